@@ -1,0 +1,4 @@
+/**
+ * Tells a result: terminal text, CSV and JSON, from one set of tables. Computes nothing.
+ */
+package flowshy.report;
