@@ -1,0 +1,50 @@
+package flowshy.study.units;
+
+/**
+ * Exponents of a unit over the base units, each counted in halves so that √Hz has one.
+ *
+ * <p>Radian, cycle (the "once" in hertz) and decibel are kept apart although they have no dimension: an angle, a frequency
+ * and a level must not pass for each other.
+ *
+ * @param metre of length
+ * @param kilogram of mass
+ * @param second of time
+ * @param kelvin of temperature
+ * @param radian of plane angle
+ * @param cycle of whole periods
+ * @param decibel of level
+ */
+record Exponents(int metre, int kilogram, int second, int kelvin, int radian, int cycle, int decibel) {
+    static final Exponents NONE = new Exponents(0, 0, 0, 0, 0, 0, 0);
+
+    /** Whole exponents of the mechanical base units. */
+    static Exponents of(int metre, int kilogram, int second) {
+        return new Exponents(2 * metre, 2 * kilogram, 2 * second, 0, 0, 0, 0);
+    }
+
+    /** This unit times another one to a power counted in halves. */
+    Exponents times(Exponents other, int halves) {
+        return new Exponents(
+                sum(metre, other.metre, halves),
+                sum(kilogram, other.kilogram, halves),
+                sum(second, other.second, halves),
+                sum(kelvin, other.kelvin, halves),
+                sum(radian, other.radian, halves),
+                sum(cycle, other.cycle, halves),
+                sum(decibel, other.decibel, halves));
+    }
+
+    /** The same with other exponents of radian and cycle, in whole steps. */
+    Exponents with(int radians, int cycles) {
+        return new Exponents(metre, kilogram, second, kelvin, 2 * radians, 2 * cycles, decibel);
+    }
+
+    /** Whether all but radian and cycle agree. */
+    boolean sameKind(Exponents other) {
+        return with(0, 0).equals(other.with(0, 0));
+    }
+
+    private static int sum(int own, int other, int halves) {
+        return Math.addExact(own, Math.multiplyExact(other, halves) / 2);
+    }
+}
