@@ -1,0 +1,154 @@
+package flowshy.math;
+
+import org.hipparchus.complex.Complex;
+import org.hipparchus.util.FastMath;
+
+/**
+ * Modified Bessel functions K₀ and K₁ of a complex argument in the right half plane, and their ratio.
+ *
+ * <p>Three routes: ascending series (Abramowitz &amp; Stegun 9.6.12, 9.6.13) up to |z| = 1.5; trapezoidal rule on
+ * K_ν(z) = ∫₀^∞ e^{-z cosh t} cosh νt dt between; Hankel's asymptotic series (9.7.2) from |z| = 20 (equation numbers from
+ * memory). On the plain path the integrand oscillates without decay as z nears the imaginary axis; v = sinh(t/2), turned by
+ * half the argument of z, makes it a Gaussian for every z. Relative error of each function and of the ratio about 1e-15,
+ * tested below 1e-14 for 1e-7 ≤ |z| ≤ 1e5 and |arg z| ≤ 90°.
+ */
+public final class BesselK {
+    /** Euler's constant γ [-]. */
+    public static final double EULER_GAMMA = 0.5772156649015329;
+
+    private static final double SERIES_BELOW = 1.5;
+
+    /** Where the smallest term of the asymptotic series, about e^{-2|z|}, is below rounding. */
+    private static final double ASYMPTOTIC_FROM = 20.0;
+
+    /** Terms and tails below e^{-40} are dropped: a hundredth of a rounding error. */
+    private static final double LOG_TOLERANCE = 40.0;
+
+    private static final double SMALLEST_TERM = 1e-18;
+
+    private final Complex scaledK0;
+    private final Complex scaledK1;
+
+    private BesselK(Complex scaledK0, Complex scaledK1) {
+        this.scaledK0 = scaledK0;
+        this.scaledK1 = scaledK1;
+    }
+
+    /**
+     * Ratio K₁(z)/K₀(z).
+     *
+     * @param z argument, Re z ≥ 0, not 0, finite
+     * @return the ratio [-]
+     * @throws IllegalArgumentException outside the closed right half plane or at 0
+     */
+    public static Complex ratio(Complex z) {
+        BesselK pair = at(z);
+        return pair.scaledK1.divide(pair.scaledK0);
+    }
+
+    /**
+     * Scaled function e^z K₀(z), free of underflow.
+     *
+     * @param z argument, Re z ≥ 0, not 0, finite
+     * @return e^z K₀(z) [-]
+     * @throws IllegalArgumentException outside the closed right half plane or at 0
+     */
+    public static Complex scaledK0(Complex z) {
+        return at(z).scaledK0;
+    }
+
+    /**
+     * Scaled function e^z K₁(z), free of underflow.
+     *
+     * @param z argument, Re z ≥ 0, not 0, finite
+     * @return e^z K₁(z) [-]
+     * @throws IllegalArgumentException outside the closed right half plane or at 0
+     */
+    public static Complex scaledK1(Complex z) {
+        return at(z).scaledK1;
+    }
+
+    private static BesselK at(Complex z) {
+        if (!(z.getReal() >= 0.0) || z.isZero() || z.isInfinite() || z.isNaN()) {
+            throw new IllegalArgumentException("K0 and K1 need a finite z with Re z >= 0, not 0, was " + z);
+        }
+        double modulus = z.norm();
+        if (modulus <= SERIES_BELOW) {
+            return series(z);
+        }
+        return modulus < ASYMPTOTIC_FROM ? quadrature(modulus, z.getArgument()) : asymptotic(z);
+    }
+
+    /** K₀ = Σ q^k/k!² (H_k − L), z K₁ = Σ q^k/k!² (1 + 2k(L − H_k)), q = z²/4, L = ln(z/2) + γ. */
+    private static BesselK series(Complex z) {
+        Complex q = z.multiply(z).multiply(0.25);
+        Complex logarithm = z.multiply(0.5).log().add(EULER_GAMMA);
+        Complex term = Complex.ONE;
+        Complex k0 = logarithm.negate();
+        Complex zk1 = Complex.ONE;
+        double harmonic = 0.0;
+        for (int k = 1; term.norm() > SMALLEST_TERM; k++) {
+            harmonic += 1.0 / k;
+            term = term.multiply(q).divide((double) k * k);
+            Complex rest = logarithm.subtract(harmonic);
+            k0 = k0.subtract(term.multiply(rest));
+            zk1 = zk1.add(term.multiply(rest.multiply(2.0 * k).add(1.0)));
+        }
+        Complex scale = z.exp();
+        return new BesselK(k0.multiply(scale), zk1.divide(z).multiply(scale));
+    }
+
+    /**
+     * e^z K₀ = 2 e^{-iθ/2} ∫₀^∞ e^{-2|z|w²} / √(1 + w² e^{-iθ}) dw; for K₁ the integrand × (1 + 2w² e^{-iθ}). The integrand
+     * is even in w, and its nearest singularity lies cos(θ/2) off the real axis, which with the Gaussian settles the step.
+     */
+    private static BesselK quadrature(double modulus, double argument) {
+        double decay = 2.0 * modulus;
+        double shift = FastMath.min(FastMath.cos(0.5 * argument), FastMath.sqrt(LOG_TOLERANCE / decay));
+        double step = 2.0 * FastMath.PI * shift / (LOG_TOLERANCE + decay * shift * shift);
+        double cosine = FastMath.cos(argument);
+        double sine = FastMath.sin(argument);
+        double k0Real = 0.5;
+        double k0Imaginary = 0.0;
+        double k1Real = 0.5;
+        double k1Imaginary = 0.0;
+        double end = FastMath.sqrt(LOG_TOLERANCE / decay);
+        for (double w = step; w < end; w += step) {
+            double turnedReal = w * w * cosine;
+            double turnedImaginary = -w * w * sine;
+            double real = 1.0 + turnedReal;
+            double norm = FastMath.sqrt(real * real + turnedImaginary * turnedImaginary);
+            // Re √ is never small: the real part under the root is at least 1 for |θ| ≤ 90°
+            double rootReal = FastMath.sqrt(0.5 * (norm + real));
+            double rootImaginary = 0.5 * turnedImaginary / rootReal;
+            double weight = FastMath.exp(-decay * w * w) / norm;
+            double valueReal = weight * rootReal;
+            double valueImaginary = -weight * rootImaginary;
+            k0Real += valueReal;
+            k0Imaginary += valueImaginary;
+            k1Real += valueReal * (1.0 + 2.0 * turnedReal) - valueImaginary * 2.0 * turnedImaginary;
+            k1Imaginary += valueImaginary * (1.0 + 2.0 * turnedReal) + valueReal * 2.0 * turnedImaginary;
+        }
+        Complex turn = new Complex(FastMath.cos(0.5 * argument), -FastMath.sin(0.5 * argument)).multiply(2.0 * step);
+        return new BesselK(
+                new Complex(k0Real, k0Imaginary).multiply(turn), new Complex(k1Real, k1Imaginary).multiply(turn));
+    }
+
+    /** e^z K_ν = √(π/2z) Σ a_k(ν) z^{-k}, a_k = a_{k-1} (4ν² − (2k−1)²)/(8k). */
+    private static BesselK asymptotic(Complex z) {
+        Complex inverse = z.reciprocal();
+        Complex term0 = Complex.ONE;
+        Complex term1 = Complex.ONE;
+        Complex k0 = Complex.ONE;
+        Complex k1 = Complex.ONE;
+        for (int k = 1; term1.norm() > SMALLEST_TERM && k <= 2.0 * ASYMPTOTIC_FROM; k++) {
+            double odd = (2.0 * k - 1.0) * (2.0 * k - 1.0);
+            term0 = term0.multiply(inverse).multiply(-odd / (8.0 * k));
+            term1 = term1.multiply(inverse).multiply((4.0 - odd) / (8.0 * k));
+            k0 = k0.add(term0);
+            k1 = k1.add(term1);
+        }
+        Complex scale = inverse.multiply(0.5 * FastMath.PI).sqrt();
+        return new BesselK(k0.multiply(scale), k1.multiply(scale));
+    }
+}
