@@ -55,7 +55,11 @@ public final class Problems {
         return found.stream().anyMatch(p -> p.path().equals(path) || p.path().startsWith(path + "."));
     }
 
-    /** @throws StudyException with every problem, if there is one */
+    /**
+     * Ends the reading if anything was found.
+     *
+     * @throws StudyException with every problem
+     */
     public void throwIfAny() {
         if (!found.isEmpty()) {
             throw new StudyException(found, untold);
