@@ -1,0 +1,36 @@
+package flowshy.response;
+
+import flowshy.hair.Hair;
+import flowshy.medium.Medium;
+import flowshy.stream.Cover;
+import java.util.Optional;
+
+/**
+ * A hair where it stands.
+ *
+ * @param hair the hair
+ * @param suspension what it turns on, empty if not stated: then torques are known, movements are not
+ * @param outside the medium in which the device is used
+ * @param cover what stands between
+ * @param around the medium that touches the hair: the outside medium, or the fill of a sealed cover
+ */
+public record Device(Hair hair, Optional<Suspension> suspension, Medium outside, Cover cover, Medium around) {
+    /**
+     * Depth of the pivot axis.
+     *
+     * @return h [m], zero without a suspension
+     */
+    public double pivotDepth() {
+        return suspension.map(Suspension::pivotDepth).orElse(0.0);
+    }
+
+    /**
+     * The same device with another hair; stiffness and structural damping are held.
+     *
+     * @param other the hair
+     * @return the device
+     */
+    public Device with(Hair other) {
+        return new Device(other, suspension, outside, cover, around);
+    }
+}

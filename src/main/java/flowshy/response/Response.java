@@ -1,0 +1,117 @@
+package flowshy.response;
+
+import flowshy.cylinder.OscillatingCylinder;
+import flowshy.torque.TorqueModel;
+import flowshy.torque.Torques;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import org.hipparchus.complex.Complex;
+import org.hipparchus.util.FastMath;
+
+/**
+ * What a device answers to motion of its base and to flow outside, at any frequency. Time factor e^{+iωt}, peak values.
+ *
+ * <p>θ/A = T / (S + S_g + iωR − ω²(J + J_plate + J_fluid)); without a suspension only the torques are known, and their ratio.
+ */
+public final class Response {
+    /** Boltzmann constant [J/K], exact in the SI of 2019. */
+    public static final double BOLTZMANN = 1.380649e-23;
+
+    private final Device device;
+    private final TorqueModel model;
+    private final Optional<Oscillator> oscillator;
+
+    /**
+     * The response of a device.
+     *
+     * @param device hair, suspension, medium and cover
+     */
+    public Response(Device device) {
+        this.device = device;
+        this.model = TorqueModel.of(device.hair(), device.around(), device.pivotDepth());
+        this.oscillator = device.suspension()
+                .map(suspension -> new Oscillator(device.hair(), suspension, Optional.of(device.around())));
+    }
+
+    /**
+     * The device.
+     *
+     * @return as given
+     */
+    public Device device() {
+        return device;
+    }
+
+    /**
+     * The device as an oscillator in its medium.
+     *
+     * @return empty without a suspension
+     */
+    public Optional<Oscillator> oscillator() {
+        return oscillator;
+    }
+
+    /**
+     * Torques at a frequency.
+     *
+     * @param frequency [Hz]
+     * @return torques per unit acceleration
+     */
+    public Torques torques(double frequency) {
+        return model.at(2.0 * FastMath.PI * frequency);
+    }
+
+    /**
+     * Rejection: motion response over flow response at equal acceleration. The suspension cancels.
+     *
+     * @param frequency [Hz]
+     * @return 20 lg |T_motion/T_flow| [dB]; +∞ where no flow reaches the hair
+     */
+    public double rejection(double frequency) {
+        Torques torques = torques(frequency);
+        return 20.0
+                * FastMath.log10(torques.motion(device.cover()).norm()
+                        / torques.flow(device.cover()).norm());
+    }
+
+    /**
+     * Everything at one frequency.
+     *
+     * @param frequency [Hz]
+     * @return the point
+     */
+    public ResponsePoint at(double frequency) {
+        double omega = 2.0 * FastMath.PI * frequency;
+        Torques torques = model.at(omega);
+        Complex motionTorque = torques.motion(device.cover());
+        Complex flowTorque = torques.flow(device.cover());
+        Optional<Complex> denominator =
+                oscillator.filter(Oscillator::stands).map(swing -> swing.denominator(omega, torques.fluidInertia()));
+        OptionalDouble thermal = thermalNoise(omega, torques, motionTorque);
+        OptionalDouble readout = denominator.isPresent()
+                        && device.suspension().orElseThrow().readoutNoise().isPresent()
+                ? OptionalDouble.of(
+                        device.suspension().orElseThrow().readoutNoise().getAsDouble()
+                                * denominator.get().norm()
+                                / motionTorque.norm())
+                : OptionalDouble.empty();
+        return new ResponsePoint(
+                frequency,
+                motionTorque,
+                flowTorque,
+                denominator.map(motionTorque::divide),
+                denominator.map(flowTorque::divide),
+                new OscillatingCylinder(device.hair().profile().largestRadius(), device.around()).womersley(omega),
+                thermal,
+                readout);
+    }
+
+    private OptionalDouble thermalNoise(double omega, Torques torques, Complex motionTorque) {
+        if (oscillator.isEmpty()) {
+            return OptionalDouble.empty();
+        }
+        double damping = oscillator.get().totalDamping(omega, torques.fluidInertia());
+        double torque = FastMath.sqrt(4.0 * BOLTZMANN * device.around().temperature() * damping);
+        return OptionalDouble.of(torque / motionTorque.norm());
+    }
+}

@@ -1,0 +1,230 @@
+package flowshy.response;
+
+import flowshy.hair.Hair;
+import flowshy.medium.Medium;
+import flowshy.response.SuspensionStatement.Dashpot;
+import flowshy.response.SuspensionStatement.Quality;
+import flowshy.response.SuspensionStatement.Resonance;
+import flowshy.response.SuspensionStatement.RingDown;
+import flowshy.response.SuspensionStatement.Spring;
+import flowshy.response.SuspensionStatement.Stiffness;
+import java.util.Locale;
+import java.util.Optional;
+import java.util.function.DoubleFunction;
+import java.util.function.DoubleUnaryOperator;
+import org.hipparchus.analysis.solvers.BracketingNthOrderBrentSolver;
+import org.hipparchus.complex.Complex;
+import org.hipparchus.exception.MathRuntimeException;
+import org.hipparchus.util.FastMath;
+
+/**
+ * Solves what was measured for the suspension alone: stiffness, and the damping that the fluid on the hair does not explain.
+ * Done once, on the base study; every variant then holds both.
+ *
+ * <p>A complex frequency s fixes R and S by two linear equations: with W = s²(J + J_plate + J_fluid(s)) + S_g,
+ * R = −Im W / Im s and S = −Re W − R Re s. Own derivation from the equation of motion; checked by solving back.
+ */
+public final class SuspensionSolver {
+    private static final double ACCURACY = 1e-13;
+
+    private final Hair hair;
+    private final SuspensionStatement statement;
+
+    /**
+     * A solver for one base study.
+     *
+     * @param hair the hair that was measured
+     * @param statement what is known
+     */
+    public SuspensionSolver(Hair hair, SuspensionStatement statement) {
+        this.hair = hair;
+        this.statement = statement;
+    }
+
+    /**
+     * The suspension that agrees with the statement.
+     *
+     * @return stiffness, structural damping and the rest
+     * @throws SuspensionException if no suspension does
+     */
+    public Suspension solve() {
+        if (statement.stiffness().isEmpty()) {
+            return fromSwing((RingDown) statement.damping());
+        }
+        double stiffness = stiffness(statement.stiffness().get());
+        double damping;
+        if (statement.damping() instanceof Dashpot dashpot) {
+            damping = fromDashpot(stiffness, dashpot);
+        } else if (statement.damping() instanceof Quality quality) {
+            damping = fromQuality(stiffness, quality);
+        } else {
+            damping = fromDecay(stiffness, (RingDown) statement.damping());
+        }
+        return suspension(stiffness, damping);
+    }
+
+    private double stiffness(Stiffness stated) {
+        if (stated instanceof Spring spring) {
+            return spring.value();
+        }
+        Resonance resonance = (Resonance) stated;
+        double omega = 2.0 * FastMath.PI * resonance.frequency();
+        Oscillator trial = oscillator(1.0, 0.0, resonance.in());
+        double stiffness =
+                omega * omega * (trial.inertia() + trial.fluidInertia(omega).getReal()) - trial.gravityStiffness();
+        if (!(stiffness > 0.0)) {
+            throw new SuspensionException(
+                    "resonance",
+                    say(
+                            "a hanging hair swings faster than %.4g Hz by gravity alone; state a higher resonance",
+                            resonance.frequency()));
+        }
+        return stiffness;
+    }
+
+    private double fromDashpot(double stiffness, Dashpot dashpot) {
+        if (dashpot.in().isEmpty()) {
+            return dashpot.value();
+        }
+        Oscillator device = standing(stiffness, dashpot.in());
+        double omega = device.resonance();
+        double fluid = device.totalDamping(omega, device.fluidInertia(omega));
+        return left(
+                "damping",
+                dashpot.value() - fluid,
+                dashpot.value(),
+                say(
+                        "%.4g N.m.s/rad in %s is less than the fluid on the hair alone gives (%.4g N.m.s/rad at %.4g Hz)",
+                        dashpot.value(), name(dashpot.in()), fluid, omega / (2.0 * FastMath.PI)));
+    }
+
+    private double fromQuality(double stiffness, Quality quality) {
+        Oscillator device = standing(stiffness, quality.in());
+        double omega = device.resonance();
+        double target = quality.value();
+        double fluidDamping = device.totalDamping(omega, device.fluidInertia(omega));
+        Decay fluidOnly = device.decay();
+        String tooHigh = say(
+                "a quality factor of %.4g in %s is above what the fluid on the hair alone allows (%.4g)",
+                target, name(quality.in()), fluidOnly.quality());
+        if (target <= 0.55) { // the definition of an overdamped device, see Oscillator.decay
+            return left(
+                    "quality",
+                    device.stiffness() / (omega * target) - fluidDamping,
+                    device.stiffness() / (omega * target),
+                    tooHigh);
+        }
+        double tilt = 1.0 / (2.0 * target);
+        Complex ray = new Complex(-tilt, FastMath.sqrt(1.0 - tilt * tilt));
+        double size = matching(device, part -> ray.multiply(part), stiffness, omega);
+        double damping = damping(device, ray.multiply(size));
+        return left("quality", damping, device.stiffness() / (omega * target), tooHigh);
+    }
+
+    private double fromDecay(double stiffness, RingDown ring) {
+        Oscillator device = standing(stiffness, ring.in());
+        double omega = device.resonance();
+        double rate = 1.0 / ring.decayTime();
+        if (!(rate < omega)) {
+            throw new SuspensionException(
+                    "ring-down",
+                    say(
+                            "a swing at %.4g Hz that dies out in %.4g s is no swing; state a damping or a quality factor",
+                            omega / (2.0 * FastMath.PI), ring.decayTime()));
+        }
+        double swing = matching(device, part -> new Complex(-rate, part), stiffness, omega);
+        return explained(device, new Complex(-rate, swing), ring);
+    }
+
+    private Suspension fromSwing(RingDown ring) {
+        Complex s = new Complex(
+                -1.0 / ring.decayTime(), 2.0 * FastMath.PI * ring.frequency().orElseThrow());
+        Oscillator device = oscillator(1.0, 0.0, ring.in());
+        double damping = explained(device, s, ring);
+        double stiffness = -device.structure(s).getReal() - damping * s.getReal();
+        if (!(stiffness > 0.0)) {
+            throw new SuspensionException(
+                    "ring-down", "the swing would need a negative stiffness; check its frequency");
+        }
+        return suspension(stiffness, damping);
+    }
+
+    private double explained(Oscillator device, Complex s, RingDown ring) {
+        double damping = damping(device, s);
+        return left(
+                "ring-down",
+                damping,
+                2.0 * device.inertia() / ring.decayTime(),
+                say(
+                        "a swing in %s that lasts %.4g s outlasts what the fluid on the hair alone allows",
+                        name(ring.in()), ring.decayTime()));
+    }
+
+    /** Where the frequency s(p) belongs to the known stiffness; p near the resonance. */
+    private double matching(Oscillator device, DoubleFunction<Complex> path, double stiffness, double omega) {
+        DoubleUnaryOperator mismatch = p -> {
+            Complex s = path.apply(p);
+            // as a share of the stiffness: the solver also stops at an absolute function value of 1e-15
+            return (-device.structure(s).getReal() - damping(device, s) * s.getReal()) / stiffness - 1.0;
+        };
+        double low = 0.2 * omega;
+        double high = 5.0 * omega;
+        try {
+            return new BracketingNthOrderBrentSolver(ACCURACY, ACCURACY * omega, 5)
+                    .solve(200, mismatch::applyAsDouble, low, high, omega);
+        } catch (MathRuntimeException e) {
+            throw new SuspensionException(
+                    statement.damping() instanceof Quality ? "quality" : "ring-down",
+                    say(
+                            "no swing between %.4g Hz and %.4g Hz agrees with stiffness and damping as stated (%s)",
+                            low / (2.0 * FastMath.PI), high / (2.0 * FastMath.PI), e.getMessage()));
+        }
+    }
+
+    private static double damping(Oscillator device, Complex s) {
+        return -device.structure(s).getImaginary() / s.getImaginary();
+    }
+
+    /** A damping of zero up to rounding is zero; a negative one is refused. */
+    private static double left(String key, double damping, double whole, String why) {
+        if (damping < -1e-9 * whole) {
+            throw new SuspensionException(
+                    key, why + "; check the value, what surrounded the device, and the plate inertia");
+        }
+        return FastMath.max(0.0, damping);
+    }
+
+    private Oscillator standing(double stiffness, Optional<Medium> in) {
+        Oscillator device = oscillator(stiffness, 0.0, in);
+        if (!device.stands()) {
+            throw new SuspensionException(
+                    statement.stiffness().orElseThrow() instanceof Spring ? "stiffness" : "resonance",
+                    say(
+                            "the upright hair falls over: its weight takes %.4g N.m/rad of %.4g N.m/rad",
+                            -device.gravityStiffness(), stiffness));
+        }
+        return device;
+    }
+
+    private Oscillator oscillator(double stiffness, double damping, Optional<Medium> in) {
+        return new Oscillator(hair, suspension(stiffness, damping), in);
+    }
+
+    private Suspension suspension(double stiffness, double damping) {
+        return new Suspension(
+                stiffness,
+                damping,
+                statement.plateInertia(),
+                statement.pivotDepth(),
+                statement.attitude(),
+                statement.readoutNoise());
+    }
+
+    private static String name(Optional<Medium> in) {
+        return in.map(Medium::name).orElse("vacuum");
+    }
+
+    private static String say(String text, Object... values) {
+        return String.format(Locale.ROOT, text, values);
+    }
+}

@@ -1,0 +1,81 @@
+package flowshy.study;
+
+import flowshy.response.Calibration;
+import flowshy.response.Device;
+import flowshy.verdict.Acceptance;
+import flowshy.verdict.Band;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+
+/**
+ * A study as understood: SI inside, checked, nothing left to ask.
+ *
+ * @param title as written, empty if there is none
+ * @param origin file, digest and settings it came from
+ * @param device hair, suspension, medium and cover
+ * @param band band of use
+ * @param acceptance limits asked
+ * @param calibration where the sensitivity is stated, if asked
+ * @param document entries of the document block, in the order written
+ * @param takenAs every default that was used
+ * @param understood every value that was written, in the order of the key table
+ */
+public record Study(
+        String title,
+        Origin origin,
+        Device device,
+        Band band,
+        Acceptance acceptance,
+        Optional<Calibration> calibration,
+        Map<String, String> document,
+        List<TakenAs> takenAs,
+        List<Understood> understood) {
+    /** Copies the lists. */
+    public Study {
+        takenAs = List.copyOf(takenAs);
+        understood = List.copyOf(understood);
+    }
+
+    /**
+     * Where a study came from.
+     *
+     * @param file name of the study file as given on the command line
+     * @param sha256 digest of its bytes, 64 hexadecimal digits
+     * @param filesRead every further file that was read, in order
+     * @param settings KEY=VALUE words that overlaid the file, in order
+     */
+    public record Origin(String file, String sha256, List<FileRead> filesRead, List<String> settings) {
+        /** Copies the lists. */
+        public Origin {
+            filesRead = List.copyOf(filesRead);
+            settings = List.copyOf(settings);
+        }
+    }
+
+    /**
+     * A further file that a study names.
+     *
+     * @param file as written in the study
+     * @param sha256 digest of its bytes
+     */
+    public record FileRead(String file, String sha256) {}
+
+    /**
+     * A default that was used.
+     *
+     * @param key path of the key, e.g. {@code medium.temperature}
+     * @param value as a study would write it, with its unit
+     * @param why where the default comes from, one short clause
+     */
+    public record TakenAs(String key, String value, String why) {}
+
+    /**
+     * A value that was written.
+     *
+     * @param key path of the key
+     * @param written as written
+     * @param si in SI with its unit, e.g. {@code 8.0e-05 m}; the text itself where the value is not a quantity
+     */
+    public record Understood(String key, String written, String si) {}
+}

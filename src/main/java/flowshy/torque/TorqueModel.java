@@ -1,0 +1,40 @@
+package flowshy.torque;
+
+import flowshy.hair.Cylinder;
+import flowshy.hair.Hair;
+import flowshy.medium.Medium;
+import org.hipparchus.complex.Complex;
+
+/** Torques on one hair in one medium, at any frequency. */
+public interface TorqueModel {
+    /**
+     * Torques at a real frequency.
+     *
+     * @param omega angular frequency, positive [rad/s]
+     * @return torques per unit acceleration and the fluid's inertia
+     */
+    Torques at(double omega);
+
+    /**
+     * Inertia of the fluid on the hair's own turning, at a complex frequency; needed for the decay of a free swing.
+     *
+     * @param s complex frequency, s = iω on the axis [1/s], imaginary part positive
+     * @return ρ ∫ πa² Γ(s) ℓ² dz [kg·m²]
+     */
+    Complex fluidInertia(Complex s);
+
+    /**
+     * The model for a hair: closed form for a cylinder, strips for every other shape.
+     *
+     * @param hair the hair
+     * @param medium what it stands in
+     * @param pivotDepth h, depth of the pivot axis below the wall, zero or more [m]
+     * @return the model
+     */
+    static TorqueModel of(Hair hair, Medium medium, double pivotDepth) {
+        if (hair.profile() instanceof Cylinder cylinder) {
+            return new CylinderTorques(cylinder, hair.density(), medium, pivotDepth);
+        }
+        return new StripTorques(hair, medium, pivotDepth);
+    }
+}

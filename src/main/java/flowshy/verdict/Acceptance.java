@@ -1,0 +1,26 @@
+package flowshy.verdict;
+
+import java.util.OptionalDouble;
+
+/**
+ * What a study asks of the device.
+ *
+ * @param rejection least rejection over the band [dB], absent if not asked
+ * @param error largest error by flow [m/s² rms], absent if not asked
+ */
+public record Acceptance(OptionalDouble rejection, OptionalDouble error) {
+    /** Margin between motion and flow where none is asked: ten to one, common practice, no source. */
+    public static final double DEFAULT_MARGIN = 20.0;
+
+    /** Nothing asked. */
+    public static final Acceptance NONE = new Acceptance(OptionalDouble.empty(), OptionalDouble.empty());
+
+    /**
+     * Margin that separates the bands.
+     *
+     * @return the rejection asked, or 20 dB
+     */
+    public double margin() {
+        return rejection.orElse(DEFAULT_MARGIN);
+    }
+}

@@ -1,0 +1,182 @@
+package flowshy.verdict;
+
+import static flowshy.verdict.BandsQuestion.say;
+
+import flowshy.cylinder.OscillatingCylinder;
+import flowshy.math.Caveat;
+import flowshy.math.Caveat.Subject;
+import flowshy.math.Caveat.Weight;
+import flowshy.medium.PropertySource;
+import flowshy.medium.PropertySource.Reading;
+import flowshy.response.Device;
+import flowshy.response.Suspension;
+import flowshy.stream.Cover;
+import java.util.ArrayList;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Set;
+import org.hipparchus.util.FastMath;
+
+/** Collects what must stand beside the numbers of a device: where a model weakens, and where it ends. */
+final class Assumptions {
+    /** First bending frequency over resonance, and EI/L over stiffness, that count as stiff: common practice, no source. */
+    private static final double STIFF = 10.0;
+
+    private static final double NEARLY_EQUAL_DENSITY = 0.05;
+
+    private Assumptions() {}
+
+    static List<Caveat> of(Device device, Band band, DeviceFacts facts) {
+        Set<Caveat> caveats = new LinkedHashSet<>(device.outside().caveats());
+        caveats.addAll(device.around().caveats());
+        fromMemory(device, caveats);
+        caveats.addAll(new OscillatingCylinder(device.hair().profile().smallestRadius(), device.around()).caveats());
+        finiteLength(device, facts, caveats);
+        excursion(device, band, facts, caveats);
+        density(device, caveats);
+        suspension(device, facts, caveats);
+        bending(device, facts, caveats);
+        return new ArrayList<>(caveats);
+    }
+
+    private static void fromMemory(Device device, Set<Caveat> caveats) {
+        for (PropertySource source : device.around().sources()) {
+            boolean decides =
+                    source.property().equals("density") || source.property().equals("viscosity");
+            if (decides && source.reading() == Reading.MEMORY) {
+                caveats.add(new Caveat(
+                        Subject.MEDIUM,
+                        Weight.WEAK,
+                        say(
+                                "The %s of %s is recalled from memory (%s); the decision rests on it.",
+                                source.property(), device.around().name(), source.source())));
+            }
+        }
+    }
+
+    private static void finiteLength(Device device, DeviceFacts facts, Set<Caveat> caveats) {
+        double length = device.hair().profile().length();
+        caveats.add(new Caveat(
+                Subject.REJECTION,
+                Weight.WEAK,
+                say(
+                        "Strip theory: each slice counts as part of an endless cylinder. Layer over length runs from %.2g to %.2g"
+                                + " here, length over diameter is %.3g. For a cylinder of 10 : 1 an independent finite-element"
+                                + " solution has %s more flow torque at a ratio of 0.5, 6 %% at 0.3, 3 %% at 0.15, none at 0.05;"
+                                + " 50 %% for a post of 2 : 1.",
+                        facts.layer().least() / length,
+                        facts.layer().largest() / length,
+                        facts.slenderness(),
+                        "12 %")));
+        caveats.add(new Caveat(
+                Subject.FLOW,
+                Weight.NOTE,
+                say(
+                        "The wall around the hair must be flat and wide against the hair (%.3g mm) and the Stokes layer (up to"
+                                + " %.3g mm).",
+                        1e3 * length, 1e3 * facts.layer().largest())));
+    }
+
+    private static void excursion(Device device, Band band, DeviceFacts facts, Set<Caveat> caveats) {
+        if (device.cover() != Cover.OPEN) {
+            return;
+        }
+        double radius = device.hair().profile().smallestRadius();
+        double low = 0.3
+                * 2.0
+                * FastMath.PI
+                * band.from()
+                * FastMath.max(radius, facts.layer().largest());
+        double high = 0.3
+                * 2.0
+                * FastMath.PI
+                * band.to()
+                * FastMath.max(radius, facts.layer().least());
+        caveats.add(new Caveat(
+                Subject.FLOW,
+                Weight.NOTE,
+                say(
+                        "Small excursions: the force law is linear while the fluid moves less than 0.3 of radius or layer,"
+                                + " that is below about %.2g m/s at %.4g Hz and %.2g m/s at %.4g Hz, without a mean stream.",
+                        low, band.from(), high, band.to())));
+    }
+
+    private static void density(Device device, Set<Caveat> caveats) {
+        double hair = device.hair().density();
+        double contrast = (hair - device.around().density()) / hair;
+        if (device.cover() == Cover.SEALED && FastMath.abs(contrast) < NEARLY_EQUAL_DENSITY) {
+            caveats.add(new Caveat(
+                    Subject.MOTION,
+                    Weight.WEAK,
+                    say(
+                            "Hair (%.5g kg/m3) and fill (%.5g kg/m3) are nearly of one density: of the hair's inertial torque %.2g %%"
+                                    + " is left, and it changes with temperature.",
+                            hair, device.around().density(), 100.0 * contrast)));
+        }
+        if (device.cover() == Cover.SEALED) {
+            caveats.add(
+                    new Caveat(
+                            Subject.RESONANCE,
+                            Weight.WEAK,
+                            "Sealed cover: the cavity is full, closed and rigid; its walls count as far from the hair, so damping and added"
+                                    + " mass of the hair's own turning are those of open fluid. Sound through the lid is not modelled."));
+        }
+    }
+
+    private static void suspension(Device device, DeviceFacts facts, Set<Caveat> caveats) {
+        if (device.suspension().isEmpty()) {
+            return;
+        }
+        if (facts.medium().isEmpty()) {
+            caveats.add(new Caveat(
+                    Subject.RESONANCE,
+                    Weight.OUT_OF_RANGE,
+                    say(
+                            "The upright hair falls over: its weight takes %.4g N.m/rad of the suspension's %.4g N.m/rad.",
+                            -facts.gravityStiffness(), device.suspension().get().stiffness())));
+        }
+        if (facts.staticTilt() != 0.0) {
+            caveats.add(new Caveat(
+                    Subject.MOTION,
+                    Weight.NOTE,
+                    say(
+                            "Horizontal: gravity tilts the hair by %.4g mrad, as a steady 9.80665 m/s2 would.",
+                            1e3 * facts.staticTilt())));
+        }
+    }
+
+    private static void bending(Device device, DeviceFacts facts, Set<Caveat> caveats) {
+        if (facts.bendingFrequency().isEmpty()) {
+            if (device.suspension().isPresent()) {
+                caveats.add(new Caveat(
+                        Subject.HAIR,
+                        Weight.NOTE,
+                        "The hair counts as rigid: without hair.youngs-modulus its bending is not checked."));
+            }
+            return;
+        }
+        double bending = facts.bendingFrequency().getAsDouble();
+        facts.medium().ifPresent(swing -> {
+            if (bending < STIFF * swing.resonance()) {
+                caveats.add(new Caveat(
+                        Subject.MOTION,
+                        Weight.WEAK,
+                        say(
+                                "The hair bends: its first bending frequency in the medium, %.4g Hz, is below ten times the resonance"
+                                        + " (%.4g Hz); it does not turn as a rigid body.",
+                                bending, swing.resonance())));
+            }
+        });
+        device.suspension().map(Suspension::stiffness).ifPresent(stiffness -> {
+            double hair = facts.bendingStiffness().orElseThrow();
+            if (hair < STIFF * stiffness) {
+                caveats.add(new Caveat(
+                        Subject.MOTION,
+                        Weight.WEAK,
+                        say(
+                                "The hair is soft: its EI/L of %.3g N.m/rad is below ten times the suspension's %.3g N.m/rad.",
+                                hair, stiffness)));
+            }
+        });
+    }
+}

@@ -1,0 +1,142 @@
+package flowshy.verdict;
+
+import flowshy.math.Caveat;
+import flowshy.medium.PropertySource;
+import flowshy.response.Device;
+import flowshy.response.Response;
+import flowshy.response.ResponsePoint;
+import flowshy.stream.Cover;
+import flowshy.verdict.BandsAnswer.Extreme;
+import flowshy.verdict.RejectionCurve.Sample;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.TreeSet;
+import org.hipparchus.util.FastMath;
+
+/**
+ * The main question about a device.
+ *
+ * @param device hair, suspension, medium, cover
+ * @param band band of use
+ * @param acceptance limits asked
+ */
+public record BandsQuestion(Device device, Band band, Acceptance acceptance) {
+    /** Hair and fluid count as equally dense within the density's own uncertainty, or this where none is stated. */
+    private static final double EQUAL_DENSITY = 1e-6;
+
+    /**
+     * Answers at third-octave frequencies.
+     *
+     * @return bands, points and verdict
+     */
+    public BandsAnswer answer() {
+        return answer(ThirdOctaves.in(band));
+    }
+
+    /**
+     * Answers at chosen frequencies.
+     *
+     * @param frequencies at which points are evaluated [Hz], any order
+     * @return bands, points and verdict
+     */
+    public BandsAnswer answer(List<Double> frequencies) {
+        Response response = new Response(device);
+        DeviceFacts facts = DeviceFacts.of(device, band);
+        List<Caveat> caveats = Assumptions.of(device, band, facts);
+        List<ResponsePoint> points = frequencies.stream().map(response::at).toList();
+        boolean ended = caveats.stream()
+                .anyMatch(caveat ->
+                        caveat.weight() == Caveat.Weight.OUT_OF_RANGE && caveat.about() == Caveat.Subject.REJECTION);
+        if (readsNothing()) {
+            return whole(facts, Reads.NOTHING, Double.NaN, points, caveats);
+        }
+        if (device.cover() == Cover.SEALED) {
+            return whole(facts, ended ? Reads.UNDECIDED : Reads.MOTION, Double.POSITIVE_INFINITY, points, caveats);
+        }
+        RejectionCurve curve = new RejectionCurve(response::rejection, band);
+        List<ReadingBand> bands = ended
+                ? List.of(new ReadingBand(
+                        band.from(),
+                        band.to(),
+                        Reads.UNDECIDED,
+                        response.rejection(band.from()),
+                        response.rejection(band.to())))
+                : split(curve, response);
+        Extreme least = extreme(curve.least());
+        Extreme largest = extreme(curve.largest());
+        Verdict verdict = Judgement.of(acceptance, bands, Optional.of(least), largest, device);
+        return new BandsAnswer(
+                device,
+                band,
+                acceptance,
+                facts,
+                bands,
+                Optional.of(least),
+                Optional.of(largest),
+                points,
+                caveats,
+                verdict);
+    }
+
+    /** A sealed device whose hair is as dense as its fill feels neither motion nor flow. */
+    private boolean readsNothing() {
+        double fluid = device.around().density();
+        OptionalDouble stated = device.around().sources().stream()
+                .filter(source -> source.property().equals("density"))
+                .map(PropertySource::uncertainty)
+                .flatMapToDouble(OptionalDouble::stream)
+                .max();
+        double tolerance = fluid * FastMath.max(EQUAL_DENSITY, stated.orElse(0.0));
+        return device.cover() == Cover.SEALED && FastMath.abs(device.hair().density() - fluid) <= tolerance;
+    }
+
+    private BandsAnswer whole(
+            DeviceFacts facts, Reads reads, double rejection, List<ResponsePoint> points, List<Caveat> caveats) {
+        List<ReadingBand> bands = List.of(new ReadingBand(band.from(), band.to(), reads, rejection, rejection));
+        Verdict verdict =
+                Judgement.of(acceptance, bands, Optional.empty(), new Extreme(band.from(), rejection), device);
+        return new BandsAnswer(
+                device, band, acceptance, facts, bands, Optional.empty(), Optional.empty(), points, caveats, verdict);
+    }
+
+    private List<ReadingBand> split(RejectionCurve curve, Response response) {
+        TreeSet<Double> edges = new TreeSet<>(List.of(band.from(), band.to()));
+        edges.addAll(curve.crossings(acceptance.margin()));
+        edges.addAll(curve.crossings(-acceptance.margin()));
+        List<Double> ordered = new ArrayList<>(edges);
+        List<ReadingBand> bands = new ArrayList<>();
+        for (int i = 1; i < ordered.size(); i++) {
+            double from = ordered.get(i - 1);
+            double to = ordered.get(i);
+            Reads reads = reads(response.rejection(FastMath.sqrt(from * to)));
+            ReadingBand last = bands.isEmpty() ? null : bands.get(bands.size() - 1);
+            if (last != null && last.reads() == reads) { // touched the level without crossing it
+                bands.set(
+                        bands.size() - 1,
+                        new ReadingBand(last.from(), to, reads, last.rejectionFrom(), response.rejection(to)));
+            } else {
+                bands.add(new ReadingBand(from, to, reads, response.rejection(from), response.rejection(to)));
+            }
+        }
+        return bands;
+    }
+
+    private Reads reads(double rejection) {
+        if (rejection >= acceptance.margin()) {
+            return Reads.MOTION;
+        }
+        return rejection <= -acceptance.margin() ? Reads.FLOW : Reads.MIXED;
+    }
+
+    private static Extreme extreme(Sample sample) {
+        return new Extreme(sample.frequency(), sample.rejection());
+    }
+
+    /** Shared with the sentences of this package: four digits, no locale. */
+    static String say(String text, Object... values) {
+        return String.format(Locale.ROOT, text, values);
+    }
+}
