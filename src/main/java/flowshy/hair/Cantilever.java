@@ -121,10 +121,13 @@ public final class Cantilever {
         RealMatrix scaled = stiffness.copy();
         RealMatrix inertia = mass.copy();
         for (int i = 0; i < diagonal.getDimension(); i++) {
-            for (int j = 0; j < diagonal.getDimension(); j++) {
+            for (int j = 0; j <= i; j++) {
                 double factor = scale * diagonal.getEntry(i) * diagonal.getEntry(j);
-                scaled.multiplyEntry(i, j, factor);
-                inertia.multiplyEntry(i, j, factor);
+                // both halves from one: Cholesky refuses a matrix that is symmetric only up to rounding
+                scaled.setEntry(i, j, factor * stiffness.getEntry(i, j));
+                scaled.setEntry(j, i, scaled.getEntry(i, j));
+                inertia.setEntry(i, j, factor * mass.getEntry(i, j));
+                inertia.setEntry(j, i, inertia.getEntry(i, j));
             }
         }
         DecompositionSolver solver = new CholeskyDecomposition(scaled, 1e-9, 1e-14).getSolver();
