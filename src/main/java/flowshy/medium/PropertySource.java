@@ -21,6 +21,8 @@ public record PropertySource(String property, String source, Reading reading, Op
         MEMORY("from memory"),
         /** computed or derived by us from published equations */
         OWN("own evaluation"),
+        /** measured by whoever made the table */
+        MEASURED("measured"),
         /** stated by the user */
         GIVEN("given in the study");
 
@@ -38,5 +40,23 @@ public record PropertySource(String property, String source, Reading reading, Op
         public String words() {
             return words;
         }
+    }
+
+    /**
+     * The same with a further, independent error.
+     *
+     * @param error relative standard uncertainty [-]
+     * @return root of the sum of squares; unchanged if no uncertainty is stated
+     */
+    PropertySource widened(double error) {
+        return uncertainty.isEmpty()
+                ? this
+                : new PropertySource(
+                        property, source, reading, OptionalDouble.of(Math.hypot(uncertainty.getAsDouble(), error)));
+    }
+
+    /** The same, as a property of one part of a mixture. */
+    PropertySource of(String part) {
+        return new PropertySource(property + " of " + part, source, reading, uncertainty);
     }
 }

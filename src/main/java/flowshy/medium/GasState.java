@@ -1,0 +1,62 @@
+package flowshy.medium;
+
+import java.util.OptionalDouble;
+import org.hipparchus.util.FastMath;
+
+/** Laws of dilute gases that every gas of the package shares. */
+final class GasState {
+    /** Molar gas constant R [J/(mol·K)], exact since 2019 (CODATA 2018). */
+    static final double GAS_CONSTANT = 8.31446261815324;
+
+    private GasState() {}
+
+    /**
+     * Compressibility factor Z = pM/(ρRT) of the gas law cut after the second virial coefficient: Z = 1 + B n with n = p/(ZRT), so
+     * Z = ½ + √(¼ + B p/(RT)); the root that tends to 1.
+     */
+    static double compressibility(double secondVirial, double temperature, double pressure) {
+        return 0.5 + FastMath.sqrt(0.25 + secondVirial * pressure / (GAS_CONSTANT * temperature));
+    }
+
+    /**
+     * Mean free path λ = (μ/p) √(πRT/(2M)) [m], which is Maxwell's μ = ½ ρ c̄ λ with the mean speed c̄ = √(8RT/(πM)).
+     */
+    static OptionalDouble meanFreePath(double viscosity, double temperature, double pressure, double molarMass) {
+        return OptionalDouble.of(
+                viscosity / pressure * FastMath.sqrt(FastMath.PI * GAS_CONSTANT * temperature / (2.0 * molarMass)));
+    }
+
+    /**
+     * Molar heat capacity over R of a perfect gas with this sound speed: c² = γRT/M, c_p/R = γ/(γ−1).
+     */
+    static double heatCapacity(double soundSpeed, double temperature, double molarMass) {
+        double gamma = soundSpeed * soundSpeed * molarMass / (GAS_CONSTANT * temperature);
+        return gamma / (gamma - 1.0);
+    }
+
+    /** Sound speed [m/s] of a perfect gas of this heat capacity over R: γ = c_p/(c_p − R). */
+    static double soundSpeed(double heatCapacity, double temperature, double molarMass) {
+        double gamma = heatCapacity / (heatCapacity - 1.0);
+        return FastMath.sqrt(gamma * GAS_CONSTANT * temperature / molarMass);
+    }
+
+    /**
+     * Viscosity of a mixture of two gases, Wilke 1950 (J. Chem. Phys. 18:517): μ = Σ x_i μ_i / Σ_j x_j φ_ij,
+     * φ_ij = [1 + √(μ_i/μ_j) (M_j/M_i)^¼]² / √(8 (1 + M_i/M_j)). From memory.
+     */
+    static double wilke(
+            double share, double viscosity, double molarMass, double otherViscosity, double otherMolarMass) {
+        double rest = 1.0 - share;
+        double first =
+                viscosity * share / (share + rest * interaction(viscosity, molarMass, otherViscosity, otherMolarMass));
+        double other = otherViscosity
+                * rest
+                / (rest + share * interaction(otherViscosity, otherMolarMass, viscosity, molarMass));
+        return first + other;
+    }
+
+    static double interaction(double mu, double m, double otherMu, double otherM) {
+        double root = 1.0 + FastMath.sqrt(mu / otherMu) * FastMath.pow(otherM / m, 0.25);
+        return root * root / FastMath.sqrt(8.0 * (1.0 + m / otherM));
+    }
+}

@@ -1,0 +1,32 @@
+package flowshy.medium;
+
+import java.util.Locale;
+
+/** Values in the words of messages: degrees Celsius, kilopascal, per cent. */
+final class Phrases {
+    private static final double ICE_POINT = 273.15;
+
+    private Phrases() {}
+
+    /** A temperature [K] in °C, two decimals at most. */
+    static String celsius(double temperature) {
+        return number(temperature - ICE_POINT, 2) + " °C";
+    }
+
+    /** A pressure [Pa] in the unit that suits its size. */
+    static String pressure(double pressure) {
+        return pressure < 1e3 ? number(pressure, 3) + " Pa" : number(1e-3 * pressure, 3) + " kPa";
+    }
+
+    /** A share [-] in per cent. */
+    static String percent(double share) {
+        return number(100.0 * share, 3) + " %";
+    }
+
+    /** A number with at most so many decimals and no trailing zeros. */
+    static String number(double value, int decimals) {
+        String text = String.format(Locale.ROOT, "%." + decimals + "f", value);
+        String bare = text.replaceAll("0+$", "").replaceAll("\\.$", "");
+        return bare.equals("-0") ? "0" : bare;
+    }
+}

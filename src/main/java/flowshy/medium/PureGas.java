@@ -1,0 +1,129 @@
+package flowshy.medium;
+
+import flowshy.math.Caveat;
+import flowshy.medium.OutOfTableException.Why;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.OptionalDouble;
+import org.hipparchus.util.FastMath;
+
+/**
+ * A gas by its table. The density of the table is scaled to other pressures by ρ = ρ₀ (p/p₀) (Z₀/Z), Z from the second virial
+ * coefficient; viscosity and sound speed are those of the table at every pressure. What both cost is stated in the header
+ * of the table and widens the uncertainty.
+ */
+final class PureGas implements MediumLaw {
+    /** Beyond this departure from the perfect gas the law cut after the second coefficient is no longer used. */
+    static final double LARGEST_DEPARTURE = 0.2;
+
+    private static final double DEPARTURE_PRESSURE = 1e6;
+
+    private final TableHeader header;
+    private final TableCurves curves;
+
+    PureGas(MediumTable table) {
+        this.header = table.header();
+        this.curves = new TableCurves(table.rows());
+    }
+
+    @Override
+    public TableHeader header() {
+        return header;
+    }
+
+    double molarMass() {
+        return header.molarMass().orElseThrow();
+    }
+
+    @Override
+    public Medium at(MediumQuery query) {
+        return at(query, query.pressure());
+    }
+
+    /** The gas at a state, where only a part of the pressure is its own and can condense it [Pa]. */
+    Medium at(MediumQuery query, double partialPressure) {
+        Admission.state(header, query);
+        double temperature = query.temperature();
+        double pressure = query.pressure();
+        refuseCondensation(temperature, partialPressure);
+        double viscosity = curves.viscosity(temperature);
+        return new Medium(
+                header.medium(),
+                Phase.GAS,
+                temperature,
+                pressure,
+                density(temperature, pressure),
+                viscosity,
+                curves.soundSpeed(temperature),
+                GasState.meanFreePath(viscosity, temperature, pressure, molarMass()),
+                sources(pressure),
+                caveats(pressure));
+    }
+
+    private double density(double temperature, double pressure) {
+        double virial = curves.secondVirial(temperature);
+        double anchor = header.tablePressure();
+        double departure = virial * pressure / (GasState.GAS_CONSTANT * temperature);
+        if (!(FastMath.abs(departure) <= LARGEST_DEPARTURE)) {
+            throw new OutOfTableException(
+                    MediumParameter.PRESSURE,
+                    Why.OUTSIDE,
+                    header.medium() + " at " + Phrases.celsius(temperature) + " and " + Phrases.pressure(pressure)
+                            + " is too dense for its gas law, which ends where it departs by "
+                            + Phrases.percent(LARGEST_DEPARTURE) + " from the perfect gas. Choose a lower pressure.");
+        }
+        return curves.density(temperature)
+                * (pressure / anchor)
+                * (GasState.compressibility(virial, temperature, anchor)
+                        / GasState.compressibility(virial, temperature, pressure));
+    }
+
+    private void refuseCondensation(double temperature, double pressure) {
+        OptionalDouble saturation = curves.saturationPressure(temperature);
+        if (saturation.isPresent() && !(pressure < saturation.getAsDouble())) {
+            MediumParameter fault = saturation.getAsDouble() < MediumQuery.USUAL_PRESSURE
+                    ? MediumParameter.TEMPERATURE
+                    : MediumParameter.PRESSURE;
+            throw new OutOfTableException(
+                    fault,
+                    Why.CONDENSES,
+                    header.medium() + " condenses above " + Phrases.pressure(saturation.getAsDouble()) + " at "
+                            + Phrases.celsius(temperature) + "; " + Phrases.pressure(pressure)
+                            + " was asked for. Choose a lower pressure or a higher temperature.");
+        }
+    }
+
+    private List<PropertySource> sources(double pressure) {
+        if (header.departures().isEmpty()) {
+            return header.sources();
+        }
+        TableHeader.Departures departures = header.departures().get();
+        double square = FastMath.abs(pressure * pressure - header.tablePressure() * header.tablePressure())
+                / (DEPARTURE_PRESSURE * DEPARTURE_PRESSURE);
+        double linear = FastMath.abs(pressure - header.tablePressure()) / DEPARTURE_PRESSURE;
+        List<PropertySource> sources = new ArrayList<>();
+        for (PropertySource source : header.sources()) {
+            sources.add(
+                    switch (source.property()) {
+                        case "density" -> source.widened(departures.density() * square);
+                        case "viscosity" -> source.widened(departures.viscosity() * linear);
+                        case "sound speed" -> source.widened(departures.soundSpeed() * linear);
+                        default -> source;
+                    });
+        }
+        return sources;
+    }
+
+    private List<Caveat> caveats(double pressure) {
+        boolean far = FastMath.abs(FastMath.log(pressure / header.tablePressure())) > FastMath.log(2.0);
+        if (!far || header.departures().isPresent()) {
+            return List.of();
+        }
+        return List.of(new Caveat(
+                Caveat.Subject.MEDIUM,
+                Caveat.Weight.WEAK,
+                header.medium() + ": the table does not say what its viscosity and sound speed lose away from "
+                        + Phrases.pressure(header.tablePressure()) + "; they are taken as the same at "
+                        + Phrases.pressure(pressure) + "."));
+    }
+}

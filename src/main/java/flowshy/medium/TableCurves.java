@@ -1,0 +1,138 @@
+package flowshy.medium;
+
+import java.util.List;
+import java.util.OptionalDouble;
+import java.util.function.Function;
+import java.util.function.ToDoubleFunction;
+import org.apache.commons.math3.analysis.interpolation.SplineInterpolator;
+import org.apache.commons.math3.analysis.polynomials.PolynomialSplineFunction;
+import org.apache.commons.math3.util.FastMath;
+
+/**
+ * Smooth curves through the rows of a table: natural cubic splines of the logarithm of each property over ln T, which makes
+ * the power laws of gases straight lines and keeps every value positive; the second virial coefficient itself over ln T, the
+ * logarithm of the saturation pressure over 1/T. Outside the rows the splines throw, nothing is extrapolated.
+ */
+final class TableCurves {
+    private final List<TableRow> rows;
+    private final PolynomialSplineFunction density;
+    private final PolynomialSplineFunction viscosity;
+    private final List<PolynomialSplineFunction> soundSpeed;
+    private final List<PolynomialSplineFunction> secondVirial;
+    private final List<PolynomialSplineFunction> saturation;
+
+    TableCurves(List<TableRow> rows) {
+        this.rows = rows;
+        this.density = through(rows, TableCurves::abscissa, row -> FastMath.log(row.density()));
+        this.viscosity = through(rows, TableCurves::abscissa, row -> FastMath.log(row.viscosity()));
+        this.soundSpeed = optional(
+                rows,
+                TableRow::soundSpeed,
+                TableCurves::abscissa,
+                r -> FastMath.log(r.soundSpeed().orElseThrow()));
+        this.secondVirial = optional(
+                rows,
+                TableRow::secondVirial,
+                TableCurves::abscissa,
+                r -> r.secondVirial().orElseThrow());
+        this.saturation = optional(
+                rows,
+                TableRow::saturationPressure,
+                row -> -1.0 / row.temperature(),
+                r -> FastMath.log(r.saturationPressure().orElseThrow()));
+    }
+
+    double density(double temperature) {
+        return FastMath.exp(at(density, FastMath.log(temperature)));
+    }
+
+    double viscosity(double temperature) {
+        return FastMath.exp(at(viscosity, FastMath.log(temperature)));
+    }
+
+    OptionalDouble soundSpeed(double temperature) {
+        return soundSpeed.isEmpty()
+                ? OptionalDouble.empty()
+                : OptionalDouble.of(FastMath.exp(at(soundSpeed.get(0), FastMath.log(temperature))));
+    }
+
+    /** B [m³/mol], zero where the table has no such column. */
+    double secondVirial(double temperature) {
+        return secondVirial.isEmpty() ? 0.0 : at(secondVirial.get(0), FastMath.log(temperature));
+    }
+
+    /** Saturation pressure [Pa], empty where the table has none at this temperature. */
+    OptionalDouble saturationPressure(double temperature) {
+        double x = -1.0 / temperature;
+        if (saturation.isEmpty() || !saturation.get(0).isValidPoint(x)) {
+            return OptionalDouble.empty();
+        }
+        return OptionalDouble.of(FastMath.exp(saturation.get(0).value(x)));
+    }
+
+    /** Temperature [K] at which the saturation pressure is the given one, empty if that is not within the rows. */
+    OptionalDouble saturationTemperature(double pressure) {
+        if (saturation.isEmpty()) {
+            return OptionalDouble.empty();
+        }
+        double[] knots = saturation.get(0).getKnots();
+        double low = knots[0];
+        double high = knots[knots.length - 1];
+        double aim = FastMath.log(pressure);
+        if (!(saturation.get(0).value(low) <= aim && aim <= saturation.get(0).value(high))) {
+            return OptionalDouble.empty();
+        }
+        // Vapour pressure rises strictly; sixty halvings reach the last bit.
+        for (int i = 0; i < 60; i++) {
+            double middle = 0.5 * (low + high);
+            if (saturation.get(0).value(middle) < aim) {
+                low = middle;
+            } else {
+                high = middle;
+            }
+        }
+        return OptionalDouble.of(-1.0 / (0.5 * (low + high)));
+    }
+
+    /** Lowest row with a saturation pressure [Pa], empty where the table has none. */
+    OptionalDouble lowestSaturationPressure() {
+        return rows.get(0).saturationPressure();
+    }
+
+    private static double abscissa(TableRow row) {
+        return FastMath.log(row.temperature());
+    }
+
+    /** The logarithm of an end of the table may differ from the knot by a rounding; that much is moved back. */
+    private static double at(PolynomialSplineFunction curve, double x) {
+        double[] knots = curve.getKnots();
+        double first = knots[0];
+        double last = knots[knots.length - 1];
+        double slack = 1e-12 * FastMath.abs(last);
+        if (x < first && x > first - slack) {
+            return curve.value(first);
+        }
+        if (x > last && x < last + slack) {
+            return curve.value(last);
+        }
+        return curve.value(x);
+    }
+
+    private static PolynomialSplineFunction through(
+            List<TableRow> rows, ToDoubleFunction<TableRow> x, ToDoubleFunction<TableRow> y) {
+        return new SplineInterpolator()
+                .interpolate(
+                        rows.stream().mapToDouble(x).toArray(),
+                        rows.stream().mapToDouble(y).toArray());
+    }
+
+    private static List<PolynomialSplineFunction> optional(
+            List<TableRow> rows,
+            Function<TableRow, OptionalDouble> property,
+            ToDoubleFunction<TableRow> x,
+            ToDoubleFunction<TableRow> y) {
+        List<TableRow> filled =
+                rows.stream().filter(row -> property.apply(row).isPresent()).toList();
+        return filled.size() < MediumTable.FEWEST_ROWS ? List.of() : List.of(through(filled, x, y));
+    }
+}

@@ -1,0 +1,30 @@
+package flowshy.medium;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.io.IOException;
+import java.io.InputStream;
+import java.nio.charset.StandardCharsets;
+import java.util.Arrays;
+import java.util.List;
+
+/** Rows of a reference file beside the tests; a file without the expected number of rows fails. */
+final class Reference {
+    private Reference() {}
+
+    static List<double[]> rows(String file, int expected) throws IOException {
+        try (InputStream in = Reference.class.getResourceAsStream(file)) {
+            assertThat(in).as(file).isNotNull();
+            List<double[]> rows = new String(in.readAllBytes(), StandardCharsets.UTF_8)
+                    .lines()
+                    .filter(line -> !line.startsWith("#"))
+                    .skip(1)
+                    .map(line -> Arrays.stream(line.split(",", -1))
+                            .mapToDouble(Double::parseDouble)
+                            .toArray())
+                    .toList();
+            assertThat(rows).hasSize(expected);
+            return rows;
+        }
+    }
+}
