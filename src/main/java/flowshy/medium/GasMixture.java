@@ -8,8 +8,8 @@ import java.util.OptionalDouble;
 
 /**
  * Two gases in one volume. Density: the molar volumes of the two at the same state add up (Amagat), so the second virial
- * coefficient of the pair is taken as the mean of the two. Viscosity: Wilke 1950. Sound speed: perfect gas with the molar heat
- * capacities added. Mean free path: with the mean molar mass. A share of 0 or 1 gives the pure gas.
+ * coefficient of the pair is taken as the mean of the two. Viscosity: Wilke 1950. Sound speed: molar heat capacities of
+ * the perfect gases added, acoustic virial coefficients from those of the two. Mean free path: with the mean molar mass. A share of 0 or 1 gives the pure gas.
  */
 final class GasMixture {
     /** Wilke's rule against measured mixtures; up to several per cent where a light gas meets a heavy one. */
@@ -54,20 +54,24 @@ final class GasMixture {
                 query.pressure(),
                 molarMass / molarVolume,
                 viscosity,
-                soundSpeed(a, b, share, molarMass),
+                soundSpeed(query, share, molarMass),
                 GasState.meanFreePath(viscosity, query.temperature(), query.pressure(), molarMass),
                 sources(a, b, query.pressure()),
                 caveats(a, b));
     }
 
-    private OptionalDouble soundSpeed(Medium a, Medium b, double share, double molarMass) {
-        if (a.soundSpeed().isEmpty() || b.soundSpeed().isEmpty()) {
+    private OptionalDouble soundSpeed(MediumQuery query, double share, double molarMass) {
+        double temperature = query.temperature();
+        OptionalDouble gamma = main.perfectGamma(temperature);
+        OptionalDouble otherGamma = second.perfectGamma(temperature);
+        if (gamma.isEmpty() || otherGamma.isEmpty()) {
             return OptionalDouble.empty();
         }
-        double heatCapacity = (1.0 - share)
-                        * GasState.heatCapacity(a.soundSpeed().getAsDouble(), a.temperature(), main.molarMass())
-                + share * GasState.heatCapacity(b.soundSpeed().getAsDouble(), b.temperature(), second.molarMass());
-        return OptionalDouble.of(GasState.soundSpeed(heatCapacity, a.temperature(), molarMass));
+        double heatCapacity = (1.0 - share) * GasState.heatCapacity(gamma.getAsDouble())
+                + share * GasState.heatCapacity(otherGamma.getAsDouble());
+        return OptionalDouble.of(main.virial(temperature)
+                .mixed(second.virial(temperature), share)
+                .soundSpeed(GasState.gamma(heatCapacity), temperature, query.pressure(), molarMass));
     }
 
     private List<PropertySource> sources(Medium a, Medium b, double pressure) {
@@ -85,7 +89,7 @@ final class GasMixture {
                         OptionalDouble.of(masses > FAR_MASSES ? WILKE_LIGHT_HEAVY : WILKE)),
                 new PropertySource(
                         "sound speed",
-                        "perfect gas, molar heat capacities of the two added",
+                        "molar heat capacities and virial coefficients of the two gases added",
                         Reading.OWN,
                         OptionalDouble.of(SOUND))));
         for (Medium part : List.of(a, b)) {

@@ -5,39 +5,25 @@ import org.hipparchus.util.FastMath;
 
 /** Laws of dilute gases that every gas of the package shares. */
 final class GasState {
-    /** Molar gas constant R [J/(mol·K)], exact since 2019 (CODATA 2018). */
-    static final double GAS_CONSTANT = 8.31446261815324;
-
     private GasState() {}
-
-    /**
-     * Compressibility factor Z = pM/(ρRT) of the gas law cut after the second virial coefficient: Z = 1 + B n with n = p/(ZRT), so
-     * Z = ½ + √(¼ + B p/(RT)); the root that tends to 1.
-     */
-    static double compressibility(double secondVirial, double temperature, double pressure) {
-        return 0.5 + FastMath.sqrt(0.25 + secondVirial * pressure / (GAS_CONSTANT * temperature));
-    }
 
     /**
      * Mean free path λ = (μ/p) √(πRT/(2M)) [m], which is Maxwell's μ = ½ ρ c̄ λ with the mean speed c̄ = √(8RT/(πM)).
      */
     static OptionalDouble meanFreePath(double viscosity, double temperature, double pressure, double molarMass) {
-        return OptionalDouble.of(
-                viscosity / pressure * FastMath.sqrt(FastMath.PI * GAS_CONSTANT * temperature / (2.0 * molarMass)));
+        return OptionalDouble.of(viscosity
+                / pressure
+                * FastMath.sqrt(FastMath.PI * Virial.GAS_CONSTANT * temperature / (2.0 * molarMass)));
     }
 
-    /**
-     * Molar heat capacity over R of a perfect gas with this sound speed: c² = γRT/M, c_p/R = γ/(γ−1).
-     */
-    static double heatCapacity(double soundSpeed, double temperature, double molarMass) {
-        double gamma = soundSpeed * soundSpeed * molarMass / (GAS_CONSTANT * temperature);
+    /** Molar heat capacity at constant pressure over R of a perfect gas with this γ: γ/(γ−1). */
+    static double heatCapacity(double gamma) {
         return gamma / (gamma - 1.0);
     }
 
-    /** Sound speed [m/s] of a perfect gas of this heat capacity over R: γ = c_p/(c_p − R). */
-    static double soundSpeed(double heatCapacity, double temperature, double molarMass) {
-        double gamma = heatCapacity / (heatCapacity - 1.0);
-        return FastMath.sqrt(gamma * GAS_CONSTANT * temperature / molarMass);
+    /** γ of a perfect gas with this molar heat capacity at constant pressure over R: c_p/(c_p − R). */
+    static double gamma(double heatCapacity) {
+        return heatCapacity / (heatCapacity - 1.0);
     }
 
     /**

@@ -9,7 +9,7 @@ import java.util.OptionalDouble;
 
 /**
  * Air at a relative humidity. Density by CIPM-2007, viscosity of dry air and water vapour mixed by Wilke 1950, sound speed by Cramer
- * 1993; outside the range of Cramer's formula that of a perfect mixture of dry air and vapour. Outside the range of CIPM-2007
+ * 1993; outside the range of Cramer's formula the molar heat capacities of dry air and vapour are added. Outside the range of CIPM-2007
  * the same equation is used and flagged. Humidity 0 is dry air by its table.
  */
 final class MoistAir implements MediumLaw {
@@ -80,16 +80,16 @@ final class MoistAir implements MediumLaw {
                 OptionalDouble.of(
                         cramer
                                 ? HumidAirLaws.soundSpeed(vapour, temperature, pressure)
-                                : perfectSoundSpeed(dryAir, vapour, molarMass)),
+                                : mixedSoundSpeed(temperature, pressure, vapour, molarMass)),
                 GasState.meanFreePath(viscosity, temperature, pressure, molarMass),
                 sources(temperature, pressure, vapour, cramer),
                 caveats(temperature, pressure, vapour));
     }
 
-    private double perfectSoundSpeed(Medium dryAir, double vapour, double molarMass) {
-        double air = GasState.heatCapacity(dryAir.soundSpeed().orElseThrow(), dryAir.temperature(), dry.molarMass());
+    private double mixedSoundSpeed(double temperature, double pressure, double vapour, double molarMass) {
+        double air = GasState.heatCapacity(dry.perfectGamma(temperature).orElseThrow());
         double mixed = (1.0 - vapour) * air + vapour * VAPOUR_HEAT_CAPACITY;
-        return GasState.soundSpeed(mixed, dryAir.temperature(), molarMass);
+        return dry.virial(temperature).soundSpeed(GasState.gamma(mixed), temperature, pressure, molarMass);
     }
 
     private static boolean cipm(double temperature, double pressure) {
@@ -115,7 +115,7 @@ final class MoistAir implements MediumLaw {
                         ? header.source("sound speed")
                         : new PropertySource(
                                 "sound speed",
-                                "perfect mixture of dry air by its table and vapour with c_p = 4.04 R (from memory)",
+                                "mixture of dry air by its table and vapour with c_p = 4.04 R (from memory)",
                                 PropertySource.Reading.OWN,
                                 OptionalDouble.of(MIXTURE_SOUND)));
         return sources;

@@ -9,8 +9,8 @@ import org.hipparchus.util.FastMath;
 
 /**
  * A gas by its table. The density of the table is scaled to other pressures by ρ = ρ₀ (p/p₀) (Z₀/Z), Z from the second virial
- * coefficient; viscosity and sound speed are those of the table at every pressure. What both cost is stated in the header
- * of the table and widens the uncertainty.
+ * coefficient, the sound speed by the second acoustic virial coefficient; the viscosity is that of the table at every pressure.
+ * What that costs is stated in the header of the table and widens the uncertainty.
  */
 final class PureGas implements MediumLaw {
     /** Beyond this departure from the perfect gas the law cut after the second coefficient is no longer used. */
@@ -54,17 +54,37 @@ final class PureGas implements MediumLaw {
                 pressure,
                 density(temperature, pressure),
                 viscosity,
-                curves.soundSpeed(temperature),
+                soundSpeed(temperature, pressure),
                 GasState.meanFreePath(viscosity, temperature, pressure, molarMass()),
                 sources(pressure),
                 caveats(pressure));
     }
 
+    Virial virial(double temperature) {
+        return curves.virial(temperature);
+    }
+
+    /** Heat capacity ratio of the gas as a perfect one, empty where the table has no sound speed. */
+    OptionalDouble perfectGamma(double temperature) {
+        OptionalDouble anchor = curves.soundSpeed(temperature);
+        return anchor.isEmpty()
+                ? OptionalDouble.empty()
+                : OptionalDouble.of(virial(temperature)
+                        .perfectGamma(anchor.getAsDouble(), temperature, header.tablePressure(), molarMass()));
+    }
+
+    private OptionalDouble soundSpeed(double temperature, double pressure) {
+        OptionalDouble gamma = perfectGamma(temperature);
+        return gamma.isEmpty()
+                ? OptionalDouble.empty()
+                : OptionalDouble.of(
+                        virial(temperature).soundSpeed(gamma.getAsDouble(), temperature, pressure, molarMass()));
+    }
+
     private double density(double temperature, double pressure) {
-        double virial = curves.secondVirial(temperature);
+        Virial virial = virial(temperature);
         double anchor = header.tablePressure();
-        double departure = virial * pressure / (GasState.GAS_CONSTANT * temperature);
-        if (!(FastMath.abs(departure) <= LARGEST_DEPARTURE)) {
+        if (!(FastMath.abs(virial.departure(temperature, pressure)) <= LARGEST_DEPARTURE)) {
             throw new OutOfTableException(
                     MediumParameter.PRESSURE,
                     Why.OUTSIDE,
@@ -74,8 +94,7 @@ final class PureGas implements MediumLaw {
         }
         return curves.density(temperature)
                 * (pressure / anchor)
-                * (GasState.compressibility(virial, temperature, anchor)
-                        / GasState.compressibility(virial, temperature, pressure));
+                * (virial.compressibility(temperature, anchor) / virial.compressibility(temperature, pressure));
     }
 
     private void refuseCondensation(double temperature, double pressure) {
@@ -107,7 +126,7 @@ final class PureGas implements MediumLaw {
                     switch (source.property()) {
                         case "density" -> source.widened(departures.density() * square);
                         case "viscosity" -> source.widened(departures.viscosity() * linear);
-                        case "sound speed" -> source.widened(departures.soundSpeed() * linear);
+                        case "sound speed" -> source.widened(departures.soundSpeed() * square);
                         default -> source;
                     });
         }
@@ -122,8 +141,8 @@ final class PureGas implements MediumLaw {
         return List.of(new Caveat(
                 Caveat.Subject.MEDIUM,
                 Caveat.Weight.WEAK,
-                header.medium() + ": the table does not say what its viscosity and sound speed lose away from "
-                        + Phrases.pressure(header.tablePressure()) + "; they are taken as the same at "
+                header.medium() + ": the table does not say what its density, viscosity and sound speed lose away from "
+                        + Phrases.pressure(header.tablePressure()) + "; the viscosity is taken as the same at "
                         + Phrases.pressure(pressure) + "."));
     }
 }

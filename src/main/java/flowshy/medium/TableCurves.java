@@ -10,15 +10,14 @@ import org.apache.commons.math3.util.FastMath;
 
 /**
  * Smooth curves through the rows of a table: natural cubic splines of the logarithm of each property over ln T, which makes
- * the power laws of gases straight lines and keeps every value positive; the second virial coefficient itself over ln T, the
- * logarithm of the saturation pressure over 1/T. Outside the rows the splines throw, nothing is extrapolated.
+ * the power laws of gases straight lines and keeps every value positive; the logarithm of the saturation pressure over 1/T. Outside the rows the splines throw, nothing is extrapolated.
  */
 final class TableCurves {
     private final List<TableRow> rows;
     private final PolynomialSplineFunction density;
     private final PolynomialSplineFunction viscosity;
     private final List<PolynomialSplineFunction> soundSpeed;
-    private final List<PolynomialSplineFunction> secondVirial;
+    private final VirialCurve secondVirial;
     private final List<PolynomialSplineFunction> saturation;
 
     TableCurves(List<TableRow> rows) {
@@ -30,11 +29,8 @@ final class TableCurves {
                 TableRow::soundSpeed,
                 TableCurves::abscissa,
                 r -> FastMath.log(r.soundSpeed().orElseThrow()));
-        this.secondVirial = optional(
-                rows,
-                TableRow::secondVirial,
-                TableCurves::abscissa,
-                r -> r.secondVirial().orElseThrow());
+        boolean real = rows.stream().allMatch(row -> row.secondVirial().isPresent());
+        this.secondVirial = real ? VirialCurve.through(rows) : VirialCurve.none();
         this.saturation = optional(
                 rows,
                 TableRow::saturationPressure,
@@ -56,9 +52,9 @@ final class TableCurves {
                 : OptionalDouble.of(FastMath.exp(at(soundSpeed.get(0), FastMath.log(temperature))));
     }
 
-    /** B [m³/mol], zero where the table has no such column. */
-    double secondVirial(double temperature) {
-        return secondVirial.isEmpty() ? 0.0 : at(secondVirial.get(0), FastMath.log(temperature));
+    /** Second virial coefficient with its slopes, zero where the table has no such column. */
+    Virial virial(double temperature) {
+        return secondVirial.at(temperature);
     }
 
     /** Saturation pressure [Pa], empty where the table has none at this temperature. */

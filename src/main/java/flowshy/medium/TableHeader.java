@@ -48,7 +48,7 @@ public record TableHeader(
      *
      * @param density of the gas law cut after the second virial coefficient [-]; grows with the square of the pressure
      * @param viscosity of a viscosity without pressure dependence [-]; grows with the pressure
-     * @param soundSpeed of a sound speed without pressure dependence [-]; grows with the pressure
+     * @param soundSpeed of a sound speed scaled by the second acoustic virial coefficient [-]; grows with its square
      */
     public record Departures(double density, double viscosity, double soundSpeed) {}
 

@@ -50,19 +50,58 @@ class GasStateValidationTest {
     @Test
     void compressibilitySolvesTheGasLaw() {
         double rt = 8.31446261815324 * 300.0;
-        double b = -1.2e-4;
-        double z = GasState.compressibility(b, 300.0, 5e5);
-        assertThat(z).isCloseTo(1.0 + b * 5e5 / (z * rt), within(1e-15));
-        assertThat(GasState.compressibility(1e-6, 300.0, 1e3) - 1.0).isCloseTo(1e-6 * 1e3 / rt, withinPercentage(1e-3));
+        double z = new Virial(-1.2e-4, 0.0, 0.0).compressibility(300.0, 5e5);
+        assertThat(z).isCloseTo(1.0 - 1.2e-4 * 5e5 / (z * rt), within(1e-15));
+        double thin = new Virial(1e-6, 0.0, 0.0).compressibility(300.0, 1e3);
+        assertThat(thin - 1.0).isCloseTo(1e-6 * 1e3 / rt, withinPercentage(1e-3));
     }
 
-    /** Argon and nitrogen as perfect gases: c_p/R = 5/2 and 7/2, to what the real gases depart at one atmosphere. */
+    /**
+     * Hard spheres have a B that does not depend on temperature; then ρ = p M/(RT + Bp) at this order, and c² = γ (∂p/∂ρ) at constant T grows
+     * by (1 + Bp/(RT))², so β = 2B for every γ.
+     */
+    @Test
+    void hardSpheresHaveTwiceTheirVolumeAsAcousticCoefficient() {
+        Virial spheres = new Virial(5e-5, 0.0, 0.0);
+        double rt = 8.31446261815324 * 250.0;
+        assertThat(spheres.acousticFactor(5.0 / 3.0, 250.0, 1e5) - 1.0)
+                .isCloseTo(2.0 * 5e-5 * 1e5 / rt, withinPercentage(1e-9));
+    }
+
+    /** γ of the perfect gas: 5/3 for single atoms; 1.3997 for nitrogen at 20 °C, whose vibration is still frozen (c_p = 29.12 J/(mol·K), from memory). */
     @ParameterizedTest
-    @CsvSource({"argon, 39.948e-3, 2.5, 0.4", "helium, 4.0026e-3, 2.5, 0.4", "nitrogen, 28.0135e-3, 3.5, 0.5"})
-    void heatCapacityOfTheTablesIsThatOfTheirMolecules(String gas, double molarMass, double expected, double percent) {
-        double c = Media.at(MediumQuery.of(gas, 293.15, 101325.0)).soundSpeed().orElseThrow();
-        double heat = GasState.heatCapacity(c, 293.15, molarMass);
-        assertThat(heat).isCloseTo(expected, withinPercentage(percent));
-        assertThat(GasState.soundSpeed(heat, 293.15, molarMass)).isCloseTo(c, withinPercentage(1e-12));
+    @CsvSource({"argon, 1.66667, 0.06", "helium, 1.66667, 0.06", "nitrogen, 1.39965, 0.06"})
+    void perfectGammaIsThatOfTheMolecules(String gas, double expected, double percent) {
+        PureGas law = new PureGas(MediumShelf.find(gas).orElseThrow());
+        double gamma = law.perfectGamma(293.15).orElseThrow();
+        assertThat(gamma).isCloseTo(expected, withinPercentage(percent));
+        assertThat(GasState.gamma(GasState.heatCapacity(gamma))).isCloseTo(gamma, withinPercentage(1e-12));
+    }
+
+    /** Slopes of the fitted coefficient against central differences of its own values, step 0.01 K and 1 K. */
+    @Test
+    void virialSlopesAreThoseOfTheCurve() {
+        TableCurves curves =
+                new TableCurves(MediumShelf.find("carbon-dioxide").orElseThrow().rows());
+        double t = 300.0;
+        double rise = curves.virial(t + 0.01).value() - curves.virial(t - 0.01).value();
+        double bend = curves.virial(t + 1.0).value()
+                - 2.0 * curves.virial(t).value()
+                + curves.virial(t - 1.0).value();
+        assertThat(curves.virial(t).slope()).isCloseTo(t * rise / 0.02, withinPercentage(1e-4));
+        assertThat(curves.virial(t).bend()).isCloseTo(t * t * bend, withinPercentage(1e-2));
+    }
+
+    /** The fitted coefficient stays within the rounding of its column, here four digits. */
+    @ParameterizedTest
+    @CsvSource({"nitrogen, 6e-9", "carbon-dioxide, 8e-8", "sulfur-hexafluoride, 8e-8", "dry-air, 6e-9", "helium, 6e-9"})
+    void virialCurveFollowsItsColumn(String file, double rounding) {
+        MediumTable table = MediumShelf.find(file).orElseThrow();
+        TableCurves curves = new TableCurves(table.rows());
+        assertThat(table.rows()).hasSizeGreaterThan(40);
+        for (TableRow row : table.rows()) {
+            assertThat(curves.virial(row.temperature()).value())
+                    .isCloseTo(row.secondVirial().orElseThrow(), within(rounding));
+        }
     }
 }

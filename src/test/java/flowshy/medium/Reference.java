@@ -12,16 +12,22 @@ import java.util.List;
 final class Reference {
     private Reference() {}
 
+    /** Rows of numbers. */
     static List<double[]> rows(String file, int expected) throws IOException {
+        return words(file, expected).stream()
+                .map(row -> Arrays.stream(row).mapToDouble(Double::parseDouble).toArray())
+                .toList();
+    }
+
+    /** Rows with words in some of their cells. */
+    static List<String[]> words(String file, int expected) throws IOException {
         try (InputStream in = Reference.class.getResourceAsStream(file)) {
             assertThat(in).as(file).isNotNull();
-            List<double[]> rows = new String(in.readAllBytes(), StandardCharsets.UTF_8)
+            List<String[]> rows = new String(in.readAllBytes(), StandardCharsets.UTF_8)
                     .lines()
                     .filter(line -> !line.startsWith("#"))
                     .skip(1)
-                    .map(line -> Arrays.stream(line.split(",", -1))
-                            .mapToDouble(Double::parseDouble)
-                            .toArray())
+                    .map(line -> line.split(",", -1))
                     .toList();
             assertThat(rows).hasSize(expected);
             return rows;
