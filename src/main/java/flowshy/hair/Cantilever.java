@@ -22,8 +22,14 @@ import org.hipparchus.util.FastMath;
  */
 public final class Cantilever {
     private static final int ELEMENTS = 48;
+
+    /** Each step gains at least one digit: the second eigenvalue lies at five times the first or higher. */
     private static final int ITERATIONS = 60;
-    private static final GaussIntegrator RULE = new GaussIntegratorFactory().legendre(4);
+
+    private static final double ACCURACY = 1e-13;
+
+    /** Exact to degree 9: on a straight taper the stiffness needs 6, the mass 8. */
+    private static final GaussIntegrator RULE = new GaussIntegratorFactory().legendre(5);
 
     private Cantilever() {}
 
@@ -36,30 +42,30 @@ public final class Cantilever {
      * @return frequency [Hz]
      */
     public static double firstFrequency(Profile profile, double youngsModulus, DoubleUnaryOperator massPerLength) {
-        List<Double> nodes = nodes(profile);
+        return firstFrequency(profile, youngsModulus, massPerLength, ELEMENTS);
+    }
+
+    /** The same with a chosen number of elements, to see how it converges. */
+    static double firstFrequency(
+            Profile profile, double youngsModulus, DoubleUnaryOperator massPerLength, int elements) {
+        List<Double> nodes = nodes(profile, elements);
         int free = 2 * (nodes.size() - 1);
         RealMatrix stiffness = new Array2DRowRealMatrix(free, free);
         RealMatrix mass = new Array2DRowRealMatrix(free, free);
         for (int e = 1; e < nodes.size(); e++) {
             double from = nodes.get(e - 1);
             double span = nodes.get(e) - from;
-            for (int q = 0; q < RULE.getNumberOfPoints(); q++) {
-                double t = 0.5 * (1.0 + RULE.getPoint(q));
-                double weight = 0.5 * span * RULE.getWeight(q);
-                double radius = profile.radius(from + t * span);
-                double bending = youngsModulus * FastMath.PI * FastMath.pow(radius, 4) / 4.0;
-                double[] curvature = curvature(t, span);
-                double[] deflection = deflection(t, span);
-                double moving = massPerLength.applyAsDouble(radius);
-                for (int i = 0; i < 4; i++) {
-                    for (int j = 0; j < 4; j++) {
-                        int row = 2 * (e - 2) + i;
-                        int column = 2 * (e - 2) + j;
-                        if (row >= 0 && column >= 0) {
-                            stiffness.addToEntry(row, column, weight * bending * curvature[i] * curvature[j]);
-                            mass.addToEntry(row, column, weight * moving * deflection[i] * deflection[j]);
-                        }
-                    }
+            List<Double> pieces = within(profile, from, nodes.get(e));
+            for (int piece = 1; piece < pieces.size(); piece++) {
+                double width = pieces.get(piece) - pieces.get(piece - 1);
+                for (int q = 0; q < RULE.getNumberOfPoints(); q++) {
+                    double z = pieces.get(piece - 1) + 0.5 * (1.0 + RULE.getPoint(q)) * width;
+                    double weight = 0.5 * width * RULE.getWeight(q);
+                    double radius = profile.radius(z);
+                    double bending = youngsModulus * FastMath.PI * FastMath.pow(radius, 4) / 4.0;
+                    addProducts(stiffness, e, curvature((z - from) / span, span), weight * bending);
+                    double moving = massPerLength.applyAsDouble(radius);
+                    addProducts(mass, e, deflection((z - from) / span, span), weight * moving);
                 }
             }
         }
@@ -86,18 +92,44 @@ public final class Cantilever {
         return 1.0 / compliance;
     }
 
-    private static List<Double> nodes(Profile profile) {
+    /** Nodes at the breaks and between; of a profile measured more finely than the elements, only every so many breaks. */
+    private static List<Double> nodes(Profile profile, int elements) {
         List<Double> nodes = new ArrayList<>(List.of(0.0));
         List<Double> breaks = profile.breaks();
+        double least = breaks.size() > elements ? profile.length() / elements : 0.0;
         for (int i = 1; i < breaks.size(); i++) {
-            double from = breaks.get(i - 1);
+            double from = nodes.get(nodes.size() - 1);
             double span = breaks.get(i) - from;
-            int parts = FastMath.max(1, (int) FastMath.ceil(ELEMENTS * span / profile.length()));
+            if (span < least && i < breaks.size() - 1) {
+                continue;
+            }
+            int parts = FastMath.max(1, (int) FastMath.ceil(elements * span / profile.length()));
             for (int k = 1; k <= parts; k++) {
                 nodes.add(from + span * k / parts);
             }
         }
         return nodes;
+    }
+
+    /** Adds weight × shape_i × shape_j at the places of an element's two nodes; the first node of all is clamped. */
+    private static void addProducts(RealMatrix matrix, int element, double[] shape, double weight) {
+        for (int i = 0; i < 4; i++) {
+            for (int j = 0; j < 4; j++) {
+                int row = 2 * (element - 2) + i;
+                int column = 2 * (element - 2) + j;
+                if (row >= 0 && column >= 0) {
+                    matrix.addToEntry(row, column, weight * shape[i] * shape[j]);
+                }
+            }
+        }
+    }
+
+    /** The ends of an element and the breaks of the profile between them. */
+    private static List<Double> within(Profile profile, double from, double to) {
+        List<Double> heights = new ArrayList<>(List.of(from));
+        profile.breaks().stream().filter(z -> z > from && z < to).forEach(heights::add);
+        heights.add(to);
+        return heights;
     }
 
     private static double[] deflection(double t, double span) {
@@ -135,7 +167,11 @@ public final class Cantilever {
         double eigenvalue = 0.0;
         for (int i = 0; i < ITERATIONS; i++) {
             RealVector next = solver.solve(inertia.operate(shape));
+            double before = eigenvalue;
             eigenvalue = shape.dotProduct(shape) / shape.dotProduct(next);
+            if (FastMath.abs(eigenvalue - before) < ACCURACY * eigenvalue) {
+                break;
+            }
             shape = next.unitVector();
         }
         return eigenvalue;

@@ -16,14 +16,14 @@ public record Strip(double height, double radius, double weight) {
     /** One factory for all: a new Gauss–Legendre rule costs milliseconds, once. */
     private static final GaussIntegratorFactory RULES = new GaussIntegratorFactory();
 
-    /** Below this share of its start, the radius at the end of a segment makes the force law steep there. */
+    /** Below this share of its middle, the radius at an end of a segment makes the force law steep there. */
     private static final double NARROW = 0.2;
 
     /**
      * Gauss–Legendre strips on each segment.
      *
-     * <p>Towards a pointed or round tip the force law falls like 1/ln a; there the points crowd with the fourth power of
-     * the distance, which restores fast convergence.
+     * <p>Towards a pointed or round tip, or a narrow foot, the force law falls like 1/ln a; there the points crowd with the
+     * fourth power of the distance, which restores fast convergence.
      *
      * @param profile the shape
      * @param breaks rising heights, first 0 and last the length [m]; the profile's own or finer
@@ -36,14 +36,18 @@ public record Strip(double height, double radius, double weight) {
         for (int i = 1; i < breaks.size(); i++) {
             double from = breaks.get(i - 1);
             double span = breaks.get(i) - from;
-            boolean crowd = profile.radius(from + span) < NARROW * profile.radius(from + 0.5 * span);
+            double narrow = NARROW * profile.radius(from + 0.5 * span);
+            boolean atTop = profile.radius(from + span) < narrow;
+            // just above the foot: at a step the foot itself still belongs to the part below
+            boolean atFoot = !atTop && profile.radius(from + 1e-6 * span) < narrow;
             for (int n = 0; n < points; n++) {
                 double share = 0.5 * (1.0 + rule.getPoint(n));
                 double weight = 0.5 * span * rule.getWeight(n);
-                if (crowd) {
-                    double left = 1.0 - share;
-                    weight *= 4.0 * left * left * left;
-                    share = 1.0 - left * left * left * left;
+                if (atTop || atFoot) {
+                    double away = atTop ? 1.0 - share : share;
+                    weight *= 4.0 * away * away * away;
+                    share = away * away * away * away;
+                    share = atTop ? 1.0 - share : share;
                 }
                 double height = from + span * share;
                 strips.add(new Strip(height, profile.radius(height), weight));
