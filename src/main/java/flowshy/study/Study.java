@@ -17,7 +17,7 @@ import java.util.Optional;
  * @param band band of use
  * @param acceptance limits asked
  * @param calibration where the sensitivity is stated, if asked
- * @param document entries of the document block, in the order written
+ * @param document entries of the document block, in the order of the key table
  * @param takenAs every default that was used
  * @param understood every value that was written, in the order of the key table
  */

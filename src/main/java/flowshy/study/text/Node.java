@@ -60,11 +60,11 @@ public sealed interface Node {
          */
         public Mapping with(Entry entry) {
             List<Entry> changed = new ArrayList<>(entries);
-            int at = entries.indexOf(entry(entry.key()).orElse(null));
-            if (at < 0) {
-                changed.add(entry);
+            Optional<Entry> old = entry(entry.key());
+            if (old.isPresent()) {
+                changed.set(entries.indexOf(old.get()), entry);
             } else {
-                changed.set(at, entry);
+                changed.add(entry);
             }
             return new Mapping(changed, position);
         }

@@ -32,7 +32,8 @@ public record Problem(Position position, String path, String found, String accep
      */
     public String text() {
         StringBuilder line = new StringBuilder(position.toString());
-        if (!path.isEmpty()) {
+        boolean told = position.line() == 0 && position.origin().endsWith(" " + path);
+        if (!path.isEmpty() && !told) {
             line.append(": ").append(Printable.of(path));
         }
         line.append(": ").append(found);

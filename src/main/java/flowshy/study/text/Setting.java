@@ -10,6 +10,8 @@ import java.util.List;
  * @param position what to print as its place
  */
 public record Setting(List<String> path, Node value, Position position) {
+    private static final int DEEPEST = 16;
+
     /** Copies the path. */
     public Setting {
         path = List.copyOf(path);
@@ -31,6 +33,10 @@ public record Setting(List<String> path, Node value, Position position) {
             throw new StudyException(Problem.of(position, "", "no KEY=VALUE", "for example hair.diameter=90 um"));
         }
         Problems problems = new Problems();
+        List<String> path = List.of(key.split("\\.", -1));
+        if (path.size() > DEEPEST) {
+            problems.add(position, "", "a key of " + path.size() + " words", "no key lies so deep");
+        }
         for (int i = 0; i < text.length(); i++) {
             if (Character.isISOControl(text.charAt(i))) {
                 problems.add(position, "", "control character in the value", "plain text only");
@@ -40,7 +46,7 @@ public record Setting(List<String> path, Node value, Position position) {
         problems.throwIfAny();
         Node value = value(text.substring(equals + 1).strip(), position, problems);
         problems.throwIfAny();
-        return new Setting(List.of(key.split("\\.", -1)), value, position);
+        return new Setting(path, value, position);
     }
 
     private static Node value(String text, Position position, Problems problems) {

@@ -20,7 +20,7 @@ public record StudyText(TextFile file, Node.Mapping root) {
      * @throws StudyException with every problem of encoding, YAML and repeated keys
      */
     public static StudyText read(Path path) {
-        return of(TextFile.read(path, LIMIT));
+        return of(TextFile.read(path, path.toString(), LIMIT));
     }
 
     /**

@@ -25,12 +25,12 @@ public record TextFile(String name, String text, String sha256) {
      * Reads a regular file.
      *
      * @param path the file
+     * @param name what to call it in messages
      * @param limit the most bytes it may have
      * @return its text
      * @throws StudyException if it cannot be read, is too long, is not UTF-8 or holds control characters
      */
-    public static TextFile read(Path path, int limit) {
-        String name = path.toString();
+    public static TextFile read(Path path, String name, int limit) {
         Position start = new Position(Printable.of(name), 1, 1);
         if (!Files.isRegularFile(path)) {
             String found = Files.exists(path) ? "is not a plain file" : "no such file";

@@ -7,68 +7,64 @@ import java.util.Optional;
 /** What a number measures: which units it may carry, and which SI unit it has inside. */
 public enum Dimension {
     /** length [m] */
-    LENGTH("a length", "m", Exponents.of(1, 0, 0), "um", "mm", "m", "nm", "cm", "in", "mil"),
+    LENGTH("a length", "m", "um mm m nm cm in mil"),
     /** area [m²] */
-    AREA("an area", "m2", Exponents.of(2, 0, 0), "mm2", "cm2", "um2", "m2"),
+    AREA("an area", "m2", "mm2 cm2 um2 m2"),
     /** volume [m³] */
-    VOLUME("a volume", "m3", Exponents.of(3, 0, 0), "mm3", "mL", "cm3", "uL", "m3"),
+    VOLUME("a volume", "m3", "mm3 mL cm3 uL m3"),
     /** mass [kg] */
-    MASS("a mass", "kg", Exponents.of(0, 1, 0), "ug", "mg", "g", "kg", "ng"),
+    MASS("a mass", "kg", "ug mg g kg ng"),
     /** time [s] */
-    TIME("a time", "s", Exponents.of(0, 0, 1), "s", "ms", "us", "min", "h"),
+    TIME("a time", "s", "s ms us min h"),
     /** frequency [Hz]; an angular frequency in rad/s is not taken for one */
-    FREQUENCY("a frequency", "Hz", Exponents.of(0, 0, -1).with(0, 1), "Hz", "kHz", "mHz", "MHz", "rpm"),
+    FREQUENCY("a frequency", "Hz", "Hz kHz mHz MHz rpm"),
     /** angle [rad] */
-    ANGLE("an angle", "rad", Exponents.NONE.with(1, 0), "deg", "rad", "mrad", "urad"),
+    ANGLE("an angle", "rad", "deg rad mrad urad"),
     /** temperature [K] */
-    TEMPERATURE("a temperature", "K", new Exponents(0, 0, 0, 2, 0, 0, 0), "degC", "K", "degF"),
+    TEMPERATURE("a temperature", "K", "degC K degF"),
     /** step of temperature [K] */
-    TEMPERATURE_STEP("a step of temperature", "K", new Exponents(0, 0, 0, 2, 0, 0, 0), "K", "degC", "mK"),
+    TEMPERATURE_STEP("a step of temperature", "K", "K degC mK"),
     /** pressure [Pa] */
-    PRESSURE("a pressure", "Pa", Exponents.of(-1, 1, -2), "kPa", "hPa", "Pa", "bar", "mbar", "atm", "Torr", "psi"),
+    PRESSURE("a pressure", "Pa", "kPa hPa Pa bar mbar atm Torr psi"),
     /** elastic modulus [Pa] */
-    ELASTIC_MODULUS("an elastic modulus", "Pa", Exponents.of(-1, 1, -2), "GPa", "MPa", "Pa"),
+    ELASTIC_MODULUS("an elastic modulus", "Pa", "GPa MPa Pa"),
     /** density [kg/m³] */
-    DENSITY("a density", "kg/m3", Exponents.of(-3, 1, 0), "g/cm3", "kg/m3", "kg/L", "g/L"),
+    DENSITY("a density", "kg/m3", "g/cm3 kg/m3 kg/L g/L"),
     /** dynamic viscosity [Pa·s] */
-    VISCOSITY("a dynamic viscosity", "Pa.s", Exponents.of(-1, 1, -1), "mPa.s", "Pa.s", "uPa.s", "cP"),
+    VISCOSITY("a dynamic viscosity", "Pa.s", "mPa.s Pa.s uPa.s cP"),
     /** kinematic viscosity [m²/s] */
-    KINEMATIC_VISCOSITY("a kinematic viscosity", "m2/s", Exponents.of(2, 0, -1), "cSt", "mm2/s", "m2/s", "St"),
+    KINEMATIC_VISCOSITY("a kinematic viscosity", "m2/s", "cSt mm2/s m2/s St"),
     /** speed [m/s] */
-    SPEED("a speed", "m/s", Exponents.of(1, 0, -1), "m/s", "mm/s", "um/s", "cm/s", "km/h"),
+    SPEED("a speed", "m/s", "m/s mm/s um/s cm/s km/h"),
     /** acceleration [m/s²]; in its units g is standard gravity */
-    ACCELERATION("an acceleration", "m/s2", Exponents.of(1, 0, -2), "m/s2", "mm/s2", "g", "mg", "ug"),
+    ACCELERATION("an acceleration", "m/s2", "m/s2 mm/s2 g mg ug"),
     /** volume flow [m³/s] */
-    VOLUME_FLOW("a volume flow", "m3/s", Exponents.of(3, 0, -1), "L/min", "m3/h", "mL/min", "m3/s"),
+    VOLUME_FLOW("a volume flow", "m3/s", "L/min m3/h mL/min m3/s"),
     /** force [N] */
-    FORCE("a force", "N", Exponents.of(1, 1, -2), "N", "uN", "nN"),
+    FORCE("a force", "N", "N uN nN"),
     /** torsional stiffness [N·m/rad] */
-    STIFFNESS(
-            "a torsional stiffness", "N.m/rad", Exponents.of(2, 1, -2).with(-1, 0), "N.m/rad", "uN.m/rad", "nN.m/rad"),
+    STIFFNESS("a torsional stiffness", "N.m/rad", "N.m/rad uN.m/rad nN.m/rad"),
     /** torsional damping [N·m·s/rad] */
-    DAMPING("a torsional damping", "N.m.s/rad", Exponents.of(2, 1, -1).with(-1, 0), "N.m.s/rad", "nN.m.s/rad"),
+    DAMPING("a torsional damping", "N.m.s/rad", "N.m.s/rad nN.m.s/rad"),
     /** moment of inertia [kg·m²] */
-    INERTIA("a moment of inertia", "kg.m2", Exponents.of(2, 1, 0), "kg.m2", "g.mm2", "mg.mm2"),
+    INERTIA("a moment of inertia", "kg.m2", "kg.m2 g.mm2 mg.mm2"),
     /** amplitude density of an angle [rad/√Hz] */
-    ANGLE_NOISE(
-            "an angle noise", "rad/rtHz", new Exponents(0, 0, 1, 0, 2, -1, 0), "rad/rtHz", "urad/rtHz", "nrad/rtHz"),
+    ANGLE_NOISE("an angle noise", "rad/rtHz", "rad/rtHz urad/rtHz nrad/rtHz"),
     /** level [dB], kept in decibels */
-    LEVEL("a level", "dB", new Exponents(0, 0, 0, 0, 0, 0, 2), "dB"),
+    LEVEL("a level", "dB", "dB"),
     /** share of a whole [-] */
-    SHARE("a share", "1", Exponents.NONE, "%", "ppm"),
+    SHARE("a share", "1", "% ppm"),
     /** pure number [-], written without a unit */
-    NUMBER("a pure number", "1", Exponents.NONE);
+    NUMBER("a pure number", "1", "");
 
     private final String phrase;
     private final String siUnit;
-    private final Exponents exponents;
-    private final List<String> units;
+    private final String units;
 
-    Dimension(String phrase, String siUnit, Exponents exponents, String... units) {
+    Dimension(String phrase, String siUnit, String units) {
         this.phrase = phrase;
         this.siUnit = siUnit;
-        this.exponents = exponents;
-        this.units = List.of(units);
+        this.units = units;
     }
 
     /**
@@ -104,7 +100,7 @@ public enum Dimension {
      * @return spellings that are accepted; empty for a pure number
      */
     public List<String> units() {
-        return units;
+        return units.isEmpty() ? List.of() : List.of(units.split(" "));
     }
 
     /**
@@ -118,7 +114,30 @@ public enum Dimension {
 
     /** Exponents of its SI unit. */
     Exponents exponents() {
-        return exponents;
+        return switch (this) {
+            case LENGTH -> Exponents.of(1, 0, 0);
+            case AREA -> Exponents.of(2, 0, 0);
+            case VOLUME -> Exponents.of(3, 0, 0);
+            case MASS -> Exponents.of(0, 1, 0);
+            case TIME -> Exponents.of(0, 0, 1);
+            case FREQUENCY -> Exponents.of(0, 0, -1).with(0, 1);
+            case ANGLE -> Exponents.NONE.with(1, 0);
+            case TEMPERATURE, TEMPERATURE_STEP -> new Exponents(0, 0, 0, 2, 0, 0, 0);
+            case PRESSURE, ELASTIC_MODULUS -> Exponents.of(-1, 1, -2);
+            case DENSITY -> Exponents.of(-3, 1, 0);
+            case VISCOSITY -> Exponents.of(-1, 1, -1);
+            case KINEMATIC_VISCOSITY -> Exponents.of(2, 0, -1);
+            case SPEED -> Exponents.of(1, 0, -1);
+            case ACCELERATION -> Exponents.of(1, 0, -2);
+            case VOLUME_FLOW -> Exponents.of(3, 0, -1);
+            case FORCE -> Exponents.of(1, 1, -2);
+            case STIFFNESS -> Exponents.of(2, 1, -2).with(-1, 0);
+            case DAMPING -> Exponents.of(2, 1, -1).with(-1, 0);
+            case INERTIA -> Exponents.of(2, 1, 0);
+            case ANGLE_NOISE -> new Exponents(0, 0, 1, 0, 2, -1, 0);
+            case LEVEL -> new Exponents(0, 0, 0, 0, 0, 0, 2);
+            case SHARE, NUMBER -> Exponents.NONE;
+        };
     }
 
     /** Whether {@code g} in its units is standard gravity, not the gram. */
@@ -128,9 +147,9 @@ public enum Dimension {
 
     /** Whether a unit of these exponents fits. Leaving out the radian is usual for stiffness; an angle must have it. */
     boolean accepts(Exponents found) {
-        boolean radian = found.radian() == exponents.radian() || (found.radian() == 0 && this != ANGLE);
-        boolean cycle = found.cycle() == exponents.cycle() || (found.cycle() == 0 && this != FREQUENCY);
-        return this != NUMBER && radian && cycle && found.sameKind(exponents);
+        boolean radian = found.radian() == exponents().radian() || (found.radian() == 0 && this != ANGLE);
+        boolean cycle = found.cycle() == exponents().cycle() || (found.cycle() == 0 && this != FREQUENCY);
+        return this != NUMBER && radian && cycle && found.sameKind(exponents());
     }
 
     /** The first dimension that such a unit belongs to. */

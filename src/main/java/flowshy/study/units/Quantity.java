@@ -90,7 +90,9 @@ public record Quantity(double value, Dimension dimension, String written, Swing 
         }
         if (wanted == Dimension.NUMBER) {
             throw fault(
-                    "unit " + Printable.of(symbol), "a pure number is wanted here, without a unit", Optional.empty());
+                    Printable.of(line) + " has a unit",
+                    "a pure number is wanted here, without a unit",
+                    Optional.empty());
         }
         Unit unit = unit(symbol, wanted, line);
         if (!wanted.accepts(unit.exponents())) {
@@ -166,6 +168,17 @@ public record Quantity(double value, Dimension dimension, String written, Swing 
 
     private static QuantityException fault(String found, String accepted, Optional<String> nearest) {
         return new QuantityException(found, accepted, nearest);
+    }
+
+    /**
+     * The same quantity with another value.
+     *
+     * @param other in SI
+     * @return written in SI, rms if it swings
+     */
+    public Quantity at(double other) {
+        Swing stated = swing == Swing.NONE ? Swing.NONE : Swing.RMS;
+        return new Quantity(other, dimension, new Quantity(other, dimension, "", stated).si(), stated);
     }
 
     /**

@@ -257,7 +257,7 @@ class QuantityTest {
                 "SHARE | 2 rad | 2 rad is an angle; a share is wanted here, with its unit: %, ppm",
                 "ANGLE | 45 % | 45 % is a share; an angle is wanted here, with its unit: deg, rad, mrad, urad",
                 "LEVEL | 20 | 20 has no unit; a level is wanted here, with its unit: dB; did you mean 20 dB?",
-                "NUMBER | 5 % | unit %; a pure number is wanted here, without a unit",
+                "NUMBER | 5 % | 5 % has a unit; a pure number is wanted here, without a unit",
                 "VISCOSITY | 2 kg/m.s | 2 kg/m.s: unit kg/m.s is ambiguous after the stroke; a dynamic viscosity is wanted here, with its unit: mPa.s, Pa.s, uPa.s, cP; did you mean kg/(m.s)?",
                 "MASS | 2 m/s2 | 2 m/s2 is an acceleration; a mass is wanted here, with its unit: ug, mg, g, kg, ng",
                 "ACCELERATION | 2 kg | 2 kg is a mass; an acceleration is wanted here, with its unit: m/s2, mm/s2, g, mg, ug",

@@ -1,0 +1,58 @@
+package flowshy.study;
+
+import flowshy.study.keys.Form;
+import flowshy.study.text.Position;
+import flowshy.study.text.Printable;
+import flowshy.study.text.Problem;
+import flowshy.study.text.StudyException;
+import flowshy.study.text.TextFile;
+import java.nio.file.Files;
+import java.nio.file.InvalidPathException;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+
+/** Reads the files that a study names, beside the study, and remembers their digests. */
+final class FilesRead {
+    /** A record of a swing may have a million lines. */
+    private static final int LIMIT = 32 * 1024 * 1024;
+
+    private final Path folder;
+    private final List<Study.FileRead> read = new ArrayList<>();
+
+    FilesRead(Path folder) {
+        this.folder = folder;
+    }
+
+    /**
+     * The table in the file that a key names.
+     *
+     * @throws StudyException with every problem of the file; one that cannot be opened is told at the key
+     */
+    ColumnFile table(Form form, String key, List<ColumnFile.Column> wanted, int most) {
+        return ColumnFile.read(text(form.word(key).orElseThrow(), form.position(key), key), wanted, most);
+    }
+
+    private TextFile text(String name, Position at, String key) {
+        Path path;
+        try {
+            path = folder.resolve(name);
+        } catch (InvalidPathException e) {
+            throw new StudyException(Problem.of(at, key, Printable.of(name) + " is no file name", "name a text file"));
+        }
+        if (!Files.isRegularFile(path)) {
+            String found = Files.exists(path) ? " is not a plain file" : ": no such file beside the study";
+            throw new StudyException(Problem.of(at, key, Printable.of(name) + found, "name a text file"));
+        }
+        TextFile file = TextFile.read(path, name, LIMIT);
+        Study.FileRead entry = new Study.FileRead(name, file.sha256());
+        if (!read.contains(entry)) {
+            read.add(entry);
+        }
+        return file;
+    }
+
+    List<Study.FileRead> read() {
+        return List.copyOf(read);
+    }
+}

@@ -1,0 +1,118 @@
+package flowshy.study;
+
+import flowshy.hair.Hair;
+import flowshy.medium.Medium;
+import flowshy.response.Calibration;
+import flowshy.response.Device;
+import flowshy.response.Suspension;
+import flowshy.stream.Cover;
+import flowshy.study.keys.Field;
+import flowshy.study.keys.Form;
+import flowshy.study.keys.KeyRow;
+import flowshy.study.keys.Keys;
+import flowshy.study.text.Problems;
+import flowshy.study.text.TextFile;
+import flowshy.study.units.Quantity;
+import flowshy.verdict.Acceptance;
+import flowshy.verdict.Band;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalDouble;
+
+/** From checked values to the things they describe; says where values do not go together. */
+final class StudyBuilder {
+    private final Form form;
+    private final Problems problems;
+    private final FilesRead files;
+    private final MediumBuilder media;
+
+    StudyBuilder(Form form, Problems problems, Path folder) {
+        this.form = form;
+        this.problems = problems;
+        this.files = new FilesRead(folder);
+        this.media = new MediumBuilder(form, problems);
+    }
+
+    Study build(TextFile file, List<String> settings) {
+        Optional<Hair> hair = new HairBuilder(form, problems, files).build();
+        Optional<Medium> outside = media.build("medium");
+        Cover cover = cover("cover.kind");
+        Optional<Medium> around = cover == Cover.SEALED && form.has("cover.fill") ? media.build("cover.fill") : outside;
+        Optional<Suspension> suspension = new SuspensionBuilder(form, problems, media).build(hair);
+        Optional<Band> band = band();
+        problems.throwIfAny();
+        Device device = new Device(hair.orElseThrow(), suspension, outside.orElseThrow(), cover, around.orElseThrow());
+        return new Study(
+                form.word("title").orElse(""),
+                new Study.Origin(file.name(), file.sha256(), files.read(), settings),
+                device,
+                band.orElseThrow(),
+                new Acceptance(
+                        form.given("accept.rejection") ? form.siIfAny("accept.rejection") : OptionalDouble.empty(),
+                        form.siIfAny("accept.error")),
+                calibration(),
+                document(),
+                takenAs(),
+                understood());
+    }
+
+    private Cover cover(String path) {
+        String word = form.word(path).orElse(Cover.OPEN.word());
+        return word.equals(Cover.SEALED.word()) ? Cover.SEALED : Cover.OPEN;
+    }
+
+    private Optional<Band> band() {
+        OptionalDouble from = form.siIfAny("band.from");
+        OptionalDouble to = form.siIfAny("band.to");
+        if (from.isEmpty() || to.isEmpty()) {
+            return Optional.empty();
+        }
+        if (from.getAsDouble() < to.getAsDouble()) {
+            return Optional.of(new Band(from.getAsDouble(), to.getAsDouble()));
+        }
+        String path = form.given("band.from") ? "band.from" : "band.to";
+        String found = "a band from " + form.word("band.from").orElseThrow() + " to "
+                + form.word("band.to").orElseThrow() + " is upside down";
+        problems.add(form.position(path), path, found, "from lies below to");
+        return Optional.empty();
+    }
+
+    private Optional<Calibration> calibration() {
+        return form.has("calibration.frequency")
+                ? Optional.of(new Calibration(form.si("calibration.frequency"), cover("calibration.cover")))
+                : Optional.empty();
+    }
+
+    private Map<String, String> document() {
+        Map<String, String> entries = new LinkedHashMap<>();
+        for (Field field : form.fields()) {
+            if (field.path().startsWith("document.")) {
+                entries.put(field.path().substring("document.".length()), field.written());
+            }
+        }
+        return entries;
+    }
+
+    private List<Study.TakenAs> takenAs() {
+        List<Form.Taken> all = new ArrayList<>(form.taken());
+        all.addAll(media.taken());
+        List<String> order = Keys.rows().stream().map(KeyRow::path).toList();
+        return all.stream()
+                .sorted(Comparator.comparingInt(t -> order.indexOf(t.path())))
+                .map(t -> new Study.TakenAs(t.path(), t.value(), t.why()))
+                .toList();
+    }
+
+    private List<Study.Understood> understood() {
+        return form.fields().stream()
+                .filter(Field::given)
+                .map(f -> new Study.Understood(
+                        f.path(), f.written(), f.quantity().map(Quantity::si).orElse(f.written())))
+                .toList();
+    }
+}

@@ -1,0 +1,102 @@
+package flowshy.study;
+
+import flowshy.study.keys.Form;
+import flowshy.study.keys.Keys;
+import flowshy.study.keys.Overlay;
+import flowshy.study.text.Node;
+import flowshy.study.text.Problems;
+import flowshy.study.text.Setting;
+import flowshy.study.text.StudyException;
+import flowshy.study.text.StudyText;
+import java.nio.file.Path;
+import java.util.List;
+
+/** From a file and the settings of the command line to a study; every problem is told at once. */
+public final class StudyReader {
+    private final StudyText text;
+    private final Path folder;
+    private final List<String> settings;
+
+    private StudyReader(StudyText text, Path folder, List<String> settings) {
+        this.text = text;
+        this.folder = folder;
+        this.settings = List.copyOf(settings);
+    }
+
+    /**
+     * Reads a study.
+     *
+     * @param file study file; the files it names are looked for beside it
+     * @param settings KEY=VALUE words that overlay the file, the later one wins
+     * @return the study
+     * @throws StudyException with every problem of file and settings
+     */
+    public static Study read(Path file, List<String> settings) {
+        return open(file, settings).study();
+    }
+
+    /**
+     * Opens a study file without reading its values yet.
+     *
+     * @param file study file
+     * @param settings KEY=VALUE words
+     * @return a reader of this one study
+     * @throws StudyException if the file is not readable or not YAML
+     */
+    public static StudyReader open(Path file, List<String> settings) {
+        Path parent = file.toAbsolutePath().getParent();
+        return new StudyReader(StudyText.read(file), parent == null ? file : parent, settings);
+    }
+
+    /**
+     * The study as written, settings laid over.
+     *
+     * @return the study
+     * @throws StudyException with every problem
+     */
+    public Study study() {
+        Problems problems = new Problems();
+        Form form = Keys.read(overlaid(problems), problems);
+        return build(form, problems);
+    }
+
+    /**
+     * The checked values, for commands that replace one of them many times.
+     *
+     * @return values by path
+     * @throws StudyException with every problem
+     */
+    public Form form() {
+        Problems problems = new Problems();
+        Form form = Keys.read(overlaid(problems), problems);
+        problems.throwIfAny();
+        return form;
+    }
+
+    /**
+     * The study of changed values; nothing is parsed again.
+     *
+     * @param form values by path
+     * @return the study
+     * @throws StudyException if the values do not go together
+     */
+    public Study study(Form form) {
+        return build(form, new Problems());
+    }
+
+    private Study build(Form form, Problems problems) {
+        return new StudyBuilder(form, problems, folder).build(text.file(), settings);
+    }
+
+    private Node.Mapping overlaid(Problems problems) {
+        Node.Mapping root = text.root();
+        for (String setting : settings) {
+            try {
+                root = Overlay.set(root, Setting.read("--set", setting));
+            } catch (StudyException e) {
+                e.problems().forEach(problems::add);
+            }
+        }
+        return root;
+    }
+}

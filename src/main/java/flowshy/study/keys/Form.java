@@ -1,0 +1,151 @@
+package flowshy.study.keys;
+
+import flowshy.study.text.Position;
+import flowshy.study.units.Quantity;
+import java.util.Collections;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalDouble;
+
+/** The checked values of a study by path, each on its own: nothing here knows what they mean together. */
+public final class Form {
+    private final Map<String, Field> fields;
+    private final Map<String, Position> places;
+    private final List<Taken> taken;
+
+    /**
+     * A default that was used, or something left out.
+     *
+     * @param path of the key
+     * @param value what was taken, as a study would write it
+     * @param why where it comes from, or what is left out
+     */
+    public record Taken(String path, String value, String why) {}
+
+    Form(Map<String, Field> fields, Map<String, Position> places, List<Taken> taken) {
+        this.fields = Collections.unmodifiableMap(new LinkedHashMap<>(fields));
+        this.places = Collections.unmodifiableMap(new LinkedHashMap<>(places));
+        this.taken = List.copyOf(taken);
+    }
+
+    /**
+     * Every value, defaults included.
+     *
+     * @return in the order of the key table
+     */
+    public List<Field> fields() {
+        return List.copyOf(fields.values());
+    }
+
+    /**
+     * Every default that was used.
+     *
+     * @return in the order of the key table
+     */
+    public List<Taken> taken() {
+        return taken;
+    }
+
+    /**
+     * Whether a key, or a group, is there, be it by default.
+     *
+     * @param path of the key
+     * @return true if so
+     */
+    public boolean has(String path) {
+        return fields.containsKey(path) || places.containsKey(path);
+    }
+
+    /**
+     * Whether a value was written.
+     *
+     * @param path of the key
+     * @return false for a default and for nothing at all
+     */
+    public boolean given(String path) {
+        return fields.containsKey(path) && fields.get(path).given();
+    }
+
+    /**
+     * The number behind a key.
+     *
+     * @param path of the key
+     * @return in SI
+     * @throws IllegalStateException if there is none: ask {@link #has} before
+     */
+    public double si(String path) {
+        return siIfAny(path).orElseThrow(() -> new IllegalStateException("no number at " + path));
+    }
+
+    /**
+     * The number behind a key.
+     *
+     * @param path of the key
+     * @return in SI, empty if the key is not there
+     */
+    public OptionalDouble siIfAny(String path) {
+        Optional<Quantity> quantity = field(path).flatMap(Field::quantity);
+        return quantity.isPresent() ? OptionalDouble.of(quantity.get().value()) : OptionalDouble.empty();
+    }
+
+    /**
+     * The word or text behind a key.
+     *
+     * @param path of the key
+     * @return as written, empty if the key is not there
+     */
+    public Optional<String> word(String path) {
+        return field(path).map(Field::written);
+    }
+
+    /**
+     * The value behind a key.
+     *
+     * @param path of the key
+     * @return the field, empty if the key is not there
+     */
+    public Optional<Field> field(String path) {
+        return Optional.ofNullable(fields.get(path));
+    }
+
+    /**
+     * Where a key's value or group stands; where it does not, its nearest group above.
+     *
+     * @param path of the key
+     * @return the place
+     * @throws IllegalStateException if the form is empty
+     */
+    public Position position(String path) {
+        if (fields.containsKey(path)) {
+            return fields.get(path).position();
+        }
+        if (places.containsKey(path)) {
+            return places.get(path);
+        }
+        if (path.isEmpty()) {
+            throw new IllegalStateException("a form without a place");
+        }
+        return position(path.substring(0, Math.max(0, path.lastIndexOf('.'))));
+    }
+
+    /**
+     * The same with one number replaced, unchecked: for sweeps inside a range that was checked before.
+     *
+     * @param path of a number that is there
+     * @param value in SI
+     * @return another form
+     * @throws IllegalStateException if there is no number at that path
+     */
+    public Form with(String path, double value) {
+        Field old = field(path)
+                .filter(f -> f.quantity().isPresent())
+                .orElseThrow(() -> new IllegalStateException("no number at " + path));
+        Quantity changed = old.quantity().orElseThrow().at(value);
+        Map<String, Field> copy = new LinkedHashMap<>(fields);
+        copy.put(path, new Field(path, changed.written(), Optional.of(changed), old.position(), true));
+        return new Form(
+                copy, places, taken.stream().filter(t -> !t.path().equals(path)).toList());
+    }
+}

@@ -1,0 +1,192 @@
+package flowshy.study.keys;
+
+import flowshy.study.text.Node;
+import flowshy.study.text.Problems;
+import flowshy.study.units.Dimension;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+
+/** The table of the keys of a study. A new key is one entry here; reader, list, schema and suggestions follow. */
+public final class Keys {
+    static final Group STUDY = Group.of("study", top());
+
+    private static final List<KeyRow> ROWS = rows(STUDY, "");
+
+    private Keys() {}
+
+    /**
+     * Every key with its place, in the order of the table.
+     *
+     * @return one row a path
+     */
+    public static List<KeyRow> rows() {
+        return ROWS;
+    }
+
+    /**
+     * The row of a path.
+     *
+     * @param path of a key; a group that stands for one of its keys may be named instead of that key
+     * @return the row of the key itself, empty if there is none
+     */
+    public static Optional<KeyRow> row(String path) {
+        Optional<KeyRow> row = ROWS.stream().filter(r -> r.path().equals(path)).findFirst();
+        if (row.isPresent()
+                && row.get().value() instanceof Group group
+                && group.shorthand().isPresent()) {
+            return row(path + "." + group.shorthand().get());
+        }
+        return row;
+    }
+
+    /**
+     * Reads a tree by the table.
+     *
+     * @param root the study's keys
+     * @param problems takes what is wrong
+     * @return the values that could be read; complete if there was no problem
+     */
+    public static Form read(Node.Mapping root, Problems problems) {
+        Reading reading = new Reading(ROWS, problems);
+        STUDY.read(reading, root, "");
+        return reading.form();
+    }
+
+    private static List<Key> top() {
+        return List.of(
+                Key.optional("title", Text.LINE, "what the study is called"),
+                Key.required("hair", HairKeys.group(), "the hair"),
+                Key.of(
+                        "suspension",
+                        SuspensionKeys.group(),
+                        Presence.leftOut("none", "torques are given, movements are not"),
+                        "what the hair turns on"),
+                Key.required("medium", MediumKeys.outside(), "gas or liquid around the device"),
+                Key.of("cover", cover(), Presence.taken("open", "a bare device"), "what stands over the hair"),
+                Key.later("candidates", "covers to choose from", "set cover to one of them at a time"),
+                Key.of("band", band(), Presence.IMPLIED, "band of use"),
+                Key.later("motion", "smallest and largest motion to be read", "accept.error states the error allowed"),
+                Key.later("surroundings", "streams, tones and sound around", "bands decides at equal accelerations"),
+                Key.of("accept", accept(), Presence.IMPLIED, "limits that the device must meet"),
+                Key.optional("calibration", calibration(), "where the sensitivity is stated"),
+                Key.later("tolerances", "spread of any number", "change the number with --set"),
+                Key.later("envelope", "states the device must bear", "change medium.temperature and others with --set"),
+                Key.later("variants", "other devices beside this one", "name several studies in one call"),
+                Key.later("measurements", "points drawn over the model", "leave it out"),
+                Key.of(
+                        "finite-length",
+                        Words.of("off").later("write off: strip theory", "on", "auto"),
+                        Presence.taken("off", "strip theory"),
+                        "correction for tip and wall"),
+                Key.optional("document", document(), "entries of the title block"));
+    }
+
+    private static Group cover() {
+        Key kind = Key.required(
+                "kind",
+                Words.of("open", "sealed")
+                        .later("open and sealed are the covers of this version", "roofed", "vented", "measured"),
+                "open: nothing; sealed: a full, closed cavity");
+        Key fill = Key.of(
+                "fill",
+                MediumKeys.fill(),
+                Presence.leftOut("as medium", "the cavity holds what is outside"),
+                "gas or liquid in the cavity");
+        Map<String, List<Key>> kinds = new LinkedHashMap<>();
+        kinds.put("open", List.of());
+        String confined = "leave it out: the cavity is taken as wide";
+        kinds.put(
+                "sealed",
+                List.of(
+                        fill,
+                        Key.later("diameter", "inner diameter of the cavity", confined),
+                        Key.later("height", "inner height of the cavity", confined)));
+        return Group.of("cover", List.of()).selectedBy(kind, kinds).shortFor("kind");
+    }
+
+    private static Group band() {
+        return Group.of(
+                "band",
+                List.of(
+                        Key.of(
+                                "from",
+                                SuspensionKeys.FREQUENCY,
+                                Presence.taken("1 Hz", "wide enough for most uses"),
+                                "lower end"),
+                        Key.of(
+                                "to",
+                                SuspensionKeys.FREQUENCY,
+                                Presence.taken("10 kHz", "wide enough for most uses"),
+                                "upper end")));
+    }
+
+    private static Group accept() {
+        return Group.of(
+                "accept",
+                List.of(
+                        Key.of(
+                                "rejection",
+                                Measure.of(Dimension.LEVEL, "0 dB", "300 dB"),
+                                Presence.taken("20 dB", "ten to one, common practice; splits the bands, is no limit"),
+                                "least rejection over the band"),
+                        Key.optional(
+                                "error",
+                                Measure.amplitude(Dimension.ACCELERATION, "1e-12 m/s2", "1e9 m/s2"),
+                                "largest error by flow")));
+    }
+
+    private static Group calibration() {
+        return Group.of(
+                "calibration",
+                List.of(
+                        Key.required("frequency", SuspensionKeys.FREQUENCY, "frequency of calibration"),
+                        Key.of(
+                                "cover",
+                                Words.of("open", "sealed"),
+                                Presence.like("cover.kind", "open"),
+                                "cover during calibration")));
+    }
+
+    private static Group document() {
+        return Group.of(
+                "document",
+                List.of(
+                        Key.optional("project", Text.LINE, "project"),
+                        Key.optional("part", Text.LINE, "part or drawing number"),
+                        Key.optional("revision", Text.LINE, "revision"),
+                        Key.optional("prepared-by", Text.LINE, "who prepared it"),
+                        Key.optional("checked-by", Text.LINE, "who checked it"),
+                        Key.optional("approved-by", Text.LINE, "who approved it"),
+                        Key.optional("remarks", Text.LINE, "remarks")));
+    }
+
+    private static List<KeyRow> rows(Group group, String above) {
+        Map<String, KeyRow> rows = new LinkedHashMap<>();
+        group.selector().ifPresent(s -> add(rows, s.key(), above, List.of()));
+        group.selector()
+                .ifPresent(s -> s.keys()
+                        .forEach((word, keys) -> keys.forEach(key -> add(rows, key, above, words(s, key.name())))));
+        group.keys().forEach(key -> add(rows, key, above, List.of()));
+        return List.copyOf(rows.values());
+    }
+
+    private static List<String> words(Selector selector, String name) {
+        return selector.wordsOf(name).stream()
+                .map(word -> selector.key().name() + ": " + word)
+                .toList();
+    }
+
+    private static void add(Map<String, KeyRow> rows, Key key, String above, List<String> words) {
+        String path = above.isEmpty() ? key.name() : above + "." + key.name();
+        rows.putIfAbsent(
+                path,
+                new KeyRow(path, key.value(), key.presence(), words, key.condition(), key.meaning(), key.instead()));
+        if (key.value() instanceof Group inner) {
+            List<KeyRow> below = new ArrayList<>(rows(inner, path));
+            below.forEach(row -> rows.putIfAbsent(row.path(), row));
+        }
+    }
+}

@@ -1,0 +1,74 @@
+package flowshy.study.keys;
+
+import flowshy.study.text.Node;
+import flowshy.study.text.Problem;
+import flowshy.study.units.Dimension;
+import flowshy.study.units.Quantity;
+import flowshy.study.units.QuantityException;
+import java.util.LinkedHashMap;
+import java.util.Map;
+import java.util.Optional;
+
+/**
+ * A number with a unit.
+ *
+ * @param dimension what it measures
+ * @param amplitude whether rms or peak may follow
+ * @param least smallest admissible value, as a study would write it
+ * @param most largest admissible value, as a study would write it
+ */
+public record Measure(Dimension dimension, boolean amplitude, String least, String most) implements Value {
+    static Measure of(Dimension dimension, String least, String most) {
+        return new Measure(dimension, false, least, most);
+    }
+
+    static Measure amplitude(Dimension dimension, String least, String most) {
+        return new Measure(dimension, true, least, most);
+    }
+
+    @Override
+    public String kind() {
+        return dimension.words() + ", " + range() + (amplitude ? ", rms or peak" : "");
+    }
+
+    private String range() {
+        return least + " to " + most;
+    }
+
+    @Override
+    public Map<String, Object> schema() {
+        Map<String, Object> schema = new LinkedHashMap<>();
+        schema.put("$ref", "#/$defs/" + Schema.name(dimension));
+        return schema;
+    }
+
+    @Override
+    public void read(Reading reading, Node node, String path) {
+        if (node instanceof Node.Scalar scalar && !scalar.text().isBlank()) {
+            try {
+                keep(reading, scalar, path, parse(scalar.text()));
+            } catch (QuantityException e) {
+                reading.problem(new Problem(scalar.position(), path, e.found(), e.accepted(), e.nearest()));
+            }
+        } else {
+            reading.unfit(node, path, dimension.phrase() + " is wanted here, " + range());
+        }
+    }
+
+    private void keep(Reading reading, Node.Scalar scalar, String path, Quantity quantity) {
+        double value = quantity.value();
+        if (value >= parse(least).value() && value <= parse(most).value()) {
+            reading.field(path, scalar, Optional.of(quantity));
+        } else {
+            reading.problem(
+                    scalar.position(),
+                    path,
+                    quantity.written(),
+                    dimension.phrase() + " of " + range() + " is wanted here");
+        }
+    }
+
+    private Quantity parse(String text) {
+        return amplitude ? Quantity.readAmplitude(text, dimension) : Quantity.read(text, dimension);
+    }
+}

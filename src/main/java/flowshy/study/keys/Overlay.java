@@ -1,0 +1,111 @@
+package flowshy.study.keys;
+
+import flowshy.study.text.Node;
+import flowshy.study.text.Position;
+import flowshy.study.text.Setting;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+
+/**
+ * Lays changes over a study before it is read, so that they are checked like the text of the file.
+ *
+ * <p>A change pushes out what it contradicts: {@code suspension.stiffness} the resonance, another {@code hair.shape} the
+ * keys that only the old shape has.
+ */
+public final class Overlay {
+    private Overlay() {}
+
+    /**
+     * The study with one value set.
+     *
+     * @param root the study
+     * @param setting path and value
+     * @return the changed study
+     */
+    public static Node.Mapping set(Node.Mapping root, Setting setting) {
+        return set(Keys.STUDY, root, setting.path(), setting.value(), setting.position());
+    }
+
+    /**
+     * The study with a part of another one laid over it: groups are merged, anything else is replaced.
+     *
+     * @param root the study
+     * @param over keys to override, of any depth
+     * @return the changed study
+     */
+    public static Node.Mapping merge(Node.Mapping root, Node.Mapping over) {
+        return merge(Optional.of(Keys.STUDY), root, over);
+    }
+
+    private static Node.Mapping set(
+            Group group, Node.Mapping mapping, List<String> path, Node value, Position position) {
+        String name = path.get(0);
+        Node below = value;
+        if (path.size() > 1) {
+            Optional<Group> inner = inner(Optional.of(group), name);
+            Node.Mapping old = mapping.entry(name)
+                    .flatMap(e -> opened(inner, e.value()))
+                    .orElse(new Node.Mapping(List.of(), position));
+            List<String> rest = path.subList(1, path.size());
+            below = inner.isPresent()
+                    ? set(inner.get(), old, rest, value, position)
+                    : new Node.Mapping(List.of(entry(rest, value, position)), position);
+        }
+        return put(Optional.of(group), mapping, new Node.Entry(name, position, below));
+    }
+
+    /** Under a key that is not a group nothing can be set; the reader refuses what stands there then. */
+    private static Node.Entry entry(List<String> path, Node value, Position position) {
+        Node below = path.size() == 1
+                ? value
+                : new Node.Mapping(List.of(entry(path.subList(1, path.size()), value, position)), position);
+        return new Node.Entry(path.get(0), position, below);
+    }
+
+    private static Node.Mapping merge(Optional<Group> group, Node.Mapping base, Node.Mapping over) {
+        Node.Mapping merged = base;
+        for (Node.Entry entry : over.entries()) {
+            Optional<Group> inner = inner(group, entry.key());
+            Optional<Node.Mapping> old = merged.entry(entry.key()).flatMap(e -> opened(inner, e.value()));
+            Node value = entry.value() instanceof Node.Mapping part && old.isPresent()
+                    ? merge(inner, old.get(), part)
+                    : entry.value();
+            merged = put(group, merged, new Node.Entry(entry.key(), entry.position(), value));
+        }
+        return merged;
+    }
+
+    private static Optional<Group> inner(Optional<Group> group, String name) {
+        return group.flatMap(g -> g.key(name))
+                .map(Key::value)
+                .filter(Group.class::isInstance)
+                .map(Group.class::cast);
+    }
+
+    /** A group that is written as a single word is opened into its keys first. */
+    private static Optional<Node.Mapping> opened(Optional<Group> group, Node node) {
+        return node instanceof Node.Mapping mapping ? Optional.of(mapping) : group.flatMap(g -> g.mapping(node));
+    }
+
+    private static Node.Mapping put(Optional<Group> group, Node.Mapping mapping, Node.Entry entry) {
+        List<String> gone = new ArrayList<>();
+        group.ifPresent(g -> g.rules().forEach(rule -> gone.addAll(rule.rivals(entry.key()))));
+        group.flatMap(Group::selector).ifPresent(selector -> gone.addAll(strangers(selector, entry)));
+        return mapping.without(gone).with(entry);
+    }
+
+    /** Keys that do not go with the new deciding word. */
+    private static List<String> strangers(Selector selector, Node.Entry entry) {
+        if (!entry.key().equals(selector.key().name()) || !(entry.value() instanceof Node.Scalar word)) {
+            return List.of();
+        }
+        List<Key> stay = selector.of(word.text().strip());
+        return selector.keys().values().stream()
+                .flatMap(List::stream)
+                .filter(key -> !stay.contains(key))
+                .map(Key::name)
+                .distinct()
+                .toList();
+    }
+}
