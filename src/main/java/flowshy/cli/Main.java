@@ -1,7 +1,39 @@
 package flowshy.cli;
 
-/** Starts the command line. */
-public final class Main {
+import flowshy.report.Version;
+import java.io.PrintWriter;
+import java.nio.charset.StandardCharsets;
+import picocli.CommandLine;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.IVersionProvider;
+import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.ParameterException;
+import picocli.CommandLine.Spec;
+
+/** Starts the command line: words in, one command, its exit code out. */
+@Command(
+        name = "flowshy",
+        mixinStandardHelpOptions = true,
+        versionProvider = Main.BuildVersion.class,
+        description = "In which bands does a hair-type inertial sensor read motion, and in which does it read flow?",
+        synopsisSubcommandLabel = "COMMAND",
+        footer = {
+            "",
+            "Example: flowshy bands study.yaml",
+            "Exit codes: 0 done; 2 wrong input or usage; 3 done, but a stated limit is not met or undecided."
+        },
+        subcommands = {
+            BandsCommand.class,
+            FillCommand.class,
+            CylinderCommand.class,
+            MediaCommand.class,
+            CheckCommand.class,
+            StartCommand.class
+        })
+public final class Main implements Runnable {
+    @Spec
+    private CommandSpec spec;
+
     private Main() {}
 
     /**
@@ -10,6 +42,34 @@ public final class Main {
      * @param args the words of the command line
      */
     public static void main(String[] args) {
-        System.exit(0);
+        System.exit(commandLine().execute(args));
+    }
+
+    /**
+     * The command line, as {@code main} runs it and tests run it.
+     *
+     * @return ready to execute
+     */
+    public static CommandLine commandLine() {
+        CommandLine line = new CommandLine(new Main());
+        line.setOut(new PrintWriter(System.out, true, StandardCharsets.UTF_8));
+        line.setErr(new PrintWriter(System.err, true, StandardCharsets.UTF_8));
+        line.setCaseInsensitiveEnumValuesAllowed(true);
+        line.setExecutionExceptionHandler(Failures::handle);
+        line.setParameterExceptionHandler(Failures::usage);
+        return line;
+    }
+
+    @Override
+    public void run() {
+        throw new ParameterException(spec.commandLine(), "a command is missing");
+    }
+
+    /** Version for {@code --version}. */
+    static final class BuildVersion implements IVersionProvider {
+        @Override
+        public String[] getVersion() {
+            return new String[] {"flowshy " + Version.number()};
+        }
     }
 }

@@ -35,10 +35,25 @@ public record Caveat(Subject about, Weight weight, String text) {
     /** How far the number can still be trusted. */
     public enum Weight {
         /** to be known, changes nothing */
-        NOTE,
+        NOTE("note"),
         /** an assumption weakens; the number stands with the stated loss */
-        WEAK,
+        WEAK("weak"),
         /** the model has ended; a decision that rests on the number is undecided */
-        OUT_OF_RANGE
+        OUT_OF_RANGE("out of range");
+
+        private final String words;
+
+        Weight(String words) {
+            this.words = words;
+        }
+
+        /**
+         * The words printed before the sentence.
+         *
+         * @return a word or three
+         */
+        public String words() {
+            return words;
+        }
     }
 }

@@ -30,28 +30,46 @@ public record Calibration(double frequency, Cover cover) {
     }
 
     /**
-     * Sensitivity in use over sensitivity in calibration, at the calibration frequency; needs no suspension only where both
-     * stand in one medium.
+     * Sensitivity on the bench, and what becomes of it in use.
      *
      * @param device in use
-     * @return ratio of the magnitudes of θ/A [-], or of the torques if no suspension is stated
+     * @return the figures
      */
-    public double change(Device device) {
+    public Figures figures(Device device) {
         ResponsePoint use = new Response(device).at(frequency);
         ResponsePoint bench = new Response(calibrated(device)).at(frequency);
         if (use.motion().isPresent() && bench.motion().isPresent()) {
-            return use.motion().get().norm() / bench.motion().get().norm();
+            double sensitivity = bench.motion().get().norm();
+            return new Figures(sensitivity, true, use.motion().get().norm() / sensitivity);
         }
-        return use.motionTorque().norm() / bench.motionTorque().norm();
+        double torque = bench.motionTorque().norm();
+        return new Figures(torque, false, use.motionTorque().norm() / torque);
     }
 
     /**
-     * The same change as a level.
+     * Sensitivity at the calibration frequency.
      *
-     * @param device in use
-     * @return 20 lg of the ratio [dB]
+     * @param sensitivity on the bench, angle [rad per m/s²] or torque [N·m per m/s²]
+     * @param angle true for an angle, false for a torque, where no suspension is stated that holds the hair
+     * @param change sensitivity in use over that on the bench [-]
      */
-    public double changeLevel(Device device) {
-        return 20.0 * FastMath.log10(change(device));
+    public record Figures(double sensitivity, boolean angle, double change) {
+        /**
+         * The change in per cent.
+         *
+         * @return 100 (change − 1) [%]
+         */
+        public double percent() {
+            return 100.0 * (change - 1.0);
+        }
+
+        /**
+         * The change as a level.
+         *
+         * @return 20 lg of the change [dB]
+         */
+        public double level() {
+            return 20.0 * FastMath.log10(change);
+        }
     }
 }

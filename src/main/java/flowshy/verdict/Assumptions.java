@@ -31,8 +31,10 @@ final class Assumptions {
         caveats.addAll(device.around().caveats());
         fromMemory(device, caveats);
         caveats.addAll(new OscillatingCylinder(device.hair().profile().smallestRadius(), device.around()).caveats());
-        finiteLength(device, facts, caveats);
-        excursion(device, band, facts, caveats);
+        if (device.cover() == Cover.OPEN) {
+            finiteLength(device, facts, caveats);
+            excursion(device, band, facts, caveats);
+        }
         density(device, caveats);
         suspension(device, facts, caveats);
         bending(device, facts, caveats);
@@ -78,9 +80,6 @@ final class Assumptions {
     }
 
     private static void excursion(Device device, Band band, DeviceFacts facts, Set<Caveat> caveats) {
-        if (device.cover() != Cover.OPEN) {
-            return;
-        }
         double radius = device.hair().profile().smallestRadius();
         double low = 0.3
                 * 2.0

@@ -1,0 +1,80 @@
+package flowshy.cli;
+
+import flowshy.report.BandsJson;
+import flowshy.report.BandsText;
+import flowshy.report.JsonPage;
+import flowshy.report.TableCsv;
+import flowshy.study.Study;
+import flowshy.verdict.BandsAnswer;
+import flowshy.verdict.BandsQuestion;
+import flowshy.verdict.Decision;
+import flowshy.verdict.Levers;
+import flowshy.verdict.ThirdOctaves;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.concurrent.Callable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Option;
+import picocli.CommandLine.Spec;
+
+/** The main job. */
+@Command(
+        name = "bands",
+        mixinStandardHelpOptions = true,
+        description = "In which bands does the device of a study read motion, and in which flow?",
+        footer = {"", "Example: flowshy bands study.yaml --frequencies \"80 Hz, 320 Hz\" --why"})
+final class BandsCommand implements Callable<Integer> {
+    /** Points of the fine grid that CSV gets. */
+    private static final int FINE = 401;
+
+    @Mixin
+    private StudyOptions studies;
+
+    @Mixin
+    private OutputOptions output;
+
+    @Option(
+            names = "--frequencies",
+            paramLabel = "LIST",
+            converter = Frequencies.Converter.class,
+            description = "evaluate the response at these frequencies, e.g. \"80 Hz, 320 Hz\"")
+    private Frequencies frequencies;
+
+    @Option(
+            names = "--why",
+            description = "explain edges of bands and failed limits: which torque dominates, what moves it")
+    private boolean why;
+
+    @Spec
+    private CommandSpec spec;
+
+    @Override
+    public Integer call() {
+        List<String> texts = new ArrayList<>();
+        List<Runnable> objects = new ArrayList<>();
+        List<String> tables = new ArrayList<>();
+        JsonPage json = new JsonPage();
+        int code = studies.each(spec.commandLine(), output.json(), study -> {
+            BandsQuestion question = new BandsQuestion(study.device(), study.band(), study.acceptance());
+            BandsAnswer answer =
+                    question.answer(frequencies == null ? ThirdOctaves.in(study.band()) : frequencies.values());
+            List<Levers> levers = why ? Levers.of(answer) : List.of();
+            texts.add(BandsText.of(study, answer, levers));
+            objects.add(() -> BandsJson.write(json, study, answer, levers));
+            if (output.csv()) {
+                tables.add(table(study, question, answer));
+            }
+            Decision decision = answer.verdict().decision();
+            return decision == Decision.FAILS || decision == Decision.UNDECIDED ? Failures.LIMIT : 0;
+        });
+        studies.send(spec.commandLine(), output, json, texts, objects, tables);
+        return code;
+    }
+
+    private String table(Study study, BandsQuestion question, BandsAnswer answer) {
+        return TableCsv.points(
+                frequencies == null ? question.answer(study.band().even(FINE)) : answer);
+    }
+}

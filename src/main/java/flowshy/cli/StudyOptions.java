@@ -1,0 +1,88 @@
+package flowshy.cli;
+
+import flowshy.report.JsonPage;
+import flowshy.study.Study;
+import flowshy.study.StudyReader;
+import flowshy.study.text.StudyException;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.function.ToIntFunction;
+import picocli.CommandLine;
+import picocli.CommandLine.Option;
+import picocli.CommandLine.ParameterException;
+import picocli.CommandLine.Parameters;
+
+/** Words shared by the commands that work on studies. */
+final class StudyOptions {
+    @Parameters(arity = "0..*", paramLabel = "STUDY", description = "study file, YAML; several give one answer each")
+    private List<Path> studies = new ArrayList<>();
+
+    @Option(
+            names = "--set",
+            paramLabel = "KEY=VALUE",
+            description = "overlay a key of the study, e.g. --set 'hair.diameter=90 um'; may be repeated")
+    private List<String> settings = new ArrayList<>();
+
+    /**
+     * Reads every study and works on it; the problems of one do not stop the others.
+     *
+     * @param line the command, for its error writer
+     * @param json whether problems are printed as JSON
+     * @param work done on each study, gives an exit code
+     * @return the worst exit code: wrong input before a limit before success
+     */
+    int each(CommandLine line, boolean json, ToIntFunction<Study> work) {
+        if (studies.isEmpty()) {
+            throw new ParameterException(
+                    line, "a STUDY is missing: name a study file, or write one with the command start");
+        }
+        int worst = 0;
+        for (Path study : studies) {
+            int code;
+            try {
+                code = work.applyAsInt(StudyReader.read(study, settings));
+            } catch (StudyException e) {
+                Failures.problems(line, e.problems(), json);
+                code = Failures.WRONG_INPUT;
+            }
+            worst = code == Failures.WRONG_INPUT || worst == Failures.WRONG_INPUT
+                    ? Failures.WRONG_INPUT
+                    : Math.max(worst, code);
+        }
+        return worst;
+    }
+
+    /**
+     * Sends the answers on: one JSON object for one study, an array for several.
+     *
+     * @param line the command, for its writer
+     * @param output where to
+     * @param json the page the objects write on
+     * @param texts one a study that could be read
+     * @param objects writes one object each, same order
+     * @param tables CSV, one a study; empty if not asked for
+     */
+    void send(
+            CommandLine line,
+            OutputOptions output,
+            JsonPage json,
+            List<String> texts,
+            List<Runnable> objects,
+            List<String> tables) {
+        if (texts.isEmpty()) {
+            return;
+        }
+        if (output.json() && studies.size() > 1) {
+            json.array(objects);
+        } else if (output.json()) {
+            objects.get(0).run();
+        }
+        output.send(
+                line,
+                String.join("\n", texts),
+                output.json() ? Optional.of(json.finish()) : Optional.empty(),
+                output.csv() ? Optional.of(String.join("\n", tables)) : Optional.empty());
+    }
+}

@@ -1,0 +1,90 @@
+package flowshy.cli;
+
+import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
+
+import java.io.IOException;
+import java.io.UncheckedIOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Map;
+import java.util.stream.Stream;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.MethodSource;
+
+/**
+ * Every example, as a user runs it: the printed answer equals {@code expected.txt}, and the figures worked apart from the program
+ * ({@code by-hand.csv}, made by {@code by-hand.py} beside it) agree. {@code -Dflowshy.rewrite=true} writes the expected outputs anew.
+ */
+class ExamplesTest {
+    private static final boolean REWRITE = Boolean.getBoolean("flowshy.rewrite");
+
+    static List<Path> examples() {
+        try (Stream<Path> folders = Files.list(Path.of("examples"))) {
+            return folders.filter(Files::isDirectory).sorted().toList();
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+    }
+
+    @Test
+    void thereAreExamples() {
+        assertThat(examples()).hasSizeGreaterThanOrEqualTo(4);
+    }
+
+    @ParameterizedTest
+    @MethodSource("examples")
+    void printsWhatIsExpected(Path example) throws IOException {
+        Run run = Run.of("bands", study(example), "--why");
+        String printed = run.out() + "exit code " + run.code() + "\n";
+        Path expected = example.resolve("expected.txt");
+        if (REWRITE) {
+            Files.writeString(expected, printed);
+        }
+        assertThat(run.err()).isEmpty();
+        assertThat(printed).isEqualTo(Files.readString(expected));
+    }
+
+    @ParameterizedTest
+    @MethodSource("examples")
+    void fitsEightyColumns(Path example) {
+        assertThat(Run.of("bands", study(example), "--why").out().lines())
+                .isNotEmpty()
+                .allSatisfy(line -> assertThat(line.length()).isLessThanOrEqualTo(80));
+    }
+
+    @ParameterizedTest
+    @MethodSource("examples")
+    void agreesWithFiguresWorkedApart(Path example) throws IOException {
+        List<String> lines = Files.readAllLines(example.resolve("by-hand.csv"));
+        assertThat(lines).hasSizeGreaterThanOrEqualTo(3); // head and two figures
+        for (String line : lines.subList(1, lines.size())) {
+            String[] fields = line.split(",");
+            double value = Double.parseDouble(fields[2]);
+            double tolerance = Double.parseDouble(fields[3]);
+            assertThat(figure(example, fields[0], fields[1]))
+                    .as("%s %s at %s Hz", example, fields[0], fields[1])
+                    .isFinite()
+                    .isCloseTo(value, within(Math.abs(value) * tolerance));
+        }
+    }
+
+    private static double figure(Path example, String name, String frequency) {
+        if (frequency.isEmpty()) {
+            Map<String, Object> answer = answer(Run.of("bands", study(example), "--json"));
+            return (double) Json.object(answer.get("device")).get(name);
+        }
+        Run run = Run.of("bands", study(example), "--json", "--frequencies", frequency + " Hz");
+        return (double) Json.objects(answer(run).get("points")).get(0).get(name);
+    }
+
+    private static Map<String, Object> answer(Run run) {
+        return Json.object(Json.parse(run.out()));
+    }
+
+    private static String study(Path example) {
+        return example.resolve("study.yaml").toString();
+    }
+}
