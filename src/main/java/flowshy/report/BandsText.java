@@ -3,6 +3,7 @@ package flowshy.report;
 import flowshy.hair.Hair;
 import flowshy.math.Caveat;
 import flowshy.math.Caveat.Subject;
+import flowshy.math.Figures;
 import flowshy.medium.Medium;
 import flowshy.medium.PropertySource;
 import flowshy.response.Calibration;

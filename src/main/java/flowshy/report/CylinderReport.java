@@ -2,6 +2,7 @@ package flowshy.report;
 
 import flowshy.cylinder.LimitingForm;
 import flowshy.math.Caveat;
+import flowshy.math.Figures;
 import flowshy.torque.StripFactors;
 import java.util.ArrayList;
 import java.util.List;

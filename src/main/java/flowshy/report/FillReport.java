@@ -1,5 +1,6 @@
 package flowshy.report;
 
+import flowshy.math.Figures;
 import flowshy.medium.Medium;
 import flowshy.study.Study;
 import flowshy.verdict.fill.FillQuestion;

@@ -2,6 +2,7 @@ package flowshy.report;
 
 import com.fasterxml.jackson.core.JsonFactory;
 import com.fasterxml.jackson.core.JsonGenerator;
+import flowshy.math.Figures;
 import java.io.IOException;
 import java.io.StringWriter;
 import java.io.UncheckedIOException;

@@ -1,6 +1,7 @@
 package flowshy.report;
 
 import flowshy.math.Caveat;
+import flowshy.math.Figures;
 import flowshy.math.Range;
 import flowshy.medium.AcceptedParameter;
 import flowshy.medium.Medium;

@@ -2,6 +2,7 @@ package flowshy.report;
 
 import de.siegmar.fastcsv.writer.CsvWriter;
 import de.siegmar.fastcsv.writer.LineDelimiter;
+import flowshy.math.Figures;
 import flowshy.verdict.BandsAnswer;
 import java.io.IOException;
 import java.io.StringWriter;

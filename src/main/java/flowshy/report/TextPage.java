@@ -1,5 +1,6 @@
 package flowshy.report;
 
+import flowshy.math.Figures;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.function.Predicate;

@@ -1,5 +1,7 @@
 package flowshy.response;
 
+import static flowshy.math.Figures.say;
+
 import flowshy.hair.Hair;
 import flowshy.medium.Medium;
 import flowshy.response.SuspensionStatement.Dashpot;
@@ -8,7 +10,6 @@ import flowshy.response.SuspensionStatement.Resonance;
 import flowshy.response.SuspensionStatement.RingDown;
 import flowshy.response.SuspensionStatement.Spring;
 import flowshy.response.SuspensionStatement.Stiffness;
-import java.util.Locale;
 import java.util.Optional;
 import java.util.function.DoubleFunction;
 import java.util.function.DoubleUnaryOperator;
@@ -222,9 +223,5 @@ public final class SuspensionSolver {
 
     private static String name(Optional<Medium> in) {
         return in.map(Medium::name).orElse("vacuum");
-    }
-
-    private static String say(String text, Object... values) {
-        return String.format(Locale.ROOT, text, values);
     }
 }

@@ -1,6 +1,6 @@
 package flowshy.verdict;
 
-import static flowshy.verdict.BandsQuestion.say;
+import static flowshy.math.Figures.say;
 
 import flowshy.cylinder.OscillatingCylinder;
 import flowshy.math.Caveat;

@@ -10,7 +10,6 @@ import flowshy.verdict.BandsAnswer.Extreme;
 import flowshy.verdict.RejectionCurve.Sample;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.TreeSet;
@@ -133,10 +132,5 @@ public record BandsQuestion(Device device, Band band, Acceptance acceptance) {
 
     private static Extreme extreme(Sample sample) {
         return new Extreme(sample.frequency(), sample.rejection());
-    }
-
-    /** Shared with the sentences of this package: four digits, no locale. */
-    static String say(String text, Object... values) {
-        return String.format(Locale.ROOT, text, values);
     }
 }

@@ -1,6 +1,6 @@
 package flowshy.verdict;
 
-import static flowshy.verdict.BandsQuestion.say;
+import static flowshy.math.Figures.say;
 
 import flowshy.response.Device;
 import flowshy.stream.Cover;
@@ -76,7 +76,7 @@ final class Judgement {
             default -> "Reads " + reading + ", at a margin of " + say("%.4g dB.", acceptance.margin());
         };
         String found = least.map(extreme ->
-                        say(" Least rejection %.2f dB at %.4g Hz.", extreme.rejection(), extreme.frequency()))
+                        say(" Least rejection %.4g dB at %.4g Hz.", extreme.rejection(), extreme.frequency()))
                 .orElse(first == Reads.MOTION ? " No flow enters: the rejection has no bound." : "");
         String judged = switch (decision) {
             case MEETS -> " Every limit that can be judged is met.";

@@ -150,7 +150,7 @@ class CommandLineTest {
         assertThat(run.out())
                 .contains("Decision: not-asked")
                 .contains("20 degC", "101.325 kPa", "50 %", "1 Hz", "10 kHz", "20 dB")
-                .contains("not stated: torques and bands are given, movements are not")
+                .contains("suspension              not stated: torques and bands")
                 .doesNotContain("rad/(m/s2)");
         Map<String, Object> answer = Json.object(
                 Json.parse(Run.of("bands", study.toString(), "--json").out()));

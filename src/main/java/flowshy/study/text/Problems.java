@@ -52,7 +52,15 @@ public final class Problems {
      * @return true if so
      */
     public boolean touches(String path) {
-        return found.stream().anyMatch(p -> p.path().equals(path) || p.path().startsWith(path + "."));
+        // a mistyped key stands for the one it was meant to be; past the hundredth problem, who knows
+        return untold > 0
+                || found.stream()
+                        .anyMatch(p -> within(p.path(), path)
+                                || p.nearest().filter(n -> within(n, path)).isPresent());
+    }
+
+    private static boolean within(String inner, String path) {
+        return inner.equals(path) || inner.startsWith(path + ".");
     }
 
     /**

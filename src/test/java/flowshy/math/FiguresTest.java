@@ -1,6 +1,7 @@
-package flowshy.report;
+package flowshy.math;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.assertThatIllegalArgumentException;
 
 import java.util.Locale;
 import org.junit.jupiter.api.Test;
@@ -50,5 +51,13 @@ class FiguresTest {
         } finally {
             Locale.setDefault(before);
         }
+    }
+
+    @Test
+    void putsFiguresIntoSentences() {
+        assertThat(Figures.say("%s: %.3g dB at %.4g Hz, %.2g %%", "least", 12.3456, 10000.0, 5.0))
+                .isEqualTo("least: 12.3 dB at 10000 Hz, 5.0 %");
+        assertThatIllegalArgumentException().isThrownBy(() -> Figures.say("%s"));
+        assertThatIllegalArgumentException().isThrownBy(() -> Figures.say("none", 1.0));
     }
 }
