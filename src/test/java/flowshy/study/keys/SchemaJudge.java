@@ -1,0 +1,183 @@
+package flowshy.study.keys;
+
+import com.fasterxml.jackson.core.JsonFactory;
+import com.fasterxml.jackson.core.JsonParser;
+import com.fasterxml.jackson.core.JsonToken;
+import flowshy.study.text.Node;
+import java.io.IOException;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.regex.Pattern;
+
+/** Judges data by a JSON Schema, for the keywords that ours uses; an unknown keyword is an error, never passed over. */
+final class SchemaJudge {
+    private final Map<String, Object> root;
+
+    SchemaJudge(String schema) {
+        this.root = map(json(schema));
+    }
+
+    Map<String, Object> root() {
+        return root;
+    }
+
+    boolean accepts(Node node) {
+        return accepts(root, data(node));
+    }
+
+    Map<String, Object> resolved(Map<String, Object> schema) {
+        if (!schema.containsKey("$ref")) {
+            return schema;
+        }
+        String name = schema.get("$ref").toString().replace("#/$defs/", "");
+        return map(map(root.get("$defs")).get(name));
+    }
+
+    private boolean accepts(Map<String, Object> schema, Object value) {
+        for (Map.Entry<String, Object> keyword : schema.entrySet()) {
+            if (!holds(keyword.getKey(), keyword.getValue(), schema, value)) {
+                return false;
+            }
+        }
+        return true;
+    }
+
+    private boolean holds(String keyword, Object wanted, Map<String, Object> schema, Object value) {
+        switch (keyword) {
+            case "$schema", "title", "description", "examples", "$defs":
+                return true;
+            case "$ref":
+                return accepts(resolved(schema), value);
+            case "type":
+                return types(wanted).stream().anyMatch(type -> type.equals(type(value)));
+            case "const":
+                return wanted.equals(value);
+            case "enum":
+                return list(wanted).contains(value);
+            case "pattern":
+                return !(value instanceof String text)
+                        || Pattern.compile(wanted.toString()).matcher(text).find();
+            case "anyOf":
+                return count(wanted, value) >= 1;
+            case "oneOf":
+                return count(wanted, value) == 1;
+            case "allOf":
+                return count(wanted, value) == list(wanted).size();
+            case "not":
+                return !accepts(map(wanted), value);
+            case "items":
+                return !(value instanceof List<?> items) || items.stream().allMatch(i -> accepts(map(wanted), i));
+            case "prefixItems":
+                return !(value instanceof List<?> items) || prefix(list(wanted), items);
+            case "minItems":
+                return !(value instanceof List<?> items) || items.size() >= (Integer) wanted;
+            case "maxItems":
+                return !(value instanceof List<?> items) || items.size() <= (Integer) wanted;
+            default:
+                return !(value instanceof Map<?, ?>) || object(keyword, wanted, schema, map(value));
+        }
+    }
+
+    private boolean object(String keyword, Object wanted, Map<String, Object> schema, Map<String, Object> value) {
+        switch (keyword) {
+            case "properties":
+                return value.entrySet().stream()
+                        .allMatch(e -> !map(wanted).containsKey(e.getKey())
+                                || accepts(map(map(wanted).get(e.getKey())), e.getValue()));
+            case "required":
+                return value.keySet().containsAll(list(wanted));
+            case "additionalProperties":
+                return map(schema.get("properties")).keySet().containsAll(value.keySet());
+            case "dependentRequired":
+                return map(wanted).entrySet().stream()
+                        .allMatch(e ->
+                                !value.containsKey(e.getKey()) || value.keySet().containsAll(list(e.getValue())));
+            case "dependentSchemas":
+                return map(wanted).entrySet().stream()
+                        .allMatch(e -> !value.containsKey(e.getKey()) || accepts(map(e.getValue()), value));
+            default:
+                throw new IllegalStateException("keyword " + keyword + " is not known to this judge");
+        }
+    }
+
+    private long count(Object schemas, Object value) {
+        return list(schemas).stream().filter(s -> accepts(map(s), value)).count();
+    }
+
+    private boolean prefix(List<Object> wanted, List<?> items) {
+        for (int i = 0; i < Math.min(wanted.size(), items.size()); i++) {
+            if (!accepts(map(wanted.get(i)), items.get(i))) {
+                return false;
+            }
+        }
+        return true;
+    }
+
+    private static List<Object> types(Object wanted) {
+        return wanted instanceof List<?> ? list(wanted) : List.of(wanted);
+    }
+
+    private static String type(Object value) {
+        return value instanceof Map<?, ?> ? "object" : value instanceof List<?> ? "array" : "string";
+    }
+
+    private static Object data(Node node) {
+        if (node instanceof Node.Mapping mapping) {
+            Map<String, Object> map = new LinkedHashMap<>();
+            mapping.entries().forEach(e -> map.put(e.key(), data(e.value())));
+            return map;
+        }
+        if (node instanceof Node.Sequence list) {
+            return list.items().stream().map(SchemaJudge::data).toList();
+        }
+        return ((Node.Scalar) node).text();
+    }
+
+    @SuppressWarnings("unchecked") // JSON objects have text keys
+    static Map<String, Object> map(Object value) {
+        return (Map<String, Object>) value;
+    }
+
+    @SuppressWarnings("unchecked") // any list is a list of objects
+    static List<Object> list(Object value) {
+        return (List<Object>) value;
+    }
+
+    private static Object json(String text) {
+        try (JsonParser parser = new JsonFactory().createParser(text)) {
+            parser.nextToken();
+            return value(parser);
+        } catch (IOException e) {
+            throw new IllegalStateException(e);
+        }
+    }
+
+    private static Object value(JsonParser parser) throws IOException {
+        switch (parser.currentToken()) {
+            case START_OBJECT:
+                Map<String, Object> map = new LinkedHashMap<>();
+                while (parser.nextToken() != JsonToken.END_OBJECT) {
+                    String name = parser.currentName();
+                    parser.nextToken();
+                    if (map.put(name, value(parser)) != null) {
+                        throw new IllegalStateException("repeated name " + name);
+                    }
+                }
+                return map;
+            case START_ARRAY:
+                List<Object> list = new ArrayList<>();
+                while (parser.nextToken() != JsonToken.END_ARRAY) {
+                    list.add(value(parser));
+                }
+                return list;
+            case VALUE_NUMBER_INT:
+                return parser.getIntValue();
+            case VALUE_FALSE:
+                return Boolean.FALSE;
+            default:
+                return parser.getText();
+        }
+    }
+}

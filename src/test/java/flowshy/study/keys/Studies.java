@@ -1,0 +1,61 @@
+package flowshy.study.keys;
+
+import java.util.List;
+
+/** Studies that together write every key which this version reads. */
+final class Studies {
+    static final String SMALLEST = "hair: {length: 610 um, diameter: 77 um, density: 1.3 g/cm3}\nmedium: air\n";
+
+    static final List<String> ALL = List.of(SMALLEST, """
+            title: every key of a cylinder
+            hair: {shape: cylinder, length: 0.61 mm, diameter: 77 µm, density: 1300 kg/m3, youngs-modulus: 3 GPa}
+            suspension:
+              stiffness: 3 nN.m/rad
+              damping: {value: 2e-13 N.m.s/rad, in: {name: air, temperature: 21 degC, pressure: 99 kPa, humidity: 30 %}, cover: open}
+              plate-inertia: 4e-18 kg.m2
+              pivot-depth: 3 um
+              attitude: hanging
+              readout-noise: 1 nrad/rtHz
+            medium: {name: air, temperature: 25 degC, pressure: 1 bar, humidity: 20 %}
+            cover: {kind: sealed, fill: {name: helium, temperature: 25 degC, pressure: 1 bar}}
+            band: {from: 5 Hz, to: 2 kHz}
+            accept: {rejection: 10 dB, error: 0.2 m/s2 peak}
+            calibration: {frequency: 60 Hz, cover: open}
+            finite-length: off
+            document: {project: p, part: "7", revision: 2.10, prepared-by: a, checked-by: b, approved-by: c, remarks: d}
+            """, """
+            hair: {shape: taper, length: 700 um, base-diameter: 90 um, tip-diameter: 0 um, density: 1.2 g/cm3}
+            suspension:
+              resonance: {frequency: 300 Hz, in: {density: 1.2 kg/m3, viscosity: 18 uPa.s, temperature: 20 degC, sound-speed: 343 m/s}, cover: sealed}
+              quality: {value: 1.5, in: {density: 1.2 kg/m3, kinematic-viscosity: 15 cSt}, cover: open}
+            medium: {density: 1.2 kg/m3, viscosity: 18 uPa.s, sound-speed: 343 m/s, temperature: 20 degC}
+            cover: {kind: sealed, fill: {density: 0.9 g/cm3, kinematic-viscosity: 5 cSt, sound-speed: 1300 m/s}}
+            """, """
+            hair: {shape: club, length: 900 um, stalk-diameter: 50 um, stalk-length: 400 um, shoulder-length: 60 um,
+                   head-diameter: 130 um, end: round, density: 1.2 g/cm3}
+            suspension:
+              resonance: 250 Hz
+              ring-down: {decay-time: 5 ms, frequency: 240 Hz, in: vacuum}
+            medium: {density: 1 g/cm3, kinematic-viscosity: 1 cSt}
+            cover: {kind: sealed, fill: {density: 0.9 g/cm3, viscosity: 4 mPa.s}}
+            """, """
+            hair: {shape: profile, points: [[0 um, 90 um], [300 um, 80 um], [0.6 mm, 0 um]], density: 2.33 g/cm3}
+            suspension: {stiffness: 3 nN.m/rad, quality: 20}
+            medium: {name: nitrogen, second: helium, share: 20 %}
+            cover: {kind: sealed, fill: {name: helium, second: argon, share: 5 %}}
+            """, """
+            hair: {shape: profile, file: profile.csv, density: 2.33 g/cm3}
+            suspension:
+              stiffness: 3 nN.m/rad
+              damping: {value: 1e-12 N.m.s/rad, in: {name: helium, second: argon, share: 1 %}}
+            medium: nitrogen
+            """, """
+            hair: {length: 610 um, diameter: 77 um, density: 1.3 g/cm3}
+            suspension:
+              stiffness: 3 nN.m/rad
+              ring-down: {decay-time: 1 ms, in: {name: nitrogen, temperature: 20 degC, pressure: 1 bar}, cover: sealed}
+            medium: nitrogen
+            """);
+
+    private Studies() {}
+}
