@@ -71,7 +71,7 @@ final class MediumShelf {
 
     private static Stream<String> files(Path folder) throws IOException {
         try (Stream<Path> paths = Files.list(folder)) {
-            return paths.map(path -> path.getFileName().toString()).toList().stream();
+            return paths.map(path -> String.valueOf(path.getFileName())).toList().stream();
         }
     }
 }

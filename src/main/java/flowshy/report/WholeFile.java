@@ -20,10 +20,10 @@ public final class WholeFile {
      * @throws IOException if the folder cannot be written or is full; nothing is left behind then
      */
     public static void write(Path target, String text) throws IOException {
-        Path folder = target.toAbsolutePath().getParent();
-        // not a system temporary file: that would be readable by its owner only, and perhaps on another disk
-        Path half = folder.resolve(
-                "." + target.getFileName() + "." + ProcessHandle.current().pid() + ".part");
+        // beside the target and not a system temporary file: that would be its owner's alone, and perhaps on another
+        // disk
+        Path half = target.resolveSibling(
+                "." + target.toFile().getName() + "." + ProcessHandle.current().pid() + ".part");
         try {
             Files.write(half, text.getBytes(StandardCharsets.UTF_8), StandardOpenOption.CREATE_NEW);
             try {

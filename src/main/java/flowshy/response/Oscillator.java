@@ -153,7 +153,7 @@ public final class Oscillator {
         while (denominator(low).getReal() <= 0.0) { // the fluid only adds inertia: the root lies below
             low *= 0.5;
         }
-        if (low == high) {
+        if (!(low < high)) { // the fluid adds nothing that counts
             return high;
         }
         BracketingNthOrderBrentSolver solver =

@@ -4,6 +4,8 @@ import flowshy.response.Calibration;
 import flowshy.response.Device;
 import flowshy.verdict.Acceptance;
 import flowshy.verdict.Band;
+import java.util.Collections;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -33,6 +35,7 @@ public record Study(
         List<Understood> understood) {
     /** Copies the lists. */
     public Study {
+        document = Collections.unmodifiableMap(new LinkedHashMap<>(document));
         takenAs = List.copyOf(takenAs);
         understood = List.copyOf(understood);
     }
