@@ -50,7 +50,11 @@ public record Strip(double height, double radius, double weight) {
                     share = atTop ? 1.0 - share : share;
                 }
                 double height = from + span * share;
-                strips.add(new Strip(height, profile.radius(height), weight));
+                double radius = profile.radius(height);
+                if (radius
+                        > 0.0) { // rounding may put the last of very many points on the very tip, which carries nothing
+                    strips.add(new Strip(height, radius, weight));
+                }
             }
         }
         return strips;

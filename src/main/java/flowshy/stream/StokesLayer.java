@@ -2,6 +2,7 @@ package flowshy.stream;
 
 import org.hipparchus.complex.Complex;
 import org.hipparchus.util.FastMath;
+import org.hipparchus.util.SinCos;
 
 /**
  * Oscillating flow along a plane wall, as a share of the free stream.
@@ -12,6 +13,9 @@ import org.hipparchus.util.FastMath;
  * @param kinematicViscosity ν [m²/s]
  */
 public record StokesLayer(double kinematicViscosity) {
+    /** Above this height in units of δ the rest, e^{-40}, is a hundredth of a rounding error. */
+    private static final double FREE = 40.0;
+
     /** @throws IllegalArgumentException if the viscosity is not positive */
     public StokesLayer {
         if (!(kinematicViscosity > 0.0)) {
@@ -47,9 +51,14 @@ public record StokesLayer(double kinematicViscosity) {
      * @return s [-]
      */
     public static Complex share(double y) {
-        double fall = FastMath.exp(-y);
-        double half = FastMath.sin(0.5 * y);
+        if (y > FREE) {
+            return Complex.ONE;
+        }
         // 1 − e^{−y} cos y = −expm1(−y) + 2 e^{−y} sin²(y/2)
-        return new Complex(-FastMath.expm1(-y) + 2.0 * fall * half * half, fall * FastMath.sin(y));
+        double rise = -FastMath.expm1(-y);
+        double fall = 1.0 - rise;
+        SinCos half = FastMath.sinCos(0.5 * y);
+        double sine = fall * 2.0 * half.sin();
+        return new Complex(rise + sine * half.sin(), sine * half.cos());
     }
 }
