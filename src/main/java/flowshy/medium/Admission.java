@@ -21,7 +21,7 @@ final class Admission {
                         true,
                         header.medium() + " needs its " + parameter.key() + ", " + say(accepted.range(), parameter));
             }
-            if (!accepted.range().contains(value.getAsDouble())) {
+            if (!inside(accepted.range(), value.getAsDouble())) {
                 throw new OutOfTableException(
                         parameter,
                         Why.OUTSIDE,
@@ -69,7 +69,7 @@ final class Admission {
         }
     }
 
-    /** The ends count as inside also after a conversion that lost the last bit, as 273.15 − 60 does. */
+    /** The ends count as inside also after a conversion that lost the last bit, as 273.15 − 60 does; zero and negative ends are exact. */
     private static boolean inside(Range range, double value) {
         return value >= range.low() * (1.0 - ROUNDING) && value <= range.high() * (1.0 + ROUNDING);
     }

@@ -12,6 +12,20 @@ enum FormulaLaw {
         MediumLaw build(TableHeader header) {
             return new MoistAir(header, new PureGas(shelved("dry-air")));
         }
+    },
+    /** glycerol with water at a mass fraction */
+    GLYCEROL_WATER("glycerol-water") {
+        @Override
+        MediumLaw build(TableHeader header) {
+            return new GlycerolWater(header, shelved("water"));
+        }
+    },
+    /** sea water at a practical salinity */
+    SEA_WATER("sea water") {
+        @Override
+        MediumLaw build(TableHeader header) {
+            return new SeaWater(header, shelved("water"));
+        }
     };
 
     private final String word;

@@ -84,8 +84,8 @@ final class GasMixture {
                         OptionalDouble.of(PAIR * pressure / PAIR_PRESSURE)),
                 new PropertySource(
                         "viscosity",
-                        "Wilke 1950, J. Chem. Phys. 18:517",
-                        Reading.MEMORY,
+                        "Wilke 1950, J. Chem. Phys. 18:517; uncertainty from memory",
+                        Reading.SECOND_HAND,
                         OptionalDouble.of(masses > FAR_MASSES ? WILKE_LIGHT_HEAVY : WILKE)),
                 new PropertySource(
                         "sound speed",

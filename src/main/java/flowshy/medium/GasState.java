@@ -28,7 +28,7 @@ final class GasState {
 
     /**
      * Viscosity of a mixture of two gases, Wilke 1950 (J. Chem. Phys. 18:517): μ = Σ x_i μ_i / Σ_j x_j φ_ij,
-     * φ_ij = [1 + √(μ_i/μ_j) (M_j/M_i)^¼]² / √(8 (1 + M_i/M_j)). From memory.
+     * φ_ij = [1 + √(μ_i/μ_j) (M_j/M_i)^¼]² / √(8 (1 + M_i/M_j)); form read second hand.
      */
     static double wilke(
             double share, double viscosity, double molarMass, double otherViscosity, double otherMolarMass) {

@@ -105,7 +105,10 @@ public final class Media {
         if (formula.isPresent()) {
             return FormulaLaw.named(formula.get(), table.file()).build(table.header());
         }
-        return table.header().phase() == Phase.GAS ? new PureGas(table) : new PlainLiquid(table);
+        if (table.header().phase() == Phase.GAS) {
+            return new PureGas(table);
+        }
+        return table.rows().get(0).grade().isPresent() ? new GradedLiquid(table) : new PlainLiquid(table);
     }
 
     private static Optional<MediumTable> byAlias(String stem) {

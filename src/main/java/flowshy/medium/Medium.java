@@ -62,6 +62,17 @@ public record Medium(
     }
 
     /**
+     * The properties that rest on a value from memory, so that a verdict can say so.
+     *
+     * @return those of density, viscosity and sound speed, of a mixture also of its parts
+     */
+    public List<PropertySource> recalled() {
+        return sources.stream()
+                .filter(source -> source.reading() == PropertySource.Reading.MEMORY)
+                .toList();
+    }
+
+    /**
      * Kinematic viscosity ν = μ/ρ.
      *
      * @return ν [m²/s]

@@ -11,7 +11,7 @@ import java.util.List;
  *
  * @param file the name under which messages point at it
  * @param header what the table says of itself
- * @param rows by rising temperature; empty if a formula replaces them
+ * @param rows by rising temperature, those of one grade together; empty if a formula replaces them
  */
 public record MediumTable(String file, TableHeader header, List<TableRow> rows) {
     /** A table needs as many rows as a cubic spline needs points. */
@@ -24,7 +24,8 @@ public record MediumTable(String file, TableHeader header, List<TableRow> rows) 
             throw new IllegalArgumentException(file + ": a table needs " + FEWEST_ROWS + " rows, has " + rows.size());
         }
         for (int i = 1; i < rows.size(); i++) {
-            if (!(rows.get(i).temperature() > rows.get(i - 1).temperature())) {
+            boolean sameGrade = rows.get(i).grade().equals(rows.get(i - 1).grade());
+            if (sameGrade && !(rows.get(i).temperature() > rows.get(i - 1).temperature())) {
                 throw new IllegalArgumentException(file + ": temperature must rise, row " + (i + 1));
             }
         }

@@ -97,8 +97,9 @@ final class MediumTableReader {
             column += cells[i].length() + 1;
         }
         if (values.keySet().containsAll(List.of(TableColumn.TEMPERATURE, TableColumn.DENSITY, TableColumn.VISCOSITY))) {
-            rising(number, values.get(TableColumn.TEMPERATURE));
+            rising(number, values);
             rows.add(new TableRow(
+                    optional(values, TableColumn.GRADE),
                     values.get(TableColumn.TEMPERATURE),
                     values.get(TableColumn.DENSITY),
                     values.get(TableColumn.VISCOSITY),
@@ -131,8 +132,16 @@ final class MediumTableReader {
         values.put(heading.column(), si);
     }
 
-    private void rising(int number, double temperature) {
-        if (!rows.isEmpty() && !(temperature > rows.get(rows.size() - 1).temperature())) {
+    private void rising(int number, Map<TableColumn, Double> values) {
+        if (rows.isEmpty()) {
+            return;
+        }
+        TableRow last = rows.get(rows.size() - 1);
+        double grade = values.getOrDefault(TableColumn.GRADE, 0.0);
+        double lastGrade = last.grade().orElse(0.0);
+        if (grade < lastGrade) {
+            text.problem(number, 1, "a grade that falls", "grades in rising order, the rows of one together");
+        } else if (grade == lastGrade && !(values.get(TableColumn.TEMPERATURE) > last.temperature())) {
             text.problem(number, 1, "a temperature that does not rise", "rows by rising temperature, each once");
         }
     }
@@ -149,9 +158,19 @@ final class MediumTableReader {
                     Math.max(1, headingLine), 1, rows.size() + " good rows", "at least " + MediumTable.FEWEST_ROWS);
             return;
         }
+        checkGrades(header);
         Range asked = header.temperatures();
-        double first = rows.get(0).temperature();
-        double last = rows.get(rows.size() - 1).temperature();
+        double first = Double.NEGATIVE_INFINITY;
+        double last = Double.POSITIVE_INFINITY;
+        for (int i = 0; i < rows.size(); i++) {
+            if (i == 0 || !rows.get(i).grade().equals(rows.get(i - 1).grade())) {
+                first = Math.max(first, rows.get(i).temperature());
+            }
+            if (i == rows.size() - 1
+                    || !rows.get(i).grade().equals(rows.get(i + 1).grade())) {
+                last = Math.min(last, rows.get(i).temperature());
+            }
+        }
         if (!(asked.low() >= first && asked.high() <= last)) {
             text.problem(
                     headerReader.lineOf("temperatures"),
@@ -161,7 +180,7 @@ final class MediumTableReader {
         }
         for (TableColumn column : TableColumn.values()) {
             boolean told = headerReader.has(column.property());
-            if (column != TableColumn.TEMPERATURE && has(column) && !told) {
+            if (column.isProperty() && has(column) && !told) {
                 text.problem(
                         headingLine,
                         1,
@@ -174,6 +193,21 @@ final class MediumTableReader {
                         "a source of " + column.property() + " without its column",
                         String.join(" or ", column.headings()));
             }
+        }
+    }
+
+    private void checkGrades(TableHeader header) {
+        boolean named = headerReader.has(MediumParameter.GRADE.key());
+        if (named != has(TableColumn.GRADE)) {
+            text.problem(
+                    headingLine,
+                    1,
+                    named ? "no column grade" : "a column grade without its range in the header",
+                    named
+                            ? String.join(" or ", TableColumn.GRADE.headings())
+                            : "a header line '# grade: 10 mm2/s to 100 mm2/s'");
+        } else if (named && header.phase() != Phase.LIQUID) {
+            text.problem(headerReader.lineOf("phase"), 1, "grades of a gas", "grades of a liquid");
         }
     }
 

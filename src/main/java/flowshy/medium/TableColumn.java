@@ -7,6 +7,7 @@ import java.util.Optional;
 
 /** The columns that a property table may have, each with the units it may be written in. */
 enum TableColumn {
+    GRADE("grade", "mm2_s 1e-6, m2_s 1"),
     TEMPERATURE("temperature", "degC 1 273.15, K 1"),
     DENSITY("density", "kg_m3 1, g_cm3 1e3"),
     VISCOSITY("viscosity", "Pa_s 1, mPa_s 1e-3, uPa_s 1e-6"),
@@ -27,6 +28,11 @@ enum TableColumn {
         return word.replace('_', ' ');
     }
 
+    /** Whether the column holds a property, of which the header must tell the source; grade and temperature only name the row. */
+    boolean isProperty() {
+        return this != GRADE && this != TEMPERATURE;
+    }
+
     /** A column heading with the unit it stands for, if there is one such. */
     static Optional<Heading> heading(String text) {
         for (TableColumn column : values()) {
@@ -42,7 +48,7 @@ enum TableColumn {
     /** The column that carries a property of the header, if there is one such. */
     static Optional<TableColumn> ofProperty(String property) {
         for (TableColumn column : values()) {
-            if (column != TEMPERATURE && column.property().equals(property)) {
+            if (column.isProperty() && column.property().equals(property)) {
                 return Optional.of(column);
             }
         }

@@ -13,7 +13,6 @@ import org.apache.commons.math3.util.FastMath;
  * the power laws of gases straight lines and keeps every value positive; the logarithm of the saturation pressure over 1/T. Outside the rows the splines throw, nothing is extrapolated.
  */
 final class TableCurves {
-    private final List<TableRow> rows;
     private final PolynomialSplineFunction density;
     private final PolynomialSplineFunction viscosity;
     private final List<PolynomialSplineFunction> soundSpeed;
@@ -21,7 +20,6 @@ final class TableCurves {
     private final List<PolynomialSplineFunction> saturation;
 
     TableCurves(List<TableRow> rows) {
-        this.rows = rows;
         this.density = through(rows, TableCurves::abscissa, row -> FastMath.log(row.density()));
         this.viscosity = through(rows, TableCurves::abscissa, row -> FastMath.log(row.viscosity()));
         this.soundSpeed = optional(
@@ -88,11 +86,6 @@ final class TableCurves {
             }
         }
         return OptionalDouble.of(-1.0 / (0.5 * (low + high)));
-    }
-
-    /** Lowest row with a saturation pressure [Pa], empty where the table has none. */
-    OptionalDouble lowestSaturationPressure() {
-        return rows.get(0).saturationPressure();
     }
 
     private static double abscissa(TableRow row) {

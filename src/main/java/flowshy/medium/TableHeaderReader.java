@@ -261,7 +261,7 @@ final class TableHeaderReader {
     private static String knownKeys() {
         List<String> all = new ArrayList<>(KEYS);
         for (TableColumn column : TableColumn.values()) {
-            if (column != TableColumn.TEMPERATURE) {
+            if (column.isProperty()) {
                 all.add(column.property());
             }
         }

@@ -5,6 +5,7 @@ import java.util.OptionalDouble;
 /**
  * One line of a property table.
  *
+ * @param grade nominal kinematic viscosity that names the oil of this row [m²/s], absent where the table has no such column
  * @param temperature [K]
  * @param density ρ [kg/m³]
  * @param viscosity dynamic viscosity μ [Pa·s]
@@ -14,6 +15,7 @@ import java.util.OptionalDouble;
  *     table has no such column
  */
 public record TableRow(
+        OptionalDouble grade,
         double temperature,
         double density,
         double viscosity,

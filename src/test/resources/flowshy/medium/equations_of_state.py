@@ -1,8 +1,10 @@
-"""Helmholtz equations of state of three gases, to see what the gas law cut after the second virial coefficient loses.
+"""Helmholtz equations of state: of three gases, to see what the gas law cut after the second virial coefficient loses, and of
+three liquids for their tables.
 
 Sulfur hexafluoride: Guder & Wagner 2009, J. Phys. Chem. Ref. Data 38:33. Carbon dioxide: Span & Wagner 1996, 25:1509, without its three
 terms at the critical point, which are below 1e-9 in the gas here. Nitrogen: Span et al. 2000, 29:1361, with the viscosity of
-Lemmon & Jacobsen 2004. Coefficients read in an open property library. Independent of the Java code; prints
+Lemmon & Jacobsen 2004. Fluoroketone C6F12O: McLinden et al. 2015, J. Chem. Eng. Data 60:3646. Hexamethyldisiloxane and
+octamethyltrisiloxane: Thol et al. 2016 and 2017. Coefficients read in an open property library. Independent of the Java code; prints
 gas-pressure-reference.csv.
 """
 from math import exp, log, sqrt
@@ -64,6 +66,59 @@ GASES = {
            (0.0167788306989, 3, 2, 15, 1, 300, 1.13), (2627.67566274, 2, 3, 25, 1, 275, 1.25)]),
 }
 
+LIQUIDS = {
+    "fluoroketone": dict(
+        tc=441.81, rc=1920.0, r=8.3144621, m=0.3160438, ideal=[(29.8, 4.391027817387565)], log=29.8, powers=[],
+        n=[0.05623648, 2.973616, -6.12697, 3.44024, 1.451737, -2.837857, 0.2077767, 2.168307, -2.124648, -1.296704],
+        d=[4, 1, 1, 1, 2, 2, 3, 2, 1, 2], t=[1, 0.25, 0.793, 1.16, 0.75, 1.09, 0.75, 1.3, 2.25, 1.9],
+        l=[0, 0, 0, 0, 0, 0, 0, 1, 2, 2],
+        g=[(-1.010569, 1, 0.88, 0.32, 1.16, 0.12, 1.1), (2.701505, 1, 1.63, 1.32, 0.793, 0.83, 1.04),
+           (0.8167202, 2, 1.3, 1.35, 1.13, 0.19, 1.15), (-1.814579, 2, 2, 1.48, 0.527, 0.95, 0.9),
+           (0.2075389, 3, 1.15, 0.51, 1.19, 0.1, 0.8), (-1.009347, 3, 1.66, 1.3, 0.83, 0.11, 1.2),
+           (-0.04848043, 1, 1.5, 5.15, 0.82, 65, 1.19)],
+        start=5300.0, ps=(1869000.0, [(-8.4411, 1), (2.711, 1.5), (-3.6354, 2.2), (-5.3872, 4.4), (-8.1641, 15)])),
+    "hexamethyldisiloxane": dict(
+        tc=518.7, rc=1653.0, r=8.3144621, m=0.16237752,
+        ideal=[(19.74, 6.940427993), (29.58, 2.699055331), (18.59, 0.038557933), (4.87, 12.14574899)], log=3, powers=[],
+        n=[0.05063651, 8.604724, -9.179684, -1.146325, 0.4878559, -2.434088, -1.621326, 0.6239872, -2.306057, -0.05555096],
+        d=[4, 1, 1, 2, 3, 1, 3, 2, 2, 7], t=[1, 0.346, 0.46, 1.01, 0.59, 2.6, 3.33, 0.75, 2.95, 0.93],
+        l=[0, 0, 0, 0, 0, 2, 2, 1, 2, 1],
+        g=[(9.385015, 1, 1.33, 1.0334, 0.8927, 0.4707, 1.7754), (-2.493508, 1, 1.68, 1.544, 0.5957, 0.32, 0.692),
+           (-3.308032, 3, 1.7, 1.113, 0.559, 0.404, 1.242), (-0.1885803, 3, 3.08, 1.113, 1.056, 0.517, 0.421),
+           (-0.09883865, 1, 5.41, 1.11, 1.3, 0.432, 0.406), (0.111109, 2, 1.4, 7.2, 0.106, 7.2, 0.163),
+           (0.1061928, 3, 1.1, 1.45, 0.181, 1.2, 0.795), (-0.01452454, 1, 5.3, 4.73, 0.525, 35.8, 0.88)],
+        start=4700.0, ps=(1939000.0, [(-4.060293696270762, 0.3795), (4.510185129815067, 0.3925),
+                                      (-4.885232278579032, 5 / 6), (-2.6822903046438245, 7 / 6),
+                                      (-5.299617058057907, 3.5), (-0.6930990905959292, 7)], 518.75)),
+    "octamethyltrisiloxane": dict(
+        tc=565.3609, rc=1134.0, r=8.3144621, m=0.23653146,
+        ideal=[(28.817, 0.0353756335), (46.951, 2.7769872306), (31.054, 8.3132738751)], log=3, powers=[],
+        n=[0.05039724, 1.189992, -2.468723, -0.743856, 0.4434056, -1.371359, -1.529621, 0.4445898, -1.009921, -0.05903694],
+        d=[4, 1, 1, 2, 3, 1, 3, 2, 2, 7], t=[1, 0.188, 1.03, 0.7, 0.464, 2.105, 1.376, 0.8, 1.8, 1.005],
+        l=[0, 0, 0, 0, 0, 2, 2, 1, 2, 1],
+        g=[(3.515188, 1, 0.7, 0.986, 0.928, 0.966, 1.25), (0.08367608, 1, 0.66, 1.715, 2.081, 0.237, 1.438),
+           (1.646856, 3, 1.138, 0.837, 0.282, 0.954, 0.894), (-0.2851917, 2, 1.56, 1.312, 1.496, 0.861, 0.9),
+           (-2.457571, 2, 1.31, 1.191, 0.805, 0.909, 0.899)],
+        start=3450.0, ps=(1410044.755816551, [(2.4897600675883105, 0.382), (-2.7167176816437455, 0.396),
+                                              (-7.436853149350945, 1), (-6.237181720678395, 10 / 3),
+                                              (-1.207450503123382, 14 / 3), (-30.880090938506317, 65 / 3)], 564.09)),
+}
+
+
+def liquid(name, temperature, pressure=101325.0):
+    """Density [kg/m3] and sound speed [m/s] of the liquid."""
+    gas = LIQUIDS[name]
+    _, rho, w = state(gas, temperature, pressure, gas["start"])
+    return rho, w
+
+
+def liquid_saturation(name, temperature):
+    """Vapour pressure [Pa] by the ancillary equation that belongs to the equation of state."""
+    entry = LIQUIDS[name]["ps"]
+    tc = entry[2] if len(entry) > 2 else LIQUIDS[name]["tc"]
+    th = 1 - temperature / tc
+    return entry[0] * E(tc / temperature * sum(n * th ** t for n, t in entry[1]))
+
 
 def residual(gas, tau, delta):
     """alpha_r and its derivatives: delta a_d, delta^2 a_dd, tau a_t, tau^2 a_tt, delta tau a_dt."""
@@ -102,11 +157,11 @@ def ideal_tt(gas, tau):
     return s
 
 
-def state(gas, temperature, pressure):
+def state(gas, temperature, pressure, start=None):
     """Molar density [mol/m3], density [kg/m3] and sound speed [m/s] of the gas."""
     tau = gas["tc"] / temperature
     rt = gas["r"] * temperature
-    rho = pressure / rt
+    rho = start or pressure / rt
     for _ in range(100):
         ad, add, _, _, _ = residual(gas, tau, rho / gas["rc"])
         f = rho * rt * (1 + ad) - pressure
