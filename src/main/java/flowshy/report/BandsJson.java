@@ -71,7 +71,7 @@ public final class BandsJson {
         DeviceFacts facts = answer.facts();
         String why = device.suspension().isEmpty() ? NO_SUSPENSION : FALLS;
         json.text("shape", device.hair().profile().shape());
-        json.text("cover", device.cover().word());
+        json.text("cover", device.cover().kind());
         json.number("length_m", device.hair().profile().length());
         json.number("largest_diameter_m", 2.0 * device.hair().profile().largestRadius());
         json.number("hair_density_kg_m3", device.hair().density());
@@ -100,7 +100,7 @@ public final class BandsJson {
         study.calibration()
                 .ifPresent(calibration -> json.object("calibration", () -> {
                     json.number("frequency_hz", calibration.frequency());
-                    json.text("cover", calibration.cover().word());
+                    json.text("cover", calibration.cover().kind());
                     Calibration.Figures figures = calibration.figures(device);
                     json.number(
                             figures.angle() ? "sensitivity_rad_per_m_s2" : "torque_n_m_per_m_s2",

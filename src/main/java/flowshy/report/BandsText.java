@@ -116,7 +116,7 @@ public final class BandsText {
         DeviceFacts facts = answer.facts();
         Hair hair = answer.device().hair();
         page.heading("Device: " + hair.profile().shape() + ", cover "
-                + answer.device().cover().word());
+                + answer.device().cover().kind());
         page.row(
                 "hair",
                 "length " + Figures.of(1e6 * hair.profile().length(), 4) + " um, largest diameter "
@@ -195,7 +195,7 @@ public final class BandsText {
                 : "in use " + Figures.of(figures.percent(), 3) + " % (" + Figures.of(figures.level(), 3) + " dB) off";
         return Figures.of(figures.sensitivity(), 4) + (figures.angle() ? " rad" : " N.m") + " per m/s2 at "
                 + Figures.of(calibration.frequency(), 4) + " Hz, cover "
-                + calibration.cover().word() + "; " + inUse;
+                + calibration.cover().kind() + "; " + inUse;
     }
 
     private static String swing(DeviceFacts.Swing swing) {

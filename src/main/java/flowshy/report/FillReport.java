@@ -7,7 +7,6 @@ import flowshy.verdict.fill.FillQuestion;
 import flowshy.verdict.fill.FillRow;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 import org.hipparchus.util.FastMath;
 
 /** Every fill, bare and sealed, as text, JSON and CSV. */
@@ -91,7 +90,7 @@ public final class FillReport {
                         .filter(row -> !row.excluded().isEmpty() && row.medium().isPresent())
                         .toList());
         List<FillRow> refused = rows.stream()
-                .filter(row -> row.medium().isEmpty() && row.cover() == flowshy.stream.Cover.OPEN)
+                .filter(row -> row.medium().isEmpty() && !row.cover().closed())
                 .toList();
         if (!refused.isEmpty()) {
             page.heading("Refused at this state");
@@ -114,9 +113,7 @@ public final class FillReport {
         page.heading(head);
         List<String> names = new ArrayList<>();
         for (FillRow row : rows) {
-            names.add(row.fill()
-                    + (row.cover() == flowshy.stream.Cover.SEALED ? ", sealed" : ", bare")
-                    + (row.fromMemory() ? " m" : ""));
+            names.add(row.fill() + (row.cover().closed() ? ", sealed" : ", bare") + (row.fromMemory() ? " m" : ""));
         }
         List<Column<FillRow>> printed = columns().stream()
                 .filter(column -> !column.name().startsWith("at_")
@@ -147,7 +144,7 @@ public final class FillReport {
             json.number("reference_hz", question.reference());
             json.array("fills", rows, row -> {
                 json.text("fill", row.fill());
-                json.text("cover", row.cover().word());
+                json.text("cover", row.cover().kind());
                 columns()
                         .forEach(
                                 column -> json.cell(column.name(), column.cell().apply(row)));
@@ -169,8 +166,7 @@ public final class FillReport {
         head.add("excluded");
         List<List<String>> lines = new ArrayList<>();
         for (FillRow row : rows) {
-            List<String> line =
-                    new ArrayList<>(List.of(row.fill(), row.cover().word().toLowerCase(Locale.ROOT)));
+            List<String> line = new ArrayList<>(List.of(row.fill(), row.cover().kind()));
             columns().forEach(column -> {
                 Cell cell = column.cell().apply(row);
                 line.add(cell.value().isPresent() ? Figures.full(cell.value().getAsDouble()) : "");

@@ -1,6 +1,6 @@
 package flowshy.response;
 
-import flowshy.stream.Cover;
+import flowshy.stream.cover.Cover;
 import org.hipparchus.util.FastMath;
 
 /**
@@ -24,9 +24,13 @@ public record Calibration(double frequency, Cover cover) {
      * @return in calibration
      */
     public Device calibrated(Device device) {
-        boolean open = cover == Cover.OPEN;
+        boolean inside = cover.closed();
         return new Device(
-                device.hair(), device.suspension(), device.outside(), cover, open ? device.outside() : device.around());
+                device.hair(),
+                device.suspension(),
+                device.outside(),
+                cover,
+                inside ? device.around() : device.outside());
     }
 
     /**

@@ -2,7 +2,7 @@ package flowshy.response;
 
 import flowshy.hair.Hair;
 import flowshy.medium.Medium;
-import flowshy.stream.Cover;
+import flowshy.stream.cover.Cover;
 import java.util.Optional;
 
 /**

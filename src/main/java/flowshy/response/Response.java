@@ -28,7 +28,7 @@ public final class Response {
      */
     public Response(Device device) {
         this.device = device;
-        this.model = TorqueModel.of(device.hair(), device.around(), device.pivotDepth());
+        this.model = TorqueModel.of(device.hair(), device.around(), device.pivotDepth(), device.cover());
         this.oscillator = device.suspension()
                 .map(suspension -> new Oscillator(device.hair(), suspension, Optional.of(device.around())));
     }
@@ -69,9 +69,10 @@ public final class Response {
      */
     public double rejection(double frequency) {
         Torques torques = torques(frequency);
+        Complex factor = device.cover().factor(torques.omega(), device.around());
         return 20.0
-                * FastMath.log10(torques.motion(device.cover()).norm()
-                        / torques.flow(device.cover()).norm());
+                * FastMath.log10(
+                        torques.motion(factor).norm() / torques.flow(factor).norm());
     }
 
     /**
@@ -83,8 +84,9 @@ public final class Response {
     public ResponsePoint at(double frequency) {
         double omega = 2.0 * FastMath.PI * frequency;
         Torques torques = model.at(omega);
-        Complex motionTorque = torques.motion(device.cover());
-        Complex flowTorque = torques.flow(device.cover());
+        Complex factor = device.cover().factor(omega, device.around());
+        Complex motionTorque = torques.motion(factor);
+        Complex flowTorque = torques.flow(factor);
         Optional<Complex> denominator =
                 oscillator.filter(Oscillator::stands).map(swing -> swing.denominator(omega, torques.fluidInertia()));
         OptionalDouble thermal = thermalNoise(omega, torques, motionTorque);

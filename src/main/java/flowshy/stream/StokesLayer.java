@@ -12,7 +12,7 @@ import org.hipparchus.util.SinCos;
  *
  * @param kinematicViscosity ν [m²/s]
  */
-public record StokesLayer(double kinematicViscosity) {
+public record StokesLayer(double kinematicViscosity) implements WallShare {
     /** Above this height in units of δ the rest, e^{-40}, is a hundredth of a rounding error. */
     private static final double FREE = 40.0;
 
@@ -33,13 +33,7 @@ public record StokesLayer(double kinematicViscosity) {
         return FastMath.sqrt(2.0 * kinematicViscosity / omega);
     }
 
-    /**
-     * Velocity at a height over that of the free stream.
-     *
-     * @param height z [m], zero or more
-     * @param omega angular frequency [rad/s]
-     * @return s(z) [-]
-     */
+    @Override
     public Complex share(double height, double omega) {
         return share(height / thickness(omega));
     }

@@ -5,7 +5,7 @@ import flowshy.medium.Medium;
 import flowshy.response.Calibration;
 import flowshy.response.Device;
 import flowshy.response.Suspension;
-import flowshy.stream.Cover;
+import flowshy.stream.cover.Cover;
 import flowshy.study.keys.Field;
 import flowshy.study.keys.Form;
 import flowshy.study.keys.KeyRow;
@@ -42,7 +42,7 @@ final class StudyBuilder {
         Optional<Hair> hair = new HairBuilder(form, problems, files).build();
         Optional<Medium> outside = media.build("medium");
         Cover cover = cover("cover.kind");
-        Optional<Medium> around = cover == Cover.SEALED && form.has("cover.fill") ? media.build("cover.fill") : outside;
+        Optional<Medium> around = cover.closed() && form.has("cover.fill") ? media.build("cover.fill") : outside;
         Optional<Suspension> suspension = new SuspensionBuilder(form, problems, media).build(hair);
         Optional<Band> band = band();
         problems.throwIfAny();
@@ -62,8 +62,7 @@ final class StudyBuilder {
     }
 
     private Cover cover(String path) {
-        String word = form.word(path).orElse(Cover.OPEN.word());
-        return word.equals(Cover.SEALED.word()) ? Cover.SEALED : Cover.OPEN;
+        return form.word(path).orElse("open").equals("sealed") ? Cover.SEALED : Cover.OPEN;
     }
 
     private Optional<Band> band() {

@@ -2,8 +2,11 @@ package flowshy.torque;
 
 import flowshy.hair.Profile;
 import flowshy.hair.Strip;
+import flowshy.stream.WallShare;
+import flowshy.stream.cover.ChannelLayer;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.TreeSet;
 import org.hipparchus.util.FastMath;
 
 /**
@@ -64,26 +67,33 @@ final class StripMesh {
      * Strips that resolve profile and layer.
      *
      * @param delta Stokes layer [m]
+     * @param share the flow over the wall; under a roof there is a second layer
      * @return from wall to tip
      */
-    List<Strip> strips(double delta) {
-        double free = LAYER_SPLITS[LAYER_SPLITS.length - 1] * delta;
+    List<Strip> strips(double delta, WallShare share) {
+        double thickness = LAYER_SPLITS[LAYER_SPLITS.length - 1] * delta;
+        double roof = share instanceof ChannelLayer channel ? channel.gap() : Double.POSITIVE_INFINITY;
         List<Strip> strips = new ArrayList<>(2 * all.size());
         for (Piece piece : pieces) {
-            if (piece.to() - piece.from() <= piece.reach() * delta || piece.from() >= free) {
+            if (piece.to() - piece.from() <= piece.reach() * delta
+                    || (piece.from() >= thickness && piece.to() <= roof - thickness)) {
                 strips.addAll(piece.strips());
             } else {
-                strips.addAll(Strip.along(profile, cuts(piece, delta), piece.cutPoints()));
+                strips.addAll(Strip.along(profile, cuts(piece, delta, roof), piece.cutPoints()));
             }
         }
         return strips;
     }
 
-    private static List<Double> cuts(Piece piece, double delta) {
+    private static List<Double> cuts(Piece piece, double delta, double roof) {
+        TreeSet<Double> wanted = new TreeSet<>();
+        for (double split : LAYER_SPLITS) {
+            wanted.add(split * delta);
+            wanted.add(roof - split * delta);
+        }
         List<Double> cuts = new ArrayList<>(List.of(piece.from()));
         double below = piece.from();
-        for (double split : LAYER_SPLITS) {
-            double z = split * delta;
+        for (double z : wanted) {
             if (z - below > SLIVER * delta && piece.to() - z > SLIVER * delta) {
                 cuts.add(z);
                 below = z;

@@ -5,6 +5,8 @@ import flowshy.hair.Hair;
 import flowshy.hair.Strip;
 import flowshy.medium.Medium;
 import flowshy.stream.StokesLayer;
+import flowshy.stream.WallShare;
+import flowshy.stream.cover.Cover;
 import org.hipparchus.complex.Complex;
 import org.hipparchus.util.FastMath;
 
@@ -16,11 +18,12 @@ public final class StripTorques implements TorqueModel {
     private final Hair hair;
     private final Medium medium;
     private final StokesLayer layer;
+    private final WallShare profile;
     private final double pivotDepth;
     private final StripMesh mesh;
 
     StripTorques(Hair hair, Medium medium, double pivotDepth) {
-        this(hair, medium, pivotDepth, 1);
+        this(hair, medium, pivotDepth, Cover.OPEN, 1);
     }
 
     /**
@@ -29,12 +32,14 @@ public final class StripTorques implements TorqueModel {
      * @param hair the hair
      * @param medium what it stands in
      * @param pivotDepth h [m]
+     * @param cover shapes the flow over the wall
      * @param refinement factor on the number of points, 1 in use
      */
-    StripTorques(Hair hair, Medium medium, double pivotDepth, int refinement) {
+    StripTorques(Hair hair, Medium medium, double pivotDepth, Cover cover, int refinement) {
         this.hair = hair;
         this.medium = medium;
         this.layer = new StokesLayer(medium.kinematicViscosity());
+        this.profile = cover.profile(medium);
         this.pivotDepth = pivotDepth;
         this.mesh = new StripMesh(hair.profile(), refinement);
     }
@@ -53,14 +58,14 @@ public final class StripTorques implements TorqueModel {
         double turningImaginary = 0.0;
         double radius = Double.NaN;
         Complex gamma = Complex.ZERO;
-        for (Strip strip : mesh.strips(delta)) {
+        for (Strip strip : mesh.strips(delta, profile)) {
             if (strip.radius() != radius) { // a straight part needs its law once
                 radius = strip.radius();
                 gamma = new OscillatingCylinder(radius, medium).hydrodynamicFunction(omega);
             }
             double arm = strip.height() + pivotDepth;
             double moment = strip.weight() * FastMath.PI * radius * radius * arm;
-            Complex share = StokesLayer.share(strip.height() / delta);
+            Complex share = profile.share(strip.height(), omega);
             // Γ s in parts: the library's product guards against infinities and takes longer than all the rest
             double sheared = gamma.getReal() * share.getReal() - gamma.getImaginary() * share.getImaginary();
             double shearedImaginary = gamma.getReal() * share.getImaginary() + gamma.getImaginary() * share.getReal();

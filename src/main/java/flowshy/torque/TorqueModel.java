@@ -3,6 +3,8 @@ package flowshy.torque;
 import flowshy.hair.Cylinder;
 import flowshy.hair.Hair;
 import flowshy.medium.Medium;
+import flowshy.stream.StokesLayer;
+import flowshy.stream.cover.Cover;
 import org.hipparchus.complex.Complex;
 
 /** Torques on one hair in one medium, at any frequency. */
@@ -32,9 +34,22 @@ public interface TorqueModel {
      * @return the model
      */
     static TorqueModel of(Hair hair, Medium medium, double pivotDepth) {
-        if (hair.profile() instanceof Cylinder cylinder) {
+        return of(hair, medium, pivotDepth, Cover.OPEN);
+    }
+
+    /**
+     * The model for a hair under a cover, which shapes the flow over the wall.
+     *
+     * @param hair the hair
+     * @param medium what it stands in
+     * @param pivotDepth h [m]
+     * @param cover what stands over it; its factor φ is left to the caller
+     * @return the model; flow and open are those under the cover at φ = 1
+     */
+    static TorqueModel of(Hair hair, Medium medium, double pivotDepth, Cover cover) {
+        if (hair.profile() instanceof Cylinder cylinder && cover.profile(medium) instanceof StokesLayer) {
             return new CylinderTorques(cylinder, hair.density(), medium, pivotDepth);
         }
-        return new StripTorques(hair, medium, pivotDepth);
+        return new StripTorques(hair, medium, pivotDepth, cover, 1);
     }
 }

@@ -1,6 +1,5 @@
 package flowshy.torque;
 
-import flowshy.stream.Cover;
 import org.hipparchus.complex.Complex;
 
 /**
@@ -17,22 +16,24 @@ import org.hipparchus.complex.Complex;
  */
 public record Torques(double omega, Complex flow, Complex open, double carried, Complex fluidInertia) {
     /**
-     * Torque of a shaking base under a cover.
+     * Torque of a shaking base under a cover that lets a share of the flow in.
      *
-     * @param cover open or sealed
-     * @return torque per unit acceleration of the base [N·m per m/s²]
+     * @param factor φ, free stream under the cover over that outside: 1 open, 0 sealed [-]
+     * @return carried + φ (open − carried), torque per unit acceleration of the base [N·m per m/s²]
      */
-    public Complex motion(Cover cover) {
-        return cover == Cover.OPEN ? open : new Complex(carried);
+    public Complex motion(Complex factor) {
+        return factor.equals(Complex.ONE)
+                ? open
+                : open.subtract(carried).multiply(factor).add(carried);
     }
 
     /**
-     * Torque of a moving fluid outside a cover.
+     * Torque of a moving fluid outside such a cover.
      *
-     * @param cover open or sealed
-     * @return torque per unit acceleration of the fluid outside [N·m per m/s²]; zero where no flow enters
+     * @param factor φ [-]
+     * @return φ times the flow's torque, per unit acceleration of the fluid outside [N·m per m/s²]
      */
-    public Complex flow(Cover cover) {
-        return cover == Cover.OPEN ? flow : Complex.ZERO;
+    public Complex flow(Complex factor) {
+        return flow.multiply(factor);
     }
 }

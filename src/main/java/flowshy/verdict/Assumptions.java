@@ -10,7 +10,6 @@ import flowshy.medium.PropertySource;
 import flowshy.medium.PropertySource.Reading;
 import flowshy.response.Device;
 import flowshy.response.Suspension;
-import flowshy.stream.Cover;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
@@ -31,11 +30,12 @@ final class Assumptions {
         caveats.addAll(device.around().caveats());
         fromMemory(device, caveats);
         caveats.addAll(new OscillatingCylinder(device.hair().profile().smallestRadius(), device.around()).caveats());
-        if (device.cover() == Cover.OPEN) {
+        if (!device.cover().closed()) {
             finiteLength(device, facts, caveats);
             excursion(device, band, facts, caveats);
         }
         density(device, caveats);
+        caveats.addAll(device.cover().assumptions(device.around()));
         suspension(device, facts, caveats);
         bending(device, facts, caveats);
         return new ArrayList<>(caveats);
@@ -103,7 +103,7 @@ final class Assumptions {
     private static void density(Device device, Set<Caveat> caveats) {
         double hair = device.hair().density();
         double contrast = (hair - device.around().density()) / hair;
-        if (device.cover() == Cover.SEALED && FastMath.abs(contrast) < NEARLY_EQUAL_DENSITY) {
+        if (device.cover().closed() && FastMath.abs(contrast) < NEARLY_EQUAL_DENSITY) {
             caveats.add(new Caveat(
                     Subject.MOTION,
                     Weight.WEAK,
@@ -111,14 +111,6 @@ final class Assumptions {
                             "Hair (%.5g kg/m3) and fill (%.5g kg/m3) are nearly of one density: of the hair's inertial torque %.2g %%"
                                     + " is left, and it changes with temperature.",
                             hair, device.around().density(), 100.0 * contrast)));
-        }
-        if (device.cover() == Cover.SEALED) {
-            caveats.add(
-                    new Caveat(
-                            Subject.RESONANCE,
-                            Weight.WEAK,
-                            "Sealed cover: the cavity is full, closed and rigid; its walls count as far from the hair, so damping and added"
-                                    + " mass of the hair's own turning are those of open fluid. Sound through the lid is not modelled."));
         }
     }
 

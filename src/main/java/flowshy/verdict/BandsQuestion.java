@@ -5,7 +5,6 @@ import flowshy.medium.PropertySource;
 import flowshy.response.Device;
 import flowshy.response.Response;
 import flowshy.response.ResponsePoint;
-import flowshy.stream.Cover;
 import flowshy.verdict.BandsAnswer.Extreme;
 import flowshy.verdict.RejectionCurve.Sample;
 import java.util.ArrayList;
@@ -52,7 +51,7 @@ public record BandsQuestion(Device device, Band band, Acceptance acceptance) {
         if (readsNothing()) {
             return whole(facts, Reads.NOTHING, Double.NaN, points, caveats);
         }
-        if (device.cover() == Cover.SEALED) {
+        if (device.cover().closed()) {
             return whole(facts, ended ? Reads.UNDECIDED : Reads.MOTION, Double.POSITIVE_INFINITY, points, caveats);
         }
         RejectionCurve curve = new RejectionCurve(response::rejection, band);
@@ -89,7 +88,7 @@ public record BandsQuestion(Device device, Band band, Acceptance acceptance) {
                 .flatMapToDouble(OptionalDouble::stream)
                 .max();
         double tolerance = fluid * FastMath.max(EQUAL_DENSITY, stated.orElse(0.0));
-        return device.cover() == Cover.SEALED && FastMath.abs(device.hair().density() - fluid) <= tolerance;
+        return device.cover().closed() && FastMath.abs(device.hair().density() - fluid) <= tolerance;
     }
 
     private BandsAnswer whole(

@@ -3,7 +3,6 @@ package flowshy.verdict;
 import static flowshy.math.Figures.say;
 
 import flowshy.response.Device;
-import flowshy.stream.Cover;
 import flowshy.verdict.BandsAnswer.Extreme;
 import java.util.ArrayList;
 import java.util.List;
@@ -31,10 +30,10 @@ final class Judgement {
                         "error",
                         "m/s2",
                         error,
-                        device.cover() == Cover.SEALED ? OptionalDouble.of(0.0) : OptionalDouble.empty(),
+                        device.cover().closed() ? OptionalDouble.of(0.0) : OptionalDouble.empty(),
                         OptionalDouble.empty(),
-                        device.cover() == Cover.SEALED ? Decision.MEETS : Decision.NOT_ASKED,
-                        device.cover() == Cover.SEALED ? "no flow enters a sealed cover" : NO_SURROUNDINGS)));
+                        device.cover().closed() ? Decision.MEETS : Decision.NOT_ASKED,
+                        device.cover().closed() ? "no flow enters a sealed cover" : NO_SURROUNDINGS)));
         Decision decision = Verdict.worst(limits);
         return new Verdict(decision, limits, sentence(decision, bands, least, acceptance, first));
     }

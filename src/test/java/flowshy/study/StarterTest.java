@@ -3,7 +3,7 @@ package flowshy.study;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
-import flowshy.stream.Cover;
+import flowshy.stream.cover.Cover;
 import flowshy.study.text.StudyException;
 import java.io.IOException;
 import java.nio.file.Files;

@@ -24,7 +24,7 @@ import flowshy.response.SuspensionStatement.Resonance;
 import flowshy.response.SuspensionStatement.RingDown;
 import flowshy.response.SuspensionStatement.Spring;
 import flowshy.response.SuspensionStatement.Stiffness;
-import flowshy.stream.Cover;
+import flowshy.stream.cover.Cover;
 import flowshy.study.keys.Form;
 import flowshy.study.text.Problem;
 import flowshy.study.text.StudyException;

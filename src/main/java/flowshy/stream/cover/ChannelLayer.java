@@ -1,6 +1,7 @@
 package flowshy.stream.cover;
 
 import flowshy.stream.StokesLayer;
+import flowshy.stream.WallShare;
 import org.hipparchus.complex.Complex;
 import org.hipparchus.util.FastMath;
 
@@ -14,7 +15,7 @@ import org.hipparchus.util.FastMath;
  * @param gap H [m]
  * @param kinematicViscosity ν [m²/s]
  */
-public record ChannelLayer(double gap, double kinematicViscosity) {
+public record ChannelLayer(double gap, double kinematicViscosity) implements WallShare {
     /** @throws IllegalArgumentException if a parameter is not positive */
     public ChannelLayer {
         if (!(gap > 0.0) || !(kinematicViscosity > 0.0)) {
@@ -23,13 +24,7 @@ public record ChannelLayer(double gap, double kinematicViscosity) {
         }
     }
 
-    /**
-     * Velocity at a height over that of the free stream.
-     *
-     * @param height z above the lower wall, 0 ≤ z ≤ H [m]
-     * @param omega angular frequency [rad/s]
-     * @return s(z) [-]
-     */
+    @Override
     public Complex share(double height, double omega) {
         double delta = FastMath.sqrt(2.0 * kinematicViscosity / omega);
         double y = gap / delta;

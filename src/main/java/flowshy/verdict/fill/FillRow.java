@@ -1,7 +1,7 @@
 package flowshy.verdict.fill;
 
 import flowshy.medium.Medium;
-import flowshy.stream.Cover;
+import flowshy.stream.cover.Cover;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
