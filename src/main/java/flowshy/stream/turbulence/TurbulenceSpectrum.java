@@ -1,5 +1,6 @@
 package flowshy.stream.turbulence;
 
+import flowshy.math.Positive;
 import flowshy.math.Range;
 import org.hipparchus.util.FastMath;
 

@@ -1,5 +1,6 @@
 package flowshy.stream.turbulence;
 
+import flowshy.math.Positive;
 import org.hipparchus.special.Gamma;
 import org.hipparchus.util.FastMath;
 

@@ -1,5 +1,6 @@
 package flowshy.stream.wall;
 
+import flowshy.math.Positive;
 import flowshy.math.Range;
 import org.hipparchus.util.FastMath;
 

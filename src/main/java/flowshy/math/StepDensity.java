@@ -1,0 +1,89 @@
+package flowshy.math;
+
+import java.util.List;
+import org.hipparchus.util.FastMath;
+
+/**
+ * A one-sided density given by the mean square in each of some bands; inside a band every part of equal width in ln f holds equal
+ * mean square, so the density falls as 1/f (pink). Outside the bands it is zero.
+ *
+ * @param bands rising, none overlapping another
+ */
+public record StepDensity(List<Band> bands) {
+    /**
+     * One band.
+     *
+     * @param low lower edge [Hz]
+     * @param high upper edge [Hz]
+     * @param meanSquare what the band holds, in the square of the unit of the signal
+     */
+    public record Band(double low, double high, double meanSquare) {
+        /** @throws IllegalArgumentException if the edges do not rise from above zero or the mean square is negative */
+        public Band {
+            if (!(low > 0.0) || !(high > low) || Double.isInfinite(high)) {
+                throw new IllegalArgumentException(
+                        "band from " + low + " to " + high + " Hz does not rise from above zero");
+            }
+            if (!(meanSquare >= 0.0) || Double.isInfinite(meanSquare)) {
+                throw new IllegalArgumentException("mean square must be zero or more and finite, was " + meanSquare);
+            }
+        }
+    }
+
+    /** @throws IllegalArgumentException if there is no band or two overlap */
+    public StepDensity {
+        bands = List.copyOf(bands);
+        if (bands.isEmpty()) {
+            throw new IllegalArgumentException("a density needs one band or more");
+        }
+        for (int i = 1; i < bands.size(); i++) {
+            // edges computed from nominal names meet to rounding only
+            if (bands.get(i).low() < bands.get(i - 1).high() * (1.0 - 1e-9)) {
+                throw new IllegalArgumentException("band " + (i + 1) + " begins below the end of the one before");
+            }
+        }
+    }
+
+    /**
+     * Density at a frequency.
+     *
+     * @param frequency f [Hz]
+     * @return square of the unit of the signal per Hz; at a common edge that of the upper band
+     */
+    public double at(double frequency) {
+        for (int i = bands.size() - 1; i >= 0; i--) {
+            Band band = bands.get(i);
+            if (frequency >= band.low()) {
+                boolean inside = frequency < band.high() || (i == bands.size() - 1 && frequency == band.high());
+                return inside ? band.meanSquare() / (frequency * FastMath.log(band.high() / band.low())) : 0.0;
+            }
+        }
+        return 0.0;
+    }
+
+    /**
+     * Mean square of all bands.
+     *
+     * @return square of the unit of the signal
+     */
+    public double meanSquare() {
+        double sum = 0.0;
+        for (Band band : bands) {
+            sum += band.meanSquare();
+        }
+        return sum;
+    }
+
+    /**
+     * Frequencies at which the density may step.
+     *
+     * @return rising [Hz], two or more
+     */
+    public List<Double> edges() {
+        return bands.stream()
+                .flatMap(band -> List.of(band.low(), band.high()).stream())
+                .distinct()
+                .sorted()
+                .toList();
+    }
+}
