@@ -43,7 +43,8 @@ final class StudyBuilder {
         Optional<Medium> outside = media.build("medium");
         Cover cover = cover("cover.kind");
         Optional<Medium> around = cover.closed() && form.has("cover.fill") ? media.build("cover.fill") : outside;
-        Optional<Suspension> suspension = new SuspensionBuilder(form, problems, media).build(hair);
+        SuspensionBuilder suspensions = new SuspensionBuilder(form, problems, media, files);
+        Optional<Suspension> suspension = suspensions.build(hair);
         Optional<Band> band = band();
         problems.throwIfAny();
         Device device = new Device(hair.orElseThrow(), suspension, outside.orElseThrow(), cover, around.orElseThrow());
@@ -57,7 +58,7 @@ final class StudyBuilder {
                         form.siIfAny("accept.error")),
                 calibration(),
                 document(),
-                takenAs(),
+                takenAs(suspensions.taken()),
                 understood());
     }
 
@@ -97,8 +98,9 @@ final class StudyBuilder {
         return entries;
     }
 
-    private List<Study.TakenAs> takenAs() {
+    private List<Study.TakenAs> takenAs(List<Form.Taken> fitted) {
         List<Form.Taken> all = new ArrayList<>(form.taken());
+        all.addAll(fitted);
         all.addAll(media.taken());
         List<String> order = Keys.rows().stream().map(KeyRow::path).toList();
         return all.stream()

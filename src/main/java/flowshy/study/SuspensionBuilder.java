@@ -3,6 +3,7 @@ package flowshy.study;
 import flowshy.hair.Hair;
 import flowshy.medium.Medium;
 import flowshy.response.Attitude;
+import flowshy.response.FreeSwing;
 import flowshy.response.Suspension;
 import flowshy.response.SuspensionException;
 import flowshy.response.SuspensionSolver;
@@ -16,8 +17,11 @@ import flowshy.response.SuspensionStatement.Spring;
 import flowshy.response.SuspensionStatement.Stiffness;
 import flowshy.study.keys.Form;
 import flowshy.study.text.Problems;
+import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 
 /** From what is stated of the suspension to stiffness and damping; solved once, here. */
 final class SuspensionBuilder {
@@ -26,11 +30,19 @@ final class SuspensionBuilder {
     private final Form form;
     private final Problems problems;
     private final MediumBuilder media;
+    private final FilesRead files;
+    private final List<Form.Taken> taken = new ArrayList<>();
 
-    SuspensionBuilder(Form form, Problems problems, MediumBuilder media) {
+    SuspensionBuilder(Form form, Problems problems, MediumBuilder media, FilesRead files) {
+        this.files = files;
         this.form = form;
         this.problems = problems;
         this.media = media;
+    }
+
+    /** What was read off a record in place of written keys. */
+    List<Form.Taken> taken() {
+        return List.copyOf(taken);
     }
 
     /** The suspension; empty if none is stated or it has a problem. */
@@ -39,7 +51,11 @@ final class SuspensionBuilder {
             return Optional.empty();
         }
         Optional<Stiffness> stiffness = stiffness();
-        Damping damping = damping();
+        Optional<Damping> stated = damping();
+        if (stated.isEmpty()) {
+            return Optional.empty();
+        }
+        Damping damping = stated.get();
         boolean swing = damping instanceof RingDown ring && ring.frequency().isPresent();
         if (stiffness.isEmpty() && !swing) {
             problems.add(
@@ -81,17 +97,28 @@ final class SuspensionBuilder {
                 : Optional.empty();
     }
 
-    private Damping damping() {
+    /** How the damping is stated; empty if it was to be read off a record and could not. */
+    private Optional<Damping> damping() {
         if (form.has("suspension.quality")) {
-            return new Quality(form.si("suspension.quality.value"), in("quality"));
+            return Optional.of(new Quality(form.si("suspension.quality.value"), in("quality")));
+        }
+        if (form.has("suspension.ring-down.file")) {
+            return fitted();
         }
         if (form.has("suspension.ring-down")) {
-            return new RingDown(
+            return Optional.of(new RingDown(
                     form.siIfAny("suspension.ring-down.frequency"),
                     form.si("suspension.ring-down.decay-time"),
-                    in("ring-down"));
+                    in("ring-down")));
         }
-        return new Dashpot(form.si("suspension.damping.value"), in("damping"));
+        return Optional.of(new Dashpot(form.si("suspension.damping.value"), in("damping")));
+    }
+
+    private Optional<Damping> fitted() {
+        RingDownReader reader = new RingDownReader(form, problems, files);
+        Optional<FreeSwing> swing = reader.read();
+        swing.ifPresent(s -> taken.addAll(reader.taken(s)));
+        return swing.map(s -> new RingDown(OptionalDouble.of(s.frequency()), s.decayTime(), in("ring-down")));
     }
 
     /** What surrounded the hair, empty for vacuum. */

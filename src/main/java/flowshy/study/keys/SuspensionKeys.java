@@ -74,7 +74,7 @@ final class SuspensionKeys {
         return Group.of(
                 "ring-down",
                 List.of(
-                        Key.later("file", "record of a free swing", "read decay-time and frequency off the record"),
+                        Key.optional("file", Text.FILE, "record with columns time and signal, units in its header"),
                         Key.optional(
                                 "decay-time",
                                 Measure.of(Dimension.TIME, "1 ns", "1e6 s"),
@@ -82,7 +82,7 @@ final class SuspensionKeys {
                         Key.optional("frequency", FREQUENCY, "frequency of the decaying swing"),
                         in(),
                         cover()),
-                Rule.exactlyOne("decay-time frequency"));
+                Rule.exactlyOne("file", "decay-time frequency"));
     }
 
     private static Key in() {

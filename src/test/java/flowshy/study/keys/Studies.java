@@ -47,7 +47,7 @@ final class Studies {
             hair: {shape: profile, file: profile.csv, density: 2.33 g/cm3}
             suspension:
               stiffness: 3 nN.m/rad
-              damping: {value: 1e-12 N.m.s/rad, in: {name: helium, second: argon, share: 1 %}}
+              ring-down: {file: swing.csv, in: {name: helium, second: argon, share: 1 %}}
             medium: nitrogen
             """, """
             hair: {length: 610 um, diameter: 77 um, density: 1.3 g/cm3}
