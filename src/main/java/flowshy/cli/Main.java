@@ -1,6 +1,8 @@
 package flowshy.cli;
 
 import flowshy.report.Version;
+import java.io.FileDescriptor;
+import java.io.FileOutputStream;
 import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
 import picocli.CommandLine;
@@ -52,12 +54,17 @@ public final class Main implements Runnable {
      */
     public static CommandLine commandLine() {
         CommandLine line = new CommandLine(new Main());
-        line.setOut(new PrintWriter(System.out, true, StandardCharsets.UTF_8));
-        line.setErr(new PrintWriter(System.err, true, StandardCharsets.UTF_8));
+        line.setOut(writer(FileDescriptor.out));
+        line.setErr(writer(FileDescriptor.err));
         line.setCaseInsensitiveEnumValuesAllowed(true);
         line.setExecutionExceptionHandler(Failures::handle);
         line.setParameterExceptionHandler(Failures::usage);
         return line;
+    }
+
+    /** UTF-8 whatever the machine's own encoding, so that one answer is the same bytes everywhere. */
+    private static PrintWriter writer(FileDescriptor descriptor) {
+        return new PrintWriter(new FileOutputStream(descriptor), true, StandardCharsets.UTF_8);
     }
 
     @Override

@@ -3,6 +3,7 @@ package flowshy.response;
 import flowshy.hair.Hair;
 import flowshy.hair.Moments;
 import flowshy.medium.Medium;
+import flowshy.stream.cover.Cover;
 import flowshy.torque.TorqueModel;
 import java.util.Optional;
 import org.hipparchus.analysis.solvers.BracketingNthOrderBrentSolver;
@@ -38,8 +39,20 @@ public final class Oscillator {
      * @param medium what surrounds it, empty for vacuum
      */
     public Oscillator(Hair hair, Suspension suspension, Optional<Medium> medium) {
+        this(hair, suspension, medium, Cover.OPEN);
+    }
+
+    /**
+     * The oscillator under a cover, whose wall may confine the fluid that the turning moves.
+     *
+     * @param hair the hair
+     * @param suspension what it stands on
+     * @param medium what surrounds it, empty for vacuum
+     * @param cover what stands over it
+     */
+    public Oscillator(Hair hair, Suspension suspension, Optional<Medium> medium, Cover cover) {
         this.suspension = suspension;
-        this.fluid = medium.map(around -> TorqueModel.of(hair, around, suspension.pivotDepth()));
+        this.fluid = medium.map(around -> TorqueModel.of(hair, around, suspension.pivotDepth(), cover));
         Moments moments = Moments.of(hair.profile(), suspension.pivotDepth());
         this.inertia = hair.density() * moments.second() + suspension.plateInertia();
         this.weightMoment =

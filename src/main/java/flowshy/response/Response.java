@@ -30,7 +30,8 @@ public final class Response {
         this.device = device;
         this.model = TorqueModel.of(device.hair(), device.around(), device.pivotDepth(), device.cover());
         this.oscillator = device.suspension()
-                .map(suspension -> new Oscillator(device.hair(), suspension, Optional.of(device.around())));
+                .map(suspension ->
+                        new Oscillator(device.hair(), suspension, Optional.of(device.around()), device.cover()));
     }
 
     /**

@@ -4,6 +4,7 @@ import flowshy.cylinder.OscillatingCylinder;
 import flowshy.hair.Cylinder;
 import flowshy.medium.Medium;
 import flowshy.stream.StokesLayer;
+import java.util.OptionalDouble;
 import org.hipparchus.complex.Complex;
 import org.hipparchus.util.FastMath;
 
@@ -22,6 +23,7 @@ public final class CylinderTorques implements TorqueModel {
 
     private final OscillatingCylinder law;
     private final StokesLayer layer;
+    private final Confinement confinement;
     private final double length;
     private final double pivotDepth;
     private final double hairWeight;
@@ -30,6 +32,11 @@ public final class CylinderTorques implements TorqueModel {
     private final double leverSquared;
 
     CylinderTorques(Cylinder cylinder, double hairDensity, Medium medium, double pivotDepth) {
+        this(cylinder, hairDensity, medium, pivotDepth, new Confinement(OptionalDouble.empty(), medium));
+    }
+
+    CylinderTorques(Cylinder cylinder, double hairDensity, Medium medium, double pivotDepth, Confinement confinement) {
+        this.confinement = confinement;
         this.law = new OscillatingCylinder(cylinder.radius(), medium);
         this.layer = new StokesLayer(medium.kinematicViscosity());
         this.length = cylinder.length();
@@ -51,12 +58,12 @@ public final class CylinderTorques implements TorqueModel {
                 sheared.add(lever).multiply(fluidWeight),
                 sheared.multiply(-fluidWeight).subtract(hairWeight * lever),
                 -(hairWeight - fluidWeight) * lever,
-                gamma.multiply(fluidWeight * leverSquared));
+                confinement.function(law.radius(), omega, gamma).multiply(fluidWeight * leverSquared));
     }
 
     @Override
     public Complex fluidInertia(Complex s) {
-        return law.hydrodynamicFunction(s).multiply(fluidWeight * leverSquared);
+        return confinement.function(law.radius(), s).multiply(fluidWeight * leverSquared);
     }
 
     /** ∫ s ℓ dz for x = (1+i) y. */

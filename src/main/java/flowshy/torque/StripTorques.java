@@ -19,6 +19,7 @@ public final class StripTorques implements TorqueModel {
     private final Medium medium;
     private final StokesLayer layer;
     private final WallShare profile;
+    private final Confinement confinement;
     private final double pivotDepth;
     private final StripMesh mesh;
 
@@ -40,6 +41,7 @@ public final class StripTorques implements TorqueModel {
         this.medium = medium;
         this.layer = new StokesLayer(medium.kinematicViscosity());
         this.profile = cover.profile(medium);
+        this.confinement = new Confinement(cover.cavityRadius(), medium);
         this.pivotDepth = pivotDepth;
         this.mesh = new StripMesh(hair.profile(), refinement);
     }
@@ -58,10 +60,12 @@ public final class StripTorques implements TorqueModel {
         double turningImaginary = 0.0;
         double radius = Double.NaN;
         Complex gamma = Complex.ZERO;
+        Complex confined = Complex.ZERO;
         for (Strip strip : mesh.strips(delta, profile)) {
             if (strip.radius() != radius) { // a straight part needs its law once
                 radius = strip.radius();
                 gamma = new OscillatingCylinder(radius, medium).hydrodynamicFunction(omega);
+                confined = confinement.function(radius, omega, gamma);
             }
             double arm = strip.height() + pivotDepth;
             double moment = strip.weight() * FastMath.PI * radius * radius * arm;
@@ -74,8 +78,8 @@ public final class StripTorques implements TorqueModel {
             open -= (solid + rho * sheared) * moment;
             openImaginary -= rho * shearedImaginary * moment;
             carried -= (solid - rho) * moment;
-            turning += rho * gamma.getReal() * moment * arm;
-            turningImaginary += rho * gamma.getImaginary() * moment * arm;
+            turning += rho * confined.getReal() * moment * arm;
+            turningImaginary += rho * confined.getImaginary() * moment * arm;
         }
         return new Torques(
                 omega,
@@ -93,7 +97,7 @@ public final class StripTorques implements TorqueModel {
         for (Strip strip : mesh.strips()) {
             if (strip.radius() != radius) {
                 radius = strip.radius();
-                gamma = new OscillatingCylinder(radius, medium).hydrodynamicFunction(s);
+                gamma = confinement.function(radius, s);
             }
             double arm = strip.height() + pivotDepth;
             turning = turning.add(

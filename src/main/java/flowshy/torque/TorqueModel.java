@@ -48,7 +48,8 @@ public interface TorqueModel {
      */
     static TorqueModel of(Hair hair, Medium medium, double pivotDepth, Cover cover) {
         if (hair.profile() instanceof Cylinder cylinder && cover.profile(medium) instanceof StokesLayer) {
-            return new CylinderTorques(cylinder, hair.density(), medium, pivotDepth);
+            return new CylinderTorques(
+                    cylinder, hair.density(), medium, pivotDepth, new Confinement(cover.cavityRadius(), medium));
         }
         return new StripTorques(hair, medium, pivotDepth, cover, 1);
     }

@@ -11,6 +11,7 @@ import flowshy.response.Device;
 import flowshy.response.Oscillator;
 import flowshy.response.Suspension;
 import flowshy.stream.StokesLayer;
+import flowshy.stream.cover.Cover;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.hipparchus.util.FastMath;
@@ -82,7 +83,8 @@ public record DeviceFacts(
         OscillatingCylinder thin = new OscillatingCylinder(profile.smallestRadius(), around);
         OscillatingCylinder thick = new OscillatingCylinder(profile.largestRadius(), around);
         StokesLayer layer = new StokesLayer(around.kinematicViscosity());
-        Optional<Oscillator> there = device.suspension().map(held -> new Oscillator(hair, held, Optional.of(around)));
+        Optional<Oscillator> there =
+                device.suspension().map(held -> new Oscillator(hair, held, Optional.of(around), device.cover()));
         return new DeviceFacts(
                 hair.density() * moments.volume(),
                 hair.density() * moments.second(),
@@ -91,8 +93,8 @@ public record DeviceFacts(
                 new Span(thin.womersley(low), thick.womersley(high)),
                 new Span(layer.thickness(high), layer.thickness(low)),
                 thin.knudsen(),
-                device.suspension().flatMap(held -> swing(hair, held, Optional.empty())),
-                device.suspension().flatMap(held -> swing(hair, held, Optional.of(around))),
+                device.suspension().flatMap(held -> swing(hair, held, Optional.empty(), device.cover())),
+                device.suspension().flatMap(held -> swing(hair, held, Optional.of(around), device.cover())),
                 there.map(Oscillator::gravityStiffness).orElse(0.0),
                 there.map(Oscillator::staticTilt).orElse(0.0),
                 hair.youngsModulus().isPresent()
@@ -104,8 +106,8 @@ public record DeviceFacts(
                         : OptionalDouble.empty());
     }
 
-    private static Optional<Swing> swing(Hair hair, Suspension held, Optional<Medium> in) {
-        Oscillator oscillator = new Oscillator(hair, held, in);
+    private static Optional<Swing> swing(Hair hair, Suspension held, Optional<Medium> in, Cover cover) {
+        Oscillator oscillator = new Oscillator(hair, held, in, cover);
         return oscillator.stands()
                 ? Optional.of(new Swing(oscillator.resonance() / (2.0 * FastMath.PI), oscillator.decay()))
                 : Optional.empty();

@@ -14,7 +14,7 @@ import org.hipparchus.complex.Complex;
  * <p>For every linear cover the torque of a shaken base is that of the fluid carried along less that of the flow:
  * T_motion = T_carried − T_flow, with T_flow = φ ρ P[1 + Γ s].
  */
-public sealed interface Cover permits OpenCover, SealedCover, RoofedCover, MeasuredCover {
+public sealed interface Cover permits OpenCover, SealedCover, RoofedCover, VentedCover, MeasuredCover {
     /** Nothing over the hair. */
     Cover OPEN = new OpenCover();
 
