@@ -6,7 +6,9 @@ import flowshy.study.Study;
 import flowshy.verdict.fill.FillQuestion;
 import flowshy.verdict.fill.FillRow;
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import org.hipparchus.util.FastMath;
 
 /** Every fill, bare and sealed, as text, JSON and CSV. */
@@ -121,11 +123,13 @@ public final class FillReport {
                         && !column.name().startsWith("density"))
                 .toList();
         page.namedTable("fill", names, printed, rows);
+        Map<String, List<String>> reasons = new LinkedHashMap<>();
         for (int i = 0; i < rows.size(); i++) {
-            if (!rows.get(i).excluded().isEmpty()) {
-                page.note(names.get(i) + ":", String.join("; ", rows.get(i).excluded()));
+            for (String reason : rows.get(i).excluded()) {
+                reasons.computeIfAbsent(reason, key -> new ArrayList<>()).add(names.get(i));
             }
         }
+        reasons.forEach((reason, fluids) -> page.note(reason + ":", String.join("; ", fluids)));
     }
 
     /**

@@ -1,11 +1,18 @@
 package flowshy.study;
 
+import flowshy.medium.MediumTable;
+import flowshy.medium.MediumTableException;
 import flowshy.study.keys.Form;
 import flowshy.study.text.Position;
 import flowshy.study.text.Printable;
 import flowshy.study.text.Problem;
+import flowshy.study.text.Problems;
 import flowshy.study.text.StudyException;
 import flowshy.study.text.TextFile;
+import java.io.ByteArrayInputStream;
+import java.io.IOException;
+import java.io.UncheckedIOException;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
@@ -31,6 +38,31 @@ final class FilesRead {
      */
     ColumnFile table(Form form, String key, List<ColumnFile.Column> wanted, int most) {
         return ColumnFile.read(text(form.word(key).orElseThrow(), form.position(key), key), wanted, most);
+    }
+
+    /**
+     * A medium's table in the file that a key names.
+     *
+     * @throws StudyException with every problem of the table, at its own lines
+     */
+    MediumTable medium(Form form, String key) {
+        String name = form.word(key).orElseThrow();
+        TextFile file = text(name, form.position(key), key);
+        try {
+            return MediumTable.read(new ByteArrayInputStream(file.text().getBytes(StandardCharsets.UTF_8)), name);
+        } catch (MediumTableException e) {
+            Problems problems = new Problems();
+            e.problems()
+                    .forEach(fault -> problems.add(
+                            new Position(fault.file(), fault.line(), fault.column()),
+                            key,
+                            fault.found(),
+                            fault.accepted()));
+            problems.throwIfAny();
+            throw e;
+        } catch (IOException e) { // a stream over memory never fails; the signature says it could
+            throw new UncheckedIOException(e);
+        }
     }
 
     private TextFile text(String name, Position at, String key) {

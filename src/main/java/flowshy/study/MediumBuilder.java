@@ -5,6 +5,7 @@ import flowshy.medium.Medium;
 import flowshy.medium.MediumException;
 import flowshy.medium.MediumParameter;
 import flowshy.medium.MediumQuery;
+import flowshy.medium.SealedFill;
 import flowshy.medium.UnfitParameterException;
 import flowshy.medium.UnknownMediumException;
 import flowshy.study.keys.Form;
@@ -14,11 +15,13 @@ import flowshy.study.keys.Presence;
 import flowshy.study.text.Nearest;
 import flowshy.study.text.Problem;
 import flowshy.study.text.Problems;
+import flowshy.study.text.StudyException;
 import flowshy.study.units.Dimension;
 import flowshy.study.units.Quantity;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Function;
 
 /** From the keys of a medium to its properties; a refused state is told at the key that is at fault. */
 final class MediumBuilder {
@@ -28,11 +31,13 @@ final class MediumBuilder {
 
     private final Form form;
     private final Problems problems;
+    private final FilesRead files;
     private final List<Form.Taken> taken = new ArrayList<>();
 
-    MediumBuilder(Form form, Problems problems) {
+    MediumBuilder(Form form, Problems problems, FilesRead files) {
         this.form = form;
         this.problems = problems;
+        this.files = files;
     }
 
     /** Defaults that were needed only because of the medium. */
@@ -45,8 +50,17 @@ final class MediumBuilder {
         return form.word(path + ".name").filter("vacuum"::equals).isPresent();
     }
 
-    /** The medium of a group; empty if it has a problem. */
+    /** The medium of a group, at its own state; empty if it has a problem. */
     Optional<Medium> build(String path) {
+        return build(path, Media::at);
+    }
+
+    /** The fill of a closed cavity, filled at its own state and used at another temperature; empty if it has a problem. */
+    Optional<Medium> sealed(String path, double temperature) {
+        return build(path, query -> new SealedFill(query).at(temperature));
+    }
+
+    private Optional<Medium> build(String path, Function<MediumQuery, Medium> law) {
         if (problems.touches(path) || !form.has(path)) {
             return Optional.empty();
         }
@@ -58,12 +72,18 @@ final class MediumBuilder {
                     "name a gas or liquid; for a package at low pressure give the gas and its pressure");
             return Optional.empty();
         }
-        MediumQuery query = query(path);
+        MediumQuery query;
         try {
-            return Optional.of(Media.at(query));
+            query = query(path);
+        } catch (StudyException e) {
+            e.problems().forEach(problems::add);
+            return Optional.empty();
+        }
+        try {
+            return Optional.of(law.apply(query));
         } catch (UnfitParameterException e) {
             return e.missing() && usual(path, e.parameter()).isPresent()
-                    ? withUsual(path, query, e.parameter())
+                    ? withUsual(path, query, e.parameter(), law)
                     : refused(path, e);
         } catch (MediumException e) {
             return refused(path, e);
@@ -79,6 +99,9 @@ final class MediumBuilder {
             MediumQuery.GivenProperties given =
                     new MediumQuery.GivenProperties(density, viscosity, form.siIfAny(path + ".sound-speed"));
             return MediumQuery.of("medium of the study", given, temperature, MediumQuery.USUAL_PRESSURE);
+        }
+        if (form.has(path + ".file")) {
+            return MediumQuery.of(files.medium(form, path + ".file"), temperature, form.si(path + ".pressure"));
         }
         MediumQuery query =
                 MediumQuery.of(form.word(path + ".name").orElseThrow(), temperature, form.si(path + ".pressure"));
@@ -96,13 +119,14 @@ final class MediumBuilder {
                 .filter(row -> row.presence().kind() == Presence.Kind.IF_NEEDED);
     }
 
-    private Optional<Medium> withUsual(String path, MediumQuery query, MediumParameter parameter) {
+    private Optional<Medium> withUsual(
+            String path, MediumQuery query, MediumParameter parameter, Function<MediumQuery, Medium> law) {
         KeyRow row = usual(path, parameter).orElseThrow();
         double value = Quantity.read(row.presence().value(), Dimension.SHARE).value();
         taken.add(new Form.Taken(
                 row.path(), row.presence().value(), row.presence().why()));
         try {
-            return Optional.of(Media.at(query.with(parameter, value)));
+            return Optional.of(law.apply(query.with(parameter, value)));
         } catch (MediumException e) {
             return refused(path, e);
         }

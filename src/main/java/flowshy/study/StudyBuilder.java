@@ -35,14 +35,16 @@ final class StudyBuilder {
         this.form = form;
         this.problems = problems;
         this.files = new FilesRead(folder);
-        this.media = new MediumBuilder(form, problems);
+        this.media = new MediumBuilder(form, problems, files);
     }
 
     Study build(TextFile file, List<String> settings) {
         Optional<Hair> hair = new HairBuilder(form, problems, files).build();
         Optional<Medium> outside = media.build("medium");
         Cover cover = cover("cover.kind");
-        Optional<Medium> around = cover.closed() && form.has("cover.fill") ? media.build("cover.fill") : outside;
+        Optional<Medium> around = cover.closed() && form.has("cover.fill")
+                ? outside.flatMap(used -> media.sealed("cover.fill", used.temperature()))
+                : outside;
         SuspensionBuilder suspensions = new SuspensionBuilder(form, problems, media, files);
         Optional<Suspension> suspension = suspensions.build(hair);
         Optional<Band> band = band();

@@ -26,7 +26,9 @@ final class Assumptions {
     private Assumptions() {}
 
     static List<Caveat> of(Device device, Band band, DeviceFacts facts) {
-        Set<Caveat> caveats = new LinkedHashSet<>(device.outside().caveats());
+        // nothing outside touches a hair in a closed cavity
+        Set<Caveat> caveats = new LinkedHashSet<>(
+                device.cover().closed() ? List.of() : device.outside().caveats());
         caveats.addAll(device.around().caveats());
         fromMemory(device, caveats);
         caveats.addAll(new OscillatingCylinder(device.hair().profile().smallestRadius(), device.around()).caveats());

@@ -58,6 +58,10 @@ final class MediumKeys {
                 Key.optional("second", Text.MEDIUM, "a second gas mixed in"),
                 Key.optional("share", Measure.of(Dimension.SHARE, "0 %", "100 %"), "mole fraction of the second gas"),
                 Key.optional(
+                        "file",
+                        Text.FILE,
+                        "table of your own beside the study, in the form of the shipped media tables"),
+                Key.optional(
                         "density",
                         Measure.of(Dimension.DENSITY, "1e-9 kg/m3", "30 g/cm3"),
                         "density of a medium without a table"),
@@ -77,7 +81,8 @@ final class MediumKeys {
                         name,
                         keys,
                         Rule.exactlyOne(
-                                "name pressure humidity mass-fraction salinity grade second share",
+                                "name humidity mass-fraction salinity grade second share",
+                                "file",
                                 "density viscosity kinematic-viscosity sound-speed"),
                         Rule.atMostOne("second share"),
                         Rule.oneBeside("second", "share"),

@@ -1,12 +1,12 @@
 package flowshy.verdict.fill;
 
+import flowshy.math.Figures;
 import flowshy.medium.Media;
 import flowshy.medium.MediumEntry;
 import flowshy.medium.MediumParameter;
 import flowshy.medium.MediumQuery;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 import java.util.Map;
 
 /**
@@ -53,9 +53,10 @@ public record Fill(String name, MediumQuery query) {
 
     private static String words(MediumParameter parameter, double value) {
         return switch (parameter) {
-            case HUMIDITY, MASS_FRACTION -> String.format(Locale.ROOT, "%.3g %%", 100.0 * value);
-            case GRADE -> String.format(Locale.ROOT, "%.4g cSt", 1e6 * value);
-            default -> String.format(Locale.ROOT, "%.3g", value);
+            case HUMIDITY -> Figures.full(100.0 * value) + " % humidity";
+            case MASS_FRACTION -> Figures.full(100.0 * value) + " %";
+            case GRADE -> Figures.full(1e6 * value) + " cSt";
+            default -> Figures.full(value);
         };
     }
 }

@@ -243,7 +243,7 @@ class KeysTest {
                 "'medium: air\nhair: {shape: profile, points: [[0 um, 9 um]], density: 1 g/cm3}' | 's.yaml:2:32: hair.points: 1 pairs; two to 1000 are read'",
                 "'medium: air\nhair: {shape: profile, points: [[0 um, 9 um], [9 um]], density: 1 g/cm3}' | 's.yaml:2:47: hair.points[1]: a list; a pair [z, diameter] is wanted here'",
                 "'medium: air\nhair: {shape: profile, points: [[0 um, 9 um], [9 um, 3]], density: 1 g/cm3}' | 's.yaml:2:54: hair.points[1].diameter: 3 has no unit; a length is wanted here, with its unit: um, mm, m, nm, cm, in, mil; did you mean 3 um?'",
-                "'hair: {length: 1 mm, diameter: 9 um, density: 1 g/cm3}\nmedium: {temperature: 3 degC}' | 's.yaml:2:9: medium: one of name, density is missing; state one of them'",
+                "'hair: {length: 1 mm, diameter: 9 um, density: 1 g/cm3}\nmedium: {temperature: 3 degC}' | 's.yaml:2:9: medium: one of name, file, density is missing; state one of them'",
                 "'hair: {length: 1 mm, diameter: 9 um, density: 1 g/cm3}\nmedium: {name: air, density: 1 g/cm3, viscosity: 1 cP}' | 's.yaml:2:21: medium.density: stands beside name; keep one of the two'",
                 "'hair: {length: 1 mm, diameter: 9 um, density: 1 g/cm3}\nmedium: {density: 1 g/cm3}' | 's.yaml:2:9: medium: one of viscosity, kinematic-viscosity is missing; state one of them'",
                 "'hair: {length: 1 mm, diameter: 9 um, density: 1 g/cm3}\nmedium: {name: argon, share: 3 %}' | 's.yaml:2:9: medium.second: missing; share goes with it'",

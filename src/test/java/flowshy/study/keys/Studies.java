@@ -55,6 +55,19 @@ final class Studies {
               stiffness: 3 nN.m/rad
               ring-down: {decay-time: 1 ms, in: {name: nitrogen, temperature: 20 degC, pressure: 1 bar}, cover: sealed}
             medium: nitrogen
+            """, """
+            hair: {length: 610 um, diameter: 77 um, density: 1.3 g/cm3}
+            suspension: {resonance: {frequency: 300 Hz, in: {file: own.csv}}, quality: {value: 3, in: {file: own.csv}}}
+            medium: {file: own.csv, temperature: 20 degC, pressure: 1 bar}
+            cover: {kind: sealed, fill: {file: own.csv}}
+            """, """
+            hair: {length: 610 um, diameter: 77 um, density: 1.3 g/cm3}
+            suspension: {stiffness: 3 nN.m/rad, damping: {value: 1e-12 N.m.s/rad, in: {file: own.csv}}}
+            medium: nitrogen
+            """, """
+            hair: {length: 610 um, diameter: 77 um, density: 1.3 g/cm3}
+            suspension: {stiffness: 3 nN.m/rad, ring-down: {decay-time: 1 ms, in: {file: own.csv}}}
+            medium: nitrogen
             """);
 
     private Studies() {}
