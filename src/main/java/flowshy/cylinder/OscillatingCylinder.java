@@ -1,10 +1,10 @@
 package flowshy.cylinder;
 
 import flowshy.math.Caveat;
+import flowshy.math.Figures;
 import flowshy.medium.Medium;
 import flowshy.medium.Phase;
 import java.util.List;
-import java.util.Locale;
 import org.hipparchus.complex.Complex;
 import org.hipparchus.util.FastMath;
 
@@ -132,7 +132,7 @@ public record OscillatingCylinder(double radius, Medium medium) {
     }
 
     private Caveat caveat(Caveat.Weight weight, String text) {
-        return new Caveat(Caveat.Subject.REJECTION, weight, String.format(Locale.ROOT, text, knudsen()));
+        return new Caveat(Caveat.Subject.REJECTION, weight, Figures.say(text, knudsen()));
     }
 
     /** Times iω ρ π a². */

@@ -1,9 +1,9 @@
 package flowshy.cylinder;
 
 import flowshy.math.Caveat;
+import flowshy.math.Figures;
 import flowshy.medium.Medium;
 import java.util.List;
-import java.util.Locale;
 import org.hipparchus.util.FastMath;
 
 /**
@@ -106,7 +106,7 @@ public record SteadyDrag(double radius, Medium medium) {
         return List.of(new Caveat(
                 Caveat.Subject.FLOW,
                 Caveat.Weight.OUT_OF_RANGE,
-                String.format(Locale.ROOT, "The drag law ends at Re = 1e5; the stream has Re = %.3g.", re)));
+                Figures.say("The drag law ends at Re = 1e5; the stream has Re = %.3g.", re)));
     }
 
     private double thinning() {

@@ -100,7 +100,7 @@ class SteadyDragTest {
         List<Caveat> caveats = CYLINDER.caveats(3e5);
         assertThat(caveats).hasSize(1);
         assertThat(caveats.get(0).weight()).isEqualTo(Caveat.Weight.OUT_OF_RANGE);
-        assertThat(caveats.get(0).text()).contains("1.50e+05");
+        assertThat(caveats.get(0).text()).contains("Re = 150000");
     }
 
     @Test
