@@ -3,6 +3,7 @@ package flowshy.medium;
 import java.math.BigDecimal;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.regex.Pattern;
 import java.util.stream.Collectors;
 
 /** Numbers with units as header lines of property tables write them. */
@@ -14,6 +15,7 @@ enum HeaderUnits {
     GRADE("100 mm2/s", "mm2/s 1e-6, m2/s 1"),
     NUMBER("35", "1");
 
+    private static final Pattern NUMBER_FORM = Pattern.compile("[-+]?(\\d+\\.?\\d*|\\.\\d+)([eE][-+]?\\d{1,3})?");
     private static final int LONGEST_NUMBER = 40;
     private static final double LARGEST = 1e30;
 
@@ -47,7 +49,7 @@ enum HeaderUnits {
 
     /** A plain decimal number of sane size; the size is looked at first, so that 1e999999999 costs nothing. */
     static Optional<BigDecimal> decimal(String text) {
-        if (text.length() > LONGEST_NUMBER || !text.matches("[-+]?(\\d+\\.?\\d*|\\.\\d+)([eE][-+]?\\d{1,3})?")) {
+        if (text.length() > LONGEST_NUMBER || !NUMBER_FORM.matcher(text).matches()) {
             return Optional.empty();
         }
         return Math.abs(Double.parseDouble(text)) < LARGEST ? Optional.of(new BigDecimal(text)) : Optional.empty();

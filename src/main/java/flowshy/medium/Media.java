@@ -18,13 +18,13 @@ public final class Media {
     private Media() {}
 
     /**
-     * The known media; reads every table.
+     * The known media; reads the header of every table.
      *
      * @return by name
      */
     public static List<MediumEntry> entries() {
-        return MediumShelf.all().stream()
-                .map(table -> MediumEntry.of(table.header()))
+        return MediumShelf.headers().stream()
+                .map(MediumEntry::of)
                 .sorted(Comparator.comparing(MediumEntry::name))
                 .toList();
     }
@@ -36,13 +36,14 @@ public final class Media {
      * @return its properties with their sources and caveats
      * @throws UnknownMediumException if no medium has that name
      * @throws UnfitParameterException if a parameter is missing or too much
+     * @throws MediumTableException if a table of the user names a formula in place of rows
      * @throws OutOfTableException if the state is not covered, or the medium boils, freezes or condenses there
      */
     public static Medium at(MediumQuery query) {
         if (query.given().isPresent()) {
             return given(query, query.given().get());
         }
-        MediumLaw law = query.table().isPresent() ? law(query.table().get()) : find(query.name());
+        MediumLaw law = query.table().isPresent() ? own(query.table().get()) : find(query.name());
         Admission.parameters(law.header(), query);
         if (query.second().isEmpty()) {
             return law.at(query);
@@ -100,6 +101,18 @@ public final class Media {
         return law;
     }
 
+    private static MediumLaw own(MediumTable table) {
+        if (table.header().law().isPresent()) {
+            throw new MediumTableException(List.of(new TableProblem(
+                    table.file(),
+                    1,
+                    1,
+                    "the law '" + table.header().law().get() + "'",
+                    "rows, in a table of your own")));
+        }
+        return law(table);
+    }
+
     private static MediumLaw law(MediumTable table) {
         Optional<String> formula = table.header().law();
         if (formula.isPresent()) {
@@ -112,10 +125,11 @@ public final class Media {
     }
 
     private static Optional<MediumTable> byAlias(String stem) {
-        return MediumShelf.all().stream()
-                .filter(table -> table.header().aliases().stream()
+        return MediumShelf.headers().stream()
+                .filter(header -> header.aliases().stream()
                         .anyMatch(alias -> MediumShelf.stem(alias).equals(stem)))
-                .findFirst();
+                .findFirst()
+                .flatMap(header -> MediumShelf.find(MediumShelf.stem(header.medium())));
     }
 
     private static UnknownMediumException unknown(String name) {

@@ -12,6 +12,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 import java.util.jar.JarEntry;
+import java.util.regex.Pattern;
 import java.util.stream.Stream;
 
 /**
@@ -25,6 +26,8 @@ final class MediumShelf {
     /** A table that is always there and so leads to the others. */
     private static final String ANCHOR = "/" + FOLDER + "/air" + SUFFIX;
 
+    private static final Pattern STEM = Pattern.compile("[a-z0-9-]+");
+
     private MediumShelf() {}
 
     /** The name of the file in which a medium of this name stands, without its ending. */
@@ -34,20 +37,32 @@ final class MediumShelf {
 
     /** The table of a file, by its stem; empty if there is none. */
     static Optional<MediumTable> find(String stem) {
-        if (!stem.matches("[a-z0-9-]+")) {
+        return read(stem, (in, file) -> MediumTable.read(in, file));
+    }
+
+    /** Every header, by the order of the file names; the rows are not read. */
+    static List<TableHeader> headers() {
+        return stems().stream()
+                .map(stem -> read(stem, (in, file) -> new MediumTableReader(file).readHeader(in))
+                        .orElseThrow())
+                .toList();
+    }
+
+    private static <T> Optional<T> read(String stem, Reading<T> reading) {
+        if (!STEM.matcher(stem).matches()) {
             return Optional.empty();
         }
         String file = FOLDER + "/" + stem + SUFFIX;
         try (InputStream in = MediumShelf.class.getResourceAsStream("/" + file)) {
-            return in == null ? Optional.empty() : Optional.of(MediumTable.read(in, file));
+            return in == null ? Optional.empty() : Optional.of(reading.of(in, file));
         } catch (IOException e) {
             throw new UncheckedIOException(file, e);
         }
     }
 
-    /** Every table, by the order of their file names. */
-    static List<MediumTable> all() {
-        return stems().stream().map(stem -> find(stem).orElseThrow()).toList();
+    /** What is taken from a file. */
+    private interface Reading<T> {
+        T of(InputStream in, String file) throws IOException;
     }
 
     private static List<String> stems() {

@@ -49,6 +49,22 @@ final class MediumTableReader {
         return new MediumTable(text.file(), header.orElseThrow(), rows);
     }
 
+    /** Reads the header lines only, for lists; the rows are not looked at. */
+    TableHeader readHeader(InputStream in) throws IOException {
+        int number = 0;
+        for (String line : text.lines(in)) {
+            number++;
+            if (line.startsWith("#")) {
+                headerReader.take(number, line);
+            } else if (!line.isBlank()) {
+                break;
+            }
+        }
+        Optional<TableHeader> header = headerReader.header();
+        text.judge();
+        return header.orElseThrow();
+    }
+
     private void headings(String line) {
         int column = 1;
         for (String cell : line.split(",", -1)) {

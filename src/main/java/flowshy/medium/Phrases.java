@@ -1,6 +1,7 @@
 package flowshy.medium;
 
-import java.util.Locale;
+import java.math.BigDecimal;
+import java.math.RoundingMode;
 
 /** Values in the words of messages: degrees Celsius, kilopascal, per cent. */
 final class Phrases {
@@ -23,10 +24,9 @@ final class Phrases {
         return number(100.0 * share, 3) + " %";
     }
 
-    /** A number with at most so many decimals and no trailing zeros. */
+    /** A number with at most so many decimals and no trailing zeros. Without a format string, which costs a command its first tenth. */
     static String number(double value, int decimals) {
-        String text = String.format(Locale.ROOT, "%." + decimals + "f", value);
-        String bare = text.replaceAll("0+$", "").replaceAll("\\.$", "");
-        return bare.equals("-0") ? "0" : bare;
+        BigDecimal rounded = BigDecimal.valueOf(value).setScale(decimals, RoundingMode.HALF_UP);
+        return rounded.signum() == 0 ? "0" : rounded.stripTrailingZeros().toPlainString();
     }
 }

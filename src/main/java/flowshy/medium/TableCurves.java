@@ -13,11 +13,11 @@ import org.apache.commons.math3.util.FastMath;
  * the power laws of gases straight lines and keeps every value positive; the logarithm of the saturation pressure over 1/T. Outside the rows the splines throw, nothing is extrapolated.
  */
 final class TableCurves {
-    private final PolynomialSplineFunction density;
-    private final PolynomialSplineFunction viscosity;
-    private final List<PolynomialSplineFunction> soundSpeed;
+    private final Curve density;
+    private final Curve viscosity;
+    private final List<Curve> soundSpeed;
     private final VirialCurve secondVirial;
-    private final List<PolynomialSplineFunction> saturation;
+    private final List<Curve> saturation;
 
     TableCurves(List<TableRow> rows) {
         this.density = through(rows, TableCurves::abscissa, row -> FastMath.log(row.density()));
@@ -37,17 +37,17 @@ final class TableCurves {
     }
 
     double density(double temperature) {
-        return FastMath.exp(at(density, FastMath.log(temperature)));
+        return FastMath.exp(density.at(FastMath.log(temperature)));
     }
 
     double viscosity(double temperature) {
-        return FastMath.exp(at(viscosity, FastMath.log(temperature)));
+        return FastMath.exp(viscosity.at(FastMath.log(temperature)));
     }
 
     OptionalDouble soundSpeed(double temperature) {
         return soundSpeed.isEmpty()
                 ? OptionalDouble.empty()
-                : OptionalDouble.of(FastMath.exp(at(soundSpeed.get(0), FastMath.log(temperature))));
+                : OptionalDouble.of(FastMath.exp(soundSpeed.get(0).at(FastMath.log(temperature))));
     }
 
     /** Second virial coefficient with its slopes, zero where the table has no such column. */
@@ -58,10 +58,10 @@ final class TableCurves {
     /** Saturation pressure [Pa], empty where the table has none at this temperature. */
     OptionalDouble saturationPressure(double temperature) {
         double x = -1.0 / temperature;
-        if (saturation.isEmpty() || !saturation.get(0).isValidPoint(x)) {
+        if (saturation.isEmpty() || !saturation.get(0).covers(x)) {
             return OptionalDouble.empty();
         }
-        return OptionalDouble.of(FastMath.exp(saturation.get(0).value(x)));
+        return OptionalDouble.of(FastMath.exp(saturation.get(0).at(x)));
     }
 
     /** Temperature [K] at which the saturation pressure is the given one, empty if that is not within the rows. */
@@ -69,17 +69,17 @@ final class TableCurves {
         if (saturation.isEmpty()) {
             return OptionalDouble.empty();
         }
-        double[] knots = saturation.get(0).getKnots();
-        double low = knots[0];
-        double high = knots[knots.length - 1];
+        Curve curve = saturation.get(0);
+        double low = curve.first();
+        double high = curve.last();
         double aim = FastMath.log(pressure);
-        if (!(saturation.get(0).value(low) <= aim && aim <= saturation.get(0).value(high))) {
+        if (!(curve.at(low) <= aim && aim <= curve.at(high))) {
             return OptionalDouble.empty();
         }
         // Vapour pressure rises strictly; sixty halvings reach the last bit.
         for (int i = 0; i < 60; i++) {
             double middle = 0.5 * (low + high);
-            if (saturation.get(0).value(middle) < aim) {
+            if (curve.at(middle) < aim) {
                 low = middle;
             } else {
                 high = middle;
@@ -92,30 +92,13 @@ final class TableCurves {
         return FastMath.log(row.temperature());
     }
 
-    /** The logarithm of an end of the table may differ from the knot by a rounding; that much is moved back. */
-    private static double at(PolynomialSplineFunction curve, double x) {
-        double[] knots = curve.getKnots();
-        double first = knots[0];
-        double last = knots[knots.length - 1];
-        double slack = 1e-12 * FastMath.abs(last);
-        if (x < first && x > first - slack) {
-            return curve.value(first);
-        }
-        if (x > last && x < last + slack) {
-            return curve.value(last);
-        }
-        return curve.value(x);
+    private static Curve through(List<TableRow> rows, ToDoubleFunction<TableRow> x, ToDoubleFunction<TableRow> y) {
+        return Curve.through(
+                rows.stream().mapToDouble(x).toArray(),
+                rows.stream().mapToDouble(y).toArray());
     }
 
-    private static PolynomialSplineFunction through(
-            List<TableRow> rows, ToDoubleFunction<TableRow> x, ToDoubleFunction<TableRow> y) {
-        return new SplineInterpolator()
-                .interpolate(
-                        rows.stream().mapToDouble(x).toArray(),
-                        rows.stream().mapToDouble(y).toArray());
-    }
-
-    private static List<PolynomialSplineFunction> optional(
+    private static List<Curve> optional(
             List<TableRow> rows,
             Function<TableRow, OptionalDouble> property,
             ToDoubleFunction<TableRow> x,
@@ -123,5 +106,25 @@ final class TableCurves {
         List<TableRow> filled =
                 rows.stream().filter(row -> property.apply(row).isPresent()).toList();
         return filled.size() < MediumTable.FEWEST_ROWS ? List.of() : List.of(through(filled, x, y));
+    }
+
+    /** A spline with its ends. */
+    private record Curve(PolynomialSplineFunction spline, double first, double last) {
+        /** The abscissa of an end may differ from its knot by a rounding; that much is moved back. */
+        private static final double SLACK = 1e-12;
+
+        static Curve through(double[] x, double[] y) {
+            return new Curve(new SplineInterpolator().interpolate(x, y), x[0], x[x.length - 1]);
+        }
+
+        boolean covers(double x) {
+            double slack = SLACK * FastMath.abs(last);
+            return x > first - slack && x < last + slack;
+        }
+
+        /** Throws the range exception of the library where the rows end. */
+        double at(double x) {
+            return spline.value(covers(x) ? FastMath.min(FastMath.max(x, first), last) : x);
+        }
     }
 }

@@ -7,6 +7,7 @@ import static org.assertj.core.api.Assertions.withinPercentage;
 
 import flowshy.medium.MediumQuery.GivenProperties;
 import flowshy.medium.OutOfTableException.Why;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
@@ -342,5 +343,77 @@ class MediaTest {
         assertThat(medium.temperature()).isEqualTo(313.15);
         assertThat(medium.meanFreePath()).isEmpty();
         assertThat(medium.sources()).extracting(PropertySource::reading).containsOnly(PropertySource.Reading.GIVEN);
+    }
+
+    /** No word means two media. */
+    @Test
+    void noNameOrAliasIsGivenTwice() {
+        List<String> words = new ArrayList<>();
+        for (MediumEntry entry : entries()) {
+            words.add(MediumShelf.stem(entry.name()));
+            entry.aliases().forEach(alias -> words.add(MediumShelf.stem(alias)));
+        }
+        assertThat(words).hasSizeGreaterThan(40).doesNotHaveDuplicates();
+    }
+
+    @Test
+    void listsTheLiquids() {
+        assertThat(entries())
+                .extracting(MediumEntry::name)
+                .contains(
+                        "ethanol",
+                        "methanol",
+                        "2-propanol",
+                        "ethylene glycol",
+                        "glycerol-water",
+                        "sea water",
+                        "silicone oil",
+                        "mineral oil",
+                        "mercury",
+                        "perfluorohexane",
+                        "fluoroketone",
+                        "olive oil");
+    }
+
+    /**
+     * Gases over −50 to 150 °C and 1 Pa to 10 bar: wherever they do not condense the density is near that of a perfect gas and
+     * rises with the pressure, the free path falls with it.
+     */
+    @ParameterizedTest
+    @MethodSource("gases")
+    void gasesCoverTheWholeRangeOfPressure(MediumEntry gas) {
+        double molarMass = MediumShelf.find(MediumShelf.stem(gas.name()))
+                .orElseThrow()
+                .header()
+                .molarMass()
+                .orElseThrow();
+        int answered = 0;
+        for (double celsius = -50.0; celsius <= 150.0; celsius += 12.5) {
+            double density = 0.0;
+            double path = Double.POSITIVE_INFINITY;
+            for (double pressure = 1.0; pressure <= 1e6; pressure *= 10.0) {
+                try {
+                    Medium medium = Media.at(plain(gas, celsius + 273.15, pressure));
+                    double perfect = pressure * molarMass / (8.314462618 * (celsius + 273.15));
+                    if (gas.parameters().isEmpty()) {
+                        assertThat(medium.density() / perfect).isBetween(0.98, 1.35);
+                    }
+                    assertThat(medium.density()).isGreaterThan(density);
+                    assertThat(medium.meanFreePath().orElseThrow()).isLessThan(path);
+                    density = medium.density();
+                    path = medium.meanFreePath().orElseThrow();
+                    answered++;
+                } catch (OutOfTableException e) {
+                    assertThat(e.why() == Why.CONDENSES || e.parameter() == MediumParameter.HUMIDITY)
+                            .as(e.getMessage())
+                            .isTrue();
+                }
+            }
+        }
+        assertThat(answered).isGreaterThan(gas.parameters().isEmpty() ? 100 : 40);
+    }
+
+    private static List<MediumEntry> gases() {
+        return entries().stream().filter(entry -> entry.phase() == Phase.GAS).toList();
     }
 }

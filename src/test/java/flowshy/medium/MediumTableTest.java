@@ -164,6 +164,48 @@ class MediumTableTest {
                 .isInstanceOf(MediumTableException.class);
     }
 
+    /** A family of grades: rising grades, each with rising temperatures, and the range in the header. */
+    private static final String GRADED = GOOD.replace("# temperatures", "# grade: 10 mm2/s to 20 mm2/s\n# temperatures")
+            .replace("temperature_degC,density", "grade_mm2_s,temperature_degC,density")
+            .replace("10,0.880,120", "10,10,0.880,120")
+            .replace("20,0.873,70", "10,20,0.873,70")
+            .replace("30,0.866,45", "10,30,0.866,45\n20,10,0.89,240\n20,20,0.88,140\n20,30,0.87,90");
+
+    @Test
+    void readsAFamilyOfGrades() throws IOException {
+        MediumTable table = read(GRADED);
+        assertThat(table.rows()).hasSize(6);
+        Medium between =
+                Media.at(MediumQuery.of(table, 293.15, 101325.0).with(MediumParameter.GRADE, 10e-6 * Math.sqrt(2.0)));
+        assertThat(between.viscosity()).isCloseTo(Math.sqrt(0.070 * 0.140), withinPercentage(1e-9));
+    }
+
+    @ParameterizedTest
+    @CsvSource(delimiter = ';', quoteCharacter = '~', textBlock = """
+            20,10,0.89,240;                  5,10,0.89,240;        16;  a grade that falls
+            20,20,0.88,140;                  20,10,0.88,140;       17;  a temperature that does not rise
+            # grade: 10 mm2/s to 20 mm2/s;   ## no range;          12;  a column grade without its range
+            # phase: liquid;                 # phase: gas;          4;  grades of a gas
+            20,30,0.87,90;                   20,29,0.87,90;         8;  beyond the rows
+            """)
+    void pointsAtTheFaultOfAFamily(String good, String bad, int line, String found) {
+        assertThat(GRADED).contains(good);
+        assertThat(problems(GRADED.replace(good, bad))).anySatisfy(problem -> {
+            assertThat(problem.line()).isEqualTo(line);
+            assertThat(problem.found()).contains(found);
+        });
+    }
+
+    @Test
+    void aTableOfTheUserHasRowsAndNoFormula() throws IOException {
+        String header =
+                GOOD.lines().filter(line -> line.startsWith("#")).reduce("# law: sea water\n", (a, b) -> a + b + "\n");
+        MediumTable table = read(header);
+        assertThatThrownBy(() -> Media.at(MediumQuery.of(table, 293.15, 101325.0)))
+                .isInstanceOf(MediumTableException.class)
+                .hasMessageContaining("'sea water'");
+    }
+
     @Test
     void nothingIsExtrapolatedBeyondTheRows() throws IOException {
         TableCurves curves = new TableCurves(read(GOOD).rows());

@@ -141,7 +141,7 @@ def number(x):
 
 
 def table(name):
-    plain = {"2-propanol": (propanol, 0, 80), "ethylene glycol": (glycol, 0, 100), "mercury": (mercury, 0, 100),
+    plain = {"2-propanol": (propanol, -40, 80), "ethylene glycol": (glycol, -10, 100), "mercury": (mercury, 0, 100),
              "fluoroketone": (fluoroketone, 0, 45)}
     if name in plain:
         law, low, high = plain[name]
@@ -150,7 +150,7 @@ def table(name):
             print(",".join([str(c)] + [number(x) for x in row]))
     elif name == "silicone oil":
         for grade in [0.65, 1] + list(SILICONE):
-            for c in range(0, 101, 5):
+            for c in range(-25, 101, 5):
                 print(",".join(["%g" % grade, str(c)] + [number(x) for x in silicone(grade, c + ICE)]))
     elif name == "mineral oil":
         for grade in MINERAL:
@@ -172,14 +172,14 @@ def reference():
     def line(name, parameter, c, row):
         cells = [number(x) for x in (list(row) + [None] * 3)[:3]]
         print(",".join([name, parameter, "%g" % c] + cells))
-    for name, law, high in (("2-propanol", propanol, 80), ("ethylene glycol", glycol, 100), ("mercury", mercury, 100),
-                            ("fluoroketone", fluoroketone, 45)):
-        for c in range(0, high, 5):
+    for name, law, low, high in (("2-propanol", propanol, -40, 80), ("ethylene glycol", glycol, -10, 100),
+                                 ("mercury", mercury, 0, 100), ("fluoroketone", fluoroketone, 0, 45)):
+        for c in range(low, high, 5):
             line(name, "", c + 2.5, law(c + 2.5 + ICE))
     for c in range(0, 75, 5):
         line("ethanol", "", c + 2.5, (None, ethanol_viscosity(c + 2.5 + ICE)))
     for grade in [0.65, 1] + list(SILICONE):
-        for c in (2.5, 27.5, 52.5, 97.5):
+        for c in (-22.5, 2.5, 27.5, 52.5, 97.5):
             line("silicone oil", "%g" % grade, c, silicone(grade, c + ICE))
     for grade in MINERAL:
         for c in (2.5, 27.5, 52.5, 97.5):
