@@ -2,6 +2,7 @@ package flowshy.response;
 
 import java.util.List;
 import java.util.Locale;
+import java.util.Optional;
 import org.hipparchus.exception.MathRuntimeException;
 import org.hipparchus.linear.Array2DRowRealMatrix;
 import org.hipparchus.linear.ArrayRealVector;
@@ -71,13 +72,9 @@ public final class FreeSwingFit {
     private FreeSwing best(double rate) {
         Optimum best = null;
         for (double trial : TRIALS) {
-            try {
-                Optimum found = fit(rate, 2.0 * FastMath.PI * trial);
-                if (Double.isFinite(found.getRMS()) && (best == null || found.getRMS() < best.getRMS())) {
-                    best = found;
-                }
-            } catch (MathRuntimeException e) {
-                continue; // this start leads nowhere; the others may
+            Optional<Optimum> found = fit(rate, 2.0 * FastMath.PI * trial);
+            if (found.isPresent() && (best == null || found.get().getRMS() < best.getRMS())) {
+                best = found.get();
             }
         }
         if (best == null) {
@@ -86,15 +83,21 @@ public final class FreeSwingFit {
         return judged(best);
     }
 
-    private Optimum fit(double rate, double turn) {
-        return new LevenbergMarquardtOptimizer()
-                .optimize(new LeastSquaresBuilder()
-                        .model(this::model)
-                        .target(signal)
-                        .start(new double[] {signal[0], 0.0, 0.0, rate, turn})
-                        .maxIterations(500)
-                        .maxEvaluations(2000)
-                        .build());
+    /** The nearest minimum; empty if this start leads nowhere, for the others may. */
+    private Optional<Optimum> fit(double rate, double turn) {
+        try {
+            Optimum found = new LevenbergMarquardtOptimizer()
+                    .optimize(new LeastSquaresBuilder()
+                            .model(this::model)
+                            .target(signal)
+                            .start(new double[] {signal[0], 0.0, 0.0, rate, turn})
+                            .maxIterations(500)
+                            .maxEvaluations(2000)
+                            .build());
+            return Optional.of(found).filter(f -> Double.isFinite(f.getRMS()));
+        } catch (MathRuntimeException e) {
+            return Optional.empty();
+        }
     }
 
     /** Values and derivatives for a, b, c, λ, ω; λ and ω per period of the first guess. */

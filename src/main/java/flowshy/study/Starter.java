@@ -78,7 +78,7 @@ public final class Starter {
         add(lines, "suspension.readout-noise|4e-9 rad/rtHz");
         add(lines, "medium|{name: air, temperature: 20 degC, pressure: 101.325 kPa, humidity: 50 %}");
         chosen(COVERS, "--cover", cover).forEach(line -> add(lines, line));
-        add(lines, "band|{from: 10 Hz, to: 400 Hz}");
+        add(lines, "band|{from: 30 Hz, to: 300 Hz}");
         add(lines, "accept|{rejection: 20 dB}");
         add(lines, "calibration|{frequency: 100 Hz, cover: " + cover + "}");
         add(lines, "document|{project: first trial, revision: A}");

@@ -5,6 +5,8 @@ import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
 import flowshy.stream.cover.Cover;
 import flowshy.study.text.StudyException;
+import flowshy.verdict.BandsQuestion;
+import flowshy.verdict.Decision;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -36,6 +38,8 @@ class StarterTest {
         assertThat(study.device().hair().profile().shape()).isEqualTo(shape);
         assertThat(study.device().cover()).isEqualTo(cover.equals("open") ? Cover.OPEN : Cover.SEALED);
         assertThat(study.device().suspension()).isPresent();
+        BandsQuestion question = new BandsQuestion(study.device(), study.band(), study.acceptance());
+        assertThat(question.answer().verdict().decision()).isEqualTo(Decision.MEETS);
         assertThat(study.understood()).hasSizeGreaterThan(20);
         assertThat(text.lines().filter(line -> line.contains("#")).count()).isGreaterThan(20);
         assertThat(text.lines())

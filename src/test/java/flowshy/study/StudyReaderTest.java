@@ -26,6 +26,8 @@ import flowshy.response.SuspensionStatement.Spring;
 import flowshy.response.SuspensionStatement.Stiffness;
 import flowshy.stream.cover.Cover;
 import flowshy.study.keys.Form;
+import flowshy.study.keys.KeyRow;
+import flowshy.study.keys.Keys;
 import flowshy.study.text.Problem;
 import flowshy.study.text.StudyException;
 import flowshy.verdict.Band;
@@ -313,6 +315,44 @@ class StudyReaderTest {
                         .map(p -> p.substring(0, p.indexOf(": ")))
                         .toList())
                 .containsExactly("s.yaml:1:33", "s.yaml:2:36", "s.yaml:3:13", "s.yaml:4:14", "s.yaml:5:1");
+    }
+
+    /** Every key set to every kind of value over two studies: a study or problems, never another exception. */
+    @Test
+    void noSettingBreaksTheReader() throws IOException {
+        List<String> values = List.of(
+                "1",
+                "0 um",
+                "-3 um",
+                "1e308 m",
+                "20 degC",
+                "50 %",
+                "1e-9 N.m/rad",
+                "air",
+                "sealed",
+                "{name: helium}",
+                "{value: 3, in: air}");
+        Path small = Files.writeString(folder.resolve("a.yaml"), HAIR + "medium: air\n");
+        Path large = Files.writeString(folder.resolve("b.yaml"), Starter.study("club", "sealed"));
+        int accepted = 0;
+        int refused = 0;
+        int turn = 0;
+        for (KeyRow row : Keys.rows()) {
+            for (String value : values) {
+                Path file = turn++ % 4 == 0 ? large : small;
+                try {
+                    assertThat(StudyReader.read(file, List.of(row.path() + "=" + value))
+                                    .band())
+                            .isNotNull();
+                    accepted++;
+                } catch (StudyException e) {
+                    assertThat(e.problems()).as(row.path() + "=" + value).isNotEmpty();
+                    refused++;
+                }
+            }
+        }
+        assertThat(accepted).isGreaterThan(80);
+        assertThat(refused).isGreaterThan(1000);
     }
 
     @Test
