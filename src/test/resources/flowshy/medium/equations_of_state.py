@@ -208,12 +208,12 @@ if __name__ == "__main__":
     print("# Not made by this project's Java code.")
     print("gas,temperature_degC,pressure_Pa,density_kg_m3,sound_speed_m_s,viscosity_Pa_s")
     for name, gas in GASES.items():
-        for celsius in (-50, -30, -10, 20, 50, 100, 150):
-            for pressure in (1e3, 3e4, 3e5, 6e5, 1e6):
+        for celsius in (-50, -47.5, -30, -12.5, 20, 22.5, 50, 97.5, 147.5, 150):
+            for pressure in (1e3, 3e4, 101325, 3e5, 6e5, 1e6):
                 t = celsius + 273.15
                 if name != "nitrogen" and t < {"carbon dioxide": 304.1, "sulfur hexafluoride": 318.7}[name]:
                     if pressure > 0.99 * saturation(name, t):
                         continue
                 n, rho, w = state(gas, t, pressure)
                 mu = "%.9g" % nitrogen_viscosity(t, n) if name == "nitrogen" else ""
-                print("%s,%d,%g,%.9g,%.8g,%s" % (name, celsius, pressure, rho, w, mu))
+                print("%s,%g,%.6g,%.9g,%.8g,%s" % (name, celsius, pressure, rho, w, mu))
