@@ -10,7 +10,6 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.concurrent.Callable;
-import org.hipparchus.util.FastMath;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
@@ -68,10 +67,7 @@ final class FillCommand implements Callable<Integer> {
         if (!only.isEmpty()) {
             fills = chosen(fills);
         }
-        double reference = study.calibration().isPresent()
-                ? study.calibration().get().frequency()
-                : FastMath.sqrt(study.band().from() * study.band().to());
-        return new FillQuestion(study.device(), study.band(), study.acceptance(), reference, fills);
+        return new FillQuestion(study.device(), study.band(), study.acceptance(), study.reference(), fills);
     }
 
     private List<Fill> chosen(List<Fill> known) {

@@ -26,6 +26,7 @@ import picocli.CommandLine.Spec;
         },
         subcommands = {
             BandsCommand.class,
+            LidCommand.class,
             FillCommand.class,
             CylinderCommand.class,
             MediaCommand.class,

@@ -63,7 +63,7 @@ final class TextPage {
      * @param words a sentence or more
      */
     void note(String mark, String words) {
-        wrap("  " + mark + " ", "    ", words);
+        wrap("  ", "    ", mark + " " + words);
     }
 
     /**

@@ -40,8 +40,19 @@ public record Calibration(double frequency, Cover cover) {
      * @return the figures
      */
     public Figures figures(Device device) {
-        ResponsePoint use = new Response(device).at(frequency);
-        ResponsePoint bench = new Response(calibrated(device)).at(frequency);
+        return figures(device, calibrated(device));
+    }
+
+    /**
+     * Sensitivity of one device, and of another against it, at the calibration frequency.
+     *
+     * @param used the device in use
+     * @param standard the device it is compared with
+     * @return the figures
+     */
+    public Figures figures(Device used, Device standard) {
+        ResponsePoint use = new Response(used).at(frequency);
+        ResponsePoint bench = new Response(standard).at(frequency);
         if (use.motion().isPresent() && bench.motion().isPresent()) {
             double sensitivity = bench.motion().get().norm();
             return new Figures(sensitivity, true, use.motion().get().norm() / sensitivity);

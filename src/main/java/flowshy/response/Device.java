@@ -3,6 +3,7 @@ package flowshy.response;
 import flowshy.hair.Hair;
 import flowshy.medium.Medium;
 import flowshy.stream.cover.Cover;
+import flowshy.stream.cover.Covers;
 import java.util.Optional;
 
 /**
@@ -22,6 +23,15 @@ public record Device(Hair hair, Optional<Suspension> suspension, Medium outside,
      */
     public double pivotDepth() {
         return suspension.map(Suspension::pivotDepth).orElse(0.0);
+    }
+
+    /**
+     * The same device without its cover, standing in the outside medium.
+     *
+     * @return the bare device
+     */
+    public Device bare() {
+        return new Device(hair, suspension, outside, Covers.OPEN, outside);
     }
 
     /**

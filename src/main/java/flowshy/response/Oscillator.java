@@ -4,6 +4,7 @@ import flowshy.hair.Hair;
 import flowshy.hair.Moments;
 import flowshy.medium.Medium;
 import flowshy.stream.cover.Cover;
+import flowshy.stream.cover.Covers;
 import flowshy.torque.TorqueModel;
 import java.util.Optional;
 import org.hipparchus.analysis.solvers.BracketingNthOrderBrentSolver;
@@ -39,7 +40,7 @@ public final class Oscillator {
      * @param medium what surrounds it, empty for vacuum
      */
     public Oscillator(Hair hair, Suspension suspension, Optional<Medium> medium) {
-        this(hair, suspension, medium, Cover.OPEN);
+        this(hair, suspension, medium, Covers.OPEN);
     }
 
     /**

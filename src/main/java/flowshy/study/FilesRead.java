@@ -18,6 +18,7 @@ import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.regex.Pattern;
 
 /** Reads the files that a study names, beside the study, and remembers their digests. */
 final class FilesRead {
@@ -38,6 +39,19 @@ final class FilesRead {
      */
     ColumnFile table(Form form, String key, List<ColumnFile.Column> wanted, int most) {
         return ColumnFile.read(text(form.word(key).orElseThrow(), form.position(key), key), wanted, most);
+    }
+
+    /** Whether the header of a table names a column; a file that cannot be opened has none, its reader tells why. */
+    boolean heads(Form form, String key, String column) {
+        TextFile file = text(form.word(key).orElseThrow(), form.position(key), key);
+        return file.text()
+                .lines()
+                .filter(line -> !line.isBlank() && !line.startsWith("#"))
+                .findFirst()
+                .filter(line -> Pattern.compile("(^|[;,\\t])\\s*" + Pattern.quote(column) + "\\b")
+                        .matcher(line)
+                        .find())
+                .isPresent();
     }
 
     /**

@@ -4,11 +4,13 @@ import flowshy.response.Calibration;
 import flowshy.response.Device;
 import flowshy.verdict.Acceptance;
 import flowshy.verdict.Band;
+import flowshy.verdict.lid.Candidate;
 import java.util.Collections;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import org.hipparchus.util.FastMath;
 
 /**
  * A study as understood: SI inside, checked, nothing left to ask.
@@ -19,6 +21,7 @@ import java.util.Optional;
  * @param band band of use
  * @param acceptance limits asked
  * @param calibration where the sensitivity is stated, if asked
+ * @param candidates covers to choose from, in order of preference; empty if not stated
  * @param document entries of the document block, in the order of the key table
  * @param takenAs every default that was used
  * @param understood every value that was written, in the order of the key table
@@ -30,14 +33,25 @@ public record Study(
         Band band,
         Acceptance acceptance,
         Optional<Calibration> calibration,
+        List<Candidate> candidates,
         Map<String, String> document,
         List<TakenAs> takenAs,
         List<Understood> understood) {
     /** Copies the lists. */
     public Study {
         document = Collections.unmodifiableMap(new LinkedHashMap<>(document));
+        candidates = List.copyOf(candidates);
         takenAs = List.copyOf(takenAs);
         understood = List.copyOf(understood);
+    }
+
+    /**
+     * Frequency at which sensitivities are compared.
+     *
+     * @return the calibration's, or the middle of the band on a logarithmic scale [Hz]
+     */
+    public double reference() {
+        return calibration.map(Calibration::frequency).orElseGet(() -> FastMath.sqrt(band.from() * band.to()));
     }
 
     /**

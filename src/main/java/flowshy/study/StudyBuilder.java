@@ -6,6 +6,7 @@ import flowshy.response.Calibration;
 import flowshy.response.Device;
 import flowshy.response.Suspension;
 import flowshy.stream.cover.Cover;
+import flowshy.stream.cover.Covers;
 import flowshy.study.keys.Field;
 import flowshy.study.keys.Form;
 import flowshy.study.keys.KeyRow;
@@ -15,6 +16,7 @@ import flowshy.study.text.TextFile;
 import flowshy.study.units.Quantity;
 import flowshy.verdict.Acceptance;
 import flowshy.verdict.Band;
+import flowshy.verdict.lid.Candidate;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.Comparator;
@@ -41,15 +43,19 @@ final class StudyBuilder {
     Study build(TextFile file, List<String> settings) {
         Optional<Hair> hair = new HairBuilder(form, problems, files).build();
         Optional<Medium> outside = media.build("medium");
-        Cover cover = cover("cover.kind");
-        Optional<Medium> around = cover.closed() && form.has("cover.fill")
-                ? outside.flatMap(used -> media.sealed("cover.fill", used.temperature()))
-                : outside;
+        Optional<Band> band = band();
+        CoverBuilder covers = new CoverBuilder(form, problems, files, media);
+        Optional<CoverBuilder.Fitted> cover = covers.build("cover", hair, outside, band);
+        List<Candidate> candidates = candidates(covers, hair, outside, band);
         SuspensionBuilder suspensions = new SuspensionBuilder(form, problems, media, files);
         Optional<Suspension> suspension = suspensions.build(hair);
-        Optional<Band> band = band();
         problems.throwIfAny();
-        Device device = new Device(hair.orElseThrow(), suspension, outside.orElseThrow(), cover, around.orElseThrow());
+        Device device = new Device(
+                hair.orElseThrow(),
+                suspension,
+                outside.orElseThrow(),
+                cover.orElseThrow().cover(),
+                cover.orElseThrow().around());
         return new Study(
                 form.word("title").orElse(""),
                 new Study.Origin(file.name(), file.sha256(), files.read(), settings),
@@ -59,13 +65,24 @@ final class StudyBuilder {
                         form.given("accept.rejection") ? form.siIfAny("accept.rejection") : OptionalDouble.empty(),
                         form.siIfAny("accept.error")),
                 calibration(),
+                candidates,
                 document(),
                 takenAs(suspensions.taken()),
                 understood());
     }
 
-    private Cover cover(String path) {
-        return form.word(path).orElse("open").equals("sealed") ? Cover.SEALED : Cover.OPEN;
+    private List<Candidate> candidates(
+            CoverBuilder covers, Optional<Hair> hair, Optional<Medium> outside, Optional<Band> band) {
+        List<Candidate> candidates = new ArrayList<>();
+        for (int i = 0; form.has("candidates[" + i + "].kind"); i++) {
+            covers.build("candidates[" + i + "]", hair, outside, band)
+                    .ifPresent(fitted -> candidates.add(new Candidate(fitted.cover(), fitted.around())));
+        }
+        return candidates;
+    }
+
+    private Cover calibrationCover(String path) {
+        return form.word(path).orElse("open").equals("sealed") ? Covers.SEALED : Covers.OPEN;
     }
 
     private Optional<Band> band() {
@@ -86,7 +103,7 @@ final class StudyBuilder {
 
     private Optional<Calibration> calibration() {
         return form.has("calibration.frequency")
-                ? Optional.of(new Calibration(form.si("calibration.frequency"), cover("calibration.cover")))
+                ? Optional.of(new Calibration(form.si("calibration.frequency"), calibrationCover("calibration.cover")))
                 : Optional.empty();
     }
 

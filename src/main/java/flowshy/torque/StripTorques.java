@@ -7,6 +7,7 @@ import flowshy.medium.Medium;
 import flowshy.stream.StokesLayer;
 import flowshy.stream.WallShare;
 import flowshy.stream.cover.Cover;
+import flowshy.stream.cover.Covers;
 import org.hipparchus.complex.Complex;
 import org.hipparchus.util.FastMath;
 
@@ -24,7 +25,7 @@ public final class StripTorques implements TorqueModel {
     private final StripMesh mesh;
 
     StripTorques(Hair hair, Medium medium, double pivotDepth) {
-        this(hair, medium, pivotDepth, Cover.OPEN, 1);
+        this(hair, medium, pivotDepth, Covers.OPEN, 1);
     }
 
     /**

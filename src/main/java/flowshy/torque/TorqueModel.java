@@ -5,6 +5,7 @@ import flowshy.hair.Hair;
 import flowshy.medium.Medium;
 import flowshy.stream.StokesLayer;
 import flowshy.stream.cover.Cover;
+import flowshy.stream.cover.Covers;
 import org.hipparchus.complex.Complex;
 
 /** Torques on one hair in one medium, at any frequency. */
@@ -34,7 +35,7 @@ public interface TorqueModel {
      * @return the model
      */
     static TorqueModel of(Hair hair, Medium medium, double pivotDepth) {
-        return of(hair, medium, pivotDepth, Cover.OPEN);
+        return of(hair, medium, pivotDepth, Covers.OPEN);
     }
 
     /**

@@ -4,7 +4,7 @@ import flowshy.hair.Hair;
 import flowshy.hair.Moments;
 import flowshy.response.Device;
 import flowshy.response.Response;
-import flowshy.stream.cover.Cover;
+import flowshy.stream.cover.Covers;
 import flowshy.torque.Torques;
 import java.util.ArrayList;
 import java.util.List;
@@ -60,7 +60,7 @@ public record Levers(
      * @return in the order of frequency; empty under a sealed cover, where no flow turns the hair
      */
     public static List<Levers> of(BandsAnswer answer) {
-        if (!answer.device().cover().equals(Cover.OPEN)) {
+        if (!answer.device().cover().equals(Covers.OPEN)) {
             return List.of();
         }
         TreeSet<Double> frequencies = new TreeSet<>();

@@ -22,7 +22,7 @@ class CommandLineTest {
     Path folder;
 
     @ParameterizedTest
-    @ValueSource(strings = {"bands", "cylinder", "media", "check", "start"})
+    @ValueSource(strings = {"bands", "lid", "fill", "cylinder", "media", "check", "start"})
     void everyCommandHasHelpWithAnExample(String command) {
         Run run = Run.of(command, "--help");
         assertThat(run.code()).isZero();

@@ -3,7 +3,7 @@ package flowshy.study;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
-import flowshy.stream.cover.Cover;
+import flowshy.stream.cover.Covers;
 import flowshy.study.text.StudyException;
 import flowshy.verdict.BandsQuestion;
 import flowshy.verdict.Decision;
@@ -36,7 +36,7 @@ class StarterTest {
         String text = Starter.study(shape, cover);
         Study study = StudyReader.read(Files.writeString(folder.resolve("mine.yaml"), text), List.of());
         assertThat(study.device().hair().profile().shape()).isEqualTo(shape);
-        assertThat(study.device().cover()).isEqualTo(cover.equals("open") ? Cover.OPEN : Cover.SEALED);
+        assertThat(study.device().cover()).isEqualTo(cover.equals("open") ? Covers.OPEN : Covers.SEALED);
         assertThat(study.device().suspension()).isPresent();
         BandsQuestion question = new BandsQuestion(study.device(), study.band(), study.acceptance());
         assertThat(question.answer().verdict().decision()).isEqualTo(Decision.MEETS);

@@ -24,7 +24,7 @@ import flowshy.response.SuspensionStatement.Resonance;
 import flowshy.response.SuspensionStatement.RingDown;
 import flowshy.response.SuspensionStatement.Spring;
 import flowshy.response.SuspensionStatement.Stiffness;
-import flowshy.stream.cover.Cover;
+import flowshy.stream.cover.Covers;
 import flowshy.study.keys.Form;
 import flowshy.study.keys.KeyRow;
 import flowshy.study.keys.Keys;
@@ -82,7 +82,7 @@ class StudyReaderTest {
         assertThat(study.device().suspension()).isEmpty();
         assertThat(study.device().outside()).isEqualTo(Media.at(query));
         assertThat(study.device().around()).isEqualTo(study.device().outside());
-        assertThat(study.device().cover()).isEqualTo(Cover.OPEN);
+        assertThat(study.device().cover()).isEqualTo(Covers.OPEN);
         assertThat(study.band()).isEqualTo(new Band(1.0, 10_000.0));
         assertThat(study.acceptance().rejection()).isEmpty();
         assertThat(study.acceptance().margin()).isEqualTo(20.0);
@@ -129,7 +129,7 @@ class StudyReaderTest {
                 .contains(new Study.TakenAs("cover.fill.temperature", "30 degC", "as medium.temperature"));
         Study same = read(HAIR + "medium: nitrogen\ncover: sealed\n");
         assertThat(same.device().around()).isEqualTo(same.device().outside());
-        assertThat(same.device().cover()).isEqualTo(Cover.SEALED);
+        assertThat(same.device().cover()).isEqualTo(Covers.SEALED);
         Study mixed = read(HAIR + "medium: {name: nitrogen, second: helium, share: 20 %}\n");
         assertThat(mixed.device().outside())
                 .isEqualTo(Media.at(MediumQuery.of("nitrogen", 293.15, 101325.0).with("helium", 0.2)));
@@ -196,7 +196,7 @@ class StudyReaderTest {
         assertThat(study.acceptance().rejection()).hasValue(12.0);
         assertThat(study.acceptance().error().orElseThrow()).isCloseTo(0.2 / Math.sqrt(2.0), within(1e-16));
         assertThat(study.calibration().orElseThrow().frequency()).isEqualTo(60.0);
-        assertThat(study.calibration().orElseThrow().cover()).isEqualTo(Cover.SEALED);
+        assertThat(study.calibration().orElseThrow().cover()).isEqualTo(Covers.SEALED);
         assertThat(study.document()).containsExactly(Map.entry("project", "p"), Map.entry("revision", "2.10"));
         assertThat(study.band()).isEqualTo(new Band(5.0, 90.0));
     }

@@ -7,7 +7,7 @@ import flowshy.hair.Cylinder;
 import flowshy.hair.Hair;
 import flowshy.hair.Profile;
 import flowshy.medium.Medium;
-import flowshy.stream.cover.Cover;
+import flowshy.stream.cover.Covers;
 import java.util.List;
 import java.util.Map;
 import org.hipparchus.complex.Complex;
@@ -33,7 +33,7 @@ class StripTorquesTest {
             for (Medium medium : Hairs.media()) {
                 Hair hair = Hairs.of(profile.getValue(), 1200.0);
                 TorqueModel usual = new StripTorques(hair, medium, 3e-6);
-                TorqueModel fine = new StripTorques(hair, medium, 3e-6, Cover.OPEN, 2);
+                TorqueModel fine = new StripTorques(hair, medium, 3e-6, Covers.OPEN, 2);
                 for (int i = 0; i < FREQUENCIES; i++) {
                     Torques one = usual.at(omega(i));
                     Torques two = fine.at(omega(i));
@@ -65,7 +65,7 @@ class StripTorquesTest {
                 Hair hair = Hairs.of(new Cylinder(8.3e-4, 3.7e-5), 1190.0);
                 TorqueModel closed = TorqueModel.of(hair, medium, depth);
                 assertThat(closed).isInstanceOf(CylinderTorques.class);
-                TorqueModel strips = new StripTorques(hair, medium, depth, Cover.OPEN, 4);
+                TorqueModel strips = new StripTorques(hair, medium, depth, Covers.OPEN, 4);
                 for (int i = 0; i < FREQUENCIES; i++) {
                     Torques one = closed.at(omega(i));
                     Torques two = strips.at(omega(i));

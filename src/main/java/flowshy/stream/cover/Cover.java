@@ -4,7 +4,6 @@ import flowshy.math.Caveat;
 import flowshy.medium.Medium;
 import flowshy.stream.WallShare;
 import java.util.List;
-import java.util.Optional;
 import java.util.OptionalDouble;
 import org.hipparchus.complex.Complex;
 
@@ -15,12 +14,6 @@ import org.hipparchus.complex.Complex;
  * T_motion = T_carried − T_flow, with T_flow = φ ρ P[1 + Γ s].
  */
 public sealed interface Cover permits OpenCover, SealedCover, RoofedCover, VentedCover, MeasuredCover {
-    /** Nothing over the hair. */
-    Cover OPEN = new OpenCover();
-
-    /** A full, closed cavity whose walls are far from the hair. */
-    Cover SEALED = new SealedCover(Optional.empty());
-
     /**
      * The word a study uses.
      *

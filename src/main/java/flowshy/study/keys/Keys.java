@@ -65,8 +65,16 @@ public final class Keys {
                         Presence.leftOut("none", "torques are given, movements are not"),
                         "what the hair turns on"),
                 Key.required("medium", MediumKeys.outside(), "gas or liquid around the device"),
-                Key.of("cover", cover(), Presence.taken("open", "a bare device"), "what stands over the hair"),
-                Key.later("candidates", "covers to choose from", "set cover to one of them at a time"),
+                Key.of(
+                        "cover",
+                        CoverKeys.group(),
+                        Presence.taken("open", "a bare device"),
+                        "what stands over the hair"),
+                Key.of(
+                        "candidates",
+                        new GroupList(CoverKeys.group()),
+                        Presence.OPTIONAL,
+                        "covers to choose from, in order of preference; for the command lid"),
                 Key.of("band", band(), Presence.IMPLIED, "band of use"),
                 Key.later("motion", "smallest and largest motion to be read", "accept.error states the error allowed"),
                 Key.later("surroundings", "streams, tones and sound around", "bands decides at equal accelerations"),
@@ -82,29 +90,6 @@ public final class Keys {
                         Presence.taken("off", "strip theory"),
                         "correction for tip and wall"),
                 Key.optional("document", document(), "entries of the title block"));
-    }
-
-    private static Group cover() {
-        Key kind = Key.required(
-                "kind",
-                Words.of("open", "sealed")
-                        .later("open and sealed are the covers of this version", "roofed", "vented", "measured"),
-                "open: nothing; sealed: a full, closed cavity");
-        Key fill = Key.of(
-                "fill",
-                MediumKeys.fill(),
-                Presence.leftOut("as medium", "the cavity holds what is outside"),
-                "gas or liquid in the cavity");
-        Map<String, List<Key>> kinds = new LinkedHashMap<>();
-        kinds.put("open", List.of());
-        String confined = "leave it out: the cavity is taken as wide";
-        kinds.put(
-                "sealed",
-                List.of(
-                        fill,
-                        Key.later("diameter", "inner diameter of the cavity", confined),
-                        Key.later("height", "inner height of the cavity", confined)));
-        return Group.of("cover", List.of()).selectedBy(kind, kinds).shortFor("kind");
     }
 
     private static Group band() {

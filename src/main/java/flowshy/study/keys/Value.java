@@ -4,7 +4,7 @@ import flowshy.study.text.Node;
 import java.util.Map;
 
 /** What may stand behind a key; each kind reads itself and describes itself. */
-public sealed interface Value permits Measure, Words, Text, Points, Group {
+public sealed interface Value permits Measure, Words, Text, Points, Group, GroupList {
     /**
      * Its kind in a few words, for the list of keys.
      *

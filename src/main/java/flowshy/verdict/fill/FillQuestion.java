@@ -8,6 +8,7 @@ import flowshy.response.Device;
 import flowshy.response.Response;
 import flowshy.response.ResponsePoint;
 import flowshy.stream.cover.Cover;
+import flowshy.stream.cover.Covers;
 import flowshy.verdict.Acceptance;
 import flowshy.verdict.Band;
 import flowshy.verdict.BandsAnswer;
@@ -44,7 +45,7 @@ public record FillQuestion(Device device, Band band, Acceptance acceptance, doub
         ResponsePoint base = new Response(device).at(reference);
         List<FillRow> rows = new ArrayList<>();
         for (Fill fill : fills) {
-            for (Cover cover : List.of(Cover.OPEN, Cover.SEALED)) {
+            for (Cover cover : List.of(Covers.OPEN, Covers.SEALED)) {
                 rows.add(row(fill, cover, base));
             }
         }

@@ -99,7 +99,7 @@ class SchemaTest {
                 "suspension: {resonance: {frequency: 3 Hz, in: {density: 1 g/cm3}}}",
                 "suspension: {resonance: {frequency: 3 Hz, in: {name: air, second: helium}}}",
                 "finite-length: auto",
-                "candidates: [open]",
+                "candidates: [open, lid]",
                 "calibration: {cover: open}",
                 "band: {from: 3 Hz, to: 5 Hz, by: 1 Hz}",
             })

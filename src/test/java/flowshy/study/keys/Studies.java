@@ -68,6 +68,23 @@ final class Studies {
             hair: {length: 610 um, diameter: 77 um, density: 1.3 g/cm3}
             suspension: {stiffness: 3 nN.m/rad, ring-down: {decay-time: 1 ms, in: {file: own.csv}}}
             medium: nitrogen
+            """, """
+            hair: {length: 610 um, diameter: 77 um, density: 1.3 g/cm3}
+            medium: nitrogen
+            cover: {kind: roofed, gap: 1 mm, length: 5 mm}
+            candidates: [open, {kind: sealed, diameter: 2 mm, height: 1 mm}]
+            """, """
+            hair: {length: 610 um, diameter: 77 um, density: 1.3 g/cm3}
+            medium: nitrogen
+            cover: {kind: vented, holes: 4, hole-diameter: 0.3 mm, hole-depth: 0.2 mm, sides: through, cavity-volume: 30 mm3, cavity-section: 9 mm2}
+            """, """
+            hair: {length: 610 um, diameter: 77 um, density: 1.3 g/cm3}
+            medium: nitrogen
+            cover: {kind: sealed, diameter: 2 mm, height: 1 mm}
+            """, """
+            hair: {length: 610 um, diameter: 77 um, density: 1.3 g/cm3}
+            medium: nitrogen
+            cover: {kind: measured, file: lid.csv}
             """);
 
     private Studies() {}

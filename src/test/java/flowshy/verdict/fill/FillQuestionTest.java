@@ -11,7 +11,7 @@ import flowshy.medium.MediumQuery;
 import flowshy.response.Attitude;
 import flowshy.response.Device;
 import flowshy.response.Suspension;
-import flowshy.stream.cover.Cover;
+import flowshy.stream.cover.Covers;
 import flowshy.verdict.Acceptance;
 import flowshy.verdict.Band;
 import flowshy.verdict.BandsQuestion;
@@ -29,7 +29,7 @@ class FillQuestionTest {
                 new Hair(new Cylinder(7e-4, 4e-5), density, OptionalDouble.empty()),
                 Optional.of(new Suspension(4e-9, 2e-13, 0.0, 0.0, Attitude.HANGING, OptionalDouble.empty())),
                 NITROGEN,
-                Cover.OPEN,
+                Covers.OPEN,
                 NITROGEN);
     }
 

@@ -1,0 +1,175 @@
+package flowshy.study;
+
+import flowshy.hair.Hair;
+import flowshy.math.LogTable;
+import flowshy.medium.Medium;
+import flowshy.stream.cover.Cavity;
+import flowshy.stream.cover.Cover;
+import flowshy.stream.cover.MeasuredCover;
+import flowshy.stream.cover.OpenCover;
+import flowshy.stream.cover.RoofedCover;
+import flowshy.stream.cover.SealedCover;
+import flowshy.stream.cover.VentedCover;
+import flowshy.study.keys.Form;
+import flowshy.study.text.Problems;
+import flowshy.study.text.StudyException;
+import flowshy.study.units.Dimension;
+import flowshy.verdict.Band;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+
+/** From the keys of a cover to what stands over the hair; refuses one that the hair does not fit under. */
+final class CoverBuilder {
+    private static final int MOST_ROWS = 10000;
+
+    private final Form form;
+    private final Problems problems;
+    private final FilesRead files;
+    private final MediumBuilder media;
+
+    /**
+     * A cover with the medium under it.
+     *
+     * @param cover the cover
+     * @param around what touches the hair
+     */
+    record Fitted(Cover cover, Medium around) {}
+
+    CoverBuilder(Form form, Problems problems, FilesRead files, MediumBuilder media) {
+        this.form = form;
+        this.problems = problems;
+        this.files = files;
+        this.media = media;
+    }
+
+    /** The cover of a group; empty if it, or the hair or medium it needs, has a problem. */
+    Optional<Fitted> build(String path, Optional<Hair> hair, Optional<Medium> outside, Optional<Band> band) {
+        if (problems.touches(path)) {
+            return Optional.empty();
+        }
+        Optional<Cover> cover = cover(path, outside, band);
+        if (cover.isEmpty() || outside.isEmpty() || (hair.isPresent() && !fits(path, cover.get(), hair.get()))) {
+            return Optional.empty();
+        }
+        if (!cover.get().closed() || !form.has(path + ".fill")) {
+            return Optional.of(new Fitted(cover.get(), outside.get()));
+        }
+        return media.sealed(path + ".fill", outside.get().temperature()).map(fill -> new Fitted(cover.get(), fill));
+    }
+
+    private Optional<Cover> cover(String path, Optional<Medium> outside, Optional<Band> band) {
+        return switch (form.word(path + ".kind").orElse("open")) {
+            case "roofed" -> Optional.of(new RoofedCover(form.si(path + ".gap"), form.si(path + ".length")));
+            case "vented" -> vented(path, outside);
+            case "sealed" ->
+                Optional.of(new SealedCover(
+                        form.has(path + ".diameter") && form.has(path + ".height")
+                                ? Optional.of(new Cavity(form.si(path + ".diameter"), form.si(path + ".height")))
+                                : Optional.empty()));
+            case "measured" -> measured(path, band);
+            default -> Optional.of(new OpenCover());
+        };
+    }
+
+    private Optional<Cover> vented(String path, Optional<Medium> outside) {
+        double holes = form.si(path + ".holes");
+        if (holes != Math.rint(holes)) {
+            return refuse(path + ".holes", "a share of a hole", "a whole number of holes");
+        }
+        if (outside.filter(medium -> medium.soundSpeed().isEmpty()).isPresent()) {
+            return refuse(
+                    path + ".kind",
+                    "the sound speed of " + outside.get().name() + " is not known",
+                    "a vented cover breathes by the compliance of its cavity: state medium.sound-speed");
+        }
+        return Optional.of(new VentedCover(
+                (int) holes,
+                form.si(path + ".hole-diameter"),
+                form.si(path + ".hole-depth"),
+                form.word(path + ".sides").orElse("one").equals("through"),
+                form.si(path + ".cavity-volume"),
+                form.si(path + ".cavity-section")));
+    }
+
+    private Optional<Cover> measured(String path, Optional<Band> band) {
+        String key = path + ".file";
+        String name = form.word(key).orElseThrow();
+        List<ColumnFile.Column> columns = new ArrayList<>(List.of(
+                new ColumnFile.Column("frequency", Optional.of(Dimension.FREQUENCY)),
+                new ColumnFile.Column("attenuation", Optional.of(Dimension.LEVEL))));
+        try {
+            boolean phased = files.heads(form, key, "phase");
+            if (phased) {
+                columns.add(new ColumnFile.Column("phase", Optional.of(Dimension.ANGLE)));
+            }
+            ColumnFile table = files.table(form, key, columns, MOST_ROWS);
+            for (int i = 0; i < table.rows().size(); i++) {
+                double before = i == 0 ? 0.0 : table.rows().get(i - 1).get(0);
+                if (!(table.rows().get(i).get(0) > before)) {
+                    problems.add(
+                            table.position(i, 0), key, "a frequency that does not rise", "rows by rising frequency");
+                    return Optional.empty();
+                }
+            }
+            if (table.rows().size() < 2) {
+                return refuse(key, name + " has one row", "two or more");
+            }
+            LogTable attenuation = column(table, 1, 1.0);
+            if (band.isPresent()
+                    && !(attenuation.range().contains(band.get().from())
+                            && attenuation.range().contains(band.get().to()))) {
+                return refuse(
+                        key,
+                        name + " covers " + attenuation.range(),
+                        "an attenuation over the whole band of use; nothing is extrapolated: narrow band, or measure more");
+            }
+            return Optional.of(new MeasuredCover(
+                    name, attenuation, phased ? Optional.of(column(table, 2, 180.0 / Math.PI)) : Optional.empty()));
+        } catch (StudyException e) {
+            e.problems().forEach(problems::add);
+            return Optional.empty();
+        }
+    }
+
+    private static LogTable column(ColumnFile table, int column, double factor) {
+        return new LogTable(
+                table.rows().stream().map(row -> row.get(0)).toList(),
+                table.rows().stream().map(row -> row.get(column) * factor).toList());
+    }
+
+    private boolean fits(String path, Cover cover, Hair hair) {
+        double length = hair.profile().length();
+        if (cover instanceof RoofedCover roof && !(roof.gap() > length)) {
+            refuse(
+                    path + ".gap",
+                    "a roof " + form.word(path + ".gap").orElse("") + " above the wall touches the hair",
+                    "a gap above the hair's length");
+            return false;
+        }
+        if (cover instanceof SealedCover sealed && sealed.cavity().isPresent()) {
+            Cavity cavity = sealed.cavity().get();
+            if (!(cavity.height() > length)) {
+                refuse(
+                        path + ".height",
+                        "a cavity " + form.word(path + ".height").orElse("") + " high touches the hair",
+                        "a height above the hair's length");
+                return false;
+            }
+        }
+        if (cover.cavityRadius().isPresent()
+                && !(cover.cavityRadius().getAsDouble() > 1.01 * hair.profile().largestRadius())) {
+            refuse(
+                    path + ".kind",
+                    "a cavity hardly wider than the hair",
+                    "a cavity radius of 1.01 of the hair's or more, where the law of the confined cylinder holds");
+            return false;
+        }
+        return true;
+    }
+
+    private Optional<Cover> refuse(String key, String found, String accepted) {
+        problems.add(form.position(key), key, found, accepted);
+        return Optional.empty();
+    }
+}

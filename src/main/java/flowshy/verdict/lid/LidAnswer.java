@@ -1,0 +1,33 @@
+package flowshy.verdict.lid;
+
+import flowshy.verdict.BandsAnswer;
+import flowshy.verdict.Verdict;
+import java.util.List;
+import java.util.Optional;
+
+/**
+ * The lid decision.
+ *
+ * @param bare the device without a cover
+ * @param required attenuation a cover must give, by frequency
+ * @param reference frequency at which sensitivities are compared [Hz]
+ * @param covers the candidates, in order of preference
+ * @param chosen the first candidate that meets every limit
+ * @param remedies what would make the nearest candidate do, if none does
+ * @param verdict the decision
+ */
+public record LidAnswer(
+        BandsAnswer bare,
+        List<RequiredAttenuation> required,
+        double reference,
+        List<CoverRow> covers,
+        Optional<CoverRow> chosen,
+        List<String> remedies,
+        Verdict verdict) {
+    /** Copies the lists. */
+    public LidAnswer {
+        required = List.copyOf(required);
+        covers = List.copyOf(covers);
+        remedies = List.copyOf(remedies);
+    }
+}

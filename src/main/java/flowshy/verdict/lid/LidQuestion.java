@@ -1,0 +1,212 @@
+package flowshy.verdict.lid;
+
+import static flowshy.math.Figures.say;
+
+import flowshy.math.Caveat;
+import flowshy.medium.Phase;
+import flowshy.response.Calibration;
+import flowshy.response.Device;
+import flowshy.response.Response;
+import flowshy.stream.cover.Cavity;
+import flowshy.stream.cover.Cover;
+import flowshy.stream.cover.Covers;
+import flowshy.stream.cover.RoofedCover;
+import flowshy.stream.cover.SealedCover;
+import flowshy.stream.cover.VentedCover;
+import flowshy.verdict.Acceptance;
+import flowshy.verdict.Band;
+import flowshy.verdict.BandsAnswer;
+import flowshy.verdict.BandsQuestion;
+import flowshy.verdict.Decision;
+import flowshy.verdict.Limit;
+import flowshy.verdict.ThirdOctaves;
+import flowshy.verdict.Verdict;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import org.hipparchus.util.FastMath;
+
+/**
+ * Does the device need a lid?
+ *
+ * @param device of the study; its own cover is taken off for the bare figures
+ * @param band band of use
+ * @param acceptance limits asked
+ * @param reference frequency at which sensitivities are compared [Hz]
+ * @param candidates covers in order of preference; empty: open, roofed, vented, sealed of a usual size
+ */
+public record LidQuestion(
+        Device device, Band band, Acceptance acceptance, double reference, List<Candidate> candidates) {
+    /** Calibrations that differ by more are worth a warning: common practice, no source. */
+    private static final double CALIBRATION_CHANGE = 0.01;
+
+    private static final double NEARLY_EQUAL_DENSITY = 0.1;
+
+    /** Takes usual covers where none is stated. */
+    public LidQuestion {
+        candidates = candidates.isEmpty() ? usual(device) : List.copyOf(candidates);
+    }
+
+    /**
+     * Covers of a usual size for a hair (common practice, no source): a roof at 1.5 times its length, 6 lengths long; a lid with four
+     * holes of a quarter length over a cavity of 4 by 4 by 2 lengths; a sealed cavity 4 lengths wide and 2 high.
+     *
+     * @param device gives hair and medium
+     * @return open, roofed, vented if the sound speed is known, sealed
+     */
+    public static List<Candidate> usual(Device device) {
+        double length = device.hair().profile().length();
+        List<Candidate> covers = new ArrayList<>();
+        covers.add(new Candidate(Covers.OPEN, device.outside()));
+        covers.add(new Candidate(new RoofedCover(1.5 * length, 6.0 * length), device.outside()));
+        if (device.outside().soundSpeed().isPresent()) {
+            double volume = 32.0 * length * length * length;
+            covers.add(new Candidate(
+                    new VentedCover(4, 0.25 * length, 0.5 * length, false, volume, 8.0 * length * length),
+                    device.outside()));
+        }
+        covers.add(
+                new Candidate(new SealedCover(Optional.of(new Cavity(4.0 * length, 2.0 * length))), device.outside()));
+        return covers;
+    }
+
+    /**
+     * Every candidate, side by side, and the decision.
+     *
+     * @return the answer
+     */
+    public LidAnswer answer() {
+        Device bareDevice = device.bare();
+        BandsAnswer bare = new BandsQuestion(bareDevice, band, acceptance).answer();
+        List<RequiredAttenuation> required = ThirdOctaves.in(band).stream()
+                .map(frequency -> RequiredAttenuation.at(device, acceptance.margin(), frequency))
+                .toList();
+        List<CoverRow> rows =
+                candidates.stream().map(candidate -> row(candidate, bareDevice)).toList();
+        Optional<CoverRow> chosen =
+                asked() ? rows.stream().filter(row -> row.misses().isEmpty()).findFirst() : Optional.empty();
+        boolean none = asked() && chosen.isEmpty();
+        List<String> remedies =
+                none ? new Remedies(nearest(rows).candidate().over(device), band, acceptance).list() : List.of();
+        return new LidAnswer(bare, required, reference, rows, chosen, remedies, verdict(rows, chosen));
+    }
+
+    private boolean asked() {
+        return acceptance.rejection().isPresent();
+    }
+
+    private CoverRow row(Candidate candidate, Device bareDevice) {
+        Device covered = candidate.over(device);
+        BandsAnswer answer = new BandsQuestion(covered, band, acceptance).answer();
+        Calibration.Figures change = new Calibration(reference, Covers.OPEN).figures(covered, bareDevice);
+        List<String> misses = new ArrayList<>();
+        for (Limit limit : answer.verdict().limits()) {
+            if (limit.decision() == Decision.FAILS || limit.decision() == Decision.UNDECIDED) {
+                misses.add(
+                        limit.found().isPresent()
+                                ? say(
+                                        "%s misses by %.3g %s",
+                                        limit.name(),
+                                        FastMath.abs(
+                                                limit.required() - limit.found().getAsDouble()),
+                                        limit.unit())
+                                : limit.name() + ": " + limit.reason());
+            }
+        }
+        return new CoverRow(
+                candidate,
+                answer,
+                new Response(covered).at(reference),
+                change,
+                misses,
+                warnings(candidate, answer, change));
+    }
+
+    private List<String> warnings(Candidate candidate, BandsAnswer answer, Calibration.Figures change) {
+        List<String> warnings = new ArrayList<>();
+        double hair = device.hair().density();
+        double contrast = FastMath.abs(hair - candidate.around().density()) / hair;
+        if (candidate.cover().closed() && contrast < NEARLY_EQUAL_DENSITY) {
+            warnings.add(say(
+                    "the fill is nearly as dense as the hair: %.2g %% of its inertial torque is left",
+                    100.0 * contrast));
+        }
+        if (FastMath.abs(change.change() - 1.0) > CALIBRATION_CHANGE) {
+            warnings.add(say(
+                    "calibrations with and without this cover differ by %.3g %% at %.4g Hz",
+                    change.percent(), reference));
+        }
+        clearance(candidate.cover()).ifPresent(gap -> {
+            double layer = answer.facts().layer().largest();
+            if (gap < layer) {
+                warnings.add(say(
+                        "%.3g um over the tip is less than the Stokes layer of %.3g um at %.4g Hz: the lid's own layer reaches the"
+                                + " hair, strip theory sees only part of it",
+                        1e6 * gap, 1e6 * layer, band.from()));
+            }
+        });
+        if (candidate.cover() instanceof VentedCover vented) {
+            vented.resonance(candidate.around()).ifPresent(resonance -> {
+                if (resonance >= band.from() && resonance <= band.to()) {
+                    warnings.add(say("the vents resonate within the band, at %.4g Hz", resonance));
+                }
+            });
+        }
+        if (candidate.cover().closed()) {
+            warnings.add("sound transmitted through the lid is not modelled");
+        }
+        if (candidate.cover().closed() && candidate.around().phase() == Phase.LIQUID) {
+            warnings.add("a liquid fill: check its freezing and boiling points over the whole range of temperature");
+        }
+        for (Caveat caveat : answer.caveats()) {
+            if (caveat.weight() == Caveat.Weight.OUT_OF_RANGE) {
+                warnings.add(caveat.text());
+            }
+        }
+        return warnings;
+    }
+
+    private OptionalDouble clearance(Cover cover) {
+        double length = device.hair().profile().length();
+        if (cover instanceof RoofedCover roof) {
+            return OptionalDouble.of(roof.gap() - length);
+        }
+        if (cover instanceof SealedCover sealed && sealed.cavity().isPresent()) {
+            return OptionalDouble.of(sealed.cavity().get().height() - length);
+        }
+        return OptionalDouble.empty();
+    }
+
+    /** The candidate whose least rejection is highest. */
+    private static CoverRow nearest(List<CoverRow> rows) {
+        return rows.stream()
+                .max(Comparator.comparingDouble(row ->
+                        row.answer().least().map(BandsAnswer.Extreme::rejection).orElse(Double.NEGATIVE_INFINITY)))
+                .orElseThrow();
+    }
+
+    private Verdict verdict(List<CoverRow> rows, Optional<CoverRow> chosen) {
+        if (!asked()) {
+            return new Verdict(
+                    Decision.NOT_ASKED,
+                    List.of(),
+                    "No limit is stated: covers are compared, none is chosen. State accept.rejection to have one chosen.");
+        }
+        if (chosen.isPresent()) {
+            Cover cover = chosen.get().candidate().cover();
+            String sentence = cover.equals(Covers.OPEN)
+                    ? "No lid is needed: the bare device meets every limit."
+                    : "The first candidate that meets every limit is: " + cover.words() + ".";
+            return new Verdict(Decision.MEETS, chosen.get().answer().verdict().limits(), sentence);
+        }
+        CoverRow nearest = nearest(rows);
+        boolean undecided = rows.stream().anyMatch(row -> row.answer().verdict().decision() == Decision.UNDECIDED);
+        return new Verdict(
+                undecided ? Decision.UNDECIDED : Decision.FAILS,
+                nearest.answer().verdict().limits(),
+                "No candidate meets every limit. The nearest is "
+                        + nearest.candidate().cover().words() + ": " + String.join("; ", nearest.misses()) + ".");
+    }
+}
