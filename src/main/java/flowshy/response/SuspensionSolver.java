@@ -15,7 +15,6 @@ import java.util.function.DoubleFunction;
 import java.util.function.DoubleUnaryOperator;
 import org.hipparchus.analysis.solvers.BracketingNthOrderBrentSolver;
 import org.hipparchus.complex.Complex;
-import org.hipparchus.exception.MathRuntimeException;
 import org.hipparchus.util.FastMath;
 
 /**
@@ -27,6 +26,15 @@ import org.hipparchus.util.FastMath;
  */
 public final class SuspensionSolver {
     private static final double ACCURACY = 1e-13;
+
+    /** A damping of zero is met up to this share of a strong one. */
+    private static final double ROUNDING = 1e-9;
+
+    /** A swing in a medium is looked for from here times the resonance down, in steps of this ratio, to a twentieth. */
+    private static final double ABOVE = 1.5;
+
+    private static final double STEP = 1.01;
+    private static final double BELOW = 20.0;
 
     private final Hair hair;
     private final SuspensionStatement statement;
@@ -108,18 +116,32 @@ public final class SuspensionSolver {
         String tooHigh = say(
                 "a quality factor of %.4g in %s is above what the fluid on the hair alone allows (%.4g)",
                 target, name(quality.in()), fluidOnly.quality());
-        if (target <= 0.55) { // the definition of an overdamped device, see Oscillator.decay
-            return left(
-                    "quality",
-                    device.stiffness() / (omega * target) - fluidDamping,
-                    device.stiffness() / (omega * target),
-                    tooHigh);
+        if (target <= Oscillator.LEAST_ROOT_QUALITY) { // the definition of an overdamped device, see Oscillator.decay
+            double whole = device.stiffness() / (omega * target);
+            return creeping(stiffness, quality, left("quality", whole - fluidDamping, whole, tooHigh));
         }
         double tilt = 1.0 / (2.0 * target);
         Complex ray = new Complex(-tilt, FastMath.sqrt(1.0 - tilt * tilt));
         double size = matching(device, part -> ray.multiply(part), stiffness, omega);
         double damping = damping(device, ray.multiply(size));
         return left("quality", damping, device.stiffness() / (omega * target), tooHigh);
+    }
+
+    /**
+     * Between S/(ωR) and the quality of the root lies a gap in a liquid: as damping falls, the device begins to swing with a
+     * quality of 0.55 where S/(ωR) is still 0.3.
+     */
+    private double creeping(double stiffness, Quality quality, double damping) {
+        Decay back = oscillator(stiffness, damping, quality.in()).decay();
+        if (FastMath.abs(back.quality() - quality.value()) > 1e-6 * quality.value()) {
+            throw new SuspensionException(
+                    "quality",
+                    say(
+                            "no device has a quality factor of %.4g in %s: with the damping S/(ωQ) it swings, and its quality factor is"
+                                    + " %.4g; below 0.55 state a damping or a ring-down",
+                            quality.value(), name(quality.in()), back.quality()));
+        }
+        return damping;
     }
 
     private double fromDecay(double stiffness, RingDown ring) {
@@ -161,25 +183,41 @@ public final class SuspensionSolver {
                         name(ring.in()), ring.decayTime()));
     }
 
-    /** Where the frequency s(p) belongs to the known stiffness; p near the resonance. */
+    /**
+     * Where the frequency s(p) belongs to the known stiffness, looked for from above the resonance downwards. In a liquid two
+     * dampings may give one decay; the weaker that is not negative is taken, as it is met first.
+     */
     private double matching(Oscillator device, DoubleFunction<Complex> path, double stiffness, double omega) {
         DoubleUnaryOperator mismatch = p -> {
             Complex s = path.apply(p);
             // as a share of the stiffness: the solver also stops at an absolute function value of 1e-15
             return (-device.structure(s).getReal() - damping(device, s) * s.getReal()) / stiffness - 1.0;
         };
-        double low = 0.2 * omega;
-        double high = 5.0 * omega;
-        try {
-            return new BracketingNthOrderBrentSolver(ACCURACY, ACCURACY * omega, 5)
-                    .solve(200, mismatch::applyAsDouble, low, high, omega);
-        } catch (MathRuntimeException e) {
+        double high = ABOVE * omega;
+        double atHigh = mismatch.applyAsDouble(high);
+        double outlasting = Double.NaN;
+        while (high > omega / BELOW) {
+            double low = high / STEP;
+            double atLow = mismatch.applyAsDouble(low);
+            if (atLow * atHigh <= 0.0) {
+                double p = new BracketingNthOrderBrentSolver(ACCURACY, ACCURACY * omega, 5)
+                        .solve(200, mismatch::applyAsDouble, low, high);
+                if (damping(device, path.apply(p)) >= -ROUNDING * stiffness / omega) {
+                    return p;
+                }
+                outlasting = p;
+            }
+            high = low;
+            atHigh = atLow;
+        }
+        if (Double.isNaN(outlasting)) {
             throw new SuspensionException(
                     statement.damping() instanceof Quality ? "quality" : "ring-down",
                     say(
-                            "no swing between %.4g Hz and %.4g Hz agrees with stiffness and damping as stated (%s)",
-                            low / (2.0 * FastMath.PI), high / (2.0 * FastMath.PI), e.getMessage()));
+                            "no swing between %.4g Hz and %.4g Hz agrees with stiffness and damping as stated",
+                            high / (2.0 * FastMath.PI), ABOVE * omega / (2.0 * FastMath.PI)));
         }
+        return outlasting;
     }
 
     private static double damping(Oscillator device, Complex s) {
@@ -188,7 +226,7 @@ public final class SuspensionSolver {
 
     /** A damping of zero up to rounding is zero; a negative one is refused. */
     private static double left(String key, double damping, double whole, String why) {
-        if (damping < -1e-9 * whole) {
+        if (damping < -ROUNDING * whole) {
             throw new SuspensionException(
                     key, why + "; check the value, what surrounded the device, and the plate inertia");
         }
