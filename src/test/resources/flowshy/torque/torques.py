@@ -115,24 +115,29 @@ def integrals(profile, medium, density, depth, s, layer):
     return first, sheared, rho * turning
 
 
-print("# Torques per unit acceleration about the pivot, and the fluid's inertia on the hair's own turning:")
-print("# flow = rho P[1 + Gamma s], open = -P[rho_h + rho Gamma s], carried = -(rho_h - rho) P[1], inertia = rho int pi a^2 Gamma l^2 dz.")
-print("# Where growth_re is not 0 the time factor is exp(s t), and only the inertia is given.")
-print("# Made with mpmath 1.2.1, 25 digits, by torques.py. Not made by this project's Java code.")
-print("case,growth_re,growth_im,flow_re,flow_im,open_re,open_im,carried,inertia_re,inertia_im")
-for name, profile, medium, density, depth in CASES:
-    rho, mu, _ = medium
-    for frequency in FREQUENCIES:
-        omega = 2 * pi * f(frequency)
-        layer = sqrt(2 * mu / rho / omega)
-        first, sheared, turning = integrals(profile, medium, density, depth, mpc(0, omega), layer)
-        flow = rho * (first + sheared)
-        opened = -(density * first + rho * sheared)
-        carried = -(density - rho) * first
-        values = [flow.real, flow.imag, opened.real, opened.imag, carried, turning.real, turning.imag]
-        row = [name.replace(",", ""), "0", nstr(omega, 17)] + [nstr(v, 18) for v in values]
-        print(",".join(row), flush=True)
-    for re, im in SWINGS:
-        _, _, turning = integrals(profile, medium, density, depth, mpc(f(re), f(im)), None)
-        row = [name.replace(",", ""), re, im] + [""] * 5 + [nstr(turning.real, 18), nstr(turning.imag, 18)]
-        print(",".join(row), flush=True)
+def main():
+    print("# Torques per unit acceleration about the pivot, and the fluid's inertia on the hair's own turning:")
+    print("# flow = rho P[1 + Gamma s], open = -P[rho_h + rho Gamma s], carried = -(rho_h - rho) P[1], inertia = rho int pi a^2 Gamma l^2 dz.")
+    print("# Where growth_re is not 0 the time factor is exp(s t), and only the inertia is given.")
+    print("# Made with mpmath 1.2.1, 25 digits, by torques.py. Not made by this project's Java code.")
+    print("case,growth_re,growth_im,flow_re,flow_im,open_re,open_im,carried,inertia_re,inertia_im")
+    for name, profile, medium, density, depth in CASES:
+        rho, mu, _ = medium
+        for frequency in FREQUENCIES:
+            omega = 2 * pi * f(frequency)
+            layer = sqrt(2 * mu / rho / omega)
+            first, sheared, turning = integrals(profile, medium, density, depth, mpc(0, omega), layer)
+            flow = rho * (first + sheared)
+            opened = -(density * first + rho * sheared)
+            carried = -(density - rho) * first
+            values = [flow.real, flow.imag, opened.real, opened.imag, carried, turning.real, turning.imag]
+            row = [name.replace(",", ""), "0", nstr(omega, 17)] + [nstr(v, 18) for v in values]
+            print(",".join(row), flush=True)
+        for re, im in SWINGS:
+            _, _, turning = integrals(profile, medium, density, depth, mpc(f(re), f(im)), None)
+            row = [name.replace(",", ""), re, im] + [""] * 5 + [nstr(turning.real, 18), nstr(turning.imag, 18)]
+            print(",".join(row), flush=True)
+
+
+if __name__ == "__main__":
+    main()
