@@ -2,6 +2,7 @@ package flowshy.cylinder;
 
 import flowshy.math.Caveat;
 import flowshy.math.Figures;
+import flowshy.math.Positive;
 import flowshy.medium.Medium;
 import flowshy.medium.Phase;
 import java.util.List;
@@ -26,9 +27,7 @@ public record OscillatingCylinder(double radius, Medium medium) {
 
     /** @throws IllegalArgumentException if the radius is not positive and finite */
     public OscillatingCylinder {
-        if (!(radius > 0.0) || Double.isInfinite(radius)) {
-            throw new IllegalArgumentException("radius [m] must be positive and finite, was " + radius);
-        }
+        Positive.check("radius [m]", radius);
     }
 
     /**

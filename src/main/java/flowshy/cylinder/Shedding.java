@@ -1,5 +1,6 @@
 package flowshy.cylinder;
 
+import flowshy.math.Positive;
 import flowshy.math.Range;
 import flowshy.medium.Medium;
 import java.util.List;
@@ -32,9 +33,7 @@ public record Shedding(double radius, Medium medium) {
 
     /** @throws IllegalArgumentException if the radius is not positive and finite */
     public Shedding {
-        if (!(radius > 0.0) || Double.isInfinite(radius)) {
-            throw new IllegalArgumentException("radius [m] must be positive and finite, was " + radius);
-        }
+        Positive.check("radius [m]", radius);
     }
 
     /**

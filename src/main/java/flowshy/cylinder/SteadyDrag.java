@@ -2,6 +2,7 @@ package flowshy.cylinder;
 
 import flowshy.math.Caveat;
 import flowshy.math.Figures;
+import flowshy.math.Positive;
 import flowshy.medium.Medium;
 import java.util.List;
 import org.hipparchus.util.FastMath;
@@ -20,9 +21,7 @@ import org.hipparchus.util.FastMath;
 public record SteadyDrag(double radius, Medium medium) {
     /** @throws IllegalArgumentException if the radius is not positive and finite */
     public SteadyDrag {
-        if (!(radius > 0.0) || Double.isInfinite(radius)) {
-            throw new IllegalArgumentException("radius [m] must be positive and finite, was " + radius);
-        }
+        Positive.check("radius [m]", radius);
     }
 
     /**

@@ -2,6 +2,7 @@ package flowshy.response;
 
 import flowshy.math.Caveat;
 import flowshy.math.Figures;
+import flowshy.math.Positive;
 import flowshy.medium.Medium;
 import flowshy.medium.Phase;
 import java.util.ArrayList;
@@ -40,9 +41,9 @@ public record TiltingPlateFilm(double length, double width, double gap) {
 
     /** @throws IllegalArgumentException if a dimension is not positive and finite */
     public TiltingPlateFilm {
-        positive("length", length);
-        positive("width", width);
-        positive("gap", gap);
+        Positive.check("length [m]", length);
+        Positive.check("width [m]", width);
+        Positive.check("gap [m]", gap);
     }
 
     /**
@@ -122,11 +123,5 @@ public record TiltingPlateFilm(double length, double width, double gap) {
 
     private static Caveat weak(String text, double figure) {
         return new Caveat(Caveat.Subject.SUSPENSION, Caveat.Weight.WEAK, Figures.say(text, figure));
-    }
-
-    private static void positive(String what, double value) {
-        if (!(value > 0.0) || Double.isInfinite(value)) {
-            throw new IllegalArgumentException(what + " [m] must be positive and finite, was " + value);
-        }
     }
 }
