@@ -157,7 +157,7 @@ final class TextPage {
     private void wrap(String first, String further, String words) {
         StringBuilder line = new StringBuilder(first);
         boolean empty = true;
-        for (String word : words.strip().split("\\s+")) {
+        for (String word : words.strip().split("\\s+", -1)) {
             if (!empty && line.codePointCount(0, line.length()) + 1 + word.length() > WIDTH) {
                 line(line.toString().stripTrailing());
                 line = new StringBuilder(further);

@@ -125,7 +125,7 @@ class CommandLineTest {
     void csvAndJsonAgreeOnEveryFigure() {
         Run json = Run.of("bands", AIR, "--json", "--frequencies", "100 Hz");
         Run csv = Run.of("bands", AIR, "--csv", "--frequencies", "100 Hz");
-        String[] lines = csv.out().split("\n");
+        String[] lines = csv.out().split("\n", -1);
         String[] names = lines[0].split(",", -1);
         String[] fields = lines[1].split(",", -1);
         Map<String, Object> point =

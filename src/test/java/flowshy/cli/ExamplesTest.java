@@ -61,7 +61,7 @@ class ExamplesTest {
         List<String> lines = Files.readAllLines(example.resolve("by-hand.csv"));
         assertThat(lines).hasSizeGreaterThanOrEqualTo(3); // head and two figures
         for (String line : lines.subList(1, lines.size())) {
-            String[] fields = line.split(",");
+            String[] fields = line.split(",", -1);
             double value = Double.parseDouble(fields[2]);
             double tolerance = Double.parseDouble(fields[3]);
             assertThat(figure(example, fields[0], fields[1]))

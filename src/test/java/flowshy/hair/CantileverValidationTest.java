@@ -6,7 +6,6 @@ import static org.assertj.core.api.Assertions.within;
 import flowshy.hair.Club.End;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.function.DoubleUnaryOperator;
 import org.hipparchus.util.FastMath;
 import org.junit.jupiter.api.Test;
 
@@ -20,12 +19,16 @@ class CantileverValidationTest {
     private static final double UNIT =
             FastMath.sqrt(MODULUS * RADIUS * RADIUS / (4.0 * DENSITY)) / (LENGTH * LENGTH * 2.0 * FastMath.PI);
 
-    private static final DoubleUnaryOperator OWN_MASS = a -> DENSITY * FastMath.PI * a * a;
+    /** Mass per length of the hair alone. */
+    private static double ownMass(double radius) {
+        return DENSITY * FastMath.PI * radius * radius;
+    }
 
     /** First root of cos x cosh x = −1, 1.8751040687 (handbook digits). */
     @Test
     void uniformBeam() {
-        double found = Cantilever.firstFrequency(new Cylinder(LENGTH, RADIUS), MODULUS, OWN_MASS);
+        double found =
+                Cantilever.firstFrequency(new Cylinder(LENGTH, RADIUS), MODULUS, CantileverValidationTest::ownMass);
         assertThat(found / (1.8751040687 * 1.8751040687 * UNIT)).isCloseTo(1.0, within(1e-6 / 8.0));
     }
 
@@ -37,7 +40,8 @@ class CantileverValidationTest {
     void fullCone() {
         double x = firstZero();
         assertThat(x * x / 4.0).isCloseTo(8.719, within(5e-4));
-        double found = Cantilever.firstFrequency(new Taper(LENGTH, RADIUS, 0.0), MODULUS, OWN_MASS);
+        double found =
+                Cantilever.firstFrequency(new Taper(LENGTH, RADIUS, 0.0), MODULUS, CantileverValidationTest::ownMass);
         assertThat(found / (x * x / 4.0 * UNIT)).isCloseTo(1.0, within(2e-6));
     }
 
@@ -70,23 +74,24 @@ class CantileverValidationTest {
     @Test
     void convergesWithTheFourthPower() {
         Cylinder beam = new Cylinder(LENGTH, RADIUS);
-        double exact = 1.8751040687119612 * 1.8751040687119612 * UNIT;
-        double two = Cantilever.firstFrequency(beam, MODULUS, OWN_MASS, 2) / exact - 1.0;
-        double four = Cantilever.firstFrequency(beam, MODULUS, OWN_MASS, 4) / exact - 1.0;
-        double eight = Cantilever.firstFrequency(beam, MODULUS, OWN_MASS, 8) / exact - 1.0;
+        double exact = 1.8751040687119611 * 1.8751040687119611 * UNIT;
+        double two = Cantilever.firstFrequency(beam, MODULUS, CantileverValidationTest::ownMass, 2) / exact - 1.0;
+        double four = Cantilever.firstFrequency(beam, MODULUS, CantileverValidationTest::ownMass, 4) / exact - 1.0;
+        double eight = Cantilever.firstFrequency(beam, MODULUS, CantileverValidationTest::ownMass, 8) / exact - 1.0;
         assertThat(two).isBetween(1e-5, 1e-3);
         assertThat(two / four).isBetween(14.0, 17.0);
         assertThat(four / eight).isBetween(15.0, 17.0);
         Taper taper = new Taper(LENGTH, RADIUS, 0.3 * RADIUS);
-        double usual = Cantilever.firstFrequency(taper, MODULUS, OWN_MASS);
-        double fine = Cantilever.firstFrequency(taper, MODULUS, OWN_MASS, 80);
+        double usual = Cantilever.firstFrequency(taper, MODULUS, CantileverValidationTest::ownMass);
+        double fine = Cantilever.firstFrequency(taper, MODULUS, CantileverValidationTest::ownMass, 80);
         assertThat(usual / fine).isCloseTo(1.0, within(1e-7));
     }
 
     /** The same taper measured at 3 or 900 points is the same beam, and takes no longer than the elements it needs. */
     @Test
     void countsAMeasuredProfileAsTheBodyItDescribes() {
-        double exact = Cantilever.firstFrequency(new Taper(LENGTH, RADIUS, 0.3 * RADIUS), MODULUS, OWN_MASS);
+        double exact = Cantilever.firstFrequency(
+                new Taper(LENGTH, RADIUS, 0.3 * RADIUS), MODULUS, CantileverValidationTest::ownMass);
         for (int pieces : new int[] {2, 47, 899}) {
             List<Double> heights = new ArrayList<>();
             List<Double> radii = new ArrayList<>();
@@ -95,7 +100,8 @@ class CantileverValidationTest {
                 heights.add(LENGTH * share);
                 radii.add(RADIUS * (1.0 - 0.7 * share));
             }
-            double found = Cantilever.firstFrequency(new MeasuredProfile(heights, radii), MODULUS, OWN_MASS);
+            double found = Cantilever.firstFrequency(
+                    new MeasuredProfile(heights, radii), MODULUS, CantileverValidationTest::ownMass);
             assertThat(found / exact).as("%d pieces", pieces).isCloseTo(1.0, within(1e-7));
         }
     }
@@ -103,10 +109,14 @@ class CantileverValidationTest {
     /** Frequency ∝ √E, and ∝ d/L². */
     @Test
     void scales() {
-        double found = Cantilever.firstFrequency(new Taper(LENGTH, RADIUS, 0.0), MODULUS, OWN_MASS);
-        double stiffer = Cantilever.firstFrequency(new Taper(LENGTH, RADIUS, 0.0), 4.0 * MODULUS, OWN_MASS);
-        double longer = Cantilever.firstFrequency(new Taper(2.0 * LENGTH, RADIUS, 0.0), MODULUS, OWN_MASS);
-        double thicker = Cantilever.firstFrequency(new Taper(LENGTH, 1.5 * RADIUS, 0.0), MODULUS, OWN_MASS);
+        double found =
+                Cantilever.firstFrequency(new Taper(LENGTH, RADIUS, 0.0), MODULUS, CantileverValidationTest::ownMass);
+        double stiffer = Cantilever.firstFrequency(
+                new Taper(LENGTH, RADIUS, 0.0), 4.0 * MODULUS, CantileverValidationTest::ownMass);
+        double longer = Cantilever.firstFrequency(
+                new Taper(2.0 * LENGTH, RADIUS, 0.0), MODULUS, CantileverValidationTest::ownMass);
+        double thicker = Cantilever.firstFrequency(
+                new Taper(LENGTH, 1.5 * RADIUS, 0.0), MODULUS, CantileverValidationTest::ownMass);
         assertThat(stiffer / found).isCloseTo(2.0, within(1e-8));
         assertThat(longer / found).isCloseTo(0.25, within(1e-8));
         assertThat(thicker / found).isCloseTo(1.5, within(1e-8));

@@ -262,7 +262,7 @@ class KeysTest {
                 accept: {rejection: 20}
                 """);
         assertThat(found.stream()
-                        .map(p -> p.split(": ")[0] + " " + p.split(": ")[1])
+                        .map(p -> p.split(": ", -1)[0] + " " + p.split(": ", -1)[1])
                         .toList())
                 .containsExactly(
                         "s.yaml:1:7 hair.stalk-length",

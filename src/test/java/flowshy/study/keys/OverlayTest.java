@@ -131,9 +131,12 @@ class OverlayTest {
 
     @Test
     void partsOfStudiesMergeGroupByGroup() {
-        Node.Mapping over =
-                tree("hair: {shape: club, stalk-diameter: 40 um, stalk-length: 300 um, head-diameter: 99 um}\n"
-                        + "medium: {temperature: 30 degC}\nsuspension: {stiffness: 1 nN.m/rad}\ntitle: changed\n");
+        Node.Mapping over = tree("""
+                hair: {shape: club, stalk-diameter: 40 um, stalk-length: 300 um, head-diameter: 99 um}
+                medium: {temperature: 30 degC}
+                suspension: {stiffness: 1 nN.m/rad}
+                title: changed
+                """);
         Form form = read(Overlay.merge(tree(BASE), over));
         assertThat(form.word("hair.shape")).contains("club");
         assertThat(form.si("hair.length")).isEqualTo(610e-6);

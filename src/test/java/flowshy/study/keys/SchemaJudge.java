@@ -45,61 +45,45 @@ final class SchemaJudge {
     }
 
     private boolean holds(String keyword, Object wanted, Map<String, Object> schema, Object value) {
-        switch (keyword) {
-            case "$schema", "title", "description", "examples", "$defs":
-                return true;
-            case "$ref":
-                return accepts(resolved(schema), value);
-            case "type":
-                return types(wanted).stream().anyMatch(type -> type.equals(type(value)));
-            case "const":
-                return wanted.equals(value);
-            case "enum":
-                return list(wanted).contains(value);
-            case "pattern":
-                return !(value instanceof String text)
+        return switch (keyword) {
+            case "$schema", "title", "description", "examples", "$defs" -> true;
+            case "$ref" -> accepts(resolved(schema), value);
+            case "type" -> types(wanted).stream().anyMatch(type -> type.equals(type(value)));
+            case "const" -> wanted.equals(value);
+            case "enum" -> list(wanted).contains(value);
+            case "pattern" ->
+                !(value instanceof String text)
                         || Pattern.compile(wanted.toString()).matcher(text).find();
-            case "anyOf":
-                return count(wanted, value) >= 1;
-            case "oneOf":
-                return count(wanted, value) == 1;
-            case "allOf":
-                return count(wanted, value) == list(wanted).size();
-            case "not":
-                return !accepts(map(wanted), value);
-            case "items":
-                return !(value instanceof List<?> items) || items.stream().allMatch(i -> accepts(map(wanted), i));
-            case "prefixItems":
-                return !(value instanceof List<?> items) || prefix(list(wanted), items);
-            case "minItems":
-                return !(value instanceof List<?> items) || items.size() >= (Integer) wanted;
-            case "maxItems":
-                return !(value instanceof List<?> items) || items.size() <= (Integer) wanted;
-            default:
-                return !(value instanceof Map<?, ?>) || object(keyword, wanted, schema, map(value));
-        }
+            case "anyOf" -> count(wanted, value) >= 1;
+            case "oneOf" -> count(wanted, value) == 1;
+            case "allOf" -> count(wanted, value) == list(wanted).size();
+            case "not" -> !accepts(map(wanted), value);
+            case "items" -> !(value instanceof List<?> items) || items.stream().allMatch(i -> accepts(map(wanted), i));
+            case "prefixItems" -> !(value instanceof List<?> items) || prefix(list(wanted), items);
+            case "minItems" -> !(value instanceof List<?> items) || items.size() >= (Integer) wanted;
+            case "maxItems" -> !(value instanceof List<?> items) || items.size() <= (Integer) wanted;
+            default -> !(value instanceof Map<?, ?>) || object(keyword, wanted, schema, map(value));
+        };
     }
 
     private boolean object(String keyword, Object wanted, Map<String, Object> schema, Map<String, Object> value) {
-        switch (keyword) {
-            case "properties":
-                return value.entrySet().stream()
+        return switch (keyword) {
+            case "properties" ->
+                value.entrySet().stream()
                         .allMatch(e -> !map(wanted).containsKey(e.getKey())
                                 || accepts(map(map(wanted).get(e.getKey())), e.getValue()));
-            case "required":
-                return value.keySet().containsAll(list(wanted));
-            case "additionalProperties":
-                return map(schema.get("properties")).keySet().containsAll(value.keySet());
-            case "dependentRequired":
-                return map(wanted).entrySet().stream()
+            case "required" -> value.keySet().containsAll(list(wanted));
+            case "additionalProperties" ->
+                map(schema.get("properties")).keySet().containsAll(value.keySet());
+            case "dependentRequired" ->
+                map(wanted).entrySet().stream()
                         .allMatch(e ->
                                 !value.containsKey(e.getKey()) || value.keySet().containsAll(list(e.getValue())));
-            case "dependentSchemas":
-                return map(wanted).entrySet().stream()
+            case "dependentSchemas" ->
+                map(wanted).entrySet().stream()
                         .allMatch(e -> !value.containsKey(e.getKey()) || accepts(map(e.getValue()), value));
-            default:
-                throw new IllegalStateException("keyword " + keyword + " is not known to this judge");
-        }
+            default -> throw new IllegalStateException("keyword " + keyword + " is not known to this judge");
+        };
     }
 
     private long count(Object schemas, Object value) {
@@ -155,8 +139,8 @@ final class SchemaJudge {
     }
 
     private static Object value(JsonParser parser) throws IOException {
-        switch (parser.currentToken()) {
-            case START_OBJECT:
+        return switch (parser.currentToken()) {
+            case START_OBJECT -> {
                 Map<String, Object> map = new LinkedHashMap<>();
                 while (parser.nextToken() != JsonToken.END_OBJECT) {
                     String name = parser.currentName();
@@ -165,19 +149,18 @@ final class SchemaJudge {
                         throw new IllegalStateException("repeated name " + name);
                     }
                 }
-                return map;
-            case START_ARRAY:
+                yield map;
+            }
+            case START_ARRAY -> {
                 List<Object> list = new ArrayList<>();
                 while (parser.nextToken() != JsonToken.END_ARRAY) {
                     list.add(value(parser));
                 }
-                return list;
-            case VALUE_NUMBER_INT:
-                return parser.getIntValue();
-            case VALUE_FALSE:
-                return Boolean.FALSE;
-            default:
-                return parser.getText();
-        }
+                yield list;
+            }
+            case VALUE_NUMBER_INT -> parser.getIntValue();
+            case VALUE_FALSE -> false;
+            default -> parser.getText();
+        };
     }
 }
