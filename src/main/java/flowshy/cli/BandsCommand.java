@@ -57,7 +57,7 @@ final class BandsCommand implements Callable<Integer> {
         List<String> tables = new ArrayList<>();
         JsonPage json = new JsonPage();
         int code = studies.each(spec.commandLine(), output.json(), study -> {
-            BandsQuestion question = new BandsQuestion(study.device(), study.band(), study.acceptance());
+            BandsQuestion question = study.question();
             BandsAnswer answer =
                     question.answer(frequencies == null ? ThirdOctaves.in(study.band()) : frequencies.values());
             List<Levers> levers = why ? Levers.of(answer) : List.of();

@@ -36,8 +36,7 @@ final class LidCommand implements Callable<Integer> {
         List<Runnable> objects = new ArrayList<>();
         List<String> tables = new ArrayList<>();
         int code = studies.each(spec.commandLine(), output.json(), study -> {
-            LidQuestion question = new LidQuestion(
-                    study.device(), study.band(), study.acceptance(), study.reference(), study.candidates());
+            LidQuestion question = new LidQuestion(study.question(), study.reference(), study.candidates());
             LidAnswer answer = question.answer();
             texts.add(LidReport.text(study, question, answer));
             objects.add(() -> LidReport.write(json, study, question, answer));

@@ -3,7 +3,10 @@ package flowshy.cli;
 import flowshy.report.JsonPage;
 import flowshy.study.Study;
 import flowshy.study.StudyReader;
+import flowshy.study.text.Position;
+import flowshy.study.text.Problem;
 import flowshy.study.text.StudyException;
+import flowshy.verdict.error.StreamTooFastException;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
@@ -45,6 +48,10 @@ final class StudyOptions {
                 code = work.applyAsInt(StudyReader.read(study, settings));
             } catch (StudyException e) {
                 Failures.problems(line, e.problems(), json);
+                code = Failures.WRONG_INPUT;
+            } catch (StreamTooFastException e) {
+                Problem problem = Problem.of(Position.label(study.toString()), "surroundings", e.getMessage(), "");
+                Failures.problems(line, List.of(problem), json);
                 code = Failures.WRONG_INPUT;
             }
             worst = code == Failures.WRONG_INPUT || worst == Failures.WRONG_INPUT

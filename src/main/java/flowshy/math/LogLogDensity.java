@@ -12,7 +12,7 @@ import org.hipparchus.util.FastMath;
  *
  * @param points two or more, frequency rising
  */
-public record LogLogDensity(List<Point> points) {
+public record LogLogDensity(List<Point> points) implements Density {
     /**
      * One point.
      *
@@ -66,6 +66,7 @@ public record LogLogDensity(List<Point> points) {
      * @param frequency f [Hz]
      * @return G; zero below the first and above the last point
      */
+    @Override
     public double at(double frequency) {
         if (!(frequency >= lowest()) || frequency > highest()) {
             return 0.0;
@@ -109,8 +110,14 @@ public record LogLogDensity(List<Point> points) {
      *
      * @return square of the unit of the signal
      */
+    @Override
     public double meanSquare() {
         return meanSquare(lowest(), highest());
+    }
+
+    @Override
+    public List<Double> edges() {
+        return points.stream().map(Point::frequency).toList();
     }
 
     /**

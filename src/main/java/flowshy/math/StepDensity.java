@@ -4,12 +4,32 @@ import java.util.List;
 import org.hipparchus.util.FastMath;
 
 /**
- * A one-sided density given by the mean square in each of some bands; inside a band every part of equal width in ln f holds equal
- * mean square, so the density falls as 1/f (pink). Outside the bands it is zero.
+ * A one-sided density given by the mean square in each of some bands, zero outside them.
  *
  * @param bands rising, none overlapping another
+ * @param inside how a band's mean square is spread over it
  */
-public record StepDensity(List<Band> bands) {
+public record StepDensity(List<Band> bands, Inside inside) implements Density {
+    /** How the mean square of a band is spread over it. */
+    public enum Inside {
+        /** the same density everywhere */
+        FLAT {
+            @Override
+            double density(Band band, double frequency) {
+                return band.meanSquare() / (band.high() - band.low());
+            }
+        },
+        /** the same mean square in equal ratios of frequency, so that the density falls as 1/f (pink) */
+        PINK {
+            @Override
+            double density(Band band, double frequency) {
+                return band.meanSquare() / (frequency * FastMath.log(band.high() / band.low()));
+            }
+        };
+
+        abstract double density(Band band, double frequency);
+    }
+
     /**
      * One band.
      *
@@ -50,15 +70,25 @@ public record StepDensity(List<Band> bands) {
      * @param frequency f [Hz]
      * @return square of the unit of the signal per Hz; at a common edge that of the upper band
      */
+    @Override
     public double at(double frequency) {
-        for (int i = bands.size() - 1; i >= 0; i--) {
-            Band band = bands.get(i);
-            if (frequency >= band.low()) {
-                boolean inside = frequency < band.high() || (i == bands.size() - 1 && frequency == band.high());
-                return inside ? band.meanSquare() / (frequency * FastMath.log(band.high() / band.low())) : 0.0;
+        if (!(frequency >= bands.get(0).low())) {
+            return 0.0;
+        }
+        int at = 0;
+        int end = bands.size();
+        while (end - at > 1) {
+            int middle = (at + end) >>> 1;
+            if (bands.get(middle).low() <= frequency) {
+                at = middle;
+            } else {
+                end = middle;
             }
         }
-        return 0.0;
+        Band band = bands.get(at);
+        boolean last = at == bands.size() - 1;
+        boolean within = frequency < band.high() || (last && frequency == band.high());
+        return within ? inside.density(band, frequency) : 0.0;
     }
 
     /**
@@ -66,6 +96,7 @@ public record StepDensity(List<Band> bands) {
      *
      * @return square of the unit of the signal
      */
+    @Override
     public double meanSquare() {
         double sum = 0.0;
         for (Band band : bands) {
@@ -79,6 +110,7 @@ public record StepDensity(List<Band> bands) {
      *
      * @return rising [Hz], two or more
      */
+    @Override
     public List<Double> edges() {
         return bands.stream()
                 .flatMap(band -> List.of(band.low(), band.high()).stream())

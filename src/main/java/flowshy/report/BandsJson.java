@@ -61,6 +61,7 @@ public final class BandsJson {
             if (!why.isEmpty()) {
                 json.array("why", why, page::levers);
             }
+            answer.error().ifPresent(budget -> ErrorReport.write(json, budget));
             CaveatJson.write(json, answer.caveats());
             json.object("verdict", () -> page.verdict(answer));
         });

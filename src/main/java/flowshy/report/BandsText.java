@@ -51,6 +51,7 @@ public final class BandsText {
         text.medium();
         text.device();
         text.bands();
+        answer.error().ifPresent(budget -> ErrorReport.print(text.page, budget, text.spectral()));
         text.points();
         text.explain(why);
         text.page.line("");
@@ -225,6 +226,10 @@ public final class BandsText {
                         "largest rejection",
                         Figures.of(most.rejection(), 4) + " dB at " + Figures.of(most.frequency(), 5) + " Hz"));
         caveats(EnumSet.of(Subject.REJECTION));
+    }
+
+    private boolean spectral() {
+        return study.motion().spectrum().isPresent();
     }
 
     private void points() {

@@ -16,6 +16,7 @@ import java.util.List;
 public final class LidReport {
     private static final String NO_BOUND = "no flow enters: the rejection has no bound";
     private static final String NO_SUSPENSION = "no suspension is stated that holds the hair";
+    private static final String NO_SURROUNDINGS = "no surroundings are given";
     private static final String NO_MOTION = "the fluid carried along leaves no motion to read";
 
     private LidReport() {}
@@ -109,6 +110,11 @@ public final class LidReport {
         page.heading("Attenuation a cover must give for a margin of "
                 + Figures.of(question.acceptance().margin(), 4) + " dB");
         page.table(required(), answer.required(), point -> false);
+        if (answer.requiredError().isPresent()) {
+            page.paragraph(
+                    "For the error limit: " + Figures.of(answer.requiredError().getAsDouble(), 4)
+                            + " dB over the band, at the operating point of the bare hair.");
+        }
         page.heading("Covers");
         page.paragraph((study.candidates().isEmpty() ? "No candidates are stated: usual covers are taken. " : "")
                 + "from, to, least: rejection at the ends of the band and where it is least. sens.: sensitivity against the"
@@ -123,6 +129,9 @@ public final class LidReport {
                 names,
                 columns().stream()
                         .filter(column -> !column.name().endsWith("percent"))
+                        .filter(column -> answer.bare().error().isPresent()
+                                ? !column.name().matches("rejection_.*")
+                                : !column.name().matches("error.*|offset.*"))
                         .toList(),
                 answer.covers());
         for (int i = 0; i < names.size(); i++) {
@@ -167,7 +176,7 @@ public final class LidReport {
                         point -> required()
                                 .forEach(column ->
                                         json.cell(column.name(), column.cell().apply(point))));
-                json.cell("error_db", Cell.missing("no surroundings are given"));
+                json.cell("error_db", Cell.of(answer.requiredError(), NO_SURROUNDINGS));
             });
             json.array("covers", answer.covers(), row -> {
                 json.text("cover", row.candidate().cover().kind());
@@ -176,7 +185,6 @@ public final class LidReport {
                 columns()
                         .forEach(
                                 column -> json.cell(column.name(), column.cell().apply(row)));
-                json.cell("error_rms_m_s2", Cell.missing("no surroundings are given"));
                 json.texts("misses", row.misses());
                 json.texts("warnings", row.warnings());
                 json.text("decision", row.answer().verdict().decision().word());

@@ -2,8 +2,11 @@ package flowshy.study;
 
 import flowshy.response.Calibration;
 import flowshy.response.Device;
+import flowshy.stream.Source;
 import flowshy.verdict.Acceptance;
 import flowshy.verdict.Band;
+import flowshy.verdict.BandsQuestion;
+import flowshy.verdict.error.Motion;
 import flowshy.verdict.lid.Candidate;
 import java.util.Collections;
 import java.util.LinkedHashMap;
@@ -22,6 +25,8 @@ import org.hipparchus.util.FastMath;
  * @param acceptance limits asked
  * @param calibration where the sensitivity is stated, if asked
  * @param candidates covers to choose from, in order of preference; empty if not stated
+ * @param motion what is to be read
+ * @param surroundings flows that are there, in the order written; empty if not stated
  * @param document entries of the document block, in the order of the key table
  * @param takenAs every default that was used
  * @param understood every value that was written, in the order of the key table
@@ -34,6 +39,8 @@ public record Study(
         Acceptance acceptance,
         Optional<Calibration> calibration,
         List<Candidate> candidates,
+        Motion motion,
+        List<Source> surroundings,
         Map<String, String> document,
         List<TakenAs> takenAs,
         List<Understood> understood) {
@@ -41,8 +48,18 @@ public record Study(
     public Study {
         document = Collections.unmodifiableMap(new LinkedHashMap<>(document));
         candidates = List.copyOf(candidates);
+        surroundings = List.copyOf(surroundings);
         takenAs = List.copyOf(takenAs);
         understood = List.copyOf(understood);
+    }
+
+    /**
+     * The main question that the study asks.
+     *
+     * @return about its device, with its limits, motion and surroundings
+     */
+    public BandsQuestion question() {
+        return new BandsQuestion(device, band, acceptance, motion, surroundings);
     }
 
     /**

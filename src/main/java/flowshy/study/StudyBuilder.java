@@ -16,6 +16,7 @@ import flowshy.study.text.TextFile;
 import flowshy.study.units.Quantity;
 import flowshy.verdict.Acceptance;
 import flowshy.verdict.Band;
+import flowshy.verdict.error.Motion;
 import flowshy.verdict.lid.Candidate;
 import java.nio.file.Path;
 import java.util.ArrayList;
@@ -66,6 +67,8 @@ final class StudyBuilder {
                         form.siIfAny("accept.error")),
                 calibration(),
                 candidates,
+                Motion.NONE,
+                List.of(),
                 document(),
                 takenAs(suspensions.taken()),
                 understood());

@@ -3,6 +3,7 @@ package flowshy.verdict;
 import flowshy.math.Caveat;
 import flowshy.response.Device;
 import flowshy.response.ResponsePoint;
+import flowshy.verdict.error.ErrorBudget;
 import java.util.List;
 import java.util.Optional;
 
@@ -17,6 +18,7 @@ import java.util.Optional;
  * @param least least rejection in the band, empty where no flow reaches the hair or it reads nothing
  * @param largest largest rejection in the band, likewise
  * @param points the response at the frequencies asked, same order
+ * @param error what the surroundings do, empty if none are given
  * @param caveats what must stand beside the numbers
  * @param verdict limit by limit
  */
@@ -29,6 +31,7 @@ public record BandsAnswer(
         Optional<Extreme> least,
         Optional<Extreme> largest,
         List<ResponsePoint> points,
+        Optional<ErrorBudget> error,
         List<Caveat> caveats,
         Verdict verdict) {
     /**

@@ -5,8 +5,12 @@ import flowshy.medium.PropertySource;
 import flowshy.response.Device;
 import flowshy.response.Response;
 import flowshy.response.ResponsePoint;
+import flowshy.stream.Source;
 import flowshy.verdict.BandsAnswer.Extreme;
 import flowshy.verdict.RejectionCurve.Sample;
+import flowshy.verdict.error.ErrorBudget;
+import flowshy.verdict.error.Motion;
+import flowshy.verdict.error.SurroundingsQuestion;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -20,10 +24,38 @@ import org.hipparchus.util.FastMath;
  * @param device hair, suspension, medium, cover
  * @param band band of use
  * @param acceptance limits asked
+ * @param motion what is to be read
+ * @param sources flows that are there; empty: the verdict holds at equal accelerations only
  */
-public record BandsQuestion(Device device, Band band, Acceptance acceptance) {
+public record BandsQuestion(Device device, Band band, Acceptance acceptance, Motion motion, List<Source> sources) {
     /** Hair and fluid count as equally dense within the density's own uncertainty, or this where none is stated. */
     private static final double EQUAL_DENSITY = 1e-6;
+
+    /** Copies the list. */
+    public BandsQuestion {
+        sources = List.copyOf(sources);
+    }
+
+    /**
+     * The question at equal accelerations of base and fluid, without surroundings.
+     *
+     * @param device hair, suspension, medium, cover
+     * @param band band of use
+     * @param acceptance limits asked
+     */
+    public BandsQuestion(Device device, Band band, Acceptance acceptance) {
+        this(device, band, acceptance, Motion.NONE, List.of());
+    }
+
+    /**
+     * The same question about another device.
+     *
+     * @param other the device
+     * @return band, limits, motion and sources kept
+     */
+    public BandsQuestion about(Device other) {
+        return new BandsQuestion(other, band, acceptance, motion, sources);
+    }
 
     /**
      * Answers at third-octave frequencies.
@@ -48,11 +80,17 @@ public record BandsQuestion(Device device, Band band, Acceptance acceptance) {
         boolean ended = caveats.stream()
                 .anyMatch(caveat ->
                         caveat.weight() == Caveat.Weight.OUT_OF_RANGE && caveat.about() == Caveat.Subject.REJECTION);
+        Optional<ErrorBudget> error = sources.isEmpty()
+                ? Optional.empty()
+                : Optional.of(new SurroundingsQuestion(device, band, acceptance.margin(), motion, sources).answer());
+        List<Caveat> all = new ArrayList<>(caveats);
+        error.ifPresent(budget -> all.addAll(budget.caveats()));
+        Findings findings = new Findings(facts, points, all, error);
         if (readsNothing()) {
-            return whole(facts, Reads.NOTHING, Double.NaN, points, caveats);
+            return whole(findings, Reads.NOTHING, Double.NaN);
         }
         if (device.cover().closed()) {
-            return whole(facts, ended ? Reads.UNDECIDED : Reads.MOTION, Double.POSITIVE_INFINITY, points, caveats);
+            return whole(findings, ended ? Reads.UNDECIDED : Reads.MOTION, Double.POSITIVE_INFINITY);
         }
         RejectionCurve curve = new RejectionCurve(response::rejection, band);
         List<ReadingBand> bands = ended
@@ -63,19 +101,27 @@ public record BandsQuestion(Device device, Band band, Acceptance acceptance) {
                         response.rejection(band.from()),
                         response.rejection(band.to())))
                 : split(curve, response);
-        Extreme least = extreme(curve.least());
-        Extreme largest = extreme(curve.largest());
-        Verdict verdict = Judgement.of(acceptance, bands, Optional.of(least), largest, device);
+        return answer(findings, bands, Optional.of(extreme(curve.least())), Optional.of(extreme(curve.largest())));
+    }
+
+    /** What was found before the bands are known. */
+    private record Findings(
+            DeviceFacts facts, List<ResponsePoint> points, List<Caveat> caveats, Optional<ErrorBudget> error) {}
+
+    private BandsAnswer answer(
+            Findings findings, List<ReadingBand> bands, Optional<Extreme> least, Optional<Extreme> largest) {
+        Verdict verdict = new Judgement(acceptance, motion, device, findings.error()).of(bands, least);
         return new BandsAnswer(
                 device,
                 band,
                 acceptance,
-                facts,
+                findings.facts(),
                 bands,
-                Optional.of(least),
-                Optional.of(largest),
-                points,
-                caveats,
+                least,
+                largest,
+                findings.points(),
+                findings.error(),
+                findings.caveats(),
                 verdict);
     }
 
@@ -91,13 +137,9 @@ public record BandsQuestion(Device device, Band band, Acceptance acceptance) {
         return device.cover().closed() && FastMath.abs(device.hair().density() - fluid) <= tolerance;
     }
 
-    private BandsAnswer whole(
-            DeviceFacts facts, Reads reads, double rejection, List<ResponsePoint> points, List<Caveat> caveats) {
+    private BandsAnswer whole(Findings findings, Reads reads, double rejection) {
         List<ReadingBand> bands = List.of(new ReadingBand(band.from(), band.to(), reads, rejection, rejection));
-        Verdict verdict =
-                Judgement.of(acceptance, bands, Optional.empty(), new Extreme(band.from(), rejection), device);
-        return new BandsAnswer(
-                device, band, acceptance, facts, bands, Optional.empty(), Optional.empty(), points, caveats, verdict);
+        return answer(findings, bands, Optional.empty(), Optional.empty());
     }
 
     private List<ReadingBand> split(RejectionCurve curve, Response response) {

@@ -2,8 +2,11 @@ package flowshy.verdict;
 
 import static flowshy.math.Figures.say;
 
+import flowshy.math.Caveat;
 import flowshy.response.Device;
 import flowshy.verdict.BandsAnswer.Extreme;
+import flowshy.verdict.error.ErrorBudget;
+import flowshy.verdict.error.Motion;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -17,25 +20,58 @@ final class Judgement {
     private static final String NO_SURROUNDINGS =
             "needs surroundings; without them the largest flow speed that keeps it is given point by point";
 
-    private Judgement() {}
+    private final Acceptance acceptance;
+    private final Motion motion;
+    private final Device device;
+    private final Optional<ErrorBudget> budget;
 
-    static Verdict of(
-            Acceptance acceptance, List<ReadingBand> bands, Optional<Extreme> least, Extreme any, Device device) {
+    Judgement(Acceptance acceptance, Motion motion, Device device, Optional<ErrorBudget> budget) {
+        this.acceptance = acceptance;
+        this.motion = motion;
+        this.device = device;
+        this.budget = budget;
+    }
+
+    Verdict of(List<ReadingBand> bands, Optional<Extreme> least) {
         Reads first = bands.get(0).reads();
         List<Limit> limits = new ArrayList<>();
         acceptance.rejection().ifPresent(margin -> limits.add(rejection(margin, first, least)));
-        acceptance
-                .error()
-                .ifPresent(error -> limits.add(new Limit(
-                        "error",
-                        "m/s2",
-                        error,
-                        device.cover().closed() ? OptionalDouble.of(0.0) : OptionalDouble.empty(),
-                        OptionalDouble.empty(),
-                        device.cover().closed() ? Decision.MEETS : Decision.NOT_ASKED,
-                        device.cover().closed() ? "no flow enters a sealed cover" : NO_SURROUNDINGS)));
+        error().ifPresent(limits::add);
         Decision decision = Verdict.worst(limits);
-        return new Verdict(decision, limits, sentence(decision, bands, least, acceptance, first));
+        return new Verdict(decision, limits, sentence(decision, bands, least, first));
+    }
+
+    /** The error limit: as stated, or with surroundings the smallest motion to be read. */
+    private Optional<Limit> error() {
+        boolean taken = acceptance.error().isEmpty();
+        OptionalDouble limit = taken && budget.isPresent() ? motion.smallest() : acceptance.error();
+        if (limit.isEmpty()) {
+            return Optional.empty();
+        }
+        double required = limit.getAsDouble();
+        if (budget.isEmpty()) {
+            boolean closed = device.cover().closed();
+            return Optional.of(new Limit(
+                    "error",
+                    "m/s2",
+                    required,
+                    closed ? OptionalDouble.of(0.0) : OptionalDouble.empty(),
+                    OptionalDouble.empty(),
+                    closed ? Decision.MEETS : Decision.NOT_ASKED,
+                    closed ? "no flow enters a sealed cover" : NO_SURROUNDINGS));
+        }
+        double found = budget.get().rms();
+        boolean ended =
+                budget.get().caveats().stream().anyMatch(caveat -> caveat.weight() == Caveat.Weight.OUT_OF_RANGE);
+        Decision decision = found <= required ? Decision.MEETS : Decision.FAILS;
+        return Optional.of(new Limit(
+                "error",
+                "m/s2",
+                required,
+                OptionalDouble.of(found),
+                OptionalDouble.empty(),
+                ended ? Decision.UNDECIDED : decision,
+                (taken ? "required is taken as motion.smallest; " : "") + "flow error over the band of use, rms"));
     }
 
     private static Limit rejection(double margin, Reads first, Optional<Extreme> least) {
@@ -64,8 +100,7 @@ final class Judgement {
                 first == Reads.UNDECIDED ? "a model has ended; see the caveats" : "");
     }
 
-    private static String sentence(
-            Decision decision, List<ReadingBand> bands, Optional<Extreme> least, Acceptance acceptance, Reads first) {
+    private String sentence(Decision decision, List<ReadingBand> bands, Optional<Extreme> least, Reads first) {
         String reading = bands.stream()
                 .map(band -> say("%s from %.4g Hz to %.4g Hz", band.reads().word(), band.from(), band.to()))
                 .collect(Collectors.joining(", "));
@@ -83,9 +118,12 @@ final class Judgement {
             case UNDECIDED -> " A limit is undecided.";
             case NOT_ASKED -> " No limit was judged.";
         };
-        String scope = first == Reads.NOTHING
-                ? ""
-                : " Decided at equal accelerations of base and fluid only: no surroundings are given.";
-        return subject + found + judged + scope;
+        return subject + found + judged + (first == Reads.NOTHING ? "" : scope());
+    }
+
+    private String scope() {
+        return budget.map(found -> say(" The surroundings add %.3g m/s2 rms over the band", found.rms())
+                        + (found.offset() == 0.0 ? "." : say(" and an offset of %.3g m/s2.", found.offset())))
+                .orElse(" Decided at equal accelerations of base and fluid only: no surroundings are given.");
     }
 }

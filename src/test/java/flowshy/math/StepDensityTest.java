@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.assertThatThrownBy;
 import static org.assertj.core.api.Assertions.within;
 
 import flowshy.math.StepDensity.Band;
+import flowshy.math.StepDensity.Inside;
 import java.util.List;
 import org.assertj.core.data.Percentage;
 import org.junit.jupiter.api.Test;
@@ -13,7 +14,7 @@ import org.junit.jupiter.api.Test;
 class StepDensityTest {
     @Test
     void everyThirdOctaveOfOneBandHoldsTheSame() {
-        StepDensity pink = new StepDensity(List.of(new Band(100.0, 2000.0, 3.0)));
+        StepDensity pink = new StepDensity(List.of(new Band(100.0, 2000.0, 3.0)), Inside.PINK);
         double width = Math.log(2000.0 / 100.0);
         for (double low : new double[] {100.0, 300.0, 1500.0}) {
             double sum = 0.0;
@@ -31,7 +32,7 @@ class StepDensityTest {
 
     @Test
     void bandsKeepTheirOwn() {
-        StepDensity two = new StepDensity(List.of(new Band(10.0, 20.0, 1.0), new Band(40.0, 80.0, 4.0)));
+        StepDensity two = new StepDensity(List.of(new Band(10.0, 20.0, 1.0), new Band(40.0, 80.0, 4.0)), Inside.PINK);
         assertThat(two.at(15.0)).isCloseTo(1.0 / (15.0 * Math.log(2.0)), within(1e-15));
         assertThat(two.at(30.0)).isZero();
         assertThat(two.at(60.0)).isCloseTo(4.0 / (60.0 * Math.log(2.0)), within(1e-15));
@@ -41,12 +42,25 @@ class StepDensityTest {
     }
 
     @Test
+    void flatBandsAreFlat() {
+        StepDensity flat = new StepDensity(
+                List.of(new Band(10.0, 20.0, 1.0), new Band(20.0, 25.0, 4.0), new Band(50.0, 60.0, 0.0)), Inside.FLAT);
+        assertThat(flat.at(10.0)).isCloseTo(0.1, within(1e-16));
+        assertThat(flat.at(19.9)).isCloseTo(0.1, within(1e-16));
+        assertThat(flat.at(20.0)).isCloseTo(0.8, within(1e-15));
+        assertThat(flat.at(25.0)).isZero();
+        assertThat(flat.at(55.0)).isZero();
+        assertThat(flat.at(Double.NaN)).isZero();
+    }
+
+    @Test
     void refusesOverlapAndUpsideDown() {
         Band low = new Band(10.0, 20.0, 1.0);
         Band over = new Band(19.0, 30.0, 1.0);
-        assertThatThrownBy(() -> new StepDensity(List.of(low, over))).hasMessageContaining("band 2");
+        assertThatThrownBy(() -> new StepDensity(List.of(low, over), Inside.PINK))
+                .hasMessageContaining("band 2");
         assertThatThrownBy(() -> new Band(20.0, 10.0, 1.0)).isInstanceOf(IllegalArgumentException.class);
         assertThatThrownBy(() -> new Band(10.0, 20.0, Double.NaN)).isInstanceOf(IllegalArgumentException.class);
-        assertThatThrownBy(() -> new StepDensity(List.of())).isInstanceOf(IllegalArgumentException.class);
+        assertThatThrownBy(() -> new StepDensity(List.of(), Inside.FLAT)).isInstanceOf(IllegalArgumentException.class);
     }
 }

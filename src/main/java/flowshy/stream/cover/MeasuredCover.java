@@ -38,6 +38,15 @@ public record MeasuredCover(String file, LogTable attenuation, Optional<LogTable
         return new Complex(size * FastMath.cos(angle), size * FastMath.sin(angle));
     }
 
+    /**
+     * Factor at the lowest frequency that was measured, taken for a steady stream.
+     *
+     * @return below or equal to one where the cover attenuates [-]
+     */
+    public double slowest() {
+        return FastMath.pow(10.0, -attenuation.values().get(0) / 20.0);
+    }
+
     @Override
     public WallShare profile(Medium around) {
         return new StokesLayer(around.kinematicViscosity());

@@ -4,12 +4,14 @@ import flowshy.verdict.BandsAnswer;
 import flowshy.verdict.Verdict;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 
 /**
  * The lid decision.
  *
  * @param bare the device without a cover
  * @param required attenuation a cover must give, by frequency
+ * @param requiredError attenuation that brings the bare error down to its limit [dB], absent without surroundings and limit
  * @param reference frequency at which sensitivities are compared [Hz]
  * @param covers the candidates, in order of preference
  * @param chosen the first candidate that meets every limit
@@ -19,6 +21,7 @@ import java.util.Optional;
 public record LidAnswer(
         BandsAnswer bare,
         List<RequiredAttenuation> required,
+        OptionalDouble requiredError,
         double reference,
         List<CoverRow> covers,
         Optional<CoverRow> chosen,

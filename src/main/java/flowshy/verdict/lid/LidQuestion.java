@@ -31,14 +31,11 @@ import org.hipparchus.util.FastMath;
 /**
  * Does the device need a lid?
  *
- * @param device of the study; its own cover is taken off for the bare figures
- * @param band band of use
- * @param acceptance limits asked
+ * @param base the study's question; its own cover is taken off for the bare figures
  * @param reference frequency at which sensitivities are compared [Hz]
  * @param candidates covers in order of preference; empty: open, roofed, vented, sealed of a usual size
  */
-public record LidQuestion(
-        Device device, Band band, Acceptance acceptance, double reference, List<Candidate> candidates) {
+public record LidQuestion(BandsQuestion base, double reference, List<Candidate> candidates) {
     /** Calibrations that differ by more are worth a warning: common practice, no source. */
     private static final double CALIBRATION_CHANGE = 0.01;
 
@@ -46,7 +43,29 @@ public record LidQuestion(
 
     /** Takes usual covers where none is stated. */
     public LidQuestion {
-        candidates = candidates.isEmpty() ? usual(device) : List.copyOf(candidates);
+        candidates = candidates.isEmpty() ? usual(base.device()) : List.copyOf(candidates);
+    }
+
+    /**
+     * The question at equal accelerations, without surroundings.
+     *
+     * @param device of the study
+     * @param band band of use
+     * @param acceptance limits asked
+     * @param reference [Hz]
+     * @param candidates covers in order of preference, may be empty
+     */
+    public LidQuestion(Device device, Band band, Acceptance acceptance, double reference, List<Candidate> candidates) {
+        this(new BandsQuestion(device, band, acceptance), reference, candidates);
+    }
+
+    /**
+     * The limits asked.
+     *
+     * @return as in the base question
+     */
+    public Acceptance acceptance() {
+        return base.acceptance();
     }
 
     /**
@@ -78,28 +97,44 @@ public record LidQuestion(
      * @return the answer
      */
     public LidAnswer answer() {
-        Device bareDevice = device.bare();
-        BandsAnswer bare = new BandsQuestion(bareDevice, band, acceptance).answer();
-        List<RequiredAttenuation> required = ThirdOctaves.in(band).stream()
-                .map(frequency -> RequiredAttenuation.at(device, acceptance.margin(), frequency))
+        Device bareDevice = base.device().bare();
+        BandsAnswer bare = base.about(bareDevice).answer();
+        List<RequiredAttenuation> required = ThirdOctaves.in(base.band()).stream()
+                .map(frequency ->
+                        RequiredAttenuation.at(base.device(), acceptance().margin(), frequency))
                 .toList();
         List<CoverRow> rows =
                 candidates.stream().map(candidate -> row(candidate, bareDevice)).toList();
-        Optional<CoverRow> chosen =
-                asked() ? rows.stream().filter(row -> row.misses().isEmpty()).findFirst() : Optional.empty();
-        boolean none = asked() && chosen.isEmpty();
+        Optional<CoverRow> chosen = asked(bare)
+                ? rows.stream().filter(row -> row.misses().isEmpty()).findFirst()
+                : Optional.empty();
+        boolean none = asked(bare) && chosen.isEmpty();
         List<String> remedies =
-                none ? new Remedies(nearest(rows).candidate().over(device), band, acceptance).list() : List.of();
-        return new LidAnswer(bare, required, reference, rows, chosen, remedies, verdict(rows, chosen));
+                none ? new Remedies(base.about(nearest(rows).candidate().over(base.device()))).list() : List.of();
+        return new LidAnswer(
+                bare, required, errorAttenuation(bare), reference, rows, chosen, remedies, verdict(bare, rows, chosen));
     }
 
-    private boolean asked() {
-        return acceptance.rejection().isPresent();
+    /** 20 lg of the bare error over its limit; the flow's torque is taken as proportional to the flow, as at the bare operating point. */
+    private static OptionalDouble errorAttenuation(BandsAnswer bare) {
+        for (Limit limit : bare.verdict().limits()) {
+            if (limit.name().equals("error")
+                    && limit.found().isPresent()
+                    && bare.error().isPresent()) {
+                double ratio = limit.found().getAsDouble() / limit.required();
+                return OptionalDouble.of(FastMath.max(0.0, 20.0 * FastMath.log10(ratio)));
+            }
+        }
+        return OptionalDouble.empty();
+    }
+
+    private static boolean asked(BandsAnswer bare) {
+        return bare.verdict().limits().stream().anyMatch(limit -> limit.decision() != Decision.NOT_ASKED);
     }
 
     private CoverRow row(Candidate candidate, Device bareDevice) {
-        Device covered = candidate.over(device);
-        BandsAnswer answer = new BandsQuestion(covered, band, acceptance).answer();
+        Device covered = candidate.over(base.device());
+        BandsAnswer answer = base.about(covered).answer();
         Calibration.Figures change = new Calibration(reference, Covers.OPEN).figures(covered, bareDevice);
         List<String> misses = new ArrayList<>();
         for (Limit limit : answer.verdict().limits()) {
@@ -126,7 +161,7 @@ public record LidQuestion(
 
     private List<String> warnings(Candidate candidate, BandsAnswer answer, Calibration.Figures change) {
         List<String> warnings = new ArrayList<>();
-        double hair = device.hair().density();
+        double hair = base.device().hair().density();
         double contrast = FastMath.abs(hair - candidate.around().density()) / hair;
         if (candidate.cover().closed() && contrast < NEARLY_EQUAL_DENSITY) {
             warnings.add(say(
@@ -144,12 +179,12 @@ public record LidQuestion(
                 warnings.add(say(
                         "%.3g um over the tip is less than the Stokes layer of %.3g um at %.4g Hz: the lid's own layer reaches the"
                                 + " hair, strip theory sees only part of it",
-                        1e6 * gap, 1e6 * layer, band.from()));
+                        1e6 * gap, 1e6 * layer, base.band().from()));
             }
         });
         if (candidate.cover() instanceof VentedCover vented) {
             vented.resonance(candidate.around()).ifPresent(resonance -> {
-                if (resonance >= band.from() && resonance <= band.to()) {
+                if (resonance >= base.band().from() && resonance <= base.band().to()) {
                     warnings.add(say("the vents resonate within the band, at %.4g Hz", resonance));
                 }
             });
@@ -169,7 +204,7 @@ public record LidQuestion(
     }
 
     private OptionalDouble clearance(Cover cover) {
-        double length = device.hair().profile().length();
+        double length = base.device().hair().profile().length();
         if (cover instanceof RoofedCover roof) {
             return OptionalDouble.of(roof.gap() - length);
         }
@@ -179,20 +214,24 @@ public record LidQuestion(
         return OptionalDouble.empty();
     }
 
-    /** The candidate whose least rejection is highest. */
+    /** The candidate that misses fewest limits, and of those the one whose least rejection is highest. */
     private static CoverRow nearest(List<CoverRow> rows) {
         return rows.stream()
-                .max(Comparator.comparingDouble(row ->
-                        row.answer().least().map(BandsAnswer.Extreme::rejection).orElse(Double.NEGATIVE_INFINITY)))
+                .min(Comparator.comparingInt((CoverRow row) -> row.misses().size())
+                        .thenComparingDouble(row -> -row.answer()
+                                .least()
+                                .map(BandsAnswer.Extreme::rejection)
+                                .orElse(Double.NEGATIVE_INFINITY)))
                 .orElseThrow();
     }
 
-    private Verdict verdict(List<CoverRow> rows, Optional<CoverRow> chosen) {
-        if (!asked()) {
+    private Verdict verdict(BandsAnswer bare, List<CoverRow> rows, Optional<CoverRow> chosen) {
+        if (!asked(bare)) {
             return new Verdict(
                     Decision.NOT_ASKED,
                     List.of(),
-                    "No limit is stated: covers are compared, none is chosen. State accept.rejection to have one chosen.");
+                    "No limit that can be judged is stated: covers are compared, none is chosen. State accept.rejection, or"
+                            + " surroundings and accept.error, to have one chosen.");
         }
         if (chosen.isPresent()) {
             Cover cover = chosen.get().candidate().cover();

@@ -4,10 +4,9 @@ import static flowshy.math.Figures.say;
 
 import flowshy.hair.Hair;
 import flowshy.response.Device;
-import flowshy.verdict.Acceptance;
-import flowshy.verdict.Band;
 import flowshy.verdict.BandsAnswer;
 import flowshy.verdict.BandsQuestion;
+import flowshy.verdict.Limit;
 import flowshy.verdict.ReadingBand;
 import flowshy.verdict.Reads;
 import java.util.ArrayList;
@@ -15,6 +14,7 @@ import java.util.List;
 import java.util.OptionalDouble;
 import java.util.function.DoubleFunction;
 import org.hipparchus.analysis.solvers.BracketingNthOrderBrentSolver;
+import org.hipparchus.util.FastMath;
 
 /** What would let a device keep its margin: a thicker hair, a denser hair, a narrower band; each computed. */
 final class Remedies {
@@ -23,14 +23,12 @@ final class Remedies {
 
     private static final double ACCURACY = 1e-4;
 
+    private final BandsQuestion question;
     private final Device device;
-    private final Band band;
-    private final Acceptance acceptance;
 
-    Remedies(Device device, Band band, Acceptance acceptance) {
-        this.device = device;
-        this.band = band;
-        this.acceptance = acceptance;
+    Remedies(BandsQuestion question) {
+        this.question = question;
+        this.device = question.device();
     }
 
     List<String> list() {
@@ -42,18 +40,18 @@ final class Remedies {
         remedies.add(
                 thicker.isPresent()
                         ? say(
-                                "all diameters times %.3g (largest %.4g um) keep the margin",
+                                "all diameters times %.3g (largest %.4g um) keep every limit",
                                 thicker.getAsDouble(),
                                 2e6 * thicker.getAsDouble() * hair.profile().largestRadius())
-                        : "no thicker hair of this shape and length keeps the margin");
+                        : "no thicker hair of this shape and length keeps every limit");
         OptionalDouble denser =
                 factor(by -> device.with(new Hair(hair.profile(), by * hair.density(), hair.youngsModulus())), REACH);
         remedies.add(
                 denser.isPresent()
                         ? say(
-                                "a hair %.3g times as dense (%.4g kg/m3) keeps the margin",
+                                "a hair %.3g times as dense (%.4g kg/m3) keeps every limit",
                                 denser.getAsDouble(), denser.getAsDouble() * hair.density())
-                        : "no hair up to eight times as dense keeps the margin");
+                        : "no hair up to eight times as dense keeps every limit");
         remedies.add(narrower());
         return remedies;
     }
@@ -66,15 +64,25 @@ final class Remedies {
                 .solve(60, by -> shortfall(changed.apply(by)), 1.0, most));
     }
 
-    /** Margin less the least rejection [dB]. */
+    /** Largest miss of the limits [dB]: margin less the least rejection, error over its limit. */
     private double shortfall(Device changed) {
-        BandsAnswer answer = new BandsQuestion(changed, band, acceptance).answer(List.of(band.from()));
-        return acceptance.margin()
-                - answer.least().map(BandsAnswer.Extreme::rejection).orElse(Double.POSITIVE_INFINITY);
+        BandsAnswer answer =
+                question.about(changed).answer(List.of(question.band().from()));
+        double most = Double.NEGATIVE_INFINITY;
+        for (Limit limit : answer.verdict().limits()) {
+            if (limit.found().isPresent()) {
+                double found = limit.found().getAsDouble();
+                double miss = limit.name().equals("rejection")
+                        ? limit.required() - found
+                        : 20.0 * FastMath.log10(found / limit.required());
+                most = FastMath.max(most, miss);
+            }
+        }
+        return most;
     }
 
     private String narrower() {
-        BandsAnswer answer = new BandsQuestion(device, band, acceptance).answer(List.of(band.from()));
+        BandsAnswer answer = question.answer(List.of(question.band().from()));
         ReadingBand widest = null;
         for (ReadingBand part : answer.bands()) {
             boolean wider = widest == null || part.to() / part.from() > widest.to() / widest.from();

@@ -34,6 +34,12 @@ class TurbulentWallValidationTest {
             double ratio = UNIT.fluctuationAt(row.get("z_plus")) / row.get("rms_plus");
             assertThat(ratio).as("%s", row).isBetween(0.92, 1.25);
         }
+        for (Map<String, Double> row : CHANNEL) {
+            double ratio = UNIT.acrossFluctuationAt(row.get("z_plus")) / row.get("across_rms_plus");
+            assertThat(ratio).as("%s", row).isBetween(0.75, 1.4);
+        }
+        assertThat(UNIT.acrossFluctuationAt(2.0)).isCloseTo(0.4, within(1e-15));
+        assertThat(UNIT.acrossFluctuationAt(15.0)).isCloseTo(1.4, within(1e-15));
         assertThat(UNIT.fluctuationAt(2.0)).isCloseTo(0.8, within(1e-15));
         assertThat(UNIT.fluctuationAt(15.0)).isCloseTo(2.7, within(1e-15));
     }

@@ -1,0 +1,78 @@
+package flowshy.stream.surroundings;
+
+import flowshy.stream.SourceKind;
+import flowshy.stream.Stated;
+import flowshy.stream.turbulence.DuctTurbulence;
+import flowshy.stream.turbulence.TurbulenceSpectrum;
+import flowshy.stream.wall.DuctFlow;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+
+/**
+ * Developed flow in a duct with the hair on its wall. Turbulence and length scale come from size and Reynolds number where they are
+ * not stated; a laminar duct carries none unless it is stated.
+ */
+public final class Duct extends CarriedFlow {
+    private static final String TURBULENCE = "turbulence";
+    private static final String LENGTH_SCALE = "length-scale";
+
+    private final String name;
+    private final double direction;
+    private final DuctFlow flow;
+
+    private Duct(String name, double direction, DuctFlow flow, List<Stated> numbers) {
+        super(name, direction, new DuctLayer(flow), spectrum(flow, numbers), numbers);
+        this.name = name;
+        this.direction = direction;
+        this.flow = flow;
+    }
+
+    /**
+     * A duct in a medium.
+     *
+     * @param name the user's name for it
+     * @param direction φ [rad]
+     * @param flow section, mean speed, viscosity
+     * @param turbulence rms of the component along over the mean speed [-]; empty for the default
+     * @param lengthScale longitudinal integral scale [m]; empty for the default
+     * @return the source
+     */
+    public static Duct of(
+            String name, double direction, DuctFlow flow, Optional<Stated> turbulence, Optional<Stated> lengthScale) {
+        DuctTurbulence usual =
+                new DuctTurbulence(flow.reynolds(), flow.section().hydraulicDiameter());
+        List<Stated> numbers = new ArrayList<>();
+        boolean carries = turbulence.isPresent() || flow.intermittency() > 0.0;
+        if (carries) {
+            numbers.add(turbulence.orElseGet(() -> Stated.assumed(
+                    TURBULENCE,
+                    usual.intensity(),
+                    "0.16 Re^(-1/8) of a developed duct, common practice of flow simulation, no single source")));
+            numbers.add(lengthScale.orElseGet(() -> Stated.assumed(
+                    LENGTH_SCALE,
+                    usual.lengthScale(),
+                    "0.165 hydraulic diameters, from the mixing length of 0.07 of common practice, own conversion")));
+        }
+        return new Duct(name, direction, flow, numbers);
+    }
+
+    private static Optional<TurbulenceSpectrum> spectrum(DuctFlow flow, List<Stated> numbers) {
+        if (numbers.isEmpty()) {
+            return Optional.empty();
+        }
+        double deviation = numbers.get(0).value() * flow.meanSpeed();
+        return Optional.of(
+                new TurbulenceSpectrum(deviation, numbers.get(1).value(), flow.coreSpeed(), flow.kinematicViscosity()));
+    }
+
+    @Override
+    public SourceKind kind() {
+        return SourceKind.DUCT;
+    }
+
+    @Override
+    CarriedFlow with(List<Stated> changed) {
+        return new Duct(name, direction, flow, changed);
+    }
+}
