@@ -2,10 +2,13 @@ package flowshy.cli;
 
 import flowshy.report.FillReport;
 import flowshy.report.JsonPage;
+import flowshy.stream.cover.Cover;
+import flowshy.stream.cover.Covers;
 import flowshy.study.Study;
 import flowshy.verdict.fill.Fill;
 import flowshy.verdict.fill.FillQuestion;
 import flowshy.verdict.fill.FillRow;
+import flowshy.verdict.lid.Candidate;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
@@ -67,7 +70,15 @@ final class FillCommand implements Callable<Integer> {
         if (!only.isEmpty()) {
             fills = chosen(fills);
         }
-        return new FillQuestion(study.device(), study.band(), study.acceptance(), study.reference(), fills);
+        List<Cover> covers =
+                study.candidates().stream().map(Candidate::cover).distinct().toList();
+        return new FillQuestion(
+                study.device(),
+                study.band(),
+                study.acceptance(),
+                study.reference(),
+                fills,
+                covers.isEmpty() ? List.of(Covers.OPEN, Covers.SEALED) : covers);
     }
 
     private List<Fill> chosen(List<Fill> known) {

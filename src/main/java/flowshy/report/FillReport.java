@@ -2,6 +2,7 @@ package flowshy.report;
 
 import flowshy.math.Figures;
 import flowshy.medium.Medium;
+import flowshy.stream.cover.OpenCover;
 import flowshy.study.Study;
 import flowshy.verdict.fill.FillQuestion;
 import flowshy.verdict.fill.FillRow;
@@ -76,7 +77,7 @@ public final class FillReport {
         page.paragraph("The study's device in every fill at "
                 + Figures.of(question.device().outside().temperature() - 273.15, 4) + " degC, "
                 + Figures.of(question.device().outside().pressure() / 1000.0, 6)
-                + " kPa. Bare: standing in the fluid. Sealed: the fluid is carried along, no flow enters. Rejection: the least over "
+                + " kPa. Bare: standing in the fluid. Sealed: the fluid is carried along, no flow enters. Other covers: standing in the fluid under them. Rejection: the least over "
                 + Figures.of(question.band().from(), 4) + " Hz to "
                 + Figures.of(question.band().to(), 4)
                 + " Hz. Sensitivity against the study's own device and thermal noise, both at "
@@ -92,7 +93,8 @@ public final class FillReport {
                         .filter(row -> !row.excluded().isEmpty() && row.medium().isPresent())
                         .toList());
         List<FillRow> refused = rows.stream()
-                .filter(row -> row.medium().isEmpty() && !row.cover().closed())
+                .filter(row -> row.medium().isEmpty()
+                        && row.cover().equals(question.covers().get(0)))
                 .toList();
         if (!refused.isEmpty()) {
             page.heading("Refused at this state");
@@ -115,7 +117,9 @@ public final class FillReport {
         page.heading(head);
         List<String> names = new ArrayList<>();
         for (FillRow row : rows) {
-            names.add(row.fill() + (row.cover().closed() ? ", sealed" : ", bare") + (row.fromMemory() ? " m" : ""));
+            names.add(row.fill() + ", "
+                    + (row.cover() instanceof OpenCover ? "bare" : row.cover().words())
+                    + (row.fromMemory() ? " m" : ""));
         }
         List<Column<FillRow>> printed = columns().stream()
                 .filter(column -> !column.name().startsWith("at_")
@@ -149,6 +153,7 @@ public final class FillReport {
             json.array("fills", rows, row -> {
                 json.text("fill", row.fill());
                 json.text("cover", row.cover().kind());
+                json.text("cover_words", row.cover().words());
                 columns()
                         .forEach(
                                 column -> json.cell(column.name(), column.cell().apply(row)));
@@ -170,7 +175,7 @@ public final class FillReport {
         head.add("excluded");
         List<List<String>> lines = new ArrayList<>();
         for (FillRow row : rows) {
-            List<String> line = new ArrayList<>(List.of(row.fill(), row.cover().kind()));
+            List<String> line = new ArrayList<>(List.of(row.fill(), row.cover().words()));
             columns().forEach(column -> {
                 Cell cell = column.cell().apply(row);
                 line.add(cell.value().isPresent() ? Figures.full(cell.value().getAsDouble()) : "");

@@ -9,6 +9,7 @@ import flowshy.response.Response;
 import flowshy.response.ResponsePoint;
 import flowshy.stream.cover.Cover;
 import flowshy.stream.cover.Covers;
+import flowshy.stream.cover.VentedCover;
 import flowshy.verdict.Acceptance;
 import flowshy.verdict.Band;
 import flowshy.verdict.BandsAnswer;
@@ -29,15 +30,31 @@ import java.util.OptionalDouble;
  * @param acceptance limits asked
  * @param reference frequency at which sensitivity and noise are compared [Hz]
  * @param fills candidates, at the study's state
+ * @param covers each fluid is tried under each; a cover that is not closed lets the fluid's own flow in
  */
-public record FillQuestion(Device device, Band band, Acceptance acceptance, double reference, List<Fill> fills) {
+public record FillQuestion(
+        Device device, Band band, Acceptance acceptance, double reference, List<Fill> fills, List<Cover> covers) {
     /** Copies the list. */
     public FillQuestion {
         fills = List.copyOf(fills);
+        covers = List.copyOf(covers);
     }
 
     /**
-     * Every fill under both covers.
+     * The question for the bare and the sealed device.
+     *
+     * @param device of the study
+     * @param band band of use
+     * @param acceptance limits asked
+     * @param reference [Hz]
+     * @param fills candidates
+     */
+    public FillQuestion(Device device, Band band, Acceptance acceptance, double reference, List<Fill> fills) {
+        this(device, band, acceptance, reference, fills, List.of(Covers.OPEN, Covers.SEALED));
+    }
+
+    /**
+     * Every fill under every cover.
      *
      * @return fluids that nothing speaks against first, by falling rejection, equal ones by rising noise
      */
@@ -45,7 +62,7 @@ public record FillQuestion(Device device, Band band, Acceptance acceptance, doub
         ResponsePoint base = new Response(device).at(reference);
         List<FillRow> rows = new ArrayList<>();
         for (Fill fill : fills) {
-            for (Cover cover : List.of(Covers.OPEN, Covers.SEALED)) {
+            for (Cover cover : covers) {
                 rows.add(row(fill, cover, base));
             }
         }
@@ -62,7 +79,11 @@ public record FillQuestion(Device device, Band band, Acceptance acceptance, doub
         try {
             medium = Media.at(fill.query());
         } catch (OutOfTableException e) {
-            return refused(fill, cover, e);
+            return refused(fill, cover, why(e));
+        }
+        if (cover instanceof VentedCover && medium.soundSpeed().isEmpty()) {
+            return refused(
+                    fill, cover, "sound speed not known: a vented cover breathes by the compliance of its cavity");
         }
         Device filled = new Device(device.hair(), device.suspension(), medium, cover, medium);
         BandsAnswer answer = new BandsQuestion(filled, band, acceptance).answer(List.of(reference));
@@ -110,13 +131,17 @@ public record FillQuestion(Device device, Band band, Acceptance acceptance, doub
         return point.motionTorque().norm() / base.motionTorque().norm();
     }
 
-    private static FillRow refused(Fill fill, Cover cover, OutOfTableException e) {
+    private static String why(OutOfTableException e) {
         String why = switch (e.why()) {
             case BOILS -> "boils";
             case FREEZES -> "freezes";
             case CONDENSES -> "condenses";
             case OUTSIDE -> "outside the range of its data";
         };
+        return why + ": " + e.getMessage();
+    }
+
+    private static FillRow refused(Fill fill, Cover cover, String why) {
         return new FillRow(
                 fill.name(),
                 cover,
@@ -127,7 +152,7 @@ public record FillQuestion(Device device, Band band, Acceptance acceptance, doub
                 OptionalDouble.empty(),
                 Double.NaN,
                 OptionalDouble.empty(),
-                List.of(why + ": " + e.getMessage()),
+                List.of(why),
                 false);
     }
 }
