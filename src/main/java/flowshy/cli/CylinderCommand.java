@@ -7,6 +7,7 @@ import flowshy.report.CylinderReport;
 import flowshy.study.Study;
 import flowshy.study.StudyReader;
 import flowshy.torque.StripFactors;
+import flowshy.verdict.error.StripPoint;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
@@ -76,7 +77,8 @@ final class CylinderCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        OscillatingCylinder strip = study == null ? fromOptions() : fromStudy();
+        List<StripPoint> points = new ArrayList<>();
+        OscillatingCylinder strip = study == null ? fromOptions() : fromStudy(points);
         OptionalDouble height = at == null ? OptionalDouble.empty() : OptionalDouble.of(at);
         List<StripFactors> factors = frequencies.values().stream()
                 .map(frequency -> StripFactors.of(strip, height, frequency))
@@ -89,9 +91,9 @@ final class CylinderCommand implements Callable<Integer> {
                 at == null ? "in the free stream" : String.format(Locale.ROOT, "%.6g um above the wall", 1e6 * at));
         output.send(
                 spec.commandLine(),
-                CylinderReport.text(head, factors, strip.caveats(), limits),
+                CylinderReport.text(head, factors, points, strip.caveats(), limits),
                 output.json()
-                        ? Optional.of(CylinderReport.json(head, factors, strip.caveats(), limits))
+                        ? Optional.of(CylinderReport.json(head, factors, points, strip.caveats(), limits))
                         : Optional.empty(),
                 output.csv() ? Optional.of(CylinderReport.csv(factors, limits)) : Optional.empty());
         return 0;
@@ -111,7 +113,7 @@ final class CylinderCommand implements Callable<Integer> {
         return new OscillatingCylinder(0.5 * diameter, medium);
     }
 
-    private OscillatingCylinder fromStudy() {
+    private OscillatingCylinder fromStudy(List<StripPoint> points) {
         if (diameter != null || mediumName != null) {
             throw new ParameterException(
                     spec.commandLine(), "--diameter and --medium go without a study; use --set to change one");
@@ -127,6 +129,11 @@ final class CylinderCommand implements Callable<Integer> {
                     "--at %.6g um lies beyond the hair, which is %.6g um long",
                     1e6 * at,
                     1e6 * profile.length()));
+        }
+        if (!read.surroundings().isEmpty()) {
+            for (double frequency : frequencies.values()) {
+                points.add(StripPoint.of(read.device(), read.surroundings(), at, frequency));
+            }
         }
         return new OscillatingCylinder(profile.radius(at), read.device().around());
     }

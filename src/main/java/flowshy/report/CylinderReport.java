@@ -4,8 +4,10 @@ import flowshy.cylinder.LimitingForm;
 import flowshy.math.Caveat;
 import flowshy.math.Figures;
 import flowshy.torque.StripFactors;
+import flowshy.verdict.error.StripPoint;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.ToDoubleFunction;
 import org.hipparchus.complex.Complex;
 import org.hipparchus.util.FastMath;
 
@@ -62,7 +64,7 @@ public final class CylinderReport {
     }
 
     private static Column<StripFactors> number(
-            String name, String label, String unit, java.util.function.ToDoubleFunction<StripFactors> value) {
+            String name, String label, String unit, ToDoubleFunction<StripFactors> value) {
         return new Column<>(name, label, unit, 6, f -> Cell.of(value.applyAsDouble(f), "not defined here"));
     }
 
@@ -70,31 +72,72 @@ public final class CylinderReport {
         return FastMath.toDegrees(force.getArgument());
     }
 
+    private static List<Column<StripPoint>> surroundings() {
+        return List.of(
+                point("mean_speed_m_s", "mean speed", "m/s", StripPoint::meanSpeed),
+                point("deviation_m_s", "fluctuation", "m/s rms", StripPoint::deviation),
+                point("reynolds", "Reynolds number Re", "", p -> p.regime().reynolds()),
+                point(
+                        "keulegan_carpenter",
+                        "Keulegan-Carpenter KC",
+                        "",
+                        p -> p.regime().keuleganCarpenter()),
+                point("stokes_beta", "Stokes's beta", "", p -> p.regime().stokesBeta()),
+                point(
+                        "excursion_ratio",
+                        "excursion ratio X",
+                        "",
+                        p -> p.regime().excursionRatio()),
+                point("steady_force_n_m", "drag of the mean", "N/m", StripPoint::steadyForce),
+                point("mean_force_n_m", "mean drag", "N/m", StripPoint::meanForce),
+                point("linear_n_s_m2", "resistance, linear", "N.s/m2", StripPoint::linear),
+                point("quasi_steady_n_s_m2", "resistance, steady", "N.s/m2", StripPoint::quasiSteady),
+                point("weight", "share of the steady law", "", StripPoint::weight),
+                point("combined_n_s_m2", "resistance in use", "N.s/m2", StripPoint::combined));
+    }
+
+    private static Column<StripPoint> point(
+            String name, String label, String unit, ToDoubleFunction<StripPoint> value) {
+        return new Column<>(name, label, unit, 6, p -> Cell.of(value.applyAsDouble(p), "not defined here"));
+    }
+
+    private static <T> void block(TextPage page, List<Column<T>> columns, T row) {
+        for (Column<T> column : columns) {
+            Cell cell = column.cell().apply(row);
+            page.row(
+                    column.label(),
+                    cell.value().isPresent()
+                            ? (Figures.of(cell.value().getAsDouble(), column.digits()) + " " + column.unit()).strip()
+                            : cell.reason());
+        }
+    }
+
     /**
      * For a terminal, one block a frequency.
      *
      * @param head what was asked, one line
      * @param factors in order
+     * @param points what the surroundings make of the law, same order; empty without surroundings
      * @param caveats of the strip
      * @param limits whether the thin and thick limits are set beside
      * @return text
      */
-    public static String text(String head, List<StripFactors> factors, List<Caveat> caveats, boolean limits) {
+    public static String text(
+            String head, List<StripFactors> factors, List<StripPoint> points, List<Caveat> caveats, boolean limits) {
         TextPage page = new TextPage();
         page.line(head);
         page.paragraph(
                 "Forces per unit length and per unit velocity. Time factor exp(+i w t). Fluid moving: i w rho pi a^2"
                         + " (1 + Gamma s); strip moving: -i w rho pi a^2 Gamma.");
-        for (StripFactors strip : factors) {
+        for (int i = 0; i < factors.size(); i++) {
             page.line("");
-            for (Column<StripFactors> column : columns(limits)) {
-                Cell cell = column.cell().apply(strip);
-                page.row(
-                        column.label(),
-                        cell.value().isPresent()
-                                ? (Figures.of(cell.value().getAsDouble(), column.digits()) + " " + column.unit())
-                                        .strip()
-                                : cell.reason());
+            block(page, columns(limits), factors.get(i));
+            if (!points.isEmpty()) {
+                block(page, surroundings(), points.get(i));
+                page.row("regime", points.get(i).regime().kind().words());
+                points.get(i)
+                        .caveats()
+                        .forEach(caveat -> page.note("[" + caveat.weight().words() + "]", caveat.text()));
             }
         }
         caveats.forEach(caveat -> page.note("[" + caveat.weight().words() + "]", caveat.text()));
@@ -106,11 +149,13 @@ public final class CylinderReport {
      *
      * @param head what was asked
      * @param factors in order
+     * @param points what the surroundings make of the law, same order; empty without surroundings
      * @param caveats of the strip
      * @param limits whether the limits are included
      * @return text
      */
-    public static String json(String head, List<StripFactors> factors, List<Caveat> caveats, boolean limits) {
+    public static String json(
+            String head, List<StripFactors> factors, List<StripPoint> points, List<Caveat> caveats, boolean limits) {
         JsonPage json = new JsonPage();
         json.object(() -> {
             json.text("strip", head);
@@ -120,6 +165,15 @@ public final class CylinderReport {
                     strip -> columns(limits)
                             .forEach(column ->
                                     json.cell(column.name(), column.cell().apply(strip))));
+            if (!points.isEmpty()) {
+                json.array("surroundings", points, point -> {
+                    json.number("frequency_hz", point.frequency());
+                    surroundings()
+                            .forEach(column ->
+                                    json.cell(column.name(), column.cell().apply(point)));
+                    json.text("regime", point.regime().kind().words());
+                });
+            }
             CaveatJson.write(json, caveats);
         });
         return json.finish();

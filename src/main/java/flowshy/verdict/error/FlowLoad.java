@@ -46,7 +46,8 @@ final class FlowLoad {
                 .toList();
         this.strips = strips(device.hair().profile());
         this.means = strips.stream().map(strip -> mean(strip.height())).toList();
-        double[] variances = variances();
+        double[] variances =
+                variances(strips.stream().mapToDouble(Strip::height).toArray());
         this.laws = new ArrayList<>();
         for (int i = 0; i < strips.size(); i++) {
             double speed = FastMath.hypot(means.get(i)[0], means.get(i)[1]);
@@ -99,8 +100,20 @@ final class FlowLoad {
         return FastMath.abs(cosine) < 1e-12 ? 0.0 : cosine;
     }
 
-    private double[] variances() {
-        double[] variances = new double[strips.size()];
+    /**
+     * Operating point of all sources together at any height.
+     *
+     * @param height above the wall [m]
+     * @return mean speed and rms there
+     */
+    OperatingPoint pointAt(double height) {
+        double[] mean = mean(height);
+        double[] variance = variances(new double[] {height});
+        return new OperatingPoint(FastMath.hypot(mean[0], mean[1]), FastMath.sqrt(variance[0]), fluctuation());
+    }
+
+    private double[] variances(double[] heights) {
+        double[] variances = new double[heights.length];
         for (Exposure exposure : exposures) {
             Source source = exposure.source();
             double low = source.support().low();
@@ -110,12 +123,13 @@ final class FlowLoad {
                 double weight = (n == 0 || n == SAMPLES ? 0.5 : 1.0) * step * frequency;
                 double meanSquare = weight * source.density(frequency);
                 if (meanSquare > 0.0) {
-                    add(variances, exposure.along(2.0 * FastMath.PI * frequency), meanSquare);
+                    add(variances, heights, exposure.along(2.0 * FastMath.PI * frequency), meanSquare);
                 }
             }
             for (Line line : source.lines()) {
                 add(
                         variances,
+                        heights,
                         exposure.along(2.0 * FastMath.PI * line.frequency()),
                         line.deviation() * line.deviation());
             }
@@ -123,9 +137,9 @@ final class FlowLoad {
         return variances;
     }
 
-    private void add(double[] variances, HeightShare share, double meanSquare) {
+    private static void add(double[] variances, double[] heights, HeightShare share, double meanSquare) {
         for (int i = 0; i < variances.length; i++) {
-            double size = share.at(strips.get(i).height()).norm();
+            double size = share.at(heights[i]).norm();
             variances[i] += size * size * meanSquare;
         }
     }
