@@ -95,6 +95,10 @@ public final class BandsJson {
         json.cell(
                 "structural_damping_n_m_s_per_rad",
                 Cell.of(device.suspension().map(s -> s.damping()).orElse(Double.NaN), why));
+        device.suspension()
+                .filter(held -> held.film().isPresent())
+                .ifPresent(held ->
+                        json.number("film_damping_n_m_s_per_rad", held.filmDamping(Optional.of(device.around()))));
         json.number("gravity_stiffness_n_m_per_rad", facts.gravityStiffness());
         json.number("static_tilt_rad", facts.staticTilt());
         json.cell("bending_frequency_hz", Cell.of(facts.bendingFrequency(), "hair.youngs-modulus is not stated"));

@@ -17,6 +17,7 @@ import flowshy.verdict.Limit;
 import flowshy.verdict.ReadingBand;
 import java.util.EnumSet;
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
 import org.hipparchus.util.FastMath;
 
@@ -163,7 +164,9 @@ public final class BandsText {
         page.row(
                 "suspension",
                 "stiffness " + Figures.of(held.stiffness(), 5) + " N.m/rad, structural damping "
-                        + Figures.of(held.damping(), 4) + " N.m.s/rad; "
+                        + Figures.of(held.damping(), 4) + " N.m.s/rad"
+                        + (held.film().isEmpty() ? "" : ", film " + Figures.of(film(held), 4) + " N.m.s/rad")
+                        + "; "
                         + held.attitude().word() + ", gravity adds "
                         + Figures.of(facts.gravityStiffness(), 3) + " N.m/rad");
         facts.vacuum().ifPresent(swing -> page.row("in vacuum", swing(swing)));
@@ -187,6 +190,10 @@ public final class BandsText {
                             + Figures.of(last.readoutNoise().orElseThrow(), 3) + " at "
                             + Figures.of(last.frequency(), 4) + " Hz");
         }
+    }
+
+    private double film(Suspension held) {
+        return held.filmDamping(Optional.of(answer.device().around()));
     }
 
     private String calibration(Calibration calibration) {

@@ -12,9 +12,10 @@ import org.hipparchus.complex.Complex;
 import org.hipparchus.util.FastMath;
 
 /**
- * Hair on its suspension as an oscillator: D = S + S_g + iωR − ω²(J + J_plate + J_fluid), θ/A = T/D.
+ * Hair on its suspension as an oscillator: D = S + S_g + iω(R + R_film) − ω²(J + J_plate + J_fluid), θ/A = T/D.
  *
- * <p>S_g = ∓(ρ_h − ρ) g P[1] for an upright (−) or hanging (+) hair. Time factor e^{+iωt}.
+ * <p>S_g = ∓(ρ_h − ρ) g P[1] for an upright (−) or hanging (+) hair; R_film is that of the film under the plate in the medium around,
+ * zero in vacuum. Time factor e^{+iωt}.
  */
 public final class Oscillator {
     /** Standard gravity [m/s²], exact by definition (CGPM 1901). */
@@ -35,6 +36,7 @@ public final class Oscillator {
     private final Suspension suspension;
     private final Optional<TorqueModel> fluid;
     private final double inertia;
+    private final double filmDamping;
     private final double gravityStiffness;
     private final double weightMoment;
 
@@ -60,6 +62,7 @@ public final class Oscillator {
     public Oscillator(Hair hair, Suspension suspension, Optional<Medium> medium, Cover cover) {
         this.suspension = suspension;
         this.fluid = medium.map(around -> TorqueModel.of(hair, around, suspension.pivotDepth(), cover));
+        this.filmDamping = suspension.filmDamping(medium);
         Moments moments = Moments.of(hair.profile(), suspension.pivotDepth());
         this.inertia = hair.density() * moments.second() + suspension.plateInertia();
         this.weightMoment =
@@ -126,7 +129,7 @@ public final class Oscillator {
      * Denominator of the response.
      *
      * @param omega [rad/s]
-     * @return S + S_g + iωR − ω²(J + J_plate + J_fluid) [N·m/rad]
+     * @return S + S_g + iω(R + R_film) − ω²(J + J_plate + J_fluid) [N·m/rad]
      */
     public Complex denominator(double omega) {
         return denominator(omega, fluidInertia(omega));
@@ -140,19 +143,19 @@ public final class Oscillator {
      * @return the denominator [N·m/rad]
      */
     public Complex denominator(double omega, Complex fluidInertia) {
-        return new Complex(stiffness(), omega * suspension.damping())
+        return new Complex(stiffness(), omega * (suspension.damping() + filmDamping))
                 .subtract(fluidInertia.add(inertia).multiply(omega * omega));
     }
 
     /**
-     * Damping of suspension and fluid together.
+     * Damping of suspension, film and fluid on the hair together.
      *
      * @param omega [rad/s]
      * @param fluidInertia J_fluid at that frequency [kg·m²]
-     * @return R − ω Im J_fluid [N·m·s/rad]
+     * @return R + R_film − ω Im J_fluid [N·m·s/rad]
      */
     public double totalDamping(double omega, Complex fluidInertia) {
-        return suspension.damping() - omega * fluidInertia.getImaginary();
+        return suspension.damping() + filmDamping - omega * fluidInertia.getImaginary();
     }
 
     /**
@@ -236,11 +239,11 @@ public final class Oscillator {
      * All of the equation of motion but the suspension itself, at a complex frequency.
      *
      * @param s complex frequency, imaginary part positive [1/s]
-     * @return s²(J + J_plate + J_fluid(s)) + S_g [N·m/rad]
+     * @return s²(J + J_plate + J_fluid(s)) + s R_film + S_g [N·m/rad]
      */
     public Complex structure(Complex s) {
         Complex turning =
                 fluid.map(model -> model.fluidInertia(s)).orElse(Complex.ZERO).add(inertia);
-        return s.multiply(s).multiply(turning).add(gravityStiffness);
+        return s.multiply(s).multiply(turning).add(s.multiply(filmDamping)).add(gravityStiffness);
     }
 }

@@ -10,6 +10,7 @@ import flowshy.response.SuspensionStatement.Resonance;
 import flowshy.response.SuspensionStatement.RingDown;
 import flowshy.response.SuspensionStatement.Spring;
 import flowshy.response.SuspensionStatement.Stiffness;
+import flowshy.stream.cover.Cover;
 import java.util.Optional;
 import java.util.function.DoubleFunction;
 import java.util.function.DoubleUnaryOperator;
@@ -18,10 +19,10 @@ import org.hipparchus.complex.Complex;
 import org.hipparchus.util.FastMath;
 
 /**
- * Solves what was measured for the suspension alone: stiffness, and the damping that the fluid on the hair does not explain.
- * Done once, on the base study; every variant then holds both.
+ * Solves what was measured for the suspension alone: stiffness, and the damping that the fluid on the hair and under the plate does not
+ * explain. Done once, on the base study; every variant then holds both.
  *
- * <p>A complex frequency s fixes R and S by two linear equations: with W = s²(J + J_plate + J_fluid(s)) + S_g,
+ * <p>A complex frequency s fixes R and S by two linear equations: with W = s²(J + J_plate + J_fluid(s)) + s R_film + S_g,
  * R = −Im W / Im s and S = −Re W − R Re s. Own derivation from the equation of motion; checked by solving back.
  */
 public final class SuspensionSolver {
@@ -78,7 +79,7 @@ public final class SuspensionSolver {
         }
         Resonance resonance = (Resonance) stated;
         double omega = 2.0 * FastMath.PI * resonance.frequency();
-        Oscillator trial = oscillator(1.0, 0.0, resonance.in());
+        Oscillator trial = oscillator(1.0, 0.0, resonance.in(), resonance.under());
         double stiffness =
                 omega * omega * (trial.inertia() + trial.fluidInertia(omega).getReal()) - trial.gravityStiffness();
         if (!(stiffness > 0.0)) {
@@ -95,7 +96,7 @@ public final class SuspensionSolver {
         if (dashpot.in().isEmpty()) {
             return dashpot.value();
         }
-        Oscillator device = standing(stiffness, dashpot.in());
+        Oscillator device = standing(stiffness, dashpot.in(), dashpot.under());
         double omega = device.resonance();
         double fluid = device.totalDamping(omega, device.fluidInertia(omega));
         return left(
@@ -103,19 +104,19 @@ public final class SuspensionSolver {
                 dashpot.value() - fluid,
                 dashpot.value(),
                 say(
-                        "%.4g N.m.s/rad in %s is less than the fluid on the hair alone gives (%.4g N.m.s/rad at %.4g Hz)",
-                        dashpot.value(), name(dashpot.in()), fluid, omega / (2.0 * FastMath.PI)));
+                        "%.4g N.m.s/rad in %s is less than the fluid %s alone gives (%.4g N.m.s/rad at %.4g Hz)",
+                        dashpot.value(), name(dashpot.in()), where(), fluid, omega / (2.0 * FastMath.PI)));
     }
 
     private double fromQuality(double stiffness, Quality quality) {
-        Oscillator device = standing(stiffness, quality.in());
+        Oscillator device = standing(stiffness, quality.in(), quality.under());
         double omega = device.resonance();
         double target = quality.value();
         double fluidDamping = device.totalDamping(omega, device.fluidInertia(omega));
         Decay fluidOnly = device.decay();
         String tooHigh = say(
-                "a quality factor of %.4g in %s is above what the fluid on the hair alone allows (%.4g)",
-                target, name(quality.in()), fluidOnly.quality());
+                "a quality factor of %.4g in %s is above what the fluid %s alone allows (%.4g)",
+                target, name(quality.in()), where(), fluidOnly.quality());
         if (target <= Oscillator.LEAST_ROOT_QUALITY) { // the definition of an overdamped device, see Oscillator.decay
             double whole = device.stiffness() / (omega * target);
             return creeping(stiffness, quality, left("quality", whole - fluidDamping, whole, tooHigh));
@@ -132,7 +133,8 @@ public final class SuspensionSolver {
      * quality of 0.55 where S/(ωR) is still 0.3.
      */
     private double creeping(double stiffness, Quality quality, double damping) {
-        Decay back = oscillator(stiffness, damping, quality.in()).decay();
+        Decay back =
+                oscillator(stiffness, damping, quality.in(), quality.under()).decay();
         if (FastMath.abs(back.quality() - quality.value()) > 1e-6 * quality.value()) {
             throw new SuspensionException(
                     "quality",
@@ -145,7 +147,7 @@ public final class SuspensionSolver {
     }
 
     private double fromDecay(double stiffness, RingDown ring) {
-        Oscillator device = standing(stiffness, ring.in());
+        Oscillator device = standing(stiffness, ring.in(), ring.under());
         double omega = device.resonance();
         double rate = 1.0 / ring.decayTime();
         if (!(rate < omega)) {
@@ -162,7 +164,7 @@ public final class SuspensionSolver {
     private Suspension fromSwing(RingDown ring) {
         Complex s = new Complex(
                 -1.0 / ring.decayTime(), 2.0 * FastMath.PI * ring.frequency().orElseThrow());
-        Oscillator device = oscillator(1.0, 0.0, ring.in());
+        Oscillator device = oscillator(1.0, 0.0, ring.in(), ring.under());
         double damping = explained(device, s, ring);
         double stiffness = -device.structure(s).getReal() - damping * s.getReal();
         if (!(stiffness > 0.0)) {
@@ -179,8 +181,8 @@ public final class SuspensionSolver {
                 damping,
                 2.0 * device.inertia() / ring.decayTime(),
                 say(
-                        "a swing in %s that lasts %.4g s outlasts what the fluid on the hair alone allows",
-                        name(ring.in()), ring.decayTime()));
+                        "a swing in %s that lasts %.4g s outlasts what the fluid %s alone allows",
+                        name(ring.in()), ring.decayTime(), where()));
     }
 
     /**
@@ -233,8 +235,8 @@ public final class SuspensionSolver {
         return FastMath.max(0.0, damping);
     }
 
-    private Oscillator standing(double stiffness, Optional<Medium> in) {
-        Oscillator device = oscillator(stiffness, 0.0, in);
+    private Oscillator standing(double stiffness, Optional<Medium> in, Cover under) {
+        Oscillator device = oscillator(stiffness, 0.0, in, under);
         if (!device.stands()) {
             throw new SuspensionException(
                     statement.stiffness().orElseThrow() instanceof Spring ? "stiffness" : "resonance",
@@ -245,8 +247,8 @@ public final class SuspensionSolver {
         return device;
     }
 
-    private Oscillator oscillator(double stiffness, double damping, Optional<Medium> in) {
-        return new Oscillator(hair, suspension(stiffness, damping), in);
+    private Oscillator oscillator(double stiffness, double damping, Optional<Medium> in, Cover under) {
+        return new Oscillator(hair, suspension(stiffness, damping), in, under);
     }
 
     private Suspension suspension(double stiffness, double damping) {
@@ -256,7 +258,12 @@ public final class SuspensionSolver {
                 statement.plateInertia(),
                 statement.pivotDepth(),
                 statement.attitude(),
-                statement.readoutNoise());
+                statement.readoutNoise(),
+                statement.film());
+    }
+
+    private String where() {
+        return statement.film().isPresent() ? "on the hair and under the plate" : "on the hair";
     }
 
     private static String name(Optional<Medium> in) {

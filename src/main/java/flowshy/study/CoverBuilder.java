@@ -58,18 +58,30 @@ final class CoverBuilder {
         return media.sealed(path + ".fill", outside.get().temperature()).map(fill -> new Fitted(cover.get(), fill));
     }
 
+    /** The cover under which something was measured; empty if none is stated or the hair does not fit under it. */
+    Optional<Cover> measuredUnder(String path, Optional<Hair> hair) {
+        if (!form.word(path + ".kind").orElse("open").equals("sealed")) {
+            return Optional.empty();
+        }
+        Cover cover = sealed(path);
+        return hair.isEmpty() || fits(path, cover, hair.get()) ? Optional.of(cover) : Optional.empty();
+    }
+
     private Optional<Cover> cover(String path, Optional<Medium> outside, Optional<Band> band) {
         return switch (form.word(path + ".kind").orElse("open")) {
             case "roofed" -> Optional.of(new RoofedCover(form.si(path + ".gap"), form.si(path + ".length")));
             case "vented" -> vented(path, outside);
-            case "sealed" ->
-                Optional.of(new SealedCover(
-                        form.has(path + ".diameter") && form.has(path + ".height")
-                                ? Optional.of(new Cavity(form.si(path + ".diameter"), form.si(path + ".height")))
-                                : Optional.empty()));
+            case "sealed" -> Optional.of(sealed(path));
             case "measured" -> measured(path, band);
             default -> Optional.of(new OpenCover());
         };
+    }
+
+    private Cover sealed(String path) {
+        return new SealedCover(
+                form.has(path + ".diameter") && form.has(path + ".height")
+                        ? Optional.of(new Cavity(form.si(path + ".diameter"), form.si(path + ".height")))
+                        : Optional.empty());
     }
 
     private Optional<Cover> vented(String path, Optional<Medium> outside) {

@@ -26,6 +26,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.stream.Stream;
 
 /** From checked values to the things they describe; says where values do not go together. */
 final class StudyBuilder {
@@ -48,8 +49,9 @@ final class StudyBuilder {
         CoverBuilder covers = new CoverBuilder(form, problems, files, media);
         Optional<CoverBuilder.Fitted> cover = covers.build("cover", hair, outside, band);
         List<Candidate> candidates = candidates(covers, hair, outside, band);
-        SuspensionBuilder suspensions = new SuspensionBuilder(form, problems, media, files);
-        Optional<Suspension> suspension = suspensions.build(hair);
+        SuspensionBuilder suspensions = new SuspensionBuilder(form, problems, media, covers, files, hair);
+        Optional<Suspension> suspension = suspensions.build();
+        Optional<Calibration> calibration = calibration(cover);
         problems.throwIfAny();
         Device device = new Device(
                 hair.orElseThrow(),
@@ -65,7 +67,7 @@ final class StudyBuilder {
                 new Acceptance(
                         form.given("accept.rejection") ? form.siIfAny("accept.rejection") : OptionalDouble.empty(),
                         form.siIfAny("accept.error")),
-                calibration(),
+                calibration,
                 candidates,
                 Motion.NONE,
                 List.of(),
@@ -84,10 +86,6 @@ final class StudyBuilder {
         return candidates;
     }
 
-    private Cover calibrationCover(String path) {
-        return form.word(path).orElse("open").equals("sealed") ? Covers.SEALED : Covers.OPEN;
-    }
-
     private Optional<Band> band() {
         OptionalDouble from = form.siIfAny("band.from");
         OptionalDouble to = form.siIfAny("band.to");
@@ -104,10 +102,26 @@ final class StudyBuilder {
         return Optional.empty();
     }
 
-    private Optional<Calibration> calibration() {
-        return form.has("calibration.frequency")
-                ? Optional.of(new Calibration(form.si("calibration.frequency"), calibrationCover("calibration.cover")))
-                : Optional.empty();
+    /** A calibration under the study's own cover, bare, or in a closed cavity far from the hair. */
+    private Optional<Calibration> calibration(Optional<CoverBuilder.Fitted> used) {
+        if (problems.touches("calibration") || !form.has("calibration.frequency") || used.isEmpty()) {
+            return Optional.empty();
+        }
+        String word = form.word("calibration.cover").orElseThrow();
+        Cover own = used.get().cover();
+        Optional<Cover> cover = word.equals(own.kind())
+                ? Optional.of(own)
+                : Stream.of(Covers.OPEN, Covers.SEALED)
+                        .filter(c -> c.kind().equals(word))
+                        .findFirst();
+        if (cover.isEmpty()) {
+            problems.add(
+                    form.position("calibration.cover"),
+                    "calibration.cover",
+                    word + " in calibration, but " + own.kind() + " in use",
+                    "open, sealed, or the kind that stands under cover");
+        }
+        return cover.map(c -> new Calibration(form.si("calibration.frequency"), c));
     }
 
     private Map<String, String> document() {

@@ -15,6 +15,9 @@ import flowshy.response.SuspensionStatement.Resonance;
 import flowshy.response.SuspensionStatement.RingDown;
 import flowshy.response.SuspensionStatement.Spring;
 import flowshy.response.SuspensionStatement.Stiffness;
+import flowshy.response.TiltingPlateFilm;
+import flowshy.stream.cover.Cover;
+import flowshy.stream.cover.Covers;
 import flowshy.study.keys.Form;
 import flowshy.study.text.Problems;
 import java.util.ArrayList;
@@ -30,11 +33,21 @@ final class SuspensionBuilder {
     private final Form form;
     private final Problems problems;
     private final MediumBuilder media;
+    private final CoverBuilder covers;
     private final FilesRead files;
+    private final Optional<Hair> hair;
     private final List<Form.Taken> taken = new ArrayList<>();
 
-    SuspensionBuilder(Form form, Problems problems, MediumBuilder media, FilesRead files) {
+    SuspensionBuilder(
+            Form form,
+            Problems problems,
+            MediumBuilder media,
+            CoverBuilder covers,
+            FilesRead files,
+            Optional<Hair> hair) {
+        this.hair = hair;
         this.files = files;
+        this.covers = covers;
         this.form = form;
         this.problems = problems;
         this.media = media;
@@ -46,7 +59,7 @@ final class SuspensionBuilder {
     }
 
     /** The suspension; empty if none is stated or it has a problem. */
-    Optional<Suspension> build(Optional<Hair> hair) {
+    Optional<Suspension> build() {
         if (!form.has(GROUP) || problems.touches(GROUP)) {
             return Optional.empty();
         }
@@ -75,7 +88,8 @@ final class SuspensionBuilder {
                         form.si("suspension.plate-inertia"),
                         form.si("suspension.pivot-depth"),
                         attitude(),
-                        form.siIfAny("suspension.readout-noise")));
+                        form.siIfAny("suspension.readout-noise"),
+                        film()));
     }
 
     private Optional<Suspension> solved(Hair hair, SuspensionStatement statement) {
@@ -93,14 +107,15 @@ final class SuspensionBuilder {
             return Optional.of(new Spring(form.si("suspension.stiffness")));
         }
         return form.has("suspension.resonance")
-                ? Optional.of(new Resonance(form.si("suspension.resonance.frequency"), in("resonance")))
+                ? Optional.of(
+                        new Resonance(form.si("suspension.resonance.frequency"), in("resonance"), under("resonance")))
                 : Optional.empty();
     }
 
     /** How the damping is stated; empty if it was to be read off a record and could not. */
     private Optional<Damping> damping() {
         if (form.has("suspension.quality")) {
-            return Optional.of(new Quality(form.si("suspension.quality.value"), in("quality")));
+            return Optional.of(new Quality(form.si("suspension.quality.value"), in("quality"), under("quality")));
         }
         if (form.has("suspension.ring-down.file")) {
             return fitted();
@@ -109,22 +124,38 @@ final class SuspensionBuilder {
             return Optional.of(new RingDown(
                     form.siIfAny("suspension.ring-down.frequency"),
                     form.si("suspension.ring-down.decay-time"),
-                    in("ring-down")));
+                    in("ring-down"),
+                    under("ring-down")));
         }
-        return Optional.of(new Dashpot(form.si("suspension.damping.value"), in("damping")));
+        return Optional.of(new Dashpot(form.si("suspension.damping.value"), in("damping"), under("damping")));
     }
 
     private Optional<Damping> fitted() {
         RingDownReader reader = new RingDownReader(form, problems, files);
         Optional<FreeSwing> swing = reader.read();
         swing.ifPresent(s -> taken.addAll(reader.taken(s)));
-        return swing.map(s -> new RingDown(OptionalDouble.of(s.frequency()), s.decayTime(), in("ring-down")));
+        return swing.map(s ->
+                new RingDown(OptionalDouble.of(s.frequency()), s.decayTime(), in("ring-down"), under("ring-down")));
     }
 
     /** What surrounded the hair, empty for vacuum. */
     private Optional<Medium> in(String key) {
         String path = GROUP + "." + key + ".in";
         return media.isVacuum(path) ? Optional.empty() : media.build(path);
+    }
+
+    /** What stood over the hair; open where nothing is said. */
+    private Cover under(String key) {
+        return covers.measuredUnder(GROUP + "." + key + ".cover", hair).orElse(Covers.OPEN);
+    }
+
+    private Optional<TiltingPlateFilm> film() {
+        return form.has("suspension.film")
+                ? Optional.of(new TiltingPlateFilm(
+                        form.si("suspension.film.length"),
+                        form.si("suspension.film.width"),
+                        form.si("suspension.film.gap")))
+                : Optional.empty();
     }
 
     private Attitude attitude() {

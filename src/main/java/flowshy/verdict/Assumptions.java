@@ -39,6 +39,7 @@ final class Assumptions {
         density(device, caveats);
         caveats.addAll(device.cover().assumptions(device.around()));
         suspension(device, facts, caveats);
+        film(device, band, facts, caveats);
         bending(device, facts, caveats);
         return new ArrayList<>(caveats);
     }
@@ -136,6 +137,14 @@ final class Assumptions {
                             "Horizontal: gravity tilts the hair by %.4g mrad, as a steady 9.80665 m/s2 would.",
                             1e3 * facts.staticTilt())));
         }
+    }
+
+    private static void film(Device device, Band band, DeviceFacts facts, Set<Caveat> caveats) {
+        double highest = FastMath.max(
+                band.to(), facts.medium().map(DeviceFacts.Swing::resonance).orElse(0.0));
+        device.suspension()
+                .flatMap(Suspension::film)
+                .ifPresent(film -> caveats.addAll(film.caveats(device.around(), 2.0 * FastMath.PI * highest)));
     }
 
     private static void bending(Device device, DeviceFacts facts, Set<Caveat> caveats) {

@@ -9,6 +9,7 @@ import flowshy.hair.Club;
 import flowshy.hair.Cylinder;
 import flowshy.hair.Hair;
 import flowshy.hair.Taper;
+import flowshy.math.Caveat;
 import flowshy.medium.Media;
 import flowshy.medium.Medium;
 import flowshy.medium.MediumParameter;
@@ -24,13 +25,18 @@ import flowshy.response.SuspensionStatement.Resonance;
 import flowshy.response.SuspensionStatement.RingDown;
 import flowshy.response.SuspensionStatement.Spring;
 import flowshy.response.SuspensionStatement.Stiffness;
+import flowshy.response.TiltingPlateFilm;
+import flowshy.stream.cover.Cavity;
 import flowshy.stream.cover.Covers;
+import flowshy.stream.cover.RoofedCover;
+import flowshy.stream.cover.SealedCover;
 import flowshy.study.keys.Form;
 import flowshy.study.keys.KeyRow;
 import flowshy.study.keys.Keys;
 import flowshy.study.text.Problem;
 import flowshy.study.text.StudyException;
 import flowshy.verdict.Band;
+import flowshy.verdict.BandsQuestion;
 import java.io.File;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
@@ -179,6 +185,28 @@ class StudyReaderTest {
                 .isEqualTo(solved(Optional.of(spring), new RingDown(OptionalDouble.empty(), 9e-3, Optional.empty())));
         assertThat(suspension("{ring-down: {decay-time: 9 ms, frequency: 250 Hz}}"))
                 .isEqualTo(solved(Optional.empty(), new RingDown(OptionalDouble.of(250.0), 9e-3, Optional.empty())));
+        SealedCover narrow = new SealedCover(Optional.of(new Cavity(0.4e-3, 1e-3)));
+        String under = "cover: {kind: sealed, diameter: 0.4 mm, height: 1 mm}";
+        assertThat(suspension("{stiffness: 3 nN.m/rad, quality: {value: 0.9, in: nitrogen, " + under + "}}"))
+                .isEqualTo(solved(Optional.of(spring), new Quality(0.9, Optional.of(nitrogen), narrow)))
+                .isNotEqualTo(
+                        suspension("{stiffness: 3 nN.m/rad, quality: {value: 0.9, in: nitrogen, cover: sealed}}"));
+        assertThat(suspension("{resonance: {frequency: 300 Hz, in: nitrogen, " + under + "}}"))
+                .isEqualTo(solved(Optional.of(new Resonance(300.0, Optional.of(nitrogen), narrow)), none));
+        assertThat(suspension(
+                        "{stiffness: 3 nN.m/rad, damping: {value: 2e-11 N.m.s/rad, in: nitrogen, " + under + "}}"))
+                .isEqualTo(solved(Optional.of(spring), new Dashpot(2e-11, Optional.of(nitrogen), narrow)));
+        assertThat(suspension("{stiffness: 3 nN.m/rad, ring-down: {decay-time: 0.6 ms, in: nitrogen, " + under + "}}"))
+                .isEqualTo(solved(
+                        Optional.of(spring),
+                        new RingDown(OptionalDouble.empty(), 6e-4, Optional.of(nitrogen), narrow)));
+        TiltingPlateFilm film = new TiltingPlateFilm(120e-6, 80e-6, 9e-6);
+        Suspension filmed = suspension(
+                "{stiffness: 3 nN.m/rad, quality: {value: 0.9, in: nitrogen}, film: {length: 120 um, width: 80 um, gap: 9 um}}");
+        assertThat(filmed.film()).contains(film);
+        Suspension unfilmed = suspension("{stiffness: 3 nN.m/rad, quality: {value: 0.9, in: nitrogen}}");
+        assertThat((unfilmed.damping() - filmed.damping()) / film.damping(nitrogen))
+                .isCloseTo(1.0, within(1e-9));
         Suspension rest = suspension(
                 "{stiffness: 3 nN.m/rad, plate-inertia: 4e-18 kg.m2, pivot-depth: 3 um, attitude: horizontal, readout-noise: 2 nrad/rtHz}");
         assertThat(rest)
@@ -199,6 +227,45 @@ class StudyReaderTest {
         assertThat(study.calibration().orElseThrow().cover()).isEqualTo(Covers.SEALED);
         assertThat(study.document()).containsExactly(Map.entry("project", "p"), Map.entry("revision", "2.10"));
         assertThat(study.band()).isEqualTo(new Band(5.0, 90.0));
+    }
+
+    /** A calibration takes the study's own cover with its size, or none, or a cavity; no other cover is known. */
+    @Test
+    void calibrationUnderACoverWithDimensions() {
+        String roofed =
+                HAIR + "medium: air\ncover: {kind: roofed, gap: 1 mm, length: 5 mm}\ncalibration: {frequency: 60 Hz";
+        assertThat(read(roofed + "}\n").calibration().orElseThrow().cover()).isEqualTo(new RoofedCover(1e-3, 5e-3));
+        assertThat(read(roofed + ", cover: open}\n").calibration().orElseThrow().cover())
+                .isEqualTo(Covers.OPEN);
+        assertThat(read(roofed + ", cover: sealed}\n")
+                        .calibration()
+                        .orElseThrow()
+                        .cover())
+                .isEqualTo(Covers.SEALED);
+        assertThat(problems(roofed + ", cover: vented}\n"))
+                .containsExactly(
+                        "s.yaml:4:40: calibration.cover: vented in calibration, but roofed in use; open, sealed, or the kind that stands under cover");
+        Study sized = read(
+                HAIR
+                        + "medium: air\ncover: {kind: sealed, diameter: 2 mm, height: 1 mm}\ncalibration: {frequency: 60 Hz}\n");
+        assertThat(sized.calibration().orElseThrow().cover())
+                .isEqualTo(sized.device().cover());
+    }
+
+    /** The caveats of a film stand beside the answer: this one is as thick as a sixth of its plate. */
+    @Test
+    void whatAFilmAssumesReachesTheAnswer() {
+        Study study = read(
+                HAIR
+                        + "medium: nitrogen\nsuspension: {stiffness: 3 nN.m/rad, film: {length: 120 um, width: 60 um, gap: 10 um}}\n");
+        List<Caveat> caveats = new BandsQuestion(study.device(), study.band(), study.acceptance())
+                .answer()
+                .caveats();
+        assertThat(caveats)
+                .contains(new Caveat(
+                        Caveat.Subject.SUSPENSION,
+                        Caveat.Weight.WEAK,
+                        "The film under the plate is 0.17 of the plate's side thick; its law is for thin films."));
     }
 
     @Test
@@ -277,6 +344,7 @@ class StudyReaderTest {
                 "band: {from: 800 Hz, to: 20 Hz} | s.yaml:3:14: band.from: a band from 800 Hz to 20 Hz is upside down; from lies below to",
                 "band: {to: 1 Hz} | s.yaml:3:12: band.to: a band from 1 Hz to 1 Hz is upside down; from lies below to",
                 "suspension: {stiffness: 3 nN.m/rad, quality: {value: 5, in: vacum}} | s.yaml:3:61: suspension.quality.in.name: 'vacum' is not a known medium",
+                "suspension: {stiffness: 3 nN.m/rad, quality: {value: 0.9, in: nitrogen, cover: {kind: sealed, diameter: 70 um, height: 1 mm}}} | s.yaml:3:87: suspension.quality.cover.kind: a cavity hardly wider than the hair; a cavity radius of 1.01 of the hair's or more, where the law of the confined cylinder holds",
                 "cover: {kind: sealed, fill: vacuum} | s.yaml:3:29: cover.fill.name: vacuum: without a medium there is no flow to read; name a gas or liquid; for a package at low pressure give the gas and its pressure",
             })
     void whatDoesNotGoTogetherIsToldAtItsKey(String line, String problem) {

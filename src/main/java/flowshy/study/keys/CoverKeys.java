@@ -11,6 +11,27 @@ final class CoverKeys {
 
     private CoverKeys() {}
 
+    /** What stood over the hair while something was measured: only the wall of a closed cavity changes the damping. */
+    static Group measuredUnder() {
+        Key kind = Key.required("kind", Words.of("open", "sealed"), "nothing, or a closed cavity");
+        Map<String, List<Key>> kinds = new LinkedHashMap<>();
+        kinds.put("open", List.of());
+        kinds.put("sealed", size());
+        return Group.of("cover of a measurement", List.of(), together())
+                .selectedBy(kind, kinds)
+                .shortFor("kind");
+    }
+
+    private static List<Key> size() {
+        return List.of(
+                Key.optional("diameter", SIZE, "inner diameter of the cavity, with height"),
+                Key.optional("height", SIZE, "inner height of the cavity, with diameter"));
+    }
+
+    private static Rule[] together() {
+        return new Rule[] {Rule.oneBeside("diameter", "height"), Rule.oneBeside("height", "diameter")};
+    }
+
     static Group group() {
         Key kind = Key.required(
                 "kind",
@@ -51,16 +72,14 @@ final class CoverKeys {
                                 MediumKeys.fill(),
                                 Presence.leftOut("as medium", "the cavity holds what is outside"),
                                 "gas or liquid in the cavity"),
-                        Key.optional("diameter", SIZE, "inner diameter of the cavity, with height"),
-                        Key.optional("height", SIZE, "inner height of the cavity, with diameter")));
+                        size().get(0),
+                        size().get(1)));
         kinds.put(
                 "measured",
                 List.of(Key.required(
                         "file",
                         Text.FILE,
                         "table with columns frequency and attenuation, and phase if it was measured")));
-        return Group.of("cover", List.of(), Rule.oneBeside("diameter", "height"), Rule.oneBeside("height", "diameter"))
-                .selectedBy(kind, kinds)
-                .shortFor("kind");
+        return Group.of("cover", List.of(), together()).selectedBy(kind, kinds).shortFor("kind");
     }
 }

@@ -41,7 +41,8 @@ final class GroupReading {
                 absent(key);
             }
         }
-        group.rules().forEach(rule -> rule.check(reading, mapping, path));
+        List<String> known = Group.built(keys);
+        group.rules().stream().filter(rule -> rule.concerns(known)).forEach(rule -> rule.check(reading, mapping, path));
     }
 
     private String selected(Selector selector) {

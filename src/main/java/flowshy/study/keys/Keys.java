@@ -130,9 +130,9 @@ public final class Keys {
                         Key.required("frequency", SuspensionKeys.FREQUENCY, "frequency of calibration"),
                         Key.of(
                                 "cover",
-                                Words.of("open", "sealed"),
+                                Words.of("open", "roofed", "vented", "sealed", "measured"),
                                 Presence.like("cover.kind", "open"),
-                                "cover during calibration")));
+                                "cover during calibration: none, the study's own, or a closed cavity")));
     }
 
     private static Group document() {

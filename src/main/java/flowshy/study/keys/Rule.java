@@ -64,6 +64,11 @@ public record Rule(Need need, String beside, List<List<String>> ways) {
                 : List.of();
     }
 
+    /** Whether a group has keys for the rule: a deciding word may leave it none. */
+    boolean concerns(List<String> known) {
+        return need == Need.BESIDE ? known.contains(beside) : ways.stream().anyMatch(way -> known.contains(way.get(0)));
+    }
+
     /** The ways of which something is written. */
     private List<List<String>> taken(Node.Mapping mapping) {
         return ways.stream()
@@ -81,7 +86,11 @@ public record Rule(Need need, String beside, List<List<String>> ways) {
 
     void check(Reading reading, Node.Mapping mapping, String path) {
         List<List<String>> taken = taken(mapping);
-        if (taken.isEmpty() && needed(mapping)) {
+        if (taken.isEmpty() && needed(mapping) && ways.size() == 1) {
+            String lead = ways.get(0).get(0);
+            String below = path.isEmpty() ? lead : path + "." + lead;
+            reading.problem(mapping.position(), below, "missing", beside + " goes with it");
+        } else if (taken.isEmpty() && needed(mapping)) {
             reading.problem(mapping.position(), path, "one of " + leads() + " is missing", "state one of them");
         } else if (taken.size() > 1) {
             String first = written(taken.get(0), mapping).key();
@@ -106,7 +115,7 @@ public record Rule(Need need, String beside, List<List<String>> ways) {
 
     /** The rule as JSON Schema keywords, one map each; nothing where its keys are not known. */
     List<Object> schema(List<String> known) {
-        if (ways.stream().noneMatch(way -> known.contains(way.get(0)))) {
+        if (!concerns(known)) {
             return List.of();
         }
         List<Object> all = new ArrayList<>();

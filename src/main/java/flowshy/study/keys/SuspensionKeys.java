@@ -57,7 +57,7 @@ final class SuspensionKeys {
                         Measure.of(Dimension.ANGLE_NOISE, "0 rad/rtHz", "1 rad/rtHz"),
                         Presence.leftOut("none", "only thermal noise is counted"),
                         "noise of the readout as an angle"),
-                Key.later("film", "film of medium under the plate", "put its effect into the damping"),
+                Key.optional("film", film(), "film of the medium under the tilting plate, if its damping counts apart"),
                 Key.later("hold", "what variants keep, stiffness or resonance", LATER));
         return Group.of(
                 "suspension",
@@ -85,6 +85,19 @@ final class SuspensionKeys {
                 Rule.exactlyOne("file", "decay-time frequency"));
     }
 
+    private static Group film() {
+        Measure side = Measure.of(Dimension.LENGTH, "100 nm", "100 mm");
+        return Group.of(
+                "film",
+                List.of(
+                        Key.required("length", side, "side of the plate across the tilt axis"),
+                        Key.required("width", side, "side of the plate along the tilt axis"),
+                        Key.required(
+                                "gap",
+                                Measure.of(Dimension.LENGTH, "1 nm", "10 mm"),
+                                "height of the gap under the level plate")));
+    }
+
     private static Key in() {
         return Key.of(
                 "in",
@@ -96,7 +109,7 @@ final class SuspensionKeys {
     private static Key cover() {
         return Key.of(
                         "cover",
-                        Words.of("open", "sealed"),
+                        CoverKeys.measuredUnder(),
                         Presence.taken("open", "measurements are usually made without a lid"),
                         "cover under which it was measured")
                 .when(Condition.asksUnless("in.name", "vacuum"));

@@ -174,7 +174,6 @@ class KeysTest {
                 "measurements: {run: {file: a.csv}} | measurements",
                 "finite-length: on | finite-length",
                 "finite-length: auto | finite-length",
-                "suspension: {stiffness: 1 N.m/rad, film: {gap: 3 um}} | suspension.film",
                 "suspension: {stiffness: 1 N.m/rad, hold: resonance} | suspension.hold",
             })
     void keysOfLaterVersionsAreKnownAndRefused(String line, String path) {
@@ -217,6 +216,10 @@ class KeysTest {
                 "'suspension: {stiffness: 1 N.m/rad, quality: {in: air}}' | 's.yaml:3:45: suspension.quality.value: missing; quality factor: pure number, 0.01 to 1e8'",
                 "'suspension: {stiffness: 1 N.m/rad, quality: 3 %}' | 's.yaml:3:45: suspension.quality.value: 3 % has a unit; a pure number is wanted here, without a unit'",
                 "'suspension: {resonance: {frequency: 3 Hz, in: {name: vacuum, pressure: 1 Pa}}}' | 's.yaml:3:62: suspension.resonance.in.pressure: not wanted here; it has no meaning with name: vacuum'",
+                "'suspension: {stiffness: 1 N.m/rad, film: {length: 90 um, width: 90 um}}' | 's.yaml:3:42: suspension.film.gap: missing; height of the gap under the level plate: length, 1 nm to 10 mm'",
+                "'suspension: {stiffness: 1 N.m/rad, quality: {value: 3, cover: lid}}' | 's.yaml:3:63: suspension.quality.cover.kind: unknown word lid; one of open, sealed is wanted here'",
+                "'suspension: {stiffness: 1 N.m/rad, quality: {value: 3, cover: {kind: sealed, height: 1 mm}}}' | 's.yaml:3:63: suspension.quality.cover.diameter: missing; height goes with it'",
+                "'suspension: {stiffness: 1 N.m/rad, quality: {value: 3, cover: {kind: open, height: 1 mm}}}' | 's.yaml:3:76: suspension.quality.cover.height: belongs to kind: sealed, not to open; known here: kind'",
                 "'suspension: {stiffness: 1 N.m/rad, ring-down: {frequency: 3 Hz}}' | 's.yaml:3:47: suspension.ring-down.decay-time: missing; frequency goes with it'",
             })
     void problemsOfOneLineAreToldExactly(String line, String problem) {

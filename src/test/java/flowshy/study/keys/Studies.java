@@ -16,6 +16,7 @@ final class Studies {
               pivot-depth: 3 um
               attitude: hanging
               readout-noise: 1 nrad/rtHz
+              film: {length: 120 um, width: 80 um, gap: 3 um}
             medium: {name: air, temperature: 25 degC, pressure: 1 bar, humidity: 20 %}
             cover: {kind: sealed, fill: {name: helium, temperature: 25 degC, pressure: 1 bar}}
             band: {from: 5 Hz, to: 2 kHz}
@@ -26,8 +27,8 @@ final class Studies {
             """, """
             hair: {shape: taper, length: 700 um, base-diameter: 90 um, tip-diameter: 0 um, density: 1.2 g/cm3}
             suspension:
-              resonance: {frequency: 300 Hz, in: {density: 1.2 kg/m3, viscosity: 18 uPa.s, temperature: 20 degC, sound-speed: 343 m/s}, cover: sealed}
-              quality: {value: 1.5, in: {density: 1.2 kg/m3, kinematic-viscosity: 15 cSt}, cover: open}
+              resonance: {frequency: 300 Hz, in: {density: 1.2 kg/m3, viscosity: 18 uPa.s, temperature: 20 degC, sound-speed: 343 m/s}, cover: {kind: sealed, diameter: 2 mm, height: 1 mm}}
+              quality: {value: 1.5, in: {density: 1.2 kg/m3, kinematic-viscosity: 15 cSt}, cover: {kind: sealed, diameter: 2 mm, height: 1 mm}}
             medium: {density: 1.2 kg/m3, viscosity: 18 uPa.s, sound-speed: 343 m/s, temperature: 20 degC}
             cover: {kind: sealed, fill: {density: 0.9 g/cm3, kinematic-viscosity: 5 cSt, sound-speed: 1300 m/s}}
             """, """
@@ -53,7 +54,7 @@ final class Studies {
             hair: {length: 610 um, diameter: 77 um, density: 1.3 g/cm3}
             suspension:
               stiffness: 3 nN.m/rad
-              ring-down: {decay-time: 1 ms, in: {name: nitrogen, temperature: 20 degC, pressure: 1 bar}, cover: sealed}
+              ring-down: {decay-time: 1 ms, in: {name: nitrogen, temperature: 20 degC, pressure: 1 bar}, cover: {kind: sealed, diameter: 2 mm, height: 1 mm}}
             medium: nitrogen
             """, """
             hair: {length: 610 um, diameter: 77 um, density: 1.3 g/cm3}
@@ -62,7 +63,7 @@ final class Studies {
             cover: {kind: sealed, fill: {file: own.csv}}
             """, """
             hair: {length: 610 um, diameter: 77 um, density: 1.3 g/cm3}
-            suspension: {stiffness: 3 nN.m/rad, damping: {value: 1e-12 N.m.s/rad, in: {file: own.csv}}}
+            suspension: {stiffness: 3 nN.m/rad, damping: {value: 1e-12 N.m.s/rad, in: {file: own.csv}, cover: {kind: sealed, diameter: 2 mm, height: 1 mm}}}
             medium: nitrogen
             """, """
             hair: {length: 610 um, diameter: 77 um, density: 1.3 g/cm3}
