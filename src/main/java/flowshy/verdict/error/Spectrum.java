@@ -130,7 +130,7 @@ final class Spectrum {
     double meanSquare(int source, double from, double to) {
         double sum = integral(point -> densities.get(point)[source], from, to);
         for (Tone tone : tones.get(source)) {
-            sum += tone.frequency() >= from && tone.frequency() < to || tone.frequency() == to
+            sum += (tone.frequency() >= from && tone.frequency() < to) || tone.frequency() == to
                     ? tone.meanSquare()
                     : 0.0;
         }
