@@ -8,8 +8,9 @@ import java.util.OptionalDouble;
  * @param profile its shape
  * @param density ρ_h [kg/m³]
  * @param youngsModulus E [Pa], absent if not stated; needed only for bending
+ * @param lengthModel how the medium's forces see its length
  */
-public record Hair(Profile profile, double density, OptionalDouble youngsModulus) {
+public record Hair(Profile profile, double density, OptionalDouble youngsModulus, LengthModel lengthModel) {
     /** @throws IllegalArgumentException if density or modulus is not positive and finite */
     public Hair {
         if (!(density > 0.0) || Double.isInfinite(density)) {
@@ -23,13 +24,44 @@ public record Hair(Profile profile, double density, OptionalDouble youngsModulus
     }
 
     /**
+     * A hair seen strip by strip.
+     *
+     * @param profile its shape
+     * @param density ρ_h [kg/m³]
+     * @param youngsModulus E [Pa], absent if not stated
+     */
+    public Hair(Profile profile, double density, OptionalDouble youngsModulus) {
+        this(profile, density, youngsModulus, LengthModel.STRIPS);
+    }
+
+    /**
+     * The same hair under another model of its length.
+     *
+     * @param model strips, or the whole hair
+     * @return a hair
+     */
+    public Hair seenAs(LengthModel model) {
+        return new Hair(profile, density, youngsModulus, model);
+    }
+
+    /**
+     * The same hair of another density.
+     *
+     * @param other [kg/m³]
+     * @return a hair
+     */
+    public Hair ofDensity(double other) {
+        return new Hair(profile, other, youngsModulus, lengthModel);
+    }
+
+    /**
      * The same material in another shape.
      *
      * @param other the shape
      * @return a hair of this density and modulus
      */
     public Hair reshaped(Profile other) {
-        return new Hair(other, density, youngsModulus);
+        return new Hair(other, density, youngsModulus, lengthModel);
     }
 
     /**

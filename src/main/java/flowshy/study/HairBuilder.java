@@ -3,6 +3,7 @@ package flowshy.study;
 import flowshy.hair.Club;
 import flowshy.hair.Cylinder;
 import flowshy.hair.Hair;
+import flowshy.hair.LengthModel;
 import flowshy.hair.Profile;
 import flowshy.hair.Taper;
 import flowshy.study.keys.Form;
@@ -32,7 +33,9 @@ final class HairBuilder {
             case "club" -> club();
             default -> new ProfileReader(form, problems, files).read();
         };
-        return profile.map(p -> new Hair(p, form.si("hair.density"), form.siIfAny("hair.youngs-modulus")));
+        LengthModel model =
+                form.word("finite-length").orElse("off").equals("on") ? LengthModel.FINITE : LengthModel.STRIPS;
+        return profile.map(p -> new Hair(p, form.si("hair.density"), form.siIfAny("hair.youngs-modulus"), model));
     }
 
     private Optional<Profile> cylinder() {

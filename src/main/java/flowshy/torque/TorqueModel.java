@@ -2,10 +2,12 @@ package flowshy.torque;
 
 import flowshy.hair.Cylinder;
 import flowshy.hair.Hair;
+import flowshy.hair.LengthModel;
 import flowshy.medium.Medium;
 import flowshy.stream.StokesLayer;
 import flowshy.stream.cover.Cover;
 import flowshy.stream.cover.Covers;
+import flowshy.torque.finite.LengthFactors;
 import org.hipparchus.complex.Complex;
 
 /** Torques on one hair in one medium, at any frequency. */
@@ -48,6 +50,14 @@ public interface TorqueModel {
      * @return the model; flow and open are those under the cover at φ = 1
      */
     static TorqueModel of(Hair hair, Medium medium, double pivotDepth, Cover cover) {
+        TorqueModel strips = strips(hair, medium, pivotDepth, cover);
+        // a cavity confines the fluid: the whole hair's solution has no wall but the one it stands on
+        return hair.lengthModel() == LengthModel.STRIPS || cover.cavityRadius().isPresent()
+                ? strips
+                : new FactoredTorques(strips, LengthFactors.of(hair.profile(), medium, pivotDepth));
+    }
+
+    private static TorqueModel strips(Hair hair, Medium medium, double pivotDepth, Cover cover) {
         if (hair.profile() instanceof Cylinder cylinder && cover.profile(medium) instanceof StokesLayer) {
             return new CylinderTorques(
                     cylinder, hair.density(), medium, pivotDepth, new Confinement(cover.cavityRadius(), medium));

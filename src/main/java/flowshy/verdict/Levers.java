@@ -97,10 +97,7 @@ public record Levers(
                 "all lengths +10 %",
                 device.with(hair.reshaped(hair.profile().lengthened(CHANGE))), frequency, rejection));
         levers.add(lever(
-                "hair density +10 %",
-                device.with(new Hair(hair.profile(), CHANGE * hair.density(), hair.youngsModulus())),
-                frequency,
-                rejection));
+                "hair density +10 %", device.with(hair.ofDensity(CHANGE * hair.density())), frequency, rejection));
         return new Levers(
                 frequency,
                 rejection,

@@ -86,7 +86,7 @@ public final class Keys {
                 Key.later("measurements", "points drawn over the model", "leave it out"),
                 Key.of(
                         "finite-length",
-                        Words.of("off").later("write off: strip theory", "on", "auto"),
+                        Words.of("off", "on").later("write on: the whole hair is solved; off: strip theory", "auto"),
                         Presence.taken("off", "strip theory"),
                         "correction for tip and wall"),
                 Key.optional("document", document(), "entries of the title block"));

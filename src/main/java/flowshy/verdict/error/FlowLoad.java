@@ -5,6 +5,7 @@ import flowshy.cylinder.excursion.CombinedResistance;
 import flowshy.cylinder.excursion.Fluctuation;
 import flowshy.cylinder.excursion.OperatingPoint;
 import flowshy.cylinder.excursion.Regime;
+import flowshy.hair.LengthModel;
 import flowshy.hair.Profile;
 import flowshy.hair.Strip;
 import flowshy.response.Device;
@@ -12,8 +13,11 @@ import flowshy.stream.HeightShare;
 import flowshy.stream.Line;
 import flowshy.stream.Source;
 import flowshy.stream.cover.Exposure;
+import flowshy.torque.finite.FiniteHair;
+import flowshy.torque.finite.LengthFactors;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import org.hipparchus.complex.Complex;
 import org.hipparchus.util.FastMath;
 
@@ -38,6 +42,7 @@ final class FlowLoad {
     private final List<Strip> strips;
     private final List<CombinedResistance> laws;
     private final List<double[]> means;
+    private final Optional<LengthFactors> finite;
 
     FlowLoad(Device device, List<Source> sources) {
         this.device = device;
@@ -45,6 +50,9 @@ final class FlowLoad {
                 .map(source -> new Exposure(source, device.cover(), device.around()))
                 .toList();
         this.strips = strips(device.hair().profile());
+        this.finite = device.hair().lengthModel() == LengthModel.FINITE
+                ? Optional.of(LengthFactors.of(device.hair().profile(), device.around(), device.pivotDepth()))
+                : Optional.empty();
         this.means = strips.stream().map(strip -> mean(strip.height())).toList();
         double[] variances =
                 variances(strips.stream().mapToDouble(Strip::height).toArray());
@@ -195,13 +203,16 @@ final class FlowLoad {
             real -= force.getImaginary() * moment; // times iω
             imaginary += force.getReal() * moment;
         }
-        return new Complex(real, imaginary);
+        Complex torque = new Complex(real, imaginary);
+        return finite.map(factors -> torque.multiply(factors.at(omega).stream()))
+                .orElse(torque);
     }
 
     /**
      * Steady torque of the mean streams about the sensitive axis.
      *
-     * @return ∫ E[f] cos α ℓ dz [N·m], α the direction of the local mean
+     * @return ∫ E[f] cos α ℓ dz [N·m], α the direction of the local mean; for a whole hair at least its creeping torque in the same
+     *     streams, which the endless cylinder's law falls short of
      */
     double steadyTorque() {
         double torque = 0.0;
@@ -216,7 +227,12 @@ final class FlowLoad {
                         * (strip.height() + device.pivotDepth());
             }
         }
-        return torque;
+        if (finite.isEmpty() || torque == 0.0) {
+            return torque;
+        }
+        double creeping = new FiniteHair(device.hair().profile(), device.around(), device.pivotDepth())
+                .creepingTorque(height -> mean(height)[0]);
+        return FastMath.abs(creeping) > FastMath.abs(torque) ? creeping : torque;
     }
 
     /**

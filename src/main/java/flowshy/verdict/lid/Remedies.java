@@ -44,8 +44,7 @@ final class Remedies {
                                 thicker.getAsDouble(),
                                 2e6 * thicker.getAsDouble() * hair.profile().largestRadius())
                         : "no thicker hair of this shape and length keeps every limit");
-        OptionalDouble denser =
-                factor(by -> device.with(new Hair(hair.profile(), by * hair.density(), hair.youngsModulus())), REACH);
+        OptionalDouble denser = factor(by -> device.with(hair.ofDensity(by * hair.density())), REACH);
         remedies.add(
                 denser.isPresent()
                         ? say(

@@ -172,7 +172,6 @@ class KeysTest {
                 "envelope: {medium.temperature: [1 degC]} | envelope",
                 "variants: {a: {medium: water}} | variants",
                 "measurements: {run: {file: a.csv}} | measurements",
-                "finite-length: on | finite-length",
                 "finite-length: auto | finite-length",
                 "suspension: {stiffness: 1 N.m/rad, hold: resonance} | suspension.hold",
             })

@@ -1,0 +1,35 @@
+package flowshy.torque;
+
+import flowshy.torque.finite.FiniteFactors;
+import flowshy.torque.finite.LengthFactors;
+import org.hipparchus.complex.Complex;
+import org.hipparchus.util.FastMath;
+
+/**
+ * Strip theory times the factors of the whole hair: one on the torque of flow, one on the fluid's inertia. T_open = T_carried − T_flow
+ * still holds, each from its own integral.
+ *
+ * @param strips strip theory
+ * @param factors of the finite hair
+ */
+record FactoredTorques(TorqueModel strips, LengthFactors factors) implements TorqueModel {
+    @Override
+    public Torques at(double omega) {
+        Torques base = strips.at(omega);
+        FiniteFactors factor = factors.at(omega);
+        return new Torques(
+                omega,
+                base.flow().multiply(factor.stream()),
+                base.open().subtract(base.carried()).multiply(factor.stream()).add(base.carried()),
+                base.carried(),
+                base.fluidInertia().multiply(factor.rocking()));
+    }
+
+    /** {@inheritDoc} The factor is that of the real frequency |s|: it changes by a few per cent a decade. */
+    @Override
+    public Complex fluidInertia(Complex s) {
+        return strips.fluidInertia(s)
+                .multiply(factors.at(FastMath.hypot(s.getReal(), s.getImaginary()))
+                        .rocking());
+    }
+}
