@@ -22,8 +22,8 @@ public record OscillatingCylinder(double radius, Medium medium) {
     /** Below this Knudsen number slip changes the force by less than 0.5 %, and is not worth a word. */
     private static final double SLIP_TO_MENTION = 0.01;
 
-    /** First-order slip ends here (common practice, no source). */
-    private static final double SLIP_END = 0.1;
+    /** Knudsen number at which first-order slip ends (common practice, no source). */
+    public static final double SLIP_END = 0.1;
 
     /** @throws IllegalArgumentException if the radius is not positive and finite */
     public OscillatingCylinder {

@@ -80,6 +80,13 @@ public record Club(
     }
 
     @Override
+    public double room() {
+        double forHead = length - stalkLength - shoulderLength;
+        double byWidth = length / (2.0 * headRadius);
+        return end == End.ROUND ? FastMath.min(byWidth, forHead / headRadius) : byWidth;
+    }
+
+    @Override
     public Profile lengthened(double factor) {
         return new Club(length * factor, stalkRadius, stalkLength * factor, shoulderLength * factor, headRadius, end);
     }

@@ -42,6 +42,16 @@ public sealed interface Profile permits Cylinder, Taper, Club, MeasuredProfile {
     Profile thickened(double factor);
 
     /**
+     * How much thicker the hair may become.
+     *
+     * @return largest factor that {@link #thickened} takes [-]; then the hair is as wide as long, or its round end takes the whole
+     *     head
+     */
+    default double room() {
+        return length() / (2.0 * largestRadius());
+    }
+
+    /**
      * The same shape with every length along the axis multiplied.
      *
      * @param factor positive factor [-]

@@ -4,6 +4,7 @@ import static flowshy.math.Figures.say;
 
 import flowshy.cylinder.OscillatingCylinder;
 import flowshy.hair.LengthModel;
+import flowshy.hair.Profile;
 import flowshy.math.Caveat;
 import flowshy.math.Caveat.Subject;
 import flowshy.math.Caveat.Weight;
@@ -11,6 +12,7 @@ import flowshy.medium.PropertySource;
 import flowshy.medium.PropertySource.Reading;
 import flowshy.response.Device;
 import flowshy.response.Suspension;
+import flowshy.torque.ThinStrips;
 import flowshy.torque.finite.FiniteFactors;
 import flowshy.torque.finite.LengthFactors;
 import java.util.ArrayList;
@@ -26,6 +28,12 @@ final class Assumptions {
 
     private static final double NEARLY_EQUAL_DENSITY = 0.05;
 
+    /** Share of the torque that may rest on a law that has ended: it moves the rejection by a tenth of a decibel or so. */
+    private static final double LITTLE = 0.05;
+
+    /** Less than this is not worth a word. */
+    private static final double UNTOLD = 0.001;
+
     private Assumptions() {}
 
     static List<Caveat> of(Device device, Band band, DeviceFacts facts) {
@@ -34,7 +42,7 @@ final class Assumptions {
                 device.cover().closed() ? List.of() : device.outside().caveats());
         caveats.addAll(device.around().caveats());
         fromMemory(device, caveats);
-        caveats.addAll(new OscillatingCylinder(device.hair().profile().smallestRadius(), device.around()).caveats());
+        rarefaction(device, band, caveats);
         if (!device.cover().closed()) {
             finiteLength(device, band, facts, caveats);
             excursion(device, band, facts, caveats);
@@ -59,6 +67,29 @@ final class Assumptions {
                                 "The %s of %s is recalled from memory (%s); the decision rests on it.",
                                 source.property(), device.around().name(), source.source())));
             }
+        }
+    }
+
+    /** Of a hair that only ends thinner than the slip law goes the rest still counts; a sealed one's reading rests on no law. */
+    private static void rarefaction(Device device, Band band, Set<Caveat> caveats) {
+        Profile profile = device.hair().profile();
+        double thin = ThinStrips.share(
+                profile, device.around(), 2.0 * FastMath.PI * band.from(), OscillatingCylinder.SLIP_END);
+        Subject subject = device.cover().closed() ? Subject.RESONANCE : Subject.REJECTION;
+        OscillatingCylinder thinnest = new OscillatingCylinder(profile.smallestRadius(), device.around());
+        boolean ended = thinnest.knudsen() > OscillatingCylinder.SLIP_END;
+        if (!ended || thin >= LITTLE) {
+            thinnest.caveats().forEach(caveat -> caveats.add(new Caveat(subject, caveat.weight(), caveat.text())));
+        }
+        if (thin > UNTOLD && (!ended || thin < LITTLE)) {
+            caveats.add(new Caveat(
+                    subject,
+                    thin < LITTLE ? Weight.NOTE : Weight.OUT_OF_RANGE,
+                    say(
+                            "Where the hair is thinner than %.3g um the slip law has ended; these parts carry %.2g %% of the torque of"
+                                    + " the flow.",
+                            2e6 * device.around().meanFreePath().orElseThrow() / OscillatingCylinder.SLIP_END,
+                            100.0 * thin)));
         }
     }
 

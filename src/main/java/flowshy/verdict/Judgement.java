@@ -17,6 +17,7 @@ import java.util.stream.Collectors;
 final class Judgement {
     private static final String NO_FLOW = "no flow reaches the hair under a sealed cover: the rejection has no bound";
     private static final String NOTHING = "the hair is as dense as the fluid carried with it: it reads nothing";
+    private static final String ENDED = "a model has ended; see the caveats";
     private static final String NO_SURROUNDINGS =
             "needs surroundings; without them the largest flow speed that keeps it is given point by point";
 
@@ -36,19 +37,29 @@ final class Judgement {
         Reads first = bands.get(0).reads();
         List<Limit> limits = new ArrayList<>();
         acceptance.rejection().ifPresent(margin -> limits.add(rejection(margin, first, least)));
-        error().ifPresent(limits::add);
+        error(first).ifPresent(limits::add);
         Decision decision = Verdict.worst(limits);
         return new Verdict(decision, limits, sentence(decision, bands, least, first));
     }
 
     /** The error limit: as stated, or with surroundings the smallest motion to be read. */
-    private Optional<Limit> error() {
+    private Optional<Limit> error(Reads first) {
         boolean taken = acceptance.error().isEmpty();
         OptionalDouble limit = taken && budget.isPresent() ? motion.smallest() : acceptance.error();
         if (limit.isEmpty()) {
             return Optional.empty();
         }
         double required = limit.getAsDouble();
+        if (first == Reads.NOTHING) {
+            return Optional.of(new Limit(
+                    "error",
+                    "m/s2",
+                    required,
+                    OptionalDouble.empty(),
+                    OptionalDouble.empty(),
+                    Decision.FAILS,
+                    NOTHING));
+        }
         if (budget.isEmpty()) {
             boolean closed = device.cover().closed();
             return Optional.of(new Limit(
@@ -87,7 +98,7 @@ final class Judgement {
                     OptionalDouble.empty(),
                     OptionalDouble.empty(),
                     first == Reads.UNDECIDED ? Decision.UNDECIDED : Decision.MEETS,
-                    NO_FLOW);
+                    first == Reads.UNDECIDED ? ENDED : NO_FLOW);
         }
         Decision decision = least.get().rejection() >= margin ? Decision.MEETS : Decision.FAILS;
         return new Limit(
@@ -97,7 +108,7 @@ final class Judgement {
                 OptionalDouble.of(least.get().rejection()),
                 OptionalDouble.of(least.get().frequency()),
                 first == Reads.UNDECIDED ? Decision.UNDECIDED : decision,
-                first == Reads.UNDECIDED ? "a model has ended; see the caveats" : "");
+                first == Reads.UNDECIDED ? ENDED : "");
     }
 
     private String sentence(Decision decision, List<ReadingBand> bands, Optional<Extreme> least, Reads first) {

@@ -10,6 +10,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
 import java.util.TreeSet;
+import java.util.function.DoubleUnaryOperator;
 import org.hipparchus.analysis.solvers.BracketingNthOrderBrentSolver;
 import org.hipparchus.complex.Complex;
 import org.hipparchus.util.FastMath;
@@ -90,9 +91,12 @@ public record Levers(
         double rejection = response.rejection(frequency);
         List<Lever> levers = new ArrayList<>();
         Hair hair = device.hair();
+        boolean room = hair.profile().room() >= CHANGE;
         levers.add(lever(
-                "all diameters +10 %",
-                device.with(hair.reshaped(hair.profile().thickened(CHANGE))), frequency, rejection));
+                room ? "all diameters +10 %" : "all diameters -10 %",
+                device.with(hair.reshaped(hair.profile().thickened(room ? CHANGE : 2.0 - CHANGE))),
+                frequency,
+                rejection));
         levers.add(lever(
                 "all lengths +10 %",
                 device.with(hair.reshaped(hair.profile().lengthened(CHANGE))), frequency, rejection));
@@ -122,16 +126,12 @@ public record Levers(
 
     private static Lever lever(String what, Device changed, double frequency, double level) {
         Response response = new Response(changed);
-        double low = frequency / REACH;
-        double high = frequency * REACH;
+        DoubleUnaryOperator more = x -> response.rejection(FastMath.exp(x)) - level;
+        double low = FastMath.log(frequency / REACH);
+        double high = FastMath.log(frequency * REACH);
         OptionalDouble edge = OptionalDouble.empty();
-        if ((response.rejection(low) - level) * (response.rejection(high) - level) < 0.0) {
-            double root = new BracketingNthOrderBrentSolver(1e-9, 5)
-                    .solve(
-                            100,
-                            x -> response.rejection(FastMath.exp(x)) - level,
-                            FastMath.log(low),
-                            FastMath.log(high));
+        if (more.applyAsDouble(low) * more.applyAsDouble(high) < 0.0) {
+            double root = new BracketingNthOrderBrentSolver(1e-9, 5).solve(100, more::applyAsDouble, low, high);
             edge = OptionalDouble.of(FastMath.exp(root));
         }
         return new Lever(what, response.rejection(frequency) - level, edge);

@@ -22,6 +22,9 @@ final class RejectionCurve {
     private static final int LEAST_POINTS = 40;
     private static final double ACCURACY = 1e-10;
 
+    /** A further sample beside each end, in steps: it shows a turning point that the first or last step would hide. */
+    private static final double END = 0.02;
+
     /**
      * One sample.
      *
@@ -43,21 +46,38 @@ final class RejectionCurve {
         this.rejection = rejection;
         double span = FastMath.log(band.to() / band.from());
         int steps = FastMath.max(LEAST_POINTS, (int) FastMath.ceil(POINTS_A_DECADE * span / FastMath.log(10.0)));
-        List<Sample> grid = new ArrayList<>(steps + 1);
+        List<Sample> grid = new ArrayList<>(steps + 3);
         for (int i = 0; i <= steps; i++) {
-            double frequency = i == steps ? band.to() : band.from() * FastMath.exp(span * i / steps);
-            grid.add(sample(frequency));
-        }
-        List<Sample> all = new ArrayList<>(grid);
-        for (int i = 1; i < steps; i++) {
-            double before = grid.get(i).rejection() - grid.get(i - 1).rejection();
-            double after = grid.get(i + 1).rejection() - grid.get(i).rejection();
-            if (before * after < 0.0) {
-                all.add(turningPoint(grid.get(i - 1), grid.get(i), grid.get(i + 1), before > 0.0));
+            if (i == steps) {
+                grid.add(sample(band.to() * FastMath.exp(-END * span / steps)));
+            }
+            grid.add(sample(i == steps ? band.to() : band.from() * FastMath.exp(span * i / steps)));
+            if (i == 0) {
+                grid.add(sample(band.from() * FastMath.exp(END * span / steps)));
             }
         }
+        List<Sample> all = new ArrayList<>(grid);
+        all.addAll(turningPoints(grid));
         all.sort(Comparator.comparingDouble(Sample::frequency));
         this.samples = List.copyOf(all);
+    }
+
+    /** Between a rise and the next fall, or the reverse; equal neighbours between them belong to both. */
+    private List<Sample> turningPoints(List<Sample> grid) {
+        List<Sample> found = new ArrayList<>();
+        double before = 0.0;
+        int start = 0;
+        for (int i = 1; i < grid.size(); i++) {
+            double change = grid.get(i).rejection() - grid.get(i - 1).rejection();
+            if (change != 0.0) {
+                if (change * before < 0.0) {
+                    found.add(turningPoint(grid.get(start), grid.get(i - 1), grid.get(i), before > 0.0));
+                }
+                before = change;
+                start = i - 1;
+            }
+        }
+        return found;
     }
 
     /**
@@ -99,18 +119,31 @@ final class RejectionCurve {
      */
     List<Double> crossings(double level) {
         List<Double> found = new ArrayList<>();
-        for (int i = 1; i < samples.size(); i++) {
-            double below = samples.get(i - 1).rejection() - level;
-            double above = samples.get(i).rejection() - level;
-            if (below * above < 0.0) {
-                double low = FastMath.log(samples.get(i - 1).frequency());
-                double high = FastMath.log(samples.get(i).frequency());
-                double root = new BracketingNthOrderBrentSolver(ACCURACY, 5)
-                        .solve(100, x -> rejection.applyAsDouble(FastMath.exp(x)) - level, low, high);
-                found.add(FastMath.exp(root));
+        int last = -1; // the last sample that is not on the level itself
+        for (int i = 0; i < samples.size(); i++) {
+            double here = samples.get(i).rejection() - level;
+            if (here == 0.0) {
+                continue;
             }
+            if (last >= 0 && here * (samples.get(last).rejection() - level) < 0.0) {
+                found.add(
+                        i == last + 1
+                                ? crossing(level, samples.get(last), samples.get(i))
+                                : samples.get(last + 1).frequency());
+            }
+            last = i;
         }
         return found;
+    }
+
+    private double crossing(double level, Sample before, Sample after) {
+        double low = FastMath.log(before.frequency());
+        double high = FastMath.log(after.frequency());
+        // at the ends the samples themselves: e^{ln f} is f but for rounding, which may lie beyond the crossing
+        DoubleUnaryOperator above = x -> x <= low
+                ? before.rejection() - level
+                : (x >= high ? after.rejection() : rejection.applyAsDouble(FastMath.exp(x))) - level;
+        return FastMath.exp(new BracketingNthOrderBrentSolver(ACCURACY, 5).solve(100, above::applyAsDouble, low, high));
     }
 
     private Sample turningPoint(Sample before, Sample middle, Sample after, boolean top) {
