@@ -28,7 +28,7 @@ class FiniteElementValidationTest {
     private static final Profile CLUB = new Club(900e-6, 20e-6, 400e-6, 100e-6, 60e-6, Club.End.ROUND);
 
     /** One row: case, frequency and four complex values. */
-    private record Row(String name, double omega, Complex[] values) {
+    private record Row(String name, double omega, List<Complex> values) {
         Medium medium() {
             return name.contains("air") ? Medium.of("air", 1.204, 1.825e-5) : Medium.of("water", 998.2, 1.0016e-3);
         }
@@ -42,8 +42,8 @@ class FiniteElementValidationTest {
     void streamPastTheFixedHair() throws IOException {
         for (Row row : rows()) {
             FiniteTorques found = new FiniteHair(row.profile(), row.medium(), 0.0).at(row.omega());
-            hold(row, found.stream().lateralTorque(), row.values()[0]);
-            hold(row, found.stream().force(), row.values()[1]);
+            hold(row, found.stream().lateralTorque(), row.values().get(0));
+            hold(row, found.stream().force(), row.values().get(1));
         }
     }
 
@@ -66,8 +66,8 @@ class FiniteElementValidationTest {
             double foot = row.profile().radius(0.0) / scale;
             Complex torque = RingLayer.dot(layer.motion(0.0, 1.0, 0.0), density).add(volume);
             Complex force = RingLayer.dot(layer.motion(1.0, 0.0, 0.0), density).add(FastMath.PI * foot * foot);
-            hold(row, torque.multiply(mu * scale * scale * scale), row.values()[2]);
-            hold(row, force.multiply(mu * scale * scale), row.values()[3]);
+            hold(row, torque.multiply(mu * scale * scale * scale), row.values().get(2));
+            hold(row, force.multiply(mu * scale * scale), row.values().get(3));
         }
     }
 
@@ -90,10 +90,10 @@ class FiniteElementValidationTest {
             for (String line : lines) {
                 if (line.startsWith("\"")) { // the names hold commas
                     String[] cells = line.substring(line.lastIndexOf('"') + 2).split(",", -1);
-                    Complex[] values = new Complex[4];
-                    for (int i = 0; i < values.length; i++) {
-                        values[i] =
-                                new Complex(Double.parseDouble(cells[2 * i + 1]), Double.parseDouble(cells[2 * i + 2]));
+                    List<Complex> values = new ArrayList<>();
+                    for (int i = 0; i < 4; i++) {
+                        values.add(new Complex(
+                                Double.parseDouble(cells[2 * i + 1]), Double.parseDouble(cells[2 * i + 2])));
                     }
                     double omega = 2.0 * FastMath.PI * Double.parseDouble(cells[0]);
                     rows.add(new Row(line.substring(1, line.lastIndexOf('"')), omega, values));
