@@ -132,6 +132,11 @@ public final class Media {
                 .flatMap(header -> MediumShelf.find(MediumShelf.stem(header.medium())));
     }
 
+    /** Slips over the longer length: of two names as many slips away the longer is nearer, or every short word would be near. */
+    private static double remoteness(String typed, String known) {
+        return (double) Spelling.distance(typed, known) / Math.max(typed.length(), known.length());
+    }
+
     private static UnknownMediumException unknown(String name) {
         List<String> names = new ArrayList<>();
         for (MediumEntry entry : entries()) {
@@ -139,7 +144,7 @@ public final class Media {
             names.addAll(entry.aliases());
         }
         String stem = MediumShelf.stem(name);
-        names.sort(Comparator.comparingInt((String known) -> Spelling.distance(stem, MediumShelf.stem(known)))
+        names.sort(Comparator.comparingDouble((String known) -> remoteness(stem, MediumShelf.stem(known)))
                 .thenComparing(Comparator.naturalOrder()));
         return new UnknownMediumException(name, names.subList(0, NEAREST));
     }
