@@ -9,7 +9,6 @@ import flowshy.medium.SealedFill;
 import flowshy.medium.UnfitParameterException;
 import flowshy.medium.UnknownMediumException;
 import flowshy.study.keys.Form;
-import flowshy.study.keys.KeyRow;
 import flowshy.study.keys.Keys;
 import flowshy.study.keys.Presence;
 import flowshy.study.text.Nearest;
@@ -114,17 +113,16 @@ final class MediumBuilder {
                 : query;
     }
 
-    private Optional<KeyRow> usual(String path, MediumParameter parameter) {
-        return Keys.row(path + "." + parameter.key())
-                .filter(row -> row.presence().kind() == Presence.Kind.IF_NEEDED);
+    private static Optional<Presence> usual(String path, MediumParameter parameter) {
+        return Keys.presence(path + "." + parameter.key())
+                .filter(presence -> presence.kind() == Presence.Kind.IF_NEEDED);
     }
 
     private Optional<Medium> withUsual(
             String path, MediumQuery query, MediumParameter parameter, Function<MediumQuery, Medium> law) {
-        KeyRow row = usual(path, parameter).orElseThrow();
-        double value = Quantity.read(row.presence().value(), Dimension.SHARE).value();
-        taken.add(new Form.Taken(
-                row.path(), row.presence().value(), row.presence().why()));
+        Presence usual = usual(path, parameter).orElseThrow();
+        double value = Quantity.read(usual.value(), Dimension.SHARE).value();
+        taken.add(new Form.Taken(path + "." + parameter.key(), usual.value(), usual.why()));
         try {
             return Optional.of(law.apply(query.with(parameter, value)));
         } catch (MediumException e) {

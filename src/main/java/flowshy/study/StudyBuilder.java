@@ -9,7 +9,6 @@ import flowshy.stream.cover.Cover;
 import flowshy.stream.cover.Covers;
 import flowshy.study.keys.Field;
 import flowshy.study.keys.Form;
-import flowshy.study.keys.KeyRow;
 import flowshy.study.keys.Keys;
 import flowshy.study.text.Problems;
 import flowshy.study.text.TextFile;
@@ -52,6 +51,7 @@ final class StudyBuilder {
         SuspensionBuilder suspensions = new SuspensionBuilder(form, problems, media, covers, files, hair);
         Optional<Suspension> suspension = suspensions.build();
         Optional<Calibration> calibration = calibration(cover);
+        Motion motion = new MotionBuilder(form, problems, files).build();
         problems.throwIfAny();
         Device device = new Device(
                 hair.orElseThrow(),
@@ -69,7 +69,7 @@ final class StudyBuilder {
                         form.siIfAny("accept.error")),
                 calibration,
                 candidates,
-                Motion.NONE,
+                motion,
                 List.of(),
                 document(),
                 takenAs(suspensions.taken()),
@@ -138,9 +138,8 @@ final class StudyBuilder {
         List<Form.Taken> all = new ArrayList<>(form.taken());
         all.addAll(fitted);
         all.addAll(media.taken());
-        List<String> order = Keys.rows().stream().map(KeyRow::path).toList();
         return all.stream()
-                .sorted(Comparator.comparingInt(t -> order.indexOf(t.path())))
+                .sorted(Comparator.comparingInt(t -> Keys.place(t.path())))
                 .map(t -> new Study.TakenAs(t.path(), t.value(), t.why()))
                 .toList();
     }

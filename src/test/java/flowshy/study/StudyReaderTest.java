@@ -229,6 +229,20 @@ class StudyReaderTest {
         assertThat(study.band()).isEqualTo(new Band(5.0, 90.0));
     }
 
+    /** A default that only some media need is taken wherever a medium stands, told at its own key. */
+    @Test
+    void aFillOfAirAmongTheCandidatesTakesTheUsualHumidity() {
+        Study study = read(HAIR + "medium: nitrogen\ncandidates: [open, {kind: sealed, fill: air}]\n");
+        assertThat(study.candidates().get(1).around())
+                .isEqualTo(Media.at(MediumQuery.of("air", 293.15, 101325.0).with(MediumParameter.HUMIDITY, 0.5)));
+        assertThat(study.takenAs())
+                .extracting(Study.TakenAs::key, Study.TakenAs::value)
+                .containsSubsequence(
+                        tuple("cover", "open"),
+                        tuple("candidates[1].fill.humidity", "50 %"),
+                        tuple("band.from", "1 Hz"));
+    }
+
     /** A calibration takes the study's own cover with its size, or none, or a cavity; no other cover is known. */
     @Test
     void calibrationUnderACoverWithDimensions() {

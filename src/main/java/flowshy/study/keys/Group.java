@@ -13,10 +13,19 @@ import java.util.Optional;
  * @param name what it is, for lists and references: {@code medium}
  * @param keys in the order in which they are read and listed
  * @param shorthand the key that a single word stands for, if that is allowed
+ * @param listing the key that a list stands for, if that is allowed
  * @param rules which keys shut each other out
  * @param selector the word that decides on further keys, if there is one
+ * @param starts sets of starting values, if it has any
  */
-record Group(String name, List<Key> keys, Optional<String> shorthand, List<Rule> rules, Optional<Selector> selector)
+record Group(
+        String name,
+        List<Key> keys,
+        Optional<String> shorthand,
+        Optional<String> listing,
+        List<Rule> rules,
+        Optional<Selector> selector,
+        Optional<Starts> starts)
         implements Value {
     Group {
         keys = List.copyOf(keys);
@@ -24,15 +33,24 @@ record Group(String name, List<Key> keys, Optional<String> shorthand, List<Rule>
     }
 
     static Group of(String name, List<Key> keys, Rule... rules) {
-        return new Group(name, keys, Optional.empty(), List.of(rules), Optional.empty());
+        return new Group(
+                name, keys, Optional.empty(), Optional.empty(), List.of(rules), Optional.empty(), Optional.empty());
     }
 
     Group shortFor(String key) {
-        return new Group(name, keys, Optional.of(key), rules, selector);
+        return new Group(name, keys, Optional.of(key), listing, rules, selector, starts);
+    }
+
+    Group listFor(String key) {
+        return new Group(name, keys, shorthand, Optional.of(key), rules, selector, starts);
     }
 
     Group selectedBy(Key key, Map<String, List<Key>> further) {
-        return new Group(name, keys, shorthand, rules, Optional.of(new Selector(key, further)));
+        return new Group(name, keys, shorthand, listing, rules, Optional.of(new Selector(key, further)), starts);
+    }
+
+    Group startingFrom(Starts sets) {
+        return new Group(name, keys, shorthand, listing, rules, selector, Optional.of(sets));
     }
 
     /** Every key of the group where the deciding word is known: deciding key, its own keys, common keys. */
@@ -55,7 +73,15 @@ record Group(String name, List<Key> keys, Optional<String> shorthand, List<Rule>
 
     @Override
     public String kind() {
-        return shorthand.map(k -> k + ", or a group of keys").orElse("group of keys");
+        String list = listing.map(k -> "list of " + k + ", or a group of keys").orElse("group of keys");
+        return shorthand
+                .map(k -> listing.isPresent() ? k + ", " + list : k + ", or a group of keys")
+                .orElse(list);
+    }
+
+    @Override
+    public Optional<Value> below(String wanted) {
+        return key(wanted).map(Key::value);
     }
 
     @Override
@@ -75,11 +101,12 @@ record Group(String name, List<Key> keys, Optional<String> shorthand, List<Rule>
             String usual = selector.flatMap(Selector::usual).orElse("");
             String names = String.join(", ", built(keys(usual)));
             String one = shorthand.map(k -> "a single " + k + " or ").orElse("");
-            reading.unfit(node, path, one + "a group of keys is wanted here: " + names);
+            String list = listing.map(k -> "a list of " + k + " or ").orElse("");
+            reading.unfit(node, path, one + list + "a group of keys is wanted here: " + names);
         }
     }
 
-    /** The node as a group; a single word stands for one key where that is allowed. */
+    /** The node as a group; a single word or a list stands for one key where that is allowed. */
     Optional<Node.Mapping> mapping(Node node) {
         if (node instanceof Node.Mapping mapping) {
             return Optional.of(mapping);
@@ -87,6 +114,10 @@ record Group(String name, List<Key> keys, Optional<String> shorthand, List<Rule>
         if (node instanceof Node.Scalar scalar && !scalar.text().isBlank() && shorthand.isPresent()) {
             Position at = scalar.position();
             return Optional.of(new Node.Mapping(List.of(new Node.Entry(shorthand.get(), at, scalar)), at));
+        }
+        if (node instanceof Node.Sequence list && listing.isPresent()) {
+            Position at = list.position();
+            return Optional.of(new Node.Mapping(List.of(new Node.Entry(listing.get(), at, list)), at));
         }
         return Optional.empty();
     }

@@ -3,6 +3,7 @@ package flowshy.study.keys;
 import flowshy.study.text.Node;
 import java.util.LinkedHashMap;
 import java.util.Map;
+import java.util.Optional;
 
 /**
  * A list whose entries are groups of one kind. The fields get the paths {@code …[0].kind}, {@code …[1].kind} and so on.
@@ -25,6 +26,11 @@ public record GroupList(Group each) implements Value {
         schema.put("minItems", 1);
         schema.put("maxItems", MOST);
         return schema;
+    }
+
+    @Override
+    public Optional<Value> below(String name) {
+        return each.below(name);
     }
 
     @Override

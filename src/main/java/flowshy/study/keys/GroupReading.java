@@ -1,16 +1,25 @@
 package flowshy.study.keys;
 
 import flowshy.study.text.Node;
+import flowshy.study.text.Position;
 import flowshy.study.text.Printable;
 import flowshy.study.text.Problem;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 
-/** Reads one group: unknown keys first, then every known key in the order of the table, then the rules between keys. */
+/**
+ * Reads one group: unknown keys first, then every known key in the order of the table, then the rules between keys. Starting values
+ * that the group takes by a word stand beside what is written, each read as a default.
+ */
 final class GroupReading {
     private final Group group;
     private final Reading reading;
     private final Node.Mapping mapping;
+    /** Keys that are not written but come from a set of starting values. */
+    private final Map<String, Presence> started;
+
     private final String path;
     private final String word;
     private final List<Key> keys;
@@ -18,7 +27,8 @@ final class GroupReading {
     GroupReading(Group group, Reading reading, Node.Mapping mapping, String path) {
         this.group = group;
         this.reading = reading;
-        this.mapping = mapping;
+        this.started = started(group, mapping);
+        this.mapping = with(group, mapping, started);
         this.path = path;
         this.word = group.selector().map(this::selected).orElse("");
         this.keys = group.keys(word);
@@ -26,7 +36,7 @@ final class GroupReading {
 
     void read() {
         reading.place(path, mapping.position());
-        if (lacksItsWord()) {
+        if (startsWrongly() || lacksItsWord()) {
             return;
         }
         if (group.selector().isEmpty() || group.selector().get().keys().containsKey(word)) {
@@ -43,6 +53,67 @@ final class GroupReading {
         }
         List<String> known = Group.built(keys);
         group.rules().stream().filter(rule -> rule.concerns(known)).forEach(rule -> rule.check(reading, mapping, path));
+    }
+
+    /** What a named set gives to keys that are not written, nor pushed out by one that is. */
+    private static Map<String, Presence> started(Group group, Node.Mapping written) {
+        if (group.starts().isEmpty()) {
+            return Map.of();
+        }
+        Starts starts = group.starts().get();
+        Map<String, Presence> set = new LinkedHashMap<>(
+                starts.sets().getOrDefault(said(group, written, starts.key()).orElse(""), Map.of()));
+        Optional<String> decider = group.selector().map(s -> s.key().name());
+        if (decider.flatMap(key -> said(group, written, key))
+                .filter(word -> !word.equals(set.get(decider.get()).value()))
+                .isPresent()) {
+            return Map.of();
+        }
+        for (Node.Entry entry : written.entries()) {
+            set.remove(entry.key());
+            group.rules().forEach(rule -> rule.rivals(entry.key()).forEach(set::remove));
+        }
+        return set;
+    }
+
+    private static Node.Mapping with(Group group, Node.Mapping written, Map<String, Presence> started) {
+        Node.Mapping all = written;
+        for (Map.Entry<String, Presence> start : started.entrySet()) {
+            Position at = written.entry(group.starts().orElseThrow().key())
+                    .orElseThrow()
+                    .value()
+                    .position();
+            Node.Scalar value = new Node.Scalar(start.getValue().value(), at);
+            all = all.with(new Node.Entry(start.getKey(), at, value));
+        }
+        return all;
+    }
+
+    /** A set of starting values that is not known, or belongs to another deciding word than the written one. */
+    private boolean startsWrongly() {
+        if (group.starts().isEmpty()
+                || mapping.entry(group.starts().get().key()).isEmpty()) {
+            return false;
+        }
+        Starts starts = group.starts().get();
+        Node.Entry entry = mapping.entry(starts.key()).get();
+        String set = said(starts.key()).orElse("");
+        if (!starts.sets().containsKey(set)) {
+            key(starts.key()).orElseThrow().value().read(reading, entry.value(), below(starts.key()));
+            return true;
+        }
+        String decider = group.selector().orElseThrow().key().name();
+        String word = starts.of(set, decider).orElseThrow().value();
+        if (!said(decider).filter(word::equals).isPresent()) {
+            reading.problem(
+                    entry.value().position(),
+                    below(starts.key()),
+                    set + " beside " + decider + ": "
+                            + Printable.of(said(decider).orElse("")),
+                    set + " is of " + decider + ": " + word);
+            return true;
+        }
+        return false;
     }
 
     private String selected(Selector selector) {
@@ -104,6 +175,8 @@ final class GroupReading {
         } else if (broken.isPresent()) {
             reading.problem(
                     entry.position(), at, "not wanted here", broken.get().words());
+        } else if (started.containsKey(key.name())) {
+            reading.take(at, key, entry.position(), started.get(key.name()));
         } else {
             key.value().read(reading, entry.value(), at);
         }

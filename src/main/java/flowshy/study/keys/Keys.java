@@ -3,7 +3,6 @@ package flowshy.study.keys;
 import flowshy.study.text.Node;
 import flowshy.study.text.Problems;
 import flowshy.study.units.Dimension;
-import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -43,6 +42,46 @@ public final class Keys {
     }
 
     /**
+     * What it means when a key is not written.
+     *
+     * @param path of a key, also below an entry of a list or a name that the user gave
+     * @return empty if there is no such key
+     */
+    public static Optional<Presence> presence(String path) {
+        Optional<Value> value = Optional.of(STUDY);
+        Optional<Presence> presence = Optional.empty();
+        for (String word : words(path)) {
+            presence = value.filter(Group.class::isInstance)
+                    .flatMap(group -> ((Group) group).key(word))
+                    .map(Key::presence);
+            value = value.flatMap(v -> v.below(word));
+        }
+        return presence;
+    }
+
+    /**
+     * Where a key stands in the list of keys; all that is below one list, or below the names that a user gave, stands at one place.
+     *
+     * @param path of a key
+     * @return from zero, rising in the order of the list
+     */
+    public static int place(String path) {
+        List<String> listed = ROWS.stream().map(KeyRow::path).toList();
+        List<String> words = words(path);
+        for (int count = words.size(); count > 0; count--) {
+            int place = listed.indexOf(String.join(".", words.subList(0, count)));
+            if (place >= 0) {
+                return place;
+            }
+        }
+        return listed.size();
+    }
+
+    private static List<String> words(String path) {
+        return List.of(path.replaceAll("\\[\\d+]", "").split("\\."));
+    }
+
+    /**
      * Reads a tree by the table.
      *
      * @param root the study's keys
@@ -76,7 +115,7 @@ public final class Keys {
                         Presence.OPTIONAL,
                         "covers to choose from, in order of preference; for the command lid"),
                 Key.of("band", band(), Presence.IMPLIED, "band of use"),
-                Key.later("motion", "smallest and largest motion to be read", "accept.error states the error allowed"),
+                Key.optional("motion", MotionKeys.group(), "the motion that is to be read"),
                 Key.later("surroundings", "streams, tones and sound around", "bands decides at equal accelerations"),
                 Key.of("accept", accept(), Presence.IMPLIED, "limits that the device must meet"),
                 Key.optional("calibration", calibration(), "where the sensitivity is stated"),
@@ -170,8 +209,9 @@ public final class Keys {
                 path,
                 new KeyRow(path, key.value(), key.presence(), words, key.condition(), key.meaning(), key.instead()));
         if (key.value() instanceof Group inner) {
-            List<KeyRow> below = new ArrayList<>(rows(inner, path));
-            below.forEach(row -> rows.putIfAbsent(row.path(), row));
+            rows(inner, path).forEach(row -> rows.putIfAbsent(row.path(), row));
+        } else if (key.value() instanceof GroupMap map) {
+            rows(map.each(), path + "." + GroupMap.NAME).forEach(row -> rows.putIfAbsent(row.path(), row));
         }
     }
 }

@@ -24,7 +24,7 @@ public final class Overlay {
      * @return the changed study
      */
     public static Node.Mapping set(Node.Mapping root, Setting setting) {
-        return set(Keys.STUDY, root, setting.path(), setting.value(), setting.position());
+        return set(Optional.of(Keys.STUDY), root, setting.path(), setting.value(), setting.position());
     }
 
     /**
@@ -39,20 +39,20 @@ public final class Overlay {
     }
 
     private static Node.Mapping set(
-            Group group, Node.Mapping mapping, List<String> path, Node value, Position position) {
+            Optional<Value> kind, Node.Mapping mapping, List<String> path, Node value, Position position) {
         String name = path.get(0);
         Node below = value;
         if (path.size() > 1) {
-            Optional<Group> inner = inner(Optional.of(group), name);
+            Optional<Value> inner = inner(kind, name);
             Node.Mapping old = mapping.entry(name)
                     .flatMap(e -> opened(inner, e.value()))
                     .orElse(new Node.Mapping(List.of(), position));
             List<String> rest = path.subList(1, path.size());
             below = inner.isPresent()
-                    ? set(inner.get(), old, rest, value, position)
+                    ? set(inner, old, rest, value, position)
                     : new Node.Mapping(List.of(entry(rest, value, position)), position);
         }
-        return put(Optional.of(group), mapping, new Node.Entry(name, position, below));
+        return put(kind, mapping, new Node.Entry(name, position, below));
     }
 
     /** Under a key that is not a group nothing can be set; the reader refuses what stands there then. */
@@ -63,35 +63,38 @@ public final class Overlay {
         return new Node.Entry(path.get(0), position, below);
     }
 
-    private static Node.Mapping merge(Optional<Group> group, Node.Mapping base, Node.Mapping over) {
+    private static Node.Mapping merge(Optional<Value> kind, Node.Mapping base, Node.Mapping over) {
         Node.Mapping merged = base;
         for (Node.Entry entry : over.entries()) {
-            Optional<Group> inner = inner(group, entry.key());
+            Optional<Value> inner = inner(kind, entry.key());
             Optional<Node.Mapping> old = merged.entry(entry.key()).flatMap(e -> opened(inner, e.value()));
             Node value = entry.value() instanceof Node.Mapping part && old.isPresent()
                     ? merge(inner, old.get(), part)
                     : entry.value();
-            merged = put(group, merged, new Node.Entry(entry.key(), entry.position(), value));
+            merged = put(kind, merged, new Node.Entry(entry.key(), entry.position(), value));
         }
         return merged;
     }
 
-    private static Optional<Group> inner(Optional<Group> group, String name) {
-        return group.flatMap(g -> g.key(name))
-                .map(Key::value)
-                .filter(Group.class::isInstance)
-                .map(Group.class::cast);
+    /** What keys may stand below, for a group or for names with groups. */
+    private static Optional<Value> inner(Optional<Value> kind, String name) {
+        return kind.flatMap(k -> k.below(name)).filter(v -> v instanceof Group || v instanceof GroupMap);
     }
 
-    /** A group that is written as a single word is opened into its keys first. */
-    private static Optional<Node.Mapping> opened(Optional<Group> group, Node node) {
-        return node instanceof Node.Mapping mapping ? Optional.of(mapping) : group.flatMap(g -> g.mapping(node));
+    /** A group that is written as a single word or as a list is opened into its keys first. */
+    private static Optional<Node.Mapping> opened(Optional<Value> kind, Node node) {
+        if (node instanceof Node.Mapping mapping) {
+            return Optional.of(mapping);
+        }
+        return kind.filter(Group.class::isInstance).flatMap(k -> ((Group) k).mapping(node));
     }
 
-    private static Node.Mapping put(Optional<Group> group, Node.Mapping mapping, Node.Entry entry) {
+    private static Node.Mapping put(Optional<Value> kind, Node.Mapping mapping, Node.Entry entry) {
         List<String> gone = new ArrayList<>();
-        group.ifPresent(g -> g.rules().forEach(rule -> gone.addAll(rule.rivals(entry.key()))));
-        group.flatMap(Group::selector).ifPresent(selector -> gone.addAll(strangers(selector, entry)));
+        if (kind.isPresent() && kind.get() instanceof Group group) {
+            group.rules().forEach(rule -> gone.addAll(rule.rivals(entry.key())));
+            group.selector().ifPresent(selector -> gone.addAll(strangers(selector, entry)));
+        }
         return mapping.without(gone).with(entry);
     }
 

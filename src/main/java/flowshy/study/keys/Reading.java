@@ -51,7 +51,12 @@ final class Reading {
 
     /** Notes a default and reads it as if it stood there. */
     void take(String path, Key key, Position group) {
-        take(path, key, group, key.presence().value(), key.presence().why());
+        take(path, key, group, key.presence());
+    }
+
+    /** The same for a value that only some studies take. */
+    void take(String path, Key key, Position group, Presence presence) {
+        take(path, key, group, presence.value(), presence.why());
     }
 
     /** Takes what another key has; that key stands earlier in the table. */

@@ -113,8 +113,12 @@ public record Rule(Need need, String beside, List<List<String>> ways) {
         return ways.stream().map(way -> way.get(0)).collect(Collectors.joining(", "));
     }
 
-    /** The rule as JSON Schema keywords, one map each; nothing where its keys are not known. */
-    List<Object> schema(List<String> known) {
+    /**
+     * The rule as JSON Schema keywords, one map each; nothing where its keys are not known.
+     *
+     * @param complete false where a missing key may come from a set of starting values
+     */
+    List<Object> schema(List<String> known, boolean complete) {
         if (!concerns(known)) {
             return List.of();
         }
@@ -135,6 +139,9 @@ public record Rule(Need need, String beside, List<List<String>> ways) {
         }
         List<Object> leads = List.copyOf(
                 ways.stream().map(w -> Map.of("required", List.of(w.get(0)))).toList());
+        if (!complete) {
+            return all;
+        }
         if (need == Need.ALWAYS) {
             all.add(Map.of("anyOf", leads));
         } else if (need == Need.BESIDE) {

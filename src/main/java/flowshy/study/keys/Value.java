@@ -2,9 +2,10 @@ package flowshy.study.keys;
 
 import flowshy.study.text.Node;
 import java.util.Map;
+import java.util.Optional;
 
 /** What may stand behind a key; each kind reads itself and describes itself. */
-public sealed interface Value permits Measure, Words, Text, Points, Group, GroupList {
+public sealed interface Value permits Measure, Words, Text, TextList, Points, Group, GroupList, GroupMap {
     /**
      * Its kind in a few words, for the list of keys.
      *
@@ -18,6 +19,16 @@ public sealed interface Value permits Measure, Words, Text, Points, Group, Group
      * @return keywords with their values, ordered
      */
     Map<String, Object> schema();
+
+    /**
+     * What may stand behind a key or name one step below.
+     *
+     * @param name the key, or a name that the user gave
+     * @return empty where nothing of that name may stand
+     */
+    default Optional<Value> below(String name) {
+        return Optional.empty();
+    }
 
     /**
      * Reads what was written; fields and problems go to the reading.

@@ -38,6 +38,8 @@ public enum Dimension {
     SPEED("a speed", "m/s", "m/s mm/s um/s cm/s km/h"),
     /** acceleration [m/s²]; in its units g is standard gravity */
     ACCELERATION("an acceleration", "m/s2", "m/s2 mm/s2 g mg ug"),
+    /** one-sided density of an acceleration [(m/s²)²/Hz]; in its units g is standard gravity */
+    ACCELERATION_DENSITY("an acceleration density", "(m/s2)2/Hz", "g2/Hz (m/s2)2/Hz mg2/Hz (mm/s2)2/Hz"),
     /** volume flow [m³/s] */
     VOLUME_FLOW("a volume flow", "m3/s", "L/min m3/h mL/min m3/s"),
     /** force [N] */
@@ -129,6 +131,7 @@ public enum Dimension {
             case KINEMATIC_VISCOSITY -> Exponents.of(2, 0, -1);
             case SPEED -> Exponents.of(1, 0, -1);
             case ACCELERATION -> Exponents.of(1, 0, -2);
+            case ACCELERATION_DENSITY -> Exponents.of(2, 0, -3).with(0, -1);
             case VOLUME_FLOW -> Exponents.of(3, 0, -1);
             case FORCE -> Exponents.of(1, 1, -2);
             case STIFFNESS -> Exponents.of(2, 1, -2).with(-1, 0);
@@ -142,7 +145,7 @@ public enum Dimension {
 
     /** Whether {@code g} in its units is standard gravity, not the gram. */
     boolean gravity() {
-        return this == ACCELERATION;
+        return this == ACCELERATION || this == ACCELERATION_DENSITY;
     }
 
     /** Whether a unit of these exponents fits. Leaving out the radian is usual for stiffness; an angle must have it. */

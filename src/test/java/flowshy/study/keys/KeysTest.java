@@ -166,7 +166,6 @@ class KeysTest {
     @CsvSource(
             delimiter = '|',
             value = {
-                "motion: {smallest: 0.2 m/s2} | motion",
                 "surroundings: {hall: {kind: sound}} | surroundings",
                 "tolerances: {hair.diameter: {sd: 3 %}} | tolerances",
                 "envelope: {medium.temperature: [1 degC]} | envelope",
@@ -186,8 +185,8 @@ class KeysTest {
     @CsvSource(
             delimiter = '|',
             value = {
-                "'diameter: 3 um' | 's.yaml:3:1: diameter: unknown key; known here: title, hair, suspension, medium, cover, candidates, band, accept, calibration, finite-length, document; did you mean hair.diameter?'",
-                "'mediun: x' | 's.yaml:3:1: mediun: unknown key; known here: title, hair, suspension, medium, cover, candidates, band, accept, calibration, finite-length, document; did you mean medium?'",
+                "'diameter: 3 um' | 's.yaml:3:1: diameter: unknown key; known here: title, hair, suspension, medium, cover, candidates, band, motion, accept, calibration, finite-length, document; did you mean hair.diameter?'",
+                "'mediun: x' | 's.yaml:3:1: mediun: unknown key; known here: title, hair, suspension, medium, cover, candidates, band, motion, accept, calibration, finite-length, document; did you mean medium?'",
                 "'band: {form: 3 Hz}' | 's.yaml:3:8: band.form: unknown key; known here: from, to; did you mean band.from?'",
                 "'band: {from: 3, to: 5 Hz}' | 's.yaml:3:14: band.from: 3 has no unit; a frequency is wanted here, with its unit: Hz, kHz, mHz, MHz, rpm; did you mean 3 Hz?'",
                 "'band: {from: 3 s}' | 's.yaml:3:14: band.from: 3 s is a time; a frequency is wanted here, with its unit: Hz, kHz, mHz, MHz, rpm'",
@@ -207,6 +206,11 @@ class KeysTest {
                 "'cover: {kind: open, fill: air}' | 's.yaml:3:21: cover.fill: belongs to kind: sealed, not to open; known here: kind'",
                 "'cover: {}' | 's.yaml:3:8: cover.kind: missing; none, a roof, a lid with holes, a closed cavity, a measured one: open | roofed | vented | sealed | measured'",
                 "'calibration: {cover: open}' | 's.yaml:3:14: calibration.frequency: missing; frequency of calibration: frequency, 1 mHz to 10 MHz'",
+                "'motion: 0.2 m/s2' | 's.yaml:3:9: motion: 0.2 m/s2; a group of keys is wanted here: smallest, full-scale, spectrum'",
+                "'motion: {smalest: 0.2 m/s2}' | 's.yaml:3:10: motion.smalest: unknown key; known here: smallest, full-scale, spectrum; did you mean motion.smallest?'",
+                "'motion: {spectrum: [[20 Hz, 3 g2/Hz]]}' | 's.yaml:3:20: motion.spectrum.points: 1 pairs; two to 1000 are read'",
+                "'motion: {spectrum: [[20 Hz, 3 g/Hz], [30 Hz, 0 g2/Hz]]}' | 's.yaml:3:29: motion.spectrum.points[0].density: 3 g/Hz is something else; an acceleration density is wanted here, with its unit: g2/Hz, (m/s2)2/Hz, mg2/Hz, (mm/s2)2/Hz'",
+                "'motion: {spectrum: {}}' | 's.yaml:3:20: motion.spectrum: one of points, file is missing; state one of them'",
                 "'title: \"\"' | 's.yaml:3:8: title: nothing stands here; text is wanted here'",
                 "'title: {a: b}' | 's.yaml:3:8: title: a group of keys; text is wanted here'",
                 "'title: \"a\\ab\"' | 's.yaml:3:8: title: control character in the text; one line of plain text'",

@@ -98,6 +98,8 @@ class SchemaTest {
                 "suspension: {resonance: {frequency: 3 Hz, in: {name: air, density: 1 g/cm3}}}",
                 "suspension: {resonance: {frequency: 3 Hz, in: {density: 1 g/cm3}}}",
                 "suspension: {resonance: {frequency: 3 Hz, in: {name: air, second: helium}}}",
+                "motion: {spectrum: [[3 Hz, 1 g2/Hz]]}",
+                "motion: {spectrum: {points: [[3 Hz, 1 g2/Hz], [4 Hz, 1 g2/Hz]], file: a.csv}}",
                 "finite-length: auto",
                 "candidates: [open, lid]",
                 "calibration: {cover: open}",

@@ -20,6 +20,7 @@ final class Studies {
             medium: {name: air, temperature: 25 degC, pressure: 1 bar, humidity: 20 %}
             cover: {kind: sealed, fill: {name: helium, temperature: 25 degC, pressure: 1 bar}}
             band: {from: 5 Hz, to: 2 kHz}
+            motion: {smallest: 0.1 m/s2 peak, full-scale: 2 g, spectrum: [[20 Hz, 0.01 g2/Hz], [2 kHz, 1e-4 g2/Hz]]}
             accept: {rejection: 10 dB, error: 0.2 m/s2 peak}
             calibration: {frequency: 60 Hz, cover: open}
             finite-length: off
@@ -86,6 +87,7 @@ final class Studies {
             hair: {length: 610 um, diameter: 77 um, density: 1.3 g/cm3}
             medium: nitrogen
             cover: {kind: measured, file: lid.csv}
+            motion: {spectrum: {file: floor.csv}}
             """);
 
     private Studies() {}
