@@ -27,7 +27,7 @@ public final class FiniteHair {
     /** Foot gap over the radius at the wall where none is stated: an own choice, no source. */
     public static final double DEFAULT_GAP_SHARE = 0.1;
 
-    /** Layer thickness over the largest radius; below it the hair's flow is two-dimensional and strip theory is better. */
+    /** Layer thickness over the largest radius for which the rings are short enough; a thinner layer is refused. */
     public static final Range LAYER_SHARE = new Range("δ/a", 0.05, Double.MAX_VALUE);
 
     private final Profile profile;

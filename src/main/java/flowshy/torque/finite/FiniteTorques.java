@@ -6,6 +6,10 @@ import org.hipparchus.complex.Complex;
 /**
  * Forces of the medium on a finite hair on its wall at one frequency, linear theory, time factor e^{+iωt}.
  *
+ * <p>All act on the wetted surface; the foot is dry. The pressure alone that carries a free stream of acceleration A has there
+ * the moment ρA (∫ πa² (z+h) dz − πa₀⁴/4), a₀ the radius at the wall: with it, and not with the displaced fluid's moment alone,
+ * a shaken wall and a stream add up exactly. The last term is 0.12 % of the first at length over diameter 10, 12 % at 1.
+ *
  * @param omega angular frequency [rad/s]
  * @param stream hair and wall fixed in an oscillating stream along the wall, per unit velocity of the free stream
  * @param rocking hair turning about the pivot in still medium, per unit angular velocity; real part negative (damping)
