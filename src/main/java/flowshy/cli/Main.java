@@ -30,6 +30,7 @@ import picocli.CommandLine.Spec;
             FillCommand.class,
             CylinderCommand.class,
             MediaCommand.class,
+            SurroundingsCommand.class,
             CheckCommand.class,
             StartCommand.class
         })

@@ -84,13 +84,7 @@ public record LogLogDensity(List<Point> points) implements Density {
         return between(points.get(low), points.get(high), frequency);
     }
 
-    /**
-     * Mean square over a range.
-     *
-     * @param from lower end [Hz]
-     * @param to upper end, not below {@code from} [Hz]
-     * @return ∫ G df, square of the unit of the signal
-     */
+    @Override
     public double meanSquare(double from, double to) {
         double sum = 0.0;
         for (int i = 1; i < points.size(); i++) {

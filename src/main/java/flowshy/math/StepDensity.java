@@ -1,5 +1,6 @@
 package flowshy.math;
 
+import java.util.ArrayList;
 import java.util.List;
 import org.hipparchus.util.FastMath;
 
@@ -18,6 +19,11 @@ public record StepDensity(List<Band> bands, Inside inside) implements Density {
             double density(Band band, double frequency) {
                 return band.meanSquare() / (band.high() - band.low());
             }
+
+            @Override
+            double part(Band band, double from, double to) {
+                return band.meanSquare() * (to - from) / (band.high() - band.low());
+            }
         },
         /** the same mean square in equal ratios of frequency, so that the density falls as 1/f (pink) */
         PINK {
@@ -25,9 +31,16 @@ public record StepDensity(List<Band> bands, Inside inside) implements Density {
             double density(Band band, double frequency) {
                 return band.meanSquare() / (frequency * FastMath.log(band.high() / band.low()));
             }
+
+            @Override
+            double part(Band band, double from, double to) {
+                return band.meanSquare() * FastMath.log(to / from) / FastMath.log(band.high() / band.low());
+            }
         };
 
         abstract double density(Band band, double frequency);
+
+        abstract double part(Band band, double from, double to);
     }
 
     /**
@@ -111,11 +124,28 @@ public record StepDensity(List<Band> bands, Inside inside) implements Density {
      * @return rising [Hz], two or more
      */
     @Override
+    public double meanSquare(double from, double to) {
+        double sum = 0.0;
+        for (Band band : bands) {
+            double low = FastMath.max(from, band.low());
+            double high = FastMath.min(to, band.high());
+            if (low < high) {
+                sum += inside.part(band, low, high);
+            }
+        }
+        return sum;
+    }
+
+    @Override
     public List<Double> edges() {
-        return bands.stream()
-                .flatMap(band -> List.of(band.low(), band.high()).stream())
-                .distinct()
-                .sorted()
-                .toList();
+        List<Double> edges = new ArrayList<>();
+        for (Band band : bands) {
+            // bands that touch share an edge, be it to rounding only
+            if (edges.isEmpty() || band.low() > edges.get(edges.size() - 1) * (1.0 + 1e-9)) {
+                edges.add(band.low());
+            }
+            edges.add(band.high());
+        }
+        return edges;
     }
 }

@@ -154,6 +154,11 @@ public final class RecordFile {
             rows.valueProblem(0, "a record that does not change", "a signal that fluctuates");
             rows.judge();
         }
+        notes.add(say(
+                "The density is Welch's: %s, lines %.3g Hz apart, each known to %.2g %%.",
+                welch.averaging().words(),
+                welch.averaging().resolution(),
+                100.0 * welch.averaging().randomError()));
         return new MeasuredSpectrum(
                 declaration.unit().signal(),
                 Optional.of(curve),

@@ -1,7 +1,5 @@
 package flowshy.stream.surroundings;
 
-import static flowshy.math.Figures.say;
-
 import flowshy.math.Caveat;
 import flowshy.math.Caveat.Subject;
 import flowshy.math.Caveat.Weight;
@@ -10,7 +8,6 @@ import flowshy.stream.HeightShare;
 import flowshy.stream.Line;
 import flowshy.stream.Source;
 import flowshy.stream.Stated;
-import flowshy.stream.turbulence.TurbulenceSpectrum;
 import flowshy.stream.turbulence.WallTurbulence;
 import flowshy.stream.wall.FluctuatingLayer;
 import flowshy.stream.wall.TurbulentWall;
@@ -30,25 +27,22 @@ import org.hipparchus.util.FastMath;
  */
 public abstract class CarriedFlow implements Source {
     private static final double TWO_PI = 2.0 * FastMath.PI;
-    /** Above this intensity turbulence is not frozen while it is carried past (common practice, no source). */
-    private static final double FROZEN = 0.3;
 
     private final String name;
     private final double direction;
     private final Layer layer;
-    private final Optional<TurbulenceSpectrum> spectrum;
+    private final Optional<Turbulence> carried;
     private final List<Stated> numbers;
 
     /**
-     * @param spectrum what the stream carries; empty for a laminar duct of which nothing is known
+     * @param carried what the stream carries; empty for a laminar duct of which nothing is known
      * @param numbers turbulence, length scale and what else may have been assumed
      */
-    CarriedFlow(
-            String name, double direction, Layer layer, Optional<TurbulenceSpectrum> spectrum, List<Stated> numbers) {
+    CarriedFlow(String name, double direction, Layer layer, Optional<Turbulence> carried, List<Stated> numbers) {
         this.name = name;
         this.direction = direction;
         this.layer = layer;
-        this.spectrum = spectrum;
+        this.carried = carried;
         this.numbers = List.copyOf(numbers);
     }
 
@@ -74,12 +68,12 @@ public abstract class CarriedFlow implements Source {
 
     @Override
     public double density(double frequency) {
-        return spectrum.map(s -> s.along(frequency)).orElse(0.0);
+        return carried.map(s -> s.along(frequency)).orElse(0.0);
     }
 
     @Override
     public double acrossDensity(double frequency) {
-        return spectrum.map(s -> s.across(frequency)).orElse(0.0);
+        return carried.map(s -> s.across(frequency)).orElse(0.0);
     }
 
     @Override
@@ -109,15 +103,15 @@ public abstract class CarriedFlow implements Source {
             return height -> layer.laminarShare(component, height, omega);
         }
         TurbulentWall wall = layer.wall();
-        double deviation = spectrum.map(TurbulenceSpectrum::deviation).orElse(0.0);
+        double deviation = carried.map(Turbulence::deviation).orElse(0.0);
         double peak = 2.7 * wall.frictionVelocity(); // rms for which the wall's spectrum is given
         double ratio = density > 0.0 ? ofWall.applyAsDouble(wall) / (peak * peak * density) : 0.0;
         return height -> {
-            double carried = FastMath.min(1.0, wall.speedAt(height) / layer.streamSpeed());
+            double brought = FastMath.min(1.0, wall.speedAt(height) / layer.streamSpeed());
             double made =
                     component == FluctuatingLayer.ALONG ? wall.fluctuationAt(height) : wall.acrossFluctuationAt(height);
-            double excess = made * made - carried * carried * deviation * deviation;
-            double turbulent = FastMath.sqrt(carried * carried + FastMath.max(0.0, excess) * ratio);
+            double excess = made * made - brought * brought * deviation * deviation;
+            double turbulent = FastMath.sqrt(brought * brought + FastMath.max(0.0, excess) * ratio);
             Complex laminar = gamma < 1.0 ? layer.laminarShare(component, height, omega) : Complex.ZERO;
             return laminar.multiply(1.0 - gamma).add(gamma * turbulent);
         };
@@ -133,29 +127,25 @@ public abstract class CarriedFlow implements Source {
         return List.of();
     }
 
-    /** From n = 1e-4, below which 4e-4 of the variance lies, to κη = 2 (a hundredth of a per cent beyond), or the wall's own if higher. */
+    /** What is carried, or the wall's own turbulence where that reaches higher. */
     @Override
     public Range support() {
-        String what = "frequency [Hz]";
-        double speed = layer.streamSpeed();
-        if (spectrum.isEmpty()) {
-            return new Range(what, 1e-3, 1.0);
+        if (carried.isEmpty()) {
+            return new Range("frequency [Hz]", 1e-3, 1.0);
         }
-        TurbulenceSpectrum carried = spectrum.get();
-        double low = 1e-4 * speed / carried.lengthScale();
-        double high = 2.0 / carried.kolmogorovLength() * speed / TWO_PI;
-        if (layer.intermittency() > 0.0) {
-            TurbulentWall wall = layer.wall();
-            // the wall's spectrum in wall units: smallest eddies 1.8, carried at 10, hence 1.8 u_τ²/ν
-            high = FastMath.max(
-                    high, 1.8 * wall.frictionVelocity() * wall.frictionVelocity() / wall.kinematicViscosity());
+        Range outside = carried.get().support();
+        if (layer.intermittency() == 0.0) {
+            return outside;
         }
-        return new Range(what, low, high);
+        TurbulentWall wall = layer.wall();
+        // the wall's smallest eddies are 1.8 ν/u_τ and carried at 10 u_τ: κη = 2 at 1.8 u_τ²/ν
+        double high = 1.8 * wall.frictionVelocity() * wall.frictionVelocity() / wall.kinematicViscosity();
+        return new Range(outside.name(), outside.low(), FastMath.max(outside.high(), high));
     }
 
     @Override
     public List<Double> breaks() {
-        return List.of();
+        return carried.map(Turbulence::breaks).orElse(List.of());
     }
 
     @Override
@@ -182,7 +172,7 @@ public abstract class CarriedFlow implements Source {
      * @return [Hz]; empty if nothing is carried
      */
     public Optional<Double> cutOff() {
-        return spectrum.map(TurbulenceSpectrum::cutOff);
+        return carried.flatMap(Turbulence::cutOff);
     }
 
     /**
@@ -191,14 +181,14 @@ public abstract class CarriedFlow implements Source {
      * @return σ [m/s], zero if nothing is carried
      */
     public double deviation() {
-        return spectrum.map(TurbulenceSpectrum::deviation).orElse(0.0);
+        return carried.map(Turbulence::deviation).orElse(0.0);
     }
 
     @Override
     public List<Caveat> caveats(double hairLength) {
         List<Caveat> caveats = new ArrayList<>(layer.caveats(hairLength));
-        spectrum.ifPresent(carried -> about(carried, hairLength, caveats));
-        if (spectrum.isEmpty()) {
+        carried.ifPresent(fluctuation -> caveats.addAll(fluctuation.caveats(hairLength)));
+        if (carried.isEmpty()) {
             add(
                     caveats,
                     Weight.NOTE,
@@ -212,37 +202,6 @@ public abstract class CarriedFlow implements Source {
                             + " wall makes, good to about a third.");
         }
         return caveats;
-    }
-
-    private void about(TurbulenceSpectrum carried, double hairLength, List<Caveat> caveats) {
-        double intensity = carried.deviation() / layer.streamSpeed();
-        if (!TurbulenceSpectrum.REYNOLDS.contains(carried.reynolds())) {
-            add(
-                    caveats,
-                    Weight.WEAK,
-                    say(
-                            "The turbulence has a Reynolds number of %.3g (rms speed times length scale over viscosity); its"
-                                    + " spectrum is meant above %.3g.",
-                            carried.reynolds(), TurbulenceSpectrum.REYNOLDS.low()));
-        }
-        if (intensity > FROZEN) {
-            add(
-                    caveats,
-                    Weight.WEAK,
-                    say(
-                            "A turbulence of %.3g %% changes while it is carried past: the spectrum is smeared towards higher"
-                                    + " frequencies by about that share.",
-                            100.0 * intensity));
-        }
-        if (carried.lengthScale() < 5.0 * hairLength) {
-            add(
-                    caveats,
-                    Weight.WEAK,
-                    say(
-                            "The length scale of %.3g mm is not large against the hair of %.3g mm: eddies no longer act on the"
-                                    + " whole hair at once, the error is overstated.",
-                            1e3 * carried.lengthScale(), 1e3 * hairLength));
-        }
     }
 
     private static void add(List<Caveat> caveats, Weight weight, String text) {

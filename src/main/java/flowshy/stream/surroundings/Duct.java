@@ -8,10 +8,12 @@ import flowshy.stream.wall.DuctFlow;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import org.hipparchus.util.FastMath;
 
 /**
  * Developed flow in a duct with the hair on its wall. Turbulence and length scale come from size and Reynolds number where they are
- * not stated; a laminar duct carries none unless it is stated.
+ * not stated, the intensity times the square root of the share of time that the flow is turbulent; a laminar duct carries none
+ * unless it is stated.
  */
 public final class Duct extends CarriedFlow {
     private static final String TURBULENCE = "turbulence";
@@ -22,7 +24,7 @@ public final class Duct extends CarriedFlow {
     private final DuctFlow flow;
 
     private Duct(String name, double direction, DuctFlow flow, List<Stated> numbers) {
-        super(name, direction, new DuctLayer(flow), spectrum(flow, numbers), numbers);
+        super(name, direction, new DuctLayer(flow), carried(flow, numbers), numbers);
         this.name = name;
         this.direction = direction;
         this.flow = flow;
@@ -47,7 +49,7 @@ public final class Duct extends CarriedFlow {
         if (carries) {
             numbers.add(turbulence.orElseGet(() -> Stated.assumed(
                     TURBULENCE,
-                    usual.intensity(),
+                    usual.intensity() * FastMath.sqrt(flow.intermittency()), // none where the duct turns laminar
                     "0.16 Re^(-1/8) of a developed duct, common practice of flow simulation, no single source")));
             numbers.add(lengthScale.orElseGet(() -> Stated.assumed(
                     LENGTH_SCALE,
@@ -57,13 +59,14 @@ public final class Duct extends CarriedFlow {
         return new Duct(name, direction, flow, numbers);
     }
 
-    private static Optional<TurbulenceSpectrum> spectrum(DuctFlow flow, List<Stated> numbers) {
+    private static Optional<Turbulence> carried(DuctFlow flow, List<Stated> numbers) {
         if (numbers.isEmpty()) {
             return Optional.empty();
         }
         double deviation = numbers.get(0).value() * flow.meanSpeed();
-        return Optional.of(
-                new TurbulenceSpectrum(deviation, numbers.get(1).value(), flow.coreSpeed(), flow.kinematicViscosity()));
+        TurbulenceSpectrum spectrum =
+                new TurbulenceSpectrum(deviation, numbers.get(1).value(), flow.coreSpeed(), flow.kinematicViscosity());
+        return Optional.of(new ModelTurbulence(spectrum, flow.coreSpeed()));
     }
 
     @Override

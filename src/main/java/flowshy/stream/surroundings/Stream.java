@@ -43,7 +43,7 @@ public final class Stream extends CarriedFlow {
     }
 
     private Stream(String name, double direction, double speed, List<Stated> numbers, Medium medium) {
-        super(name, direction, layer(speed, numbers, medium), Optional.of(spectrum(speed, numbers, medium)), numbers);
+        super(name, direction, layer(speed, numbers, medium), Optional.of(carried(speed, numbers, medium)), numbers);
         this.name = name;
         this.direction = direction;
         this.speed = speed;
@@ -57,9 +57,10 @@ public final class Stream extends CarriedFlow {
         return new PlateLayer(PlateFlow.of(speed, fetch, turbulence, medium.kinematicViscosity()));
     }
 
-    private static TurbulenceSpectrum spectrum(double speed, List<Stated> numbers, Medium medium) {
+    private static Turbulence carried(double speed, List<Stated> numbers, Medium medium) {
         double deviation = numbers.get(0).value() * speed;
-        return new TurbulenceSpectrum(deviation, numbers.get(1).value(), speed, medium.kinematicViscosity());
+        return new ModelTurbulence(
+                new TurbulenceSpectrum(deviation, numbers.get(1).value(), speed, medium.kinematicViscosity()), speed);
     }
 
     @Override

@@ -124,7 +124,11 @@ class RecordFileTest {
         assertThat(record.averaging().orElseThrow().rate()).isCloseTo(200.0, within(1e-9));
         assertThat(record.averaging().orElseThrow().words())
                 .isEqualTo("Hann window, 50 % overlap, 10 averages of 256 samples");
-        assertThat(record.meanSquare()).isCloseTo(0.00250, Percentage.withPercentage(12.0));
+        assertThat(record.notes())
+                .containsExactly(
+                        "The density is Welch's: Hann window, 50 % overlap, 10 averages of 256 samples, lines 0.781 Hz"
+                                + " apart, each known to 32 %.");
+        assertThat(record.meanSquare()).isCloseTo(0.0023822, Percentage.withPercentage(2.0));
     }
 
     @Test
