@@ -2,6 +2,7 @@ package flowshy.cli;
 
 import flowshy.medium.MediumException;
 import flowshy.report.ProblemsJson;
+import flowshy.stream.cover.UnmeasuredFrequencyException;
 import flowshy.study.text.Problem;
 import flowshy.study.text.StudyException;
 import flowshy.study.units.QuantityException;
@@ -41,6 +42,7 @@ final class Failures {
         }
         if (failure instanceof MediumException
                 || failure instanceof QuantityException
+                || failure instanceof UnmeasuredFrequencyException
                 || failure instanceof UserException) {
             message(line, failure.getMessage(), json);
             return WRONG_INPUT;

@@ -16,6 +16,9 @@ import org.hipparchus.util.FastMath;
  * @param medium the medium in the gap
  */
 public record ConfinedCylinder(double radius, double enclosureRadius, Medium medium) {
+    /** Narrowest enclosure the law is tested for, b/a [-]. */
+    public static final double NARROWEST = 1.01;
+
     /** @throws IllegalArgumentException if the radii are not positive and finite, or the enclosure is not the wider */
     public ConfinedCylinder {
         if (!(radius > 0.0) || !(enclosureRadius > radius) || Double.isInfinite(enclosureRadius)) {

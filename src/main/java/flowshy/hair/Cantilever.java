@@ -31,27 +31,35 @@ public final class Cantilever {
     /** Exact to degree 9: on a straight taper the stiffness needs 6, the mass 8. */
     private static final GaussIntegrator RULE = new GaussIntegratorFactory().legendre(5);
 
-    private Cantilever() {}
+    private final List<Point> points = new ArrayList<>();
+    private final double[] scaling;
+    private final DecompositionSolver stiffness;
 
     /**
-     * First natural frequency.
+     * A point of an integration rule.
+     *
+     * @param first place of the element's first deflection in the vector of unknowns; the clamped node has none
+     * @param radius a there [m]
+     * @param weight of the point [m]
+     * @param deflection there by a unit of each of the element's four unknowns
+     */
+    private record Point(int first, double radius, double weight, List<Double> deflection) {}
+
+    /**
+     * A hair as a beam.
      *
      * @param profile shape, gives I = πa⁴/4
      * @param youngsModulus E [Pa]
-     * @param massPerLength mass that moves with the hair, by radius [kg/m]
-     * @return frequency [Hz]
      */
-    public static double firstFrequency(Profile profile, double youngsModulus, DoubleUnaryOperator massPerLength) {
-        return firstFrequency(profile, youngsModulus, massPerLength, ELEMENTS);
+    public Cantilever(Profile profile, double youngsModulus) {
+        this(profile, youngsModulus, ELEMENTS);
     }
 
     /** The same with a chosen number of elements, to see how it converges. */
-    static double firstFrequency(
-            Profile profile, double youngsModulus, DoubleUnaryOperator massPerLength, int elements) {
+    Cantilever(Profile profile, double youngsModulus, int elements) {
         List<Double> nodes = nodes(profile, elements);
         int free = 2 * (nodes.size() - 1);
-        RealMatrix stiffness = new Array2DRowRealMatrix(free, free);
-        RealMatrix mass = new Array2DRowRealMatrix(free, free);
+        RealMatrix matrix = new Array2DRowRealMatrix(free, free);
         for (int e = 1; e < nodes.size(); e++) {
             double from = nodes.get(e - 1);
             double span = nodes.get(e) - from;
@@ -60,16 +68,50 @@ public final class Cantilever {
                 double width = pieces.get(piece) - pieces.get(piece - 1);
                 for (int q = 0; q < RULE.getNumberOfPoints(); q++) {
                     double z = pieces.get(piece - 1) + 0.5 * (1.0 + RULE.getPoint(q)) * width;
-                    double weight = 0.5 * width * RULE.getWeight(q);
                     double radius = profile.radius(z);
-                    double bending = youngsModulus * FastMath.PI * FastMath.pow(radius, 4) / 4.0;
-                    addProducts(stiffness, e, curvature((z - from) / span, span), weight * bending);
-                    double moving = massPerLength.applyAsDouble(radius);
-                    addProducts(mass, e, deflection((z - from) / span, span), weight * moving);
+                    double t = (z - from) / span;
+                    Point point = new Point(2 * (e - 2), radius, 0.5 * width * RULE.getWeight(q), deflection(t, span));
+                    points.add(point);
+                    addProducts(
+                            matrix,
+                            point.first(),
+                            curvature(t, span),
+                            point.weight() * youngsModulus * FastMath.PI * FastMath.pow(radius, 4) / 4.0);
                 }
             }
         }
-        return FastMath.sqrt(smallestEigenvalue(stiffness, mass)) / (2.0 * FastMath.PI);
+        // lengths of 1e-4 m make the entries tiny: scale so that Cholesky's absolute thresholds do not bite
+        scaling = new double[free];
+        for (int i = 0; i < free; i++) {
+            scaling[i] = 1.0 / FastMath.sqrt(matrix.getEntry(i, i));
+        }
+        stiffness = new CholeskyDecomposition(scaled(matrix), 1e-9, 1e-14).getSolver();
+    }
+
+    /**
+     * First natural frequency.
+     *
+     * @param massPerLength mass that moves with the hair, by radius [kg/m]
+     * @return frequency [Hz]
+     */
+    public double firstFrequency(DoubleUnaryOperator massPerLength) {
+        double[] masses = new double[points.size()];
+        for (int i = 0; i < masses.length; i++) {
+            masses[i] = points.get(i).weight()
+                    * massPerLength.applyAsDouble(points.get(i).radius());
+        }
+        RealVector shape = new ArrayRealVector(scaling.length, 1.0);
+        double eigenvalue = 0.0;
+        for (int i = 0; i < ITERATIONS; i++) {
+            RealVector next = stiffness.solve(inertia(masses, shape));
+            double before = eigenvalue;
+            eigenvalue = shape.dotProduct(shape) / shape.dotProduct(next);
+            if (FastMath.abs(eigenvalue - before) < ACCURACY * eigenvalue) {
+                break;
+            }
+            shape = next.unitVector();
+        }
+        return FastMath.sqrt(eigenvalue) / (2.0 * FastMath.PI);
     }
 
     /**
@@ -112,16 +154,44 @@ public final class Cantilever {
     }
 
     /** Adds weight × shape_i × shape_j at the places of an element's two nodes; the first node of all is clamped. */
-    private static void addProducts(RealMatrix matrix, int element, double[] shape, double weight) {
+    private static void addProducts(RealMatrix matrix, int first, List<Double> shape, double weight) {
         for (int i = 0; i < 4; i++) {
             for (int j = 0; j < 4; j++) {
-                int row = 2 * (element - 2) + i;
-                int column = 2 * (element - 2) + j;
-                if (row >= 0 && column >= 0) {
-                    matrix.addToEntry(row, column, weight * shape[i] * shape[j]);
+                if (first + i >= 0 && first + j >= 0) {
+                    matrix.addToEntry(first + i, first + j, weight * shape.get(i) * shape.get(j));
                 }
             }
         }
+    }
+
+    /** Consistent mass times a shape, point by point, in scaled unknowns. */
+    private RealVector inertia(double[] masses, RealVector shape) {
+        RealVector force = new ArrayRealVector(scaling.length);
+        for (int p = 0; p < masses.length; p++) {
+            Point point = points.get(p);
+            double moved = 0.0;
+            for (int i = FastMath.max(0, -point.first()); i < 4; i++) {
+                int at = point.first() + i;
+                moved += point.deflection().get(i) * scaling[at] * shape.getEntry(at);
+            }
+            for (int i = FastMath.max(0, -point.first()); i < 4; i++) {
+                int at = point.first() + i;
+                force.addToEntry(at, point.deflection().get(i) * scaling[at] * masses[p] * moved);
+            }
+        }
+        return force;
+    }
+
+    /** Ones on the diagonal; both halves from one, as Cholesky refuses a matrix that is symmetric only up to rounding. */
+    private RealMatrix scaled(RealMatrix matrix) {
+        RealMatrix scaled = new Array2DRowRealMatrix(scaling.length, scaling.length);
+        for (int i = 0; i < scaling.length; i++) {
+            for (int j = 0; j <= i; j++) {
+                scaled.setEntry(i, j, scaling[i] * scaling[j] * matrix.getEntry(i, j));
+                scaled.setEntry(j, i, scaled.getEntry(i, j));
+            }
+        }
+        return scaled;
     }
 
     /** The ends of an element and the breaks of the profile between them. */
@@ -132,48 +202,14 @@ public final class Cantilever {
         return heights;
     }
 
-    private static double[] deflection(double t, double span) {
+    private static List<Double> deflection(double t, double span) {
         double t2 = t * t;
         double t3 = t2 * t;
-        return new double[] {1 - 3 * t2 + 2 * t3, span * (t - 2 * t2 + t3), 3 * t2 - 2 * t3, span * (t3 - t2)};
+        return List.of(1 - 3 * t2 + 2 * t3, span * (t - 2 * t2 + t3), 3 * t2 - 2 * t3, span * (t3 - t2));
     }
 
-    private static double[] curvature(double t, double span) {
+    private static List<Double> curvature(double t, double span) {
         double s2 = span * span;
-        return new double[] {(12 * t - 6) / s2, (6 * t - 4) / span, (6 - 12 * t) / s2, (6 * t - 2) / span};
-    }
-
-    private static double smallestEigenvalue(RealMatrix stiffness, RealMatrix mass) {
-        // lengths of 1e-4 m make the entries tiny: scale so that Cholesky's absolute thresholds do not bite
-        double scale = 1.0 / stiffness.getEntry(0, 0);
-        RealVector diagonal = new ArrayRealVector(stiffness.getRowDimension());
-        for (int i = 0; i < diagonal.getDimension(); i++) {
-            diagonal.setEntry(i, 1.0 / FastMath.sqrt(scale * stiffness.getEntry(i, i)));
-        }
-        RealMatrix scaled = stiffness.copy();
-        RealMatrix inertia = mass.copy();
-        for (int i = 0; i < diagonal.getDimension(); i++) {
-            for (int j = 0; j <= i; j++) {
-                double factor = scale * diagonal.getEntry(i) * diagonal.getEntry(j);
-                // both halves from one: Cholesky refuses a matrix that is symmetric only up to rounding
-                scaled.setEntry(i, j, factor * stiffness.getEntry(i, j));
-                scaled.setEntry(j, i, scaled.getEntry(i, j));
-                inertia.setEntry(i, j, factor * mass.getEntry(i, j));
-                inertia.setEntry(j, i, inertia.getEntry(i, j));
-            }
-        }
-        DecompositionSolver solver = new CholeskyDecomposition(scaled, 1e-9, 1e-14).getSolver();
-        RealVector shape = new ArrayRealVector(diagonal.getDimension(), 1.0);
-        double eigenvalue = 0.0;
-        for (int i = 0; i < ITERATIONS; i++) {
-            RealVector next = solver.solve(inertia.operate(shape));
-            double before = eigenvalue;
-            eigenvalue = shape.dotProduct(shape) / shape.dotProduct(next);
-            if (FastMath.abs(eigenvalue - before) < ACCURACY * eigenvalue) {
-                break;
-            }
-            shape = next.unitVector();
-        }
-        return eigenvalue;
+        return List.of((12 * t - 6) / s2, (6 * t - 4) / span, (6 - 12 * t) / s2, (6 * t - 2) / span);
     }
 }

@@ -38,6 +38,17 @@ public record LogTable(List<Double> frequencies, List<Double> values) {
     }
 
     /**
+     * Whether a frequency is covered.
+     *
+     * @param frequency [Hz]
+     * @return true if it lies in the range, to 1e-9 relative
+     */
+    public boolean covers(double frequency) {
+        Range range = range();
+        return frequency >= range.low() * (1.0 - EDGE) && frequency <= range.high() * (1.0 + EDGE);
+    }
+
+    /**
      * Value at a frequency.
      *
      * @param frequency within the range, to 1e-9 relative [Hz]
@@ -45,9 +56,8 @@ public record LogTable(List<Double> frequencies, List<Double> values) {
      * @throws IllegalArgumentException outside the range
      */
     public double at(double frequency) {
-        Range range = range();
-        if (!(frequency >= range.low() * (1.0 - EDGE) && frequency <= range.high() * (1.0 + EDGE))) {
-            throw new IllegalArgumentException("frequency " + frequency + " Hz is outside " + range);
+        if (!covers(frequency)) {
+            throw new IllegalArgumentException("frequency " + frequency + " Hz is outside " + range());
         }
         int high = 1;
         while (high < frequencies.size() - 1 && frequencies.get(high) < frequency) {

@@ -1,10 +1,12 @@
 package flowshy.response;
 
+import flowshy.cylinder.ConfinedCylinder;
 import flowshy.hair.Hair;
 import flowshy.medium.Medium;
 import flowshy.stream.cover.Cover;
 import flowshy.stream.cover.Covers;
 import java.util.Optional;
+import org.hipparchus.util.FastMath;
 
 /**
  * A hair where it stands.
@@ -32,6 +34,17 @@ public record Device(Hair hair, Optional<Suspension> suspension, Medium outside,
      */
     public Device bare() {
         return new Device(hair, suspension, outside, Covers.OPEN, outside);
+    }
+
+    /**
+     * Largest factor by which all diameters can grow in this place: the hair stays a hair, and inside its cavity.
+     *
+     * @return factor [-], one or more
+     */
+    public double room() {
+        double cavity = cover.cavityRadius().orElse(Double.POSITIVE_INFINITY);
+        double inside = cavity / (ConfinedCylinder.NARROWEST * hair.profile().largestRadius());
+        return FastMath.min(hair.profile().room(), inside);
     }
 
     /**

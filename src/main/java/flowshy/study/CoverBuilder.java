@@ -1,28 +1,21 @@
 package flowshy.study;
 
+import flowshy.cylinder.ConfinedCylinder;
 import flowshy.hair.Hair;
-import flowshy.math.LogTable;
 import flowshy.medium.Medium;
 import flowshy.stream.cover.Cavity;
 import flowshy.stream.cover.Cover;
-import flowshy.stream.cover.MeasuredCover;
 import flowshy.stream.cover.OpenCover;
 import flowshy.stream.cover.RoofedCover;
 import flowshy.stream.cover.SealedCover;
 import flowshy.stream.cover.VentedCover;
 import flowshy.study.keys.Form;
 import flowshy.study.text.Problems;
-import flowshy.study.text.StudyException;
-import flowshy.study.units.Dimension;
 import flowshy.verdict.Band;
-import java.util.ArrayList;
-import java.util.List;
 import java.util.Optional;
 
 /** From the keys of a cover to what stands over the hair; refuses one that the hair does not fit under. */
 final class CoverBuilder {
-    private static final int MOST_ROWS = 10000;
-
     private final Form form;
     private final Problems problems;
     private final FilesRead files;
@@ -72,7 +65,7 @@ final class CoverBuilder {
             case "roofed" -> Optional.of(new RoofedCover(form.si(path + ".gap"), form.si(path + ".length")));
             case "vented" -> vented(path, outside);
             case "sealed" -> Optional.of(sealed(path));
-            case "measured" -> measured(path, band);
+            case "measured" -> new AttenuationReader(form, problems, files).read(path, band);
             default -> Optional.of(new OpenCover());
         };
     }
@@ -104,52 +97,6 @@ final class CoverBuilder {
                 form.si(path + ".cavity-section")));
     }
 
-    private Optional<Cover> measured(String path, Optional<Band> band) {
-        String key = path + ".file";
-        String name = form.word(key).orElseThrow();
-        List<ColumnFile.Column> columns = new ArrayList<>(List.of(
-                new ColumnFile.Column("frequency", Optional.of(Dimension.FREQUENCY)),
-                new ColumnFile.Column("attenuation", Optional.of(Dimension.LEVEL))));
-        try {
-            boolean phased = files.heads(form, key, "phase");
-            if (phased) {
-                columns.add(new ColumnFile.Column("phase", Optional.of(Dimension.ANGLE)));
-            }
-            ColumnFile table = files.table(form, key, columns, MOST_ROWS);
-            for (int i = 0; i < table.rows().size(); i++) {
-                double before = i == 0 ? 0.0 : table.rows().get(i - 1).get(0);
-                if (!(table.rows().get(i).get(0) > before)) {
-                    problems.add(
-                            table.position(i, 0), key, "a frequency that does not rise", "rows by rising frequency");
-                    return Optional.empty();
-                }
-            }
-            if (table.rows().size() < 2) {
-                return refuse(key, name + " has one row", "two or more");
-            }
-            LogTable attenuation = column(table, 1, 1.0);
-            if (band.isPresent()
-                    && !(attenuation.range().contains(band.get().from())
-                            && attenuation.range().contains(band.get().to()))) {
-                return refuse(
-                        key,
-                        name + " covers " + attenuation.range(),
-                        "an attenuation over the whole band of use; nothing is extrapolated: narrow band, or measure more");
-            }
-            return Optional.of(new MeasuredCover(
-                    name, attenuation, phased ? Optional.of(column(table, 2, 180.0 / Math.PI)) : Optional.empty()));
-        } catch (StudyException e) {
-            e.problems().forEach(problems::add);
-            return Optional.empty();
-        }
-    }
-
-    private static LogTable column(ColumnFile table, int column, double factor) {
-        return new LogTable(
-                table.rows().stream().map(row -> row.get(0)).toList(),
-                table.rows().stream().map(row -> row.get(column) * factor).toList());
-    }
-
     private boolean fits(String path, Cover cover, Hair hair) {
         double length = hair.profile().length();
         if (cover instanceof RoofedCover roof && !(roof.gap() > length)) {
@@ -170,7 +117,8 @@ final class CoverBuilder {
             }
         }
         if (cover.cavityRadius().isPresent()
-                && !(cover.cavityRadius().getAsDouble() > 1.01 * hair.profile().largestRadius())) {
+                && !(cover.cavityRadius().getAsDouble()
+                        > ConfinedCylinder.NARROWEST * hair.profile().largestRadius())) {
             refuse(
                     path + ".kind",
                     "a cavity hardly wider than the hair",

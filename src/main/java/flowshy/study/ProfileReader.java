@@ -16,6 +16,12 @@ import java.util.Optional;
 final class ProfileReader {
     private static final int MOST_ROWS = 10_000;
 
+    /** As thin as the keys of the other shapes allow [m]. */
+    private static final double THINNEST = 1e-8;
+
+    /** As long as they allow [m]. */
+    private static final double LONGEST = 1.0;
+
     private final Form form;
     private final Problems problems;
     private final FilesRead files;
@@ -90,11 +96,16 @@ final class ProfileReader {
             boolean pointed = point.equals(last) && point.diameter() == 0.0;
             if (!(point.diameter() > 0.0) && !pointed) {
                 problems.add(point.diameterAt(), path, "a diameter not above zero", "only the tip may have diameter 0");
+            } else if (point.diameter() < THINNEST && !pointed) {
+                problems.add(point.diameterAt(), path, "thinner than 10 nm", "10 nm or more, or a tip of diameter 0");
             }
             if (!(point.diameter() <= last.height())) {
                 problems.add(
                         point.diameterAt(), path, "wider than the hair is long", "a hair is at least as long as wide");
             }
+        }
+        if (!(last.height() <= LONGEST)) {
+            problems.add(last.heightAt(), path, "longer than 1 m", "a hair of 1 m or less");
         }
         if (points.size() < 2) {
             problems.add(first.heightAt(), path, "one height only", "a profile has two heights or more");

@@ -25,6 +25,11 @@ class FuzzTest {
     private static final long SEED = 20260917L;
     private static final int MUTANTS = 3000;
 
+    /** One accepted mutant of so many is also asked for its lid, and one for its fill: these take longer. */
+    private static final int LID_EVERY = 12;
+
+    private static final int FILL_EVERY = 40;
+
     private static final Pattern QUANTITY =
             Pattern.compile("(?<=[ :])([+-]?\\d+(?:\\.\\d+)?(?:e-?\\d+)?)( [a-zA-Z%/][\\w./%]*)");
     private static final List<String> UNITS = List.of(
@@ -61,6 +66,8 @@ class FuzzTest {
         int accepted = 0;
         int refused = 0;
         int values = 0;
+        int lids = 0;
+        int fills = 0;
         for (int i = 0; i < MUTANTS; i++) {
             Path base = studies.get(i % studies.size());
             String text = Files.readString(base);
@@ -82,12 +89,25 @@ class FuzzTest {
                 accepted++;
                 assertThat(run.err()).isEmpty();
                 assertThat(numbers(Json.parse(run.out()), mutant)).isGreaterThan(50);
+                lids += accepted % LID_EVERY == 0 ? answers("lid", file, mutant) : 0;
+                fills += accepted % FILL_EVERY == 0 ? answers("fill", file, mutant) : 0;
             }
         }
+        assertThat(lids).isGreaterThan(50);
+        assertThat(fills).isGreaterThan(15);
         assertThat(accepted + refused).isEqualTo(MUTANTS);
         assertThat(values).isGreaterThanOrEqualTo(MUTANTS * 30 / 100);
         assertThat(accepted).isGreaterThanOrEqualTo(MUTANTS * 10 / 100);
         assertThat(refused).isGreaterThanOrEqualTo(MUTANTS * 10 / 100);
+    }
+
+    /** A study that bands accepts is one that the other commands answer. */
+    private static int answers(String command, Path study, String mutant) {
+        Run run = Run.of(command, study.toString(), "--json");
+        assertThat(run.code()).as("%s: %s%n%s", command, run.err(), mutant).isIn(0, 3);
+        assertThat(run.err()).as(mutant).isEmpty();
+        assertThat(numbers(Json.parse(run.out()), mutant)).isGreaterThan(50);
+        return 1;
     }
 
     /** Copies of the examples, with the files they name. */

@@ -28,7 +28,7 @@ class CantileverValidationTest {
     @Test
     void uniformBeam() {
         double found =
-                Cantilever.firstFrequency(new Cylinder(LENGTH, RADIUS), MODULUS, CantileverValidationTest::ownMass);
+                new Cantilever(new Cylinder(LENGTH, RADIUS), MODULUS).firstFrequency(CantileverValidationTest::ownMass);
         assertThat(found / (1.8751040687 * 1.8751040687 * UNIT)).isCloseTo(1.0, within(1e-6 / 8.0));
     }
 
@@ -40,8 +40,8 @@ class CantileverValidationTest {
     void fullCone() {
         double x = firstZero();
         assertThat(x * x / 4.0).isCloseTo(8.719, within(5e-4));
-        double found =
-                Cantilever.firstFrequency(new Taper(LENGTH, RADIUS, 0.0), MODULUS, CantileverValidationTest::ownMass);
+        double found = new Cantilever(new Taper(LENGTH, RADIUS, 0.0), MODULUS)
+                .firstFrequency(CantileverValidationTest::ownMass);
         assertThat(found / (x * x / 4.0 * UNIT)).isCloseTo(1.0, within(2e-6));
     }
 
@@ -54,7 +54,7 @@ class CantileverValidationTest {
         double head = 1.6e-4;
         double load = 2.3e-6;
         Club club = new Club(stalk + head, thin, stalk, 0.0, thick, End.FLAT);
-        double found = Cantilever.firstFrequency(club, MODULUS, a -> a > thin ? load : 0.0);
+        double found = new Cantilever(club, MODULUS).firstFrequency(a -> a > thin ? load : 0.0);
         double bending = MODULUS * FastMath.PI * FastMath.pow(thin, 4) / 4.0;
         double k11 = 12.0 * bending / FastMath.pow(stalk, 3);
         double k12 = -6.0 * bending / (stalk * stalk);
@@ -75,23 +75,23 @@ class CantileverValidationTest {
     void convergesWithTheFourthPower() {
         Cylinder beam = new Cylinder(LENGTH, RADIUS);
         double exact = 1.8751040687119611 * 1.8751040687119611 * UNIT;
-        double two = Cantilever.firstFrequency(beam, MODULUS, CantileverValidationTest::ownMass, 2) / exact - 1.0;
-        double four = Cantilever.firstFrequency(beam, MODULUS, CantileverValidationTest::ownMass, 4) / exact - 1.0;
-        double eight = Cantilever.firstFrequency(beam, MODULUS, CantileverValidationTest::ownMass, 8) / exact - 1.0;
+        double two = new Cantilever(beam, MODULUS, 2).firstFrequency(CantileverValidationTest::ownMass) / exact - 1.0;
+        double four = new Cantilever(beam, MODULUS, 4).firstFrequency(CantileverValidationTest::ownMass) / exact - 1.0;
+        double eight = new Cantilever(beam, MODULUS, 8).firstFrequency(CantileverValidationTest::ownMass) / exact - 1.0;
         assertThat(two).isBetween(1e-5, 1e-3);
         assertThat(two / four).isBetween(14.0, 17.0);
         assertThat(four / eight).isBetween(15.0, 17.0);
         Taper taper = new Taper(LENGTH, RADIUS, 0.3 * RADIUS);
-        double usual = Cantilever.firstFrequency(taper, MODULUS, CantileverValidationTest::ownMass);
-        double fine = Cantilever.firstFrequency(taper, MODULUS, CantileverValidationTest::ownMass, 80);
+        double usual = new Cantilever(taper, MODULUS).firstFrequency(CantileverValidationTest::ownMass);
+        double fine = new Cantilever(taper, MODULUS, 80).firstFrequency(CantileverValidationTest::ownMass);
         assertThat(usual / fine).isCloseTo(1.0, within(1e-7));
     }
 
     /** The same taper measured at 3 or 900 points is the same beam, and takes no longer than the elements it needs. */
     @Test
     void countsAMeasuredProfileAsTheBodyItDescribes() {
-        double exact = Cantilever.firstFrequency(
-                new Taper(LENGTH, RADIUS, 0.3 * RADIUS), MODULUS, CantileverValidationTest::ownMass);
+        double exact = new Cantilever(new Taper(LENGTH, RADIUS, 0.3 * RADIUS), MODULUS)
+                .firstFrequency(CantileverValidationTest::ownMass);
         for (int pieces : new int[] {2, 47, 899}) {
             List<Double> heights = new ArrayList<>();
             List<Double> radii = new ArrayList<>();
@@ -100,8 +100,8 @@ class CantileverValidationTest {
                 heights.add(LENGTH * share);
                 radii.add(RADIUS * (1.0 - 0.7 * share));
             }
-            double found = Cantilever.firstFrequency(
-                    new MeasuredProfile(heights, radii), MODULUS, CantileverValidationTest::ownMass);
+            double found = new Cantilever(new MeasuredProfile(heights, radii), MODULUS)
+                    .firstFrequency(CantileverValidationTest::ownMass);
             assertThat(found / exact).as("%d pieces", pieces).isCloseTo(1.0, within(1e-7));
         }
     }
@@ -109,14 +109,14 @@ class CantileverValidationTest {
     /** Frequency ∝ √E, and ∝ d/L². */
     @Test
     void scales() {
-        double found =
-                Cantilever.firstFrequency(new Taper(LENGTH, RADIUS, 0.0), MODULUS, CantileverValidationTest::ownMass);
-        double stiffer = Cantilever.firstFrequency(
-                new Taper(LENGTH, RADIUS, 0.0), 4.0 * MODULUS, CantileverValidationTest::ownMass);
-        double longer = Cantilever.firstFrequency(
-                new Taper(2.0 * LENGTH, RADIUS, 0.0), MODULUS, CantileverValidationTest::ownMass);
-        double thicker = Cantilever.firstFrequency(
-                new Taper(LENGTH, 1.5 * RADIUS, 0.0), MODULUS, CantileverValidationTest::ownMass);
+        double found = new Cantilever(new Taper(LENGTH, RADIUS, 0.0), MODULUS)
+                .firstFrequency(CantileverValidationTest::ownMass);
+        double stiffer = new Cantilever(new Taper(LENGTH, RADIUS, 0.0), 4.0 * MODULUS)
+                .firstFrequency(CantileverValidationTest::ownMass);
+        double longer = new Cantilever(new Taper(2.0 * LENGTH, RADIUS, 0.0), MODULUS)
+                .firstFrequency(CantileverValidationTest::ownMass);
+        double thicker = new Cantilever(new Taper(LENGTH, 1.5 * RADIUS, 0.0), MODULUS)
+                .firstFrequency(CantileverValidationTest::ownMass);
         assertThat(stiffer / found).isCloseTo(2.0, within(1e-8));
         assertThat(longer / found).isCloseTo(0.25, within(1e-8));
         assertThat(thicker / found).isCloseTo(1.5, within(1e-8));

@@ -170,6 +170,26 @@ class ProfileTest {
                 .hasMessageContaining("as long as wide");
     }
 
+    static List<Profile> shapesWithRoom() {
+        return List.of(
+                new Cylinder(7e-4, 4e-5),
+                new Taper(7e-4, 1e-5, 4e-5),
+                CLUB,
+                new Club(9e-4, 2e-5, 7.6e-4, 0.6e-4, 6e-5, End.ROUND),
+                new Club(9e-4, 2e-5, 7.6e-4, 0.6e-4, 6e-5, End.FLAT),
+                new MeasuredProfile(List.of(0.0, 2e-4, 8e-4), List.of(5e-5, 2e-5, 0.0)));
+    }
+
+    @ParameterizedTest
+    @MethodSource("shapesWithRoom")
+    void saysHowMuchThickerItCanBe(Profile profile) {
+        double most = profile.room();
+        assertThat(most).isGreaterThan(1.0);
+        assertThat(profile.thickened(most * (1.0 - 1e-9)).largestRadius())
+                .isCloseTo(most * profile.largestRadius(), within(1e-12));
+        assertThatThrownBy(() -> profile.thickened(most * (1.0 + 1e-6))).isInstanceOf(IllegalArgumentException.class);
+    }
+
     @Test
     void keepsMaterialInAnotherShape() {
         Hair hair = new Hair(CLUB, 1180.0, OptionalDouble.of(2e9));

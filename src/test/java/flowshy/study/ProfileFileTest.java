@@ -88,6 +88,8 @@ class ProfileFileTest {
                 "'z [um],diameter [um]\n0,90\n300,80\n300,70' | p.csv:4:1: hair.file: the height does not rise; each z lies above the one before",
                 "'z [um],diameter [um]\n0,90\n300,0\n600,70' | p.csv:3:5: hair.file: a diameter not above zero; only the tip may have diameter 0",
                 "'z [um],diameter [um]\n0,90\n300,-5\n600,70' | p.csv:3:5: hair.file: a diameter not above zero; only the tip may have diameter 0",
+                "'z [um],diameter [um]\n0,90\n300,0.009\n600,70' | p.csv:3:5: hair.file: thinner than 10 nm; 10 nm or more, or a tip of diameter 0",
+                "'z [um],diameter [um]\n0,90\n1.1e6,70' | p.csv:3:1: hair.file: longer than 1 m; a hair of 1 m or less",
                 "'z [um],diameter [um]\n0,9000\n600,70' | p.csv:2:3: hair.file: wider than the hair is long; a hair is at least as long as wide",
                 "'z [um],diameter [um]\n0,0' | p.csv:2:1: hair.file: one height only; a profile has two heights or more",
                 "'z [um],diameter [um]' | p.csv: no rows; a header with units, then numbers",

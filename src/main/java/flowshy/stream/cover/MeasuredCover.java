@@ -28,10 +28,17 @@ public record MeasuredCover(String file, LogTable attenuation, Optional<LogTable
         return "measured, " + file;
     }
 
-    /** {@inheritDoc} Outside the measured frequencies the nearest value would be a guess: see {@link LogTable#at}. */
+    /**
+     * {@inheritDoc}
+     *
+     * @throws UnmeasuredFrequencyException outside the measured frequencies, where the nearest value would be a guess
+     */
     @Override
     public Complex factor(double omega, Medium around) {
         double frequency = omega / (2.0 * FastMath.PI);
+        if (!attenuation.covers(frequency)) {
+            throw new UnmeasuredFrequencyException(file, attenuation.range(), frequency);
+        }
         double size = FastMath.pow(10.0, -attenuation.at(frequency) / 20.0);
         double angle =
                 FastMath.toRadians(phase.map(table -> table.at(frequency)).orElse(0.0));

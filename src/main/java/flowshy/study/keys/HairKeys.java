@@ -9,6 +9,7 @@ import java.util.Map;
 final class HairKeys {
     private static final Measure LENGTH = Measure.of(Dimension.LENGTH, "100 nm", "1 m");
     private static final Measure DIAMETER = Measure.of(Dimension.LENGTH, "10 nm", "1 m");
+    private static final Measure TIP = DIAMETER.orZero();
     private static final Measure PART = Measure.of(Dimension.LENGTH, "0 m", "1 m");
 
     private HairKeys() {}
@@ -27,7 +28,7 @@ final class HairKeys {
                 List.of(
                         length,
                         Key.required("base-diameter", DIAMETER, "diameter at the wall"),
-                        Key.required("tip-diameter", PART, "diameter at the tip, zero for a point")));
+                        Key.required("tip-diameter", TIP, "diameter at the tip, zero for a point")));
         shapes.put(
                 "club",
                 List.of(
@@ -53,7 +54,7 @@ final class HairKeys {
                                 "points",
                                 new Points(
                                         Key.required("z", PART, "height above the wall"),
-                                        Key.required("diameter", PART, "diameter there")),
+                                        Key.required("diameter", TIP, "diameter there")),
                                 "the same as a list of pairs")));
         List<Key> common = List.of(
                 Key.required(

@@ -14,16 +14,23 @@ import java.util.Optional;
  *
  * @param dimension what it measures
  * @param amplitude whether rms or peak may follow
+ * @param zero whether zero is admissible beside the range
  * @param least smallest admissible value, as a study would write it
  * @param most largest admissible value, as a study would write it
  */
-public record Measure(Dimension dimension, boolean amplitude, String least, String most) implements Value {
+public record Measure(Dimension dimension, boolean amplitude, boolean zero, String least, String most)
+        implements Value {
     static Measure of(Dimension dimension, String least, String most) {
-        return new Measure(dimension, false, least, most);
+        return new Measure(dimension, false, false, least, most);
     }
 
     static Measure amplitude(Dimension dimension, String least, String most) {
-        return new Measure(dimension, true, least, most);
+        return new Measure(dimension, true, false, least, most);
+    }
+
+    /** The same, zero admitted beside the range. */
+    Measure orZero() {
+        return new Measure(dimension, amplitude, true, least, most);
     }
 
     @Override
@@ -32,7 +39,7 @@ public record Measure(Dimension dimension, boolean amplitude, String least, Stri
     }
 
     private String range() {
-        return least + " to " + most;
+        return (zero ? "zero or " : "") + least + " to " + most;
     }
 
     @Override
@@ -57,14 +64,15 @@ public record Measure(Dimension dimension, boolean amplitude, String least, Stri
 
     private void keep(Reading reading, Node.Scalar scalar, String path, Quantity quantity) {
         double value = quantity.value();
-        if (value >= parse(least).value() && value <= parse(most).value()) {
+        boolean inside = value >= parse(least).value() && value <= parse(most).value();
+        if (inside || (zero && value == 0.0)) {
             reading.field(path, scalar, Optional.of(quantity));
         } else {
             reading.problem(
                     scalar.position(),
                     path,
                     quantity.written(),
-                    dimension.phrase() + " of " + range() + " is wanted here");
+                    dimension.phrase() + (zero ? ", " : " of ") + range() + " is wanted here");
         }
     }
 

@@ -138,16 +138,13 @@ public record LidQuestion(BandsQuestion base, double reference, List<Candidate> 
         Calibration.Figures change = new Calibration(reference, Covers.OPEN).figures(covered, bareDevice);
         List<String> misses = new ArrayList<>();
         for (Limit limit : answer.verdict().limits()) {
-            if (limit.decision() == Decision.FAILS || limit.decision() == Decision.UNDECIDED) {
-                misses.add(
-                        limit.found().isPresent()
-                                ? say(
-                                        "%s misses by %.3g %s",
-                                        limit.name(),
-                                        FastMath.abs(
-                                                limit.required() - limit.found().getAsDouble()),
-                                        limit.unit())
-                                : limit.name() + ": " + limit.reason());
+            if (limit.decision() == Decision.FAILS && limit.found().isPresent()) {
+                double by = FastMath.abs(limit.required() - limit.found().getAsDouble());
+                misses.add(say("%s misses by %.3g %s", limit.name(), by, limit.unit()));
+            } else if (limit.decision() == Decision.FAILS) {
+                misses.add(limit.name() + ": " + limit.reason());
+            } else if (limit.decision() == Decision.UNDECIDED) {
+                misses.add(limit.name() + " is undecided: " + limit.reason());
             }
         }
         return new CoverRow(

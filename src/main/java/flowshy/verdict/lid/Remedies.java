@@ -3,25 +3,34 @@ package flowshy.verdict.lid;
 import static flowshy.math.Figures.say;
 
 import flowshy.hair.Hair;
+import flowshy.math.Figures;
 import flowshy.response.Device;
 import flowshy.verdict.BandsAnswer;
 import flowshy.verdict.BandsQuestion;
-import flowshy.verdict.Limit;
+import flowshy.verdict.Decision;
 import flowshy.verdict.ReadingBand;
 import flowshy.verdict.Reads;
+import java.math.BigDecimal;
+import java.math.MathContext;
+import java.math.RoundingMode;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
 import java.util.function.DoubleFunction;
-import org.hipparchus.analysis.solvers.BracketingNthOrderBrentSolver;
 import org.hipparchus.util.FastMath;
 
-/** What would let a device keep its margin: a thicker hair, a denser hair, a narrower band; each computed. */
+/** What would let a device meet its limits: a thicker hair, a denser hair, a narrower band; each computed. */
 final class Remedies {
     /** A hair more than this many times as thick or dense is another design. */
     private static final double REACH = 8.0;
 
-    private static final double ACCURACY = 1e-4;
+    /** Density of the densest metals [kg/m³], from memory. */
+    private static final double DENSEST = 22500.0;
+
+    /** Factors tried before the least one that does is narrowed down: not every limit comes nearer steadily. */
+    private static final int STEPS = 8;
+
+    private static final double ACCURACY = 1e-5;
 
     private final BandsQuestion question;
     private final Device device;
@@ -32,11 +41,15 @@ final class Remedies {
     }
 
     List<String> list() {
+        if (answer(device).bands().get(0).reads() == Reads.NOTHING) {
+            double twice = 2.0 * device.around().density();
+            return List.of(say(
+                    "a hair of another density than its fill: one of %.4g kg/m3 keeps half of its inertial torque",
+                    twice));
+        }
         List<String> remedies = new ArrayList<>();
         Hair hair = device.hair();
-        double thickest = 0.5 * hair.profile().length() / hair.profile().largestRadius();
-        OptionalDouble thicker = factor(
-                by -> device.with(hair.reshaped(hair.profile().thickened(by))), Math.min(REACH, 0.999 * thickest));
+        OptionalDouble thicker = factor(this::thicker, device.room());
         remedies.add(
                 thicker.isPresent()
                         ? say(
@@ -44,51 +57,87 @@ final class Remedies {
                                 thicker.getAsDouble(),
                                 2e6 * thicker.getAsDouble() * hair.profile().largestRadius())
                         : "no thicker hair of this shape and length keeps every limit");
-        OptionalDouble denser = factor(by -> device.with(hair.ofDensity(by * hair.density())), REACH);
+        OptionalDouble denser = factor(this::denser, DENSEST / hair.density());
         remedies.add(
                 denser.isPresent()
                         ? say(
                                 "a hair %.3g times as dense (%.4g kg/m3) keeps every limit",
                                 denser.getAsDouble(), denser.getAsDouble() * hair.density())
-                        : "no hair up to eight times as dense keeps every limit");
+                        : say(
+                                "no hair up to %.4g kg/m3 keeps every limit",
+                                FastMath.min(DENSEST, REACH * hair.density())));
         remedies.add(narrower());
         return remedies;
     }
 
-    private OptionalDouble factor(DoubleFunction<Device> changed, double most) {
-        if (!(most > 1.0) || !(shortfall(changed.apply(most)) <= 0.0)) {
-            return OptionalDouble.empty();
-        }
-        return OptionalDouble.of(new BracketingNthOrderBrentSolver(ACCURACY, 5)
-                .solve(60, by -> shortfall(changed.apply(by)), 1.0, most));
+    private Device thicker(double by) {
+        return device.with(device.hair().reshaped(device.hair().profile().thickened(by)));
     }
 
-    /** Largest miss of the limits [dB]: margin less the least rejection, error over its limit. */
-    private double shortfall(Device changed) {
-        BandsAnswer answer =
-                question.about(changed).answer(List.of(question.band().from()));
-        double most = Double.NEGATIVE_INFINITY;
-        for (Limit limit : answer.verdict().limits()) {
-            if (limit.found().isPresent()) {
-                double found = limit.found().getAsDouble();
-                double miss = limit.name().equals("rejection")
-                        ? limit.required() - found
-                        : 20.0 * FastMath.log10(found / limit.required());
-                most = FastMath.max(most, miss);
+    private Device denser(double by) {
+        return device.with(device.hair().ofDensity(by * device.hair().density()));
+    }
+
+    /** Least factor above one that does, rounded up to the three digits printed so that it still does. */
+    private OptionalDouble factor(DoubleFunction<Device> changed, double room) {
+        double most = FastMath.min(REACH, room);
+        double before = 1.0;
+        for (int i = 1; i <= STEPS && most > 1.0; i++) {
+            double tried = down(FastMath.pow(most, (double) i / STEPS), 3);
+            if (tried > before && meets(changed.apply(tried))) {
+                return OptionalDouble.of(narrowed(changed, before, tried));
+            }
+            before = FastMath.max(before, tried);
+        }
+        return OptionalDouble.empty();
+    }
+
+    private double narrowed(DoubleFunction<Device> changed, double fails, double does) {
+        double low = fails;
+        double high = does;
+        while (high - low > ACCURACY * high) {
+            double middle = 0.5 * (low + high);
+            if (meets(changed.apply(middle))) {
+                high = middle;
+            } else {
+                low = middle;
             }
         }
-        return most;
+        return FastMath.min(does, up(high, 3));
+    }
+
+    private static double down(double value, int digits) {
+        return rounded(value, new MathContext(digits, RoundingMode.DOWN));
+    }
+
+    private static double up(double value, int digits) {
+        return rounded(value, new MathContext(digits, RoundingMode.UP));
+    }
+
+    /** First as programs read it, so that 0.1 is not taken for a little more. */
+    private static double rounded(double value, MathContext to) {
+        return new BigDecimal(value)
+                .round(new MathContext(Figures.FULL))
+                .round(to)
+                .doubleValue();
+    }
+
+    private boolean meets(Device changed) {
+        return answer(changed).verdict().decision() == Decision.MEETS;
+    }
+
+    private BandsAnswer answer(Device changed) {
+        return question.about(changed).answer(List.of(question.band().from()));
     }
 
     private String narrower() {
-        BandsAnswer answer = question.answer(List.of(question.band().from()));
         ReadingBand widest = null;
-        for (ReadingBand part : answer.bands()) {
+        for (ReadingBand part : answer(device).bands()) {
             boolean wider = widest == null || part.to() / part.from() > widest.to() / widest.from();
             widest = part.reads() == Reads.MOTION && wider ? part : widest;
         }
         return widest == null
                 ? "no part of the band keeps the margin"
-                : say("a band from %.4g Hz to %.4g Hz keeps the margin", widest.from(), widest.to());
+                : say("a band from %.4g Hz to %.4g Hz keeps the margin", up(widest.from(), 4), down(widest.to(), 4));
     }
 }

@@ -97,7 +97,7 @@ class OverlayTest {
         assertThat(problems("hair.shape=taper"))
                 .containsExactly(
                         "s.yaml:1:7: hair.base-diameter: missing; diameter at the wall: length, 10 nm to 1 m",
-                        "s.yaml:1:7: hair.tip-diameter: missing; diameter at the tip, zero for a point: length, 0 m to 1 m");
+                        "s.yaml:1:7: hair.tip-diameter: missing; diameter at the tip, zero for a point: length, zero or 10 nm to 1 m");
     }
 
     @Test
