@@ -81,7 +81,8 @@ public final class FillReport {
                 + Figures.of(question.band().from(), 4) + " Hz to "
                 + Figures.of(question.band().to(), 4)
                 + " Hz. Sensitivity against the study's own device and thermal noise, both at "
-                + Figures.of(question.reference(), 4) + " Hz. Stiffness and structural damping are held.");
+                + Figures.of(question.reference(), 4)
+                + " Hz. Stiffness and structural damping are held. Strip theory throughout.");
         part(
                 page,
                 "Nothing speaks against",
