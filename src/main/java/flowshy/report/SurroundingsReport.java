@@ -23,7 +23,7 @@ public final class SurroundingsReport {
             page.line("");
             page.line("  " + named.name() + "   (" + named.kind().word() + ")");
             page.row("", named.about());
-            for (NamedSurrounding.Number number : named.numbers()) {
+            for (NamedSurrounding.StartingValue number : named.numbers()) {
                 page.row(
                         number.stated().key(),
                         Figures.of(number.stated().value(), 3) + (number.unit().equals("1") ? "" : " " + number.unit())
@@ -64,7 +64,7 @@ public final class SurroundingsReport {
     public static String csv(List<NamedSurrounding> all) {
         List<List<String>> rows = new ArrayList<>();
         for (NamedSurrounding named : all) {
-            for (NamedSurrounding.Number number : named.numbers()) {
+            for (NamedSurrounding.StartingValue number : named.numbers()) {
                 rows.add(List.of(
                         named.name(),
                         named.kind().word(),

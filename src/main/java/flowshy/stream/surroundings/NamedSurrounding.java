@@ -13,14 +13,14 @@ import java.util.Optional;
  * @param about what it is, a few words
  * @param numbers assumed values with their sources, SI, levels in dB; keys as in a study
  */
-public record NamedSurrounding(String name, SourceKind kind, String about, List<Number> numbers) {
+public record NamedSurrounding(String name, SourceKind kind, String about, List<StartingValue> numbers) {
     /**
      * One number with its unit.
      *
      * @param stated key, value and source
      * @param unit SI unit, {@code 1} for shares, {@code dB} for levels
      */
-    public record Number(Stated stated, String unit) {}
+    public record StartingValue(Stated stated, String unit) {}
 
     /** Copies the list. */
     public NamedSurrounding {
@@ -35,7 +35,7 @@ public record NamedSurrounding(String name, SourceKind kind, String about, List<
      */
     public Optional<Stated> number(String key) {
         return numbers.stream()
-                .map(Number::stated)
+                .map(StartingValue::stated)
                 .filter(stated -> stated.key().equals(key))
                 .findFirst();
     }

@@ -71,9 +71,9 @@ public final class NamedSurroundings {
                 all.add(new NamedSurrounding(cells.get(0), kind(cells.get(1)), cells.get(2), List.of()));
             } else {
                 NamedSurrounding last = all.remove(all.size() - 1);
-                List<NamedSurrounding.Number> numbers = new ArrayList<>(last.numbers());
+                List<NamedSurrounding.StartingValue> numbers = new ArrayList<>(last.numbers());
                 Stated stated = Stated.assumed(cells.get(0), Double.parseDouble(cells.get(1)), cells.get(3));
-                numbers.add(new NamedSurrounding.Number(stated, cells.get(2)));
+                numbers.add(new NamedSurrounding.StartingValue(stated, cells.get(2)));
                 all.add(new NamedSurrounding(last.name(), last.kind(), last.about(), numbers));
             }
         }

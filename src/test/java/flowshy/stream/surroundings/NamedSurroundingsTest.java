@@ -31,7 +31,7 @@ class NamedSurroundingsTest {
         for (NamedSurrounding named : NamedSurroundings.all()) {
             assertThat(named.about()).as(named.name()).isNotBlank();
             assertThat(named.numbers()).as(named.name()).isNotEmpty();
-            for (NamedSurrounding.Number number : named.numbers()) {
+            for (NamedSurrounding.StartingValue number : named.numbers()) {
                 assertThat(number.stated().source())
                         .as("%s %s", named.name(), number.stated().key())
                         .matches(".*(common practice|\\(seen\\)|seen\\)|from memory).*");
