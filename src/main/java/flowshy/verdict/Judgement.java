@@ -3,6 +3,7 @@ package flowshy.verdict;
 import static flowshy.math.Figures.say;
 
 import flowshy.math.Caveat;
+import flowshy.medium.PropertySource;
 import flowshy.response.Device;
 import flowshy.verdict.BandsAnswer.Extreme;
 import flowshy.verdict.error.ErrorBudget;
@@ -129,7 +130,19 @@ final class Judgement {
             case UNDECIDED -> " A limit is undecided.";
             case NOT_ASKED -> " No limit was judged.";
         };
-        return subject + found + judged + (first == Reads.NOTHING ? "" : scope());
+        return subject + found + judged + (first == Reads.NOTHING ? "" : scope()) + memory();
+    }
+
+    /** Density and viscosity decide; a verdict that rests on a recalled one says so. */
+    private String memory() {
+        List<String> recalled = device.around().recalled().stream()
+                .filter(source ->
+                        source.property().equals("density") || source.property().equals("viscosity"))
+                .map(PropertySource::property)
+                .toList();
+        return recalled.isEmpty()
+                ? ""
+                : " It rests on a " + String.join(" and a ", recalled) + " recalled from memory.";
     }
 
     private String scope() {

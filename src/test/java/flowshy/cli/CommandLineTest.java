@@ -257,4 +257,34 @@ class CommandLineTest {
         assertThat(Json.object(Json.parse(Run.of("check", "--schema").out()))).containsKey("properties");
         assertThat(Run.of("check").code()).isEqualTo(2);
     }
+
+    /** The package of the example as it is pumped out: the rejection grows until the slip law ends, and the answer says so. */
+    @Test
+    void rejectionGrowsAsThePressureFallsUntilTheModelEnds() {
+        double before = 0.0;
+        for (String pressure : List.of("100 kPa", "40 kPa", "15 kPa", "6 kPa")) {
+            Run run = Run.of(
+                    "bands", "examples/vacuum-package/study.yaml", "--json", "--set", "medium.pressure=" + pressure);
+            Map<String, Object> least =
+                    Json.object(Json.object(Json.parse(run.out())).get("least_rejection"));
+            double rejection = (double) least.get("rejection_db");
+            assertThat(rejection).isGreaterThan(before + 2.0);
+            before = rejection;
+        }
+        Run ended = Run.of("bands", "examples/vacuum-package/study.yaml", "--json", "--set", "medium.pressure=1 kPa");
+        Map<String, Object> answer = Json.object(Json.parse(ended.out()));
+        assertThat(Json.objects(answer.get("bands")))
+                .singleElement()
+                .satisfies(band -> assertThat(band).containsEntry("reads", "undecided"));
+        assertThat(ended.code()).isEqualTo(3);
+        assertThat(ended.out()).contains("the slip law ends at 0.1");
+    }
+
+    @Test
+    void aVerdictThatRestsOnAValueFromMemorySaysSo() {
+        Run oil = Run.of("bands", WATER, "--set", "medium={name: silicone oil, grade: 10 cSt, temperature: 18 degC}");
+        assertThat(oil.out().replaceAll("\\s+", " "))
+                .contains("It rests on a density and a viscosity recalled from memory.");
+        assertThat(Run.of("bands", WATER).out()).doesNotContain("recalled from memory");
+    }
 }
