@@ -1,9 +1,8 @@
 package flowshy.hair;
 
+import flowshy.math.GaussLegendre;
 import java.util.ArrayList;
 import java.util.List;
-import org.hipparchus.analysis.integration.gauss.GaussIntegrator;
-import org.hipparchus.analysis.integration.gauss.GaussIntegratorFactory;
 
 /**
  * One quadrature point along a hair.
@@ -13,9 +12,6 @@ import org.hipparchus.analysis.integration.gauss.GaussIntegratorFactory;
  * @param weight share of the length that the point stands for [m]
  */
 public record Strip(double height, double radius, double weight) {
-    /** One factory for all: a new Gauss–Legendre rule costs milliseconds, once. */
-    private static final GaussIntegratorFactory RULES = new GaussIntegratorFactory();
-
     /** Below this share of its middle, the radius at an end of a segment makes the force law steep there. */
     private static final double NARROW = 0.2;
 
@@ -31,7 +27,7 @@ public record Strip(double height, double radius, double weight) {
      * @return strips from wall to tip
      */
     public static List<Strip> along(Profile profile, List<Double> breaks, int points) {
-        GaussIntegrator rule = RULES.legendre(points);
+        GaussLegendre rule = GaussLegendre.of(points);
         List<Strip> strips = new ArrayList<>(points * (breaks.size() - 1));
         for (int i = 1; i < breaks.size(); i++) {
             double from = breaks.get(i - 1);
@@ -41,8 +37,8 @@ public record Strip(double height, double radius, double weight) {
             // just above the foot: at a step the foot itself still belongs to the part below
             boolean atFoot = !atTop && profile.radius(from + 1e-6 * span) < narrow;
             for (int n = 0; n < points; n++) {
-                double share = 0.5 * (1.0 + rule.getPoint(n));
-                double weight = 0.5 * span * rule.getWeight(n);
+                double share = 0.5 * (1.0 + rule.point(n));
+                double weight = 0.5 * span * rule.weight(n);
                 if (atTop || atFoot) {
                     double away = atTop ? 1.0 - share : share;
                     weight *= 4.0 * away * away * away;

@@ -1,9 +1,8 @@
 package flowshy.cylinder.excursion;
 
 import flowshy.cylinder.SteadyDrag;
+import flowshy.math.GaussLegendre;
 import java.util.function.DoubleUnaryOperator;
-import org.hipparchus.analysis.integration.gauss.GaussIntegrator;
-import org.hipparchus.analysis.integration.gauss.GaussIntegratorFactory;
 import org.hipparchus.util.FastMath;
 
 /**
@@ -19,7 +18,7 @@ import org.hipparchus.util.FastMath;
  * @param offset mean force per length along the stream [N/m]
  */
 public record QuasiSteady(double along, double across, double offset) {
-    private static final GaussIntegrator RULE = new GaussIntegratorFactory().legendre(8);
+    private static final GaussLegendre RULE = GaussLegendre.of(8);
 
     /** A fluctuation below this share of the mean sees the slope of the drag; its curve would add the square of it. */
     private static final double SMALL = 1e-5;
@@ -50,9 +49,9 @@ public record QuasiSteady(double along, double across, double offset) {
         double offset = 0.0;
         for (int i = 1; i < breaks.length; i++) {
             double half = 0.5 * (breaks[i] - breaks[i - 1]);
-            for (int k = 0; k < RULE.getNumberOfPoints(); k++) {
-                double x = breaks[i - 1] + half * (1.0 + RULE.getPoint(k));
-                double weight = half * RULE.getWeight(k) * point.fluctuation().density(x);
+            for (int k = 0; k < RULE.size(); k++) {
+                double x = breaks[i - 1] + half * (1.0 + RULE.point(k));
+                double weight = half * RULE.weight(k) * point.fluctuation().density(x);
                 double v = point.fluctuation().velocity(x, mean, deviation);
                 double f = v == 0.0 ? 0.0 : force.applyAsDouble(v);
                 along += weight * f * (v - mean);

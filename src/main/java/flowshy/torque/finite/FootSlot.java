@@ -1,8 +1,7 @@
 package flowshy.torque.finite;
 
 import flowshy.math.BesselJ01;
-import org.hipparchus.analysis.integration.gauss.GaussIntegrator;
-import org.hipparchus.analysis.integration.gauss.GaussIntegratorFactory;
+import flowshy.math.GaussLegendre;
 
 /**
  * How the wall takes part in the hair's turning: inside the foot's radius it moves with the hair, over the gap its motion
@@ -12,7 +11,7 @@ import org.hipparchus.analysis.integration.gauss.GaussIntegratorFactory;
  * @param gap width of the slot round it, positive
  */
 record FootSlot(double radius, double gap) {
-    private static final GaussIntegrator RULE = new GaussIntegratorFactory().legendre(24);
+    private static final GaussLegendre RULE = GaussLegendre.of(24);
 
     /** Turns of the Bessel functions over the gap that the rule still follows; beyond, the transforms are below 1e-4. */
     private static final double FOLLOWED = 40.0;
@@ -27,10 +26,10 @@ record FootSlot(double radius, double gap) {
             return;
         }
         double[] pair = new double[2];
-        for (int n = 0; n < RULE.getNumberOfPoints(); n++) {
-            double r = radius + 0.5 * gap * (1.0 + RULE.getPoint(n));
+        for (int n = 0; n < RULE.size(); n++) {
+            double r = radius + 0.5 * gap * (1.0 + RULE.point(n));
             BesselJ01.at(kappa * r, pair);
-            double share = 0.5 * RULE.getWeight(n) / kappa;
+            double share = 0.5 * RULE.weight(n) / kappa;
             out[0] += share * r * pair[1];
             out[1] += share * r * r * second(kappa * r, pair);
         }

@@ -1,13 +1,12 @@
 package flowshy.torque.finite;
 
+import flowshy.math.GaussLegendre;
 import java.util.function.DoubleFunction;
-import org.hipparchus.analysis.integration.gauss.GaussIntegrator;
-import org.hipparchus.analysis.integration.gauss.GaussIntegratorFactory;
 import org.hipparchus.complex.Complex;
 
 /** Mean of a function of the height over a piece. */
 final class PieceMean {
-    private static final GaussIntegrator RULE = new GaussIntegratorFactory().legendre(12);
+    private static final GaussLegendre RULE = GaussLegendre.of(12);
 
     private PieceMean() {}
 
@@ -16,9 +15,9 @@ final class PieceMean {
             return function.apply(piece.middle());
         }
         Complex sum = Complex.ZERO;
-        for (int n = 0; n < RULE.getNumberOfPoints(); n++) {
-            double z = piece.from().height() + 0.5 * piece.thickness() * (1.0 + RULE.getPoint(n));
-            sum = sum.add(function.apply(z).multiply(0.5 * RULE.getWeight(n)));
+        for (int n = 0; n < RULE.size(); n++) {
+            double z = piece.from().height() + 0.5 * piece.thickness() * (1.0 + RULE.point(n));
+            sum = sum.add(function.apply(z).multiply(0.5 * RULE.weight(n)));
         }
         return sum;
     }

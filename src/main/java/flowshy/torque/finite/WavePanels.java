@@ -1,9 +1,8 @@
 package flowshy.torque.finite;
 
+import flowshy.math.GaussLegendre;
 import java.util.ArrayList;
 import java.util.List;
-import org.hipparchus.analysis.integration.gauss.GaussIntegrator;
-import org.hipparchus.analysis.integration.gauss.GaussIntegratorFactory;
 import org.hipparchus.util.FastMath;
 
 /**
@@ -20,7 +19,7 @@ record WavePanels(double from, double to) {
     /** Width in units of one over the radius: the product of two Bessel functions turns by 20 in it, three times. */
     private static final double TURN = 10.0;
 
-    private static final GaussIntegrator RULE = new GaussIntegratorFactory().legendre(16);
+    private static final GaussLegendre RULE = GaussLegendre.of(16);
 
     static List<WavePanels> over(List<Ring> rings, double[] cutoffs) {
         double height = 0.0;
@@ -47,11 +46,11 @@ record WavePanels(double from, double to) {
     }
 
     int size() {
-        return RULE.getNumberOfPoints();
+        return RULE.size();
     }
 
     Wave wave(int n, double beta) {
         double half = 0.5 * (to - from);
-        return new Wave(from + half * (1.0 + RULE.getPoint(n)), half * RULE.getWeight(n), beta);
+        return new Wave(from + half * (1.0 + RULE.point(n)), half * RULE.weight(n), beta);
     }
 }
