@@ -94,7 +94,7 @@ abstract class DrivenFlow implements Source {
                 .min()
                 .orElse(support().low());
         double layer = new StokesLayer(medium.kinematicViscosity()).thickness(TWO_PI * slowest);
-        double reynolds = 1.6 * deviation() * layer / medium.kinematicViscosity();
+        double reynolds = FastMath.sqrt(2.0) * deviation() * layer / medium.kinematicViscosity();
         if (reynolds > LAMINAR) {
             caveats.add(new Caveat(
                     Subject.ERROR,

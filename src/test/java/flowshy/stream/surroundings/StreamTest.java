@@ -86,6 +86,15 @@ class StreamTest {
         }
     }
 
+    /** A wind of twenty metres' scale ends at 1.7 kHz; the wall's own turbulence goes on to 1.8 u_τ²/ν. */
+    @Test
+    void supportReachesToTheWallsOwnTurbulence() {
+        Stream wind = stream(10.0, 0.02, 20.0, 2.0);
+        double friction = PlateFlow.of(10.0, 2.0, 0.02, 1.51e-5).wall().frictionVelocity();
+        assertThat(wind.support().high())
+                .isCloseTo(1.8 * friction * friction / 1.51e-5, Percentage.withPercentage(0.01));
+    }
+
     private static double variance(Source source, HeightShare uniform, double height) {
         double low = Math.log(source.support().low());
         double high = Math.log(source.support().high());
