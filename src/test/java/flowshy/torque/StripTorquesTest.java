@@ -7,9 +7,14 @@ import flowshy.hair.Cylinder;
 import flowshy.hair.Hair;
 import flowshy.hair.Profile;
 import flowshy.medium.Medium;
+import flowshy.stream.cover.Cavity;
+import flowshy.stream.cover.Cover;
 import flowshy.stream.cover.Covers;
+import flowshy.stream.cover.RoofedCover;
+import flowshy.stream.cover.SealedCover;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import org.hipparchus.complex.Complex;
 import org.hipparchus.util.FastMath;
 import org.junit.jupiter.api.Test;
@@ -49,6 +54,31 @@ class StripTorquesTest {
             }
         }
         assertThat(compared).isEqualTo(13 * 4 * FREQUENCIES);
+    }
+
+    /** The same under roofs, low and high: there a second layer hangs over the tip. */
+    @Test
+    void isConvergedUnderARoof() {
+        int compared = 0;
+        for (Map.Entry<String, Profile> profile : Hairs.profiles().entrySet()) {
+            for (Medium medium : Hairs.media()) {
+                for (double gap : new double[] {1.02, 1.4, 6.0}) {
+                    Cover roof = new RoofedCover(gap * profile.getValue().length(), 5e-3);
+                    Hair hair = Hairs.of(profile.getValue(), 1200.0);
+                    TorqueModel usual = TorqueModel.of(hair, medium, 3e-6, roof);
+                    TorqueModel fine = new StripTorques(hair, medium, 3e-6, roof, 2);
+                    for (int i = 0; i < FREQUENCIES; i += 2) {
+                        Torques one = usual.at(omega(i));
+                        Torques two = fine.at(omega(i));
+                        String where = profile.getKey() + " in " + medium.name() + " at " + omega(i) + " rad/s, " + gap;
+                        same(one.flow(), two.flow(), where);
+                        same(one.open(), two.open(), where);
+                        compared++;
+                    }
+                }
+            }
+        }
+        assertThat(compared).isEqualTo(13 * 4 * 3 * FREQUENCIES / 2);
     }
 
     private static void same(Complex one, Complex two, String where) {
@@ -109,6 +139,36 @@ class StripTorquesTest {
             }
         }
         assertThat(compared).isEqualTo(13 * 4 * 3 * 8 * 3);
+    }
+
+    /** The same with the profile under each cover, its factor, and its own medium's law. */
+    @Test
+    void motionIsWhatIsCarriedLessTheFlowUnderEveryCover() {
+        List<Cover> covers = List.of(
+                Covers.OPEN,
+                Covers.SEALED,
+                new SealedCover(Optional.of(new Cavity(4e-3, 2e-3))),
+                new RoofedCover(1.3e-3, 5e-3));
+        int compared = 0;
+        for (Profile profile : Hairs.profiles().values()) {
+            for (Medium medium : Hairs.media()) {
+                for (Cover cover : covers) {
+                    TorqueModel model = TorqueModel.of(Hairs.of(profile, 1200.0), medium, 0.0, cover);
+                    for (int i = 0; i < FREQUENCIES; i += 5) {
+                        Torques torques = model.at(omega(i));
+                        Complex factor = cover.factor(omega(i), medium);
+                        Complex rest =
+                                torques.motion(factor).add(torques.flow(factor)).subtract(torques.carried());
+                        double size = torques.open().norm() + torques.flow().norm();
+                        assertThat(rest.norm() / size)
+                                .as("%s, %s", cover.words(), profile)
+                                .isCloseTo(0.0, within(1e-13));
+                        compared++;
+                    }
+                }
+            }
+        }
+        assertThat(compared).isEqualTo(13 * 4 * 4 * 5);
     }
 
     @Test
