@@ -23,6 +23,8 @@ public final class FreeSwingFit {
     private static final int FEWEST = 12;
     /** More unexplained rms than this is not one free swing. */
     private static final double LARGEST_REST = 0.3;
+    /** Within less than a period a drift passes for a swing. */
+    private static final double FEWEST_TURNS = 1.0;
     /** A decay known worse than this decides nothing. */
     private static final double LARGEST_UNCERTAINTY = 0.2;
     /** The guess of the frequency is coarse where few periods are left; neighbours are tried too. */
@@ -130,6 +132,10 @@ public final class FreeSwingFit {
         }
         if (!(rate > 0.0) || !(turn > 0.0)) {
             throw refused("the swing in the record does not die out");
+        }
+        double turns = turn * periods[periods.length - 1] / (2.0 * FastMath.PI);
+        if (!(turns >= FEWEST_TURNS)) {
+            throw refused("the record holds %.2g of one period of the swing; record longer", turns);
         }
         RealVector sigma = sigma(optimum);
         double noise = rest * FastMath.sqrt(signal.length / (signal.length - 5.0));

@@ -117,6 +117,8 @@ class FreeSwingFitValidationTest {
         assertThatThrownBy(() -> fit(500, 1.0, t -> Math.exp(-t / 0.1))).isInstanceOf(SuspensionException.class);
         assertThatThrownBy(() -> fit(500, 1.0, t -> Math.exp(-t / 0.1) + 0.01 * random.nextGaussian()))
                 .isInstanceOf(SuspensionException.class);
+        assertThatThrownBy(() -> fit(500, 0.6, t -> Math.exp(-t / 0.3) * Math.cos(2.0 * Math.PI * t)))
+                .hasMessageContaining("0.60 of one period");
         assertThatThrownBy(() -> fit(500, 1.0, t -> 3.0 * t)).isInstanceOf(SuspensionException.class);
         assertThatThrownBy(() -> fit(500, 1.0, t -> t < 0.6 ? 0.0 : Math.cos(200.0 * t) * Math.exp((0.6 - t) / 0.1)))
                 .hasMessageContaining("cut what lies before the release");
