@@ -5,6 +5,7 @@ import flowshy.study.Study;
 import flowshy.verdict.BandsAnswer;
 import flowshy.verdict.DeviceFacts.Swing;
 import flowshy.verdict.ReadingBand;
+import flowshy.verdict.error.ErrorBudget;
 import flowshy.verdict.lid.CoverRow;
 import flowshy.verdict.lid.LidAnswer;
 import flowshy.verdict.lid.LidQuestion;
@@ -60,6 +61,20 @@ public final class LidReport {
                                         .map(s -> s.decay().quality())
                                         .orElse(Double.NaN),
                                 NO_SUSPENSION)),
+                new Column<>(
+                        "error_rms_m_s2",
+                        "error",
+                        "m/s2",
+                        3,
+                        row -> Cell.of(
+                                row.answer().error().map(ErrorBudget::rms).orElse(Double.NaN), NO_SURROUNDINGS)),
+                new Column<>(
+                        "offset_m_s2",
+                        "offset",
+                        "m/s2",
+                        3,
+                        row -> Cell.of(
+                                row.answer().error().map(ErrorBudget::offset).orElse(Double.NaN), NO_SURROUNDINGS)),
                 new Column<>(
                         "sensitivity_change_percent",
                         "sens.",
@@ -117,7 +132,8 @@ public final class LidReport {
         }
         page.heading("Covers");
         page.paragraph((study.candidates().isEmpty() ? "No candidates are stated: usual covers are taken. " : "")
-                + "from, to, least: rejection at the ends of the band and where it is least. sens.: sensitivity against the"
+                + "from, to, least: rejection at the ends of the band and where it is least. error, offset: of the surroundings, as acceleration. sens.: sensitivity"
+                + " against the"
                 + " bare device, noise: thermal, both at " + Figures.of(answer.reference(), 4) + " Hz.");
         List<String> names = new ArrayList<>();
         for (CoverRow row : answer.covers()) {
@@ -142,7 +158,8 @@ public final class LidReport {
                     row.misses().isEmpty()
                             ? "meets every limit that can be judged."
                             : String.join("; ", row.misses()) + ".");
-            row.warnings().forEach(warning -> page.note("  [warning]", warning + "."));
+            row.warnings()
+                    .forEach(warning -> page.note("  [warning]", warning.endsWith(".") ? warning : warning + "."));
         }
         page.line("");
         page.paragraph(Cautions.SHORT);

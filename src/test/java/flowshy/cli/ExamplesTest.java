@@ -47,6 +47,31 @@ class ExamplesTest {
         assertThat(printed).isEqualTo(Files.readString(expected));
     }
 
+    static List<Path> lidExamples() {
+        return examples().stream()
+                .filter(example -> Files.exists(example.resolve("expected-lid.txt")))
+                .toList();
+    }
+
+    @Test
+    void thereAreLidExamples() {
+        assertThat(lidExamples()).hasSizeGreaterThanOrEqualTo(4);
+    }
+
+    @ParameterizedTest
+    @MethodSource("lidExamples")
+    void decidesOnTheLidAsExpected(Path example) throws IOException {
+        Run run = Run.of("lid", study(example));
+        String printed = run.out() + "exit code " + run.code() + "\n";
+        Path expected = example.resolve("expected-lid.txt");
+        if (REWRITE) {
+            Files.writeString(expected, printed);
+        }
+        assertThat(run.err()).isEmpty();
+        assertThat(printed).isEqualTo(Files.readString(expected));
+        assertThat(printed.lines()).allSatisfy(line -> assertThat(line.length()).isLessThanOrEqualTo(80));
+    }
+
     @ParameterizedTest
     @MethodSource("examples")
     void fitsEightyColumns(Path example) {

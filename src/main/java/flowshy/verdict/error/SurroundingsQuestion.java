@@ -253,7 +253,11 @@ public record SurroundingsQuestion(Device device, Band band, double margin, Moti
         boolean mixed = false;
         boolean unstable = false;
         double reynolds = 0.0;
+        double thin = device.hair().profile().smallestRadius();
         for (CombinedResistance law : load.laws()) {
+            if (law.cylinder().radius() < 0.999 * thin) {
+                continue; // the last bit of a point or round end, which carries next to nothing
+            }
             for (double omega : new double[] {low, high}) {
                 Regime regime = law.regime(omega);
                 ended |= regime.kind() == Regime.Kind.OUT_OF_RANGE;
