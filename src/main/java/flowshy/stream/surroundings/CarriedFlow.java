@@ -8,13 +8,13 @@ import flowshy.stream.HeightShare;
 import flowshy.stream.Line;
 import flowshy.stream.Source;
 import flowshy.stream.Stated;
+import flowshy.stream.turbulence.TurbulenceSpectrum;
 import flowshy.stream.turbulence.WallTurbulence;
 import flowshy.stream.wall.FluctuatingLayer;
 import flowshy.stream.wall.TurbulentWall;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import java.util.function.ToDoubleFunction;
 import org.hipparchus.complex.Complex;
 import org.hipparchus.util.FastMath;
 
@@ -33,6 +33,12 @@ public abstract class CarriedFlow implements Source {
     private final Layer layer;
     private final Optional<Turbulence> carried;
     private final List<Stated> numbers;
+    private final double streamSpeed;
+    private final double gamma;
+    /** The wall and its own turbulence, where some of the layer is turbulent. */
+    private final Optional<TurbulentWall> wall;
+
+    private final Optional<TurbulenceSpectrum> made;
 
     /**
      * @param carried what the stream carries; empty for a laminar duct of which nothing is known
@@ -44,6 +50,10 @@ public abstract class CarriedFlow implements Source {
         this.layer = layer;
         this.carried = carried;
         this.numbers = List.copyOf(numbers);
+        this.streamSpeed = layer.streamSpeed();
+        this.gamma = layer.intermittency();
+        this.wall = gamma > 0.0 ? Optional.of(layer.wall()) : Optional.empty();
+        this.made = wall.map(w -> WallTurbulence.spectrum(w.frictionVelocity(), w.kinematicViscosity()));
     }
 
     @Override
@@ -58,7 +68,7 @@ public abstract class CarriedFlow implements Source {
 
     @Override
     public double meanSpeed() {
-        return layer.streamSpeed();
+        return streamSpeed;
     }
 
     @Override
@@ -78,40 +88,40 @@ public abstract class CarriedFlow implements Source {
 
     @Override
     public HeightShare share(double omega) {
-        return share(
-                FluctuatingLayer.ALONG,
-                omega,
-                density(omega / TWO_PI),
-                wall -> WallTurbulence.spectrum(wall.frictionVelocity(), wall.kinematicViscosity())
-                        .along(omega / TWO_PI));
+        double frequency = omega / TWO_PI;
+        double density = density(frequency);
+        double ratio = density > 0.0 ? made.map(m -> m.along(frequency)).orElse(0.0) / density : 0.0;
+        return share(FluctuatingLayer.ALONG, omega, ratio);
     }
 
     @Override
     public HeightShare acrossShare(double omega) {
-        return share(
-                FluctuatingLayer.ACROSS,
-                omega,
-                acrossDensity(omega / TWO_PI),
-                wall -> WallTurbulence.spectrum(wall.frictionVelocity(), wall.kinematicViscosity())
-                        .across(omega / TWO_PI));
+        double frequency = omega / TWO_PI;
+        double density = acrossDensity(frequency);
+        double ratio = density > 0.0 ? made.map(m -> m.across(frequency)).orElse(0.0) / density : 0.0;
+        return share(FluctuatingLayer.ACROSS, omega, ratio);
     }
 
-    private HeightShare share(
-            FluctuatingLayer component, double omega, double density, ToDoubleFunction<TurbulentWall> ofWall) {
-        double gamma = layer.intermittency();
-        if (gamma == 0.0) {
+    /**
+     * Share in the mixture of laminar and turbulent layer.
+     *
+     * @param ratio density of the wall's own turbulence at its peak rms over that of the stream
+     */
+    private HeightShare share(FluctuatingLayer component, double omega, double ratio) {
+        if (wall.isEmpty()) {
             return height -> layer.laminarShare(component, height, omega);
         }
-        TurbulentWall wall = layer.wall();
-        double deviation = carried.map(Turbulence::deviation).orElse(0.0);
-        double peak = 2.7 * wall.frictionVelocity(); // rms for which the wall's spectrum is given
-        double ratio = density > 0.0 ? ofWall.applyAsDouble(wall) / (peak * peak * density) : 0.0;
+        TurbulentWall turbulentWall = wall.get();
+        double deviation = deviation();
+        double peak = made.orElseThrow().deviation();
         return height -> {
-            double brought = FastMath.min(1.0, wall.speedAt(height) / layer.streamSpeed());
-            double made =
-                    component == FluctuatingLayer.ALONG ? wall.fluctuationAt(height) : wall.acrossFluctuationAt(height);
-            double excess = made * made - brought * brought * deviation * deviation;
-            double turbulent = FastMath.sqrt(brought * brought + FastMath.max(0.0, excess) * ratio);
+            double brought = FastMath.min(1.0, turbulentWall.speedAt(height) / streamSpeed);
+            double local = component == FluctuatingLayer.ALONG
+                    ? turbulentWall.fluctuationAt(height)
+                    : turbulentWall.acrossFluctuationAt(height);
+            double excess = local * local - brought * brought * deviation * deviation;
+            double added = FastMath.max(0.0, excess) / (peak * peak) * ratio;
+            double turbulent = FastMath.sqrt(brought * brought + added);
             Complex laminar = gamma < 1.0 ? layer.laminarShare(component, height, omega) : Complex.ZERO;
             return laminar.multiply(1.0 - gamma).add(gamma * turbulent);
         };
@@ -134,12 +144,12 @@ public abstract class CarriedFlow implements Source {
             return new Range("frequency [Hz]", 1e-3, 1.0);
         }
         Range outside = carried.get().support();
-        if (layer.intermittency() == 0.0) {
+        if (wall.isEmpty()) {
             return outside;
         }
-        TurbulentWall wall = layer.wall();
         // the wall's smallest eddies are 1.8 ν/u_τ and carried at 10 u_τ: κη = 2 at 1.8 u_τ²/ν
-        double high = 1.8 * wall.frictionVelocity() * wall.frictionVelocity() / wall.kinematicViscosity();
+        double friction = wall.get().frictionVelocity();
+        double high = 1.8 * friction * friction / wall.get().kinematicViscosity();
         return new Range(outside.name(), outside.low(), FastMath.max(outside.high(), high));
     }
 
@@ -194,7 +204,7 @@ public abstract class CarriedFlow implements Source {
                     Weight.NOTE,
                     "No fluctuation is stated and a laminar duct makes none; give turbulence, or a pump as a tone.");
         }
-        if (layer.intermittency() > 0.0) {
+        if (wall.isPresent()) {
             add(
                     caveats,
                     Weight.WEAK,

@@ -1,7 +1,7 @@
 package flowshy.stream.wall;
 
-import org.hipparchus.linear.Array2DRowRealMatrix;
-import org.hipparchus.linear.LUDecomposition;
+import java.util.Arrays;
+import org.hipparchus.util.FastMath;
 
 /**
  * Polynomial collocation on given points: matrices that differentiate, integrate and interpolate values at the points.
@@ -38,25 +38,80 @@ final class Collocation {
     }
 
     double[][] secondDerivative() {
-        Array2DRowRealMatrix d = new Array2DRowRealMatrix(derivative(), false);
-        return d.multiply(d).getData();
+        double[][] d = derivative();
+        int size = d.length;
+        double[][] square = new double[size][size];
+        for (int i = 0; i < size; i++) {
+            for (int k = 0; k < size; k++) {
+                double factor = d[i][k];
+                for (int j = 0; j < size; j++) {
+                    square[i][j] += factor * d[k][j];
+                }
+            }
+        }
+        return square;
     }
 
     /** Integral from the first point: the inverse of the derivative without its first row and column. */
     double[][] integral() {
+        double[][] d = derivative();
         int last = points.length - 1;
-        double[][] inner = new Array2DRowRealMatrix(derivative(), false)
-                .getSubMatrix(1, last, 1, last)
-                .getData();
-        double[][] inverse = new LUDecomposition(new Array2DRowRealMatrix(inner, false))
-                .getSolver()
-                .getInverse()
-                .getData();
         double[][] integral = new double[last + 1][last + 1];
-        for (int j = 1; j <= last; j++) {
-            System.arraycopy(inverse[j - 1], 0, integral[j], 1, last);
+        double[][] inner = new double[last][];
+        double[][] unit = new double[last][last];
+        for (int i = 0; i < last; i++) {
+            inner[i] = Arrays.copyOfRange(d[i + 1], 1, last + 1);
+            unit[i][i] = 1.0;
+        }
+        double[][] inverse = solve(inner, unit);
+        for (int i = 0; i < last; i++) {
+            System.arraycopy(inverse[i], 0, integral[i + 1], 1, last);
         }
         return integral;
+    }
+
+    /**
+     * Gaussian elimination with row pivots, in place, for several right-hand sides, one a column. The decompositions of the library do
+     * the same but take four times as long before the virtual machine has warmed up, which is when this runs.
+     */
+    static double[][] solve(double[][] matrix, double[][] right) {
+        int size = right.length;
+        for (int k = 0; k < size; k++) {
+            int pivot = k;
+            for (int i = k + 1; i < size; i++) {
+                if (FastMath.abs(matrix[i][k]) > FastMath.abs(matrix[pivot][k])) {
+                    pivot = i;
+                }
+            }
+            swap(matrix, k, pivot);
+            swap(right, k, pivot);
+            for (int i = k + 1; i < size; i++) {
+                double factor = matrix[i][k] / matrix[k][k];
+                subtract(matrix[i], factor, matrix[k], k);
+                subtract(right[i], factor, right[k], 0);
+            }
+        }
+        for (int k = size - 1; k >= 0; k--) {
+            for (int j = k + 1; j < size; j++) {
+                subtract(right[k], matrix[k][j], right[j], 0);
+            }
+            for (int c = 0; c < right[k].length; c++) {
+                right[k][c] /= matrix[k][k];
+            }
+        }
+        return right;
+    }
+
+    private static void swap(double[][] rows, int one, int other) {
+        double[] row = rows[one];
+        rows[one] = rows[other];
+        rows[other] = row;
+    }
+
+    private static void subtract(double[] row, double factor, double[] other, int from) {
+        for (int j = from; j < row.length; j++) {
+            row[j] -= factor * other[j];
+        }
     }
 
     /** Weights w such that Σ wⱼ gⱼ is the interpolating polynomial at a place. */

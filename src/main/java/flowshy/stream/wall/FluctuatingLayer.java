@@ -2,9 +2,6 @@ package flowshy.stream.wall;
 
 import flowshy.stream.StokesLayer;
 import org.hipparchus.complex.Complex;
-import org.hipparchus.linear.Array2DRowRealMatrix;
-import org.hipparchus.linear.ArrayRealVector;
-import org.hipparchus.linear.LUDecomposition;
 import org.hipparchus.util.FastMath;
 
 /**
@@ -60,10 +57,14 @@ public enum FluctuatingLayer {
     private static final double STEP = 0.05;
     private static final int POINTS = (int) FastMath.round(ETA_END / STEP) + 1;
 
-    /** Tables are made when first asked for. */
-    private static final class Tables {
-        static final double[][][] ALONG_TABLE = ALONG.solve();
-        static final double[][][] ACROSS_TABLE = ACROSS.solve();
+    /** Made when first asked for. */
+    private static final class TableAlong {
+        static final double[][][] TABLE = ALONG.solve();
+    }
+
+    /** Made when first asked for. */
+    private static final class TableAcross {
+        static final double[][][] TABLE = ACROSS.solve();
     }
 
     /** w₀(η): the answer to a slow change of the stream. */
@@ -92,7 +93,7 @@ public enum FluctuatingLayer {
         if (eta >= ETA_END) {
             return Complex.ONE;
         }
-        double[][][] table = this == ALONG ? Tables.ALONG_TABLE : Tables.ACROSS_TABLE;
+        double[][][] table = this == ALONG ? TableAlong.TABLE : TableAcross.TABLE;
         int i = FastMath.min((int) (eta / STEP), POINTS - 2);
         double t = eta / STEP - i;
         double real = 0.0;
@@ -126,7 +127,7 @@ public enum FluctuatingLayer {
         }
         for (int n = 1; n < TERMS; n++) {
             double[][] left = new double[ORDER + 1][ORDER + 1];
-            double[] right = new double[ORDER + 1];
+            double[][] right = new double[ORDER + 1][1];
             for (int j = 1; j < ORDER; j++) {
                 double f = Blasius.f(eta[j]);
                 double stream = streamTerm(n, eta[j]);
@@ -134,28 +135,29 @@ public enum FluctuatingLayer {
                     left[j][k] = second[j][k] + 0.5 * f * first[j][k] + stream * integral[j][k];
                 }
                 left[j][j] -= n * Blasius.slope(eta[j]);
-                right[j] = w[n - 1][j] - (n == 1 ? 1.0 : 0.0);
+                right[j][0] = w[n - 1][j] - (n == 1 ? 1.0 : 0.0);
             }
             left[0][0] = 1.0;
             left[ORDER][ORDER] = 1.0;
-            w[n] = new LUDecomposition(new Array2DRowRealMatrix(left, false))
-                    .getSolver()
-                    .solve(new ArrayRealVector(right, false))
-                    .toArray();
+            Collocation.solve(left, right);
+            for (int j = 0; j <= ORDER; j++) {
+                w[n][j] = right[j][0];
+            }
             w[n][0] = 0.0; // rounding of the solver, which the sum would multiply
             w[n][ORDER] = 0.0;
+        }
+        double[][] slopes = new double[TERMS][ORDER + 1];
+        for (int n = 0; n < TERMS; n++) {
+            for (int j = 0; j <= ORDER; j++) {
+                slopes[n][j] = dot(first[j], w[n]);
+            }
         }
         double[][][] table = new double[POINTS][2][TERMS];
         for (int i = 0; i < POINTS; i++) {
             double[] weights = grid.weightsAt(i * STEP);
             for (int n = 0; n < TERMS; n++) {
                 table[i][0][n] = dot(weights, w[n]);
-            }
-        }
-        for (int n = 0; n < TERMS; n++) {
-            double[] slopes = new Array2DRowRealMatrix(first, false).operate(w[n]);
-            for (int i = 0; i < POINTS; i++) {
-                table[i][1][n] = dot(grid.weightsAt(i * STEP), slopes);
+                table[i][1][n] = dot(weights, slopes[n]);
             }
         }
         return table;
