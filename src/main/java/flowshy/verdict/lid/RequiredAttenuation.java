@@ -28,6 +28,9 @@ public record RequiredAttenuation(double frequency, double attenuation) {
         Torques torques = new Response(device.bare()).torques(frequency);
         Complex q = torques.flow().reciprocal().multiply(torques.carried());
         double squared = q.getReal() * q.getReal() + q.getImaginary() * q.getImaginary();
+        if (squared == 0.0) {
+            return new RequiredAttenuation(frequency, Double.POSITIVE_INFINITY);
+        }
         double level = FastMath.pow(10.0, margin / 20.0);
         double root = FastMath.sqrt(FastMath.max(0.0, q.getReal() * q.getReal() + squared * (level * level - 1.0)));
         double x = (q.getReal() + root) / squared;
