@@ -107,7 +107,7 @@ final class TextPage {
         for (int r = 0; r < lines.size(); r++) {
             String name = r == 0 ? title : r == 1 ? "" : names.get(r - 2);
             if (name.length() > left) {
-                line("  " + name);
+                wrap("  ", "    ", name);
                 name = "";
             }
             line("  " + name + " ".repeat(left - name.length()) + tableLine(lines.get(r), widths));

@@ -55,6 +55,15 @@ final class FilesRead {
     }
 
     /**
+     * The text of the file that a key names.
+     *
+     * @throws StudyException if it cannot be opened or is no text
+     */
+    TextFile text(Form form, String key) {
+        return text(form.word(key).orElseThrow(), form.position(key), key);
+    }
+
+    /**
      * A medium's table in the file that a key names.
      *
      * @throws StudyException with every problem of the table, at its own lines

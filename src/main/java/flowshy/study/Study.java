@@ -29,7 +29,7 @@ import org.hipparchus.util.FastMath;
  * @param surroundings flows that are there, in the order written; empty if not stated
  * @param document entries of the document block, in the order of the key table
  * @param takenAs every default that was used
- * @param understood every value that was written, in the order of the key table
+ * @param understood every value that was written, and every one of the surroundings in full, in the order of the key table
  */
 public record Study(
         String title,
@@ -105,10 +105,10 @@ public record Study(
     public record TakenAs(String key, String value, String why) {}
 
     /**
-     * A value that was written.
+     * A value that was written, or that stands for a word of the surroundings.
      *
      * @param key path of the key
-     * @param written as written
+     * @param written as written, or as a study would write it
      * @param si in SI with its unit, e.g. {@code 8.0e-05 m}; the text itself where the value is not a quantity
      */
     public record Understood(String key, String written, String si) {}

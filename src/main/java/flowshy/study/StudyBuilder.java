@@ -5,6 +5,7 @@ import flowshy.medium.Medium;
 import flowshy.response.Calibration;
 import flowshy.response.Device;
 import flowshy.response.Suspension;
+import flowshy.stream.Source;
 import flowshy.stream.cover.Cover;
 import flowshy.stream.cover.Covers;
 import flowshy.study.keys.Field;
@@ -52,6 +53,13 @@ final class StudyBuilder {
         Optional<Suspension> suspension = suspensions.build();
         Optional<Calibration> calibration = calibration(cover);
         Motion motion = new MotionBuilder(form, problems, files).build();
+        List<Form.Taken> fitted = new ArrayList<>(suspensions.taken());
+        List<Source> surroundings = new ArrayList<>();
+        if (outside.isPresent() && hair.isPresent()) {
+            SurroundingsBuilder sources = new SurroundingsBuilder(form, problems, files, outside.get(), hair.get());
+            surroundings.addAll(sources.build());
+            fitted.addAll(sources.taken());
+        }
         problems.throwIfAny();
         Device device = new Device(
                 hair.orElseThrow(),
@@ -70,9 +78,9 @@ final class StudyBuilder {
                 calibration,
                 candidates,
                 motion,
-                List.of(),
+                surroundings,
                 document(),
-                takenAs(suspensions.taken()),
+                takenAs(fitted),
                 understood());
     }
 
@@ -138,15 +146,23 @@ final class StudyBuilder {
         List<Form.Taken> all = new ArrayList<>(form.taken());
         all.addAll(fitted);
         all.addAll(media.taken());
+        List<String> sources = form.names("surroundings");
         return all.stream()
-                .sorted(Comparator.comparingInt(t -> Keys.place(t.path())))
+                .sorted(Comparator.comparingInt((Form.Taken t) -> Keys.place(t.path()))
+                        .thenComparing(t -> sources.indexOf(source(t.path()))))
                 .map(t -> new Study.TakenAs(t.path(), t.value(), t.why()))
                 .toList();
     }
 
+    /** The name in a path of the surroundings, empty for any other. */
+    private static String source(String path) {
+        String[] words = path.split("\\.");
+        return words.length > 1 && words[0].equals("surroundings") ? words[1] : "";
+    }
+
     private List<Study.Understood> understood() {
         return form.fields().stream()
-                .filter(Field::given)
+                .filter(field -> field.given() || field.path().startsWith("surroundings."))
                 .map(f -> new Study.Understood(
                         f.path(), f.written(), f.quantity().map(Quantity::si).orElse(f.written())))
                 .toList();

@@ -111,6 +111,30 @@ public final class Form {
     }
 
     /**
+     * The names of the groups right below a path.
+     *
+     * @param path of names that the user gave
+     * @return in the order of the text, empty if the path is not there
+     */
+    public List<String> names(String path) {
+        String above = path + ".";
+        return places.keySet().stream()
+                .filter(place -> place.startsWith(above) && place.indexOf('.', above.length()) < 0)
+                .map(place -> place.substring(above.length()))
+                .toList();
+    }
+
+    /**
+     * Where a default comes from.
+     *
+     * @param path of the key
+     * @return its reason, empty for what is written or not there
+     */
+    public Optional<String> why(String path) {
+        return taken.stream().filter(t -> t.path().equals(path)).map(Taken::why).findFirst();
+    }
+
+    /**
      * Where a key's value or group stands; where it does not, its nearest group above.
      *
      * @param path of the key

@@ -23,6 +23,7 @@ final class GroupReading {
     private final String path;
     private final String word;
     private final List<Key> keys;
+    private final List<Rule> rules;
 
     GroupReading(Group group, Reading reading, Node.Mapping mapping, String path) {
         this.group = group;
@@ -32,6 +33,11 @@ final class GroupReading {
         this.path = path;
         this.word = group.selector().map(this::selected).orElse("");
         this.keys = group.keys(word);
+        List<String> known = Group.built(keys);
+        this.rules = group.rules().stream()
+                .map(rule -> rule.within(known))
+                .filter(rule -> !rule.ways().isEmpty())
+                .toList();
     }
 
     void read() {
@@ -51,8 +57,7 @@ final class GroupReading {
                 absent(key);
             }
         }
-        List<String> known = Group.built(keys);
-        group.rules().stream().filter(rule -> rule.concerns(known)).forEach(rule -> rule.check(reading, mapping, path));
+        rules.forEach(rule -> rule.check(reading, mapping, path));
     }
 
     /** What a named set gives to keys that are not written, nor pushed out by one that is. */
@@ -61,13 +66,17 @@ final class GroupReading {
             return Map.of();
         }
         Starts starts = group.starts().get();
-        Map<String, Presence> set = new LinkedHashMap<>(
-                starts.sets().getOrDefault(said(group, written, starts.key()).orElse(""), Map.of()));
-        Optional<String> decider = group.selector().map(s -> s.key().name());
-        if (decider.flatMap(key -> said(group, written, key))
-                .filter(word -> !word.equals(set.get(decider.get()).value()))
-                .isPresent()) {
+        String word = said(group, written, starts.key()).orElse("");
+        if (!starts.sets().containsKey(word)) {
             return Map.of();
+        }
+        Map<String, Presence> set = new LinkedHashMap<>(starts.sets().get(word));
+        for (Selector selector : group.selector().stream().toList()) {
+            String decider = selector.key().name();
+            Optional<String> said = said(group, written, decider);
+            if (said.isPresent() && !said.get().equals(set.get(decider).value())) {
+                return Map.of();
+            }
         }
         for (Node.Entry entry : written.entries()) {
             set.remove(entry.key());
@@ -183,7 +192,7 @@ final class GroupReading {
     }
 
     private void absent(Key key) {
-        boolean idle = group.rules().stream().anyMatch(rule -> rule.excludes(key.name(), mapping))
+        boolean idle = rules.stream().anyMatch(rule -> rule.excludes(key.name(), mapping))
                 || key.condition()
                         .filter(c -> !c.holds(said(c.sibling()).orElse("")))
                         .isPresent();
@@ -201,7 +210,7 @@ final class GroupReading {
             case LEFT_OUT -> reading.leftOut(at, key.presence());
             case IMPLIED -> key.value().read(reading, new Node.Mapping(List.of(), mapping.position()), at);
             case LIKE -> reading.takeLike(at, key, mapping.position());
-            case OPTIONAL, IF_NEEDED -> {}
+            case OPTIONAL, ONE_OF, IF_NEEDED -> {}
         }
     }
 

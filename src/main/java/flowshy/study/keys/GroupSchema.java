@@ -97,7 +97,7 @@ final class GroupSchema {
     private static List<Object> rules(Group group, String word, boolean complete) {
         List<String> known = Group.built(group.keys(word));
         return group.rules().stream()
-                .flatMap(rule -> rule.schema(known, complete).stream())
+                .flatMap(rule -> rule.within(known).schema(complete).stream())
                 .toList();
     }
 

@@ -8,7 +8,7 @@ import java.util.Optional;
  *
  * @param path from the top of the study
  * @param value what may stand there
- * @param presence what happens if it does not
+ * @param defaultWords what happens if it does not, e.g. {@code 20 degC}, {@code required}, {@code optional}; by deciding word where they differ
  * @param words the deciding words of its group under which it is known, e.g. {@code shape: club}; empty if it always is
  * @param condition beside which other word it has a meaning
  * @param meaning one line
@@ -17,7 +17,7 @@ import java.util.Optional;
 public record KeyRow(
         String path,
         Value value,
-        Presence presence,
+        String defaultWords,
         List<String> words,
         Optional<Condition> condition,
         String meaning,
@@ -25,22 +25,6 @@ public record KeyRow(
     /** Copies the words. */
     public KeyRow {
         words = List.copyOf(words);
-    }
-
-    /**
-     * The default in a few words.
-     *
-     * @return e.g. {@code 20 degC}, {@code required}, {@code optional}
-     */
-    public String defaultWords() {
-        return switch (presence.kind()) {
-            case REQUIRED -> "required";
-            case OPTIONAL -> "optional";
-            case IMPLIED -> "by its keys";
-            case LIKE -> "as " + presence.value();
-            case IF_NEEDED -> presence.value() + " if needed";
-            case DEFAULT, LEFT_OUT -> presence.value();
-        };
     }
 
     /**

@@ -3,10 +3,12 @@ package flowshy.study.keys;
 import flowshy.study.text.Node;
 import flowshy.study.text.Problems;
 import flowshy.study.units.Dimension;
+import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.stream.Collectors;
 
 /** The table of the keys of a study. A new key is one entry here; reader, list, schema and suggestions follow. */
 public final class Keys {
@@ -116,7 +118,8 @@ public final class Keys {
                         "covers to choose from, in order of preference; for the command lid"),
                 Key.of("band", band(), Presence.IMPLIED, "band of use"),
                 Key.optional("motion", MotionKeys.group(), "the motion that is to be read"),
-                Key.later("surroundings", "streams, tones and sound around", "bands decides at equal accelerations"),
+                Key.optional(
+                        "surroundings", SurroundingsKeys.map(), "streams, tones and sound around, each under a name"),
                 Key.of("accept", accept(), Presence.IMPLIED, "limits that the device must meet"),
                 Key.optional("calibration", calibration(), "where the sensitivity is stated"),
                 Key.later("tolerances", "spread of any number", "change the number with --set"),
@@ -189,11 +192,19 @@ public final class Keys {
 
     private static List<KeyRow> rows(Group group, String above) {
         Map<String, KeyRow> rows = new LinkedHashMap<>();
-        group.selector().ifPresent(s -> add(rows, s.key(), above, List.of()));
-        group.selector()
-                .ifPresent(s -> s.keys()
-                        .forEach((word, keys) -> keys.forEach(key -> add(rows, key, above, words(s, key.name())))));
-        group.keys().forEach(key -> add(rows, key, above, List.of()));
+        group.selector().ifPresent(selector -> {
+            add(
+                    rows,
+                    selector.key(),
+                    above,
+                    List.of(),
+                    selector.key().presence().words());
+            selector.keys()
+                    .values()
+                    .forEach(keys -> keys.forEach(
+                            key -> add(rows, key, above, words(selector, key.name()), absent(group, key.name()))));
+        });
+        group.keys().forEach(key -> add(rows, key, above, List.of(), absent(group, "", key)));
         return List.copyOf(rows.values());
     }
 
@@ -203,11 +214,41 @@ public final class Keys {
                 .toList();
     }
 
-    private static void add(Map<String, KeyRow> rows, Key key, String above, List<String> words) {
+    /** What happens without a key, by deciding word where that makes a difference. */
+    private static String absent(Group group, String name) {
+        Selector selector = group.selector().orElseThrow();
+        Map<String, List<String>> all = new LinkedHashMap<>();
+        for (String word : selector.wordsOf(name)) {
+            Key key = selector.of(word).stream()
+                    .filter(k -> k.name().equals(name))
+                    .findFirst()
+                    .orElseThrow();
+            all.computeIfAbsent(absent(group, word, key), text -> new ArrayList<>())
+                    .add(word);
+        }
+        return all.size() == 1
+                ? all.keySet().iterator().next()
+                : all.entrySet().stream()
+                        .map(entry -> String.join(", ", entry.getValue()) + ": " + entry.getKey())
+                        .collect(Collectors.joining("; "));
+    }
+
+    /** A key that leads one of several ways is told with the others, for one of them must be there. */
+    private static String absent(Group group, String word, Key key) {
+        List<String> known = Group.built(group.keys(word));
+        return group.rules().stream()
+                .map(rule -> rule.within(known))
+                .filter(rule -> rule.need() == Rule.Need.ALWAYS && rule.leads().contains(key.name()))
+                .findFirst()
+                .map(rule -> Presence.oneOf(rule.leads()))
+                .orElse(key.presence())
+                .words();
+    }
+
+    private static void add(Map<String, KeyRow> rows, Key key, String above, List<String> words, String absent) {
         String path = above.isEmpty() ? key.name() : above + "." + key.name();
         rows.putIfAbsent(
-                path,
-                new KeyRow(path, key.value(), key.presence(), words, key.condition(), key.meaning(), key.instead()));
+                path, new KeyRow(path, key.value(), absent, words, key.condition(), key.meaning(), key.instead()));
         if (key.value() instanceof Group inner) {
             rows(inner, path).forEach(row -> rows.putIfAbsent(row.path(), row));
         } else if (key.value() instanceof GroupMap map) {

@@ -1,5 +1,7 @@
 package flowshy.study.keys;
 
+import java.util.List;
+
 /**
  * What it means when a key is not written.
  *
@@ -22,6 +24,8 @@ public record Presence(Kind kind, String value, String why) {
         LEFT_OUT,
         /** nothing follows */
         OPTIONAL,
+        /** an error unless another key stands in its place; {@code value} names them all */
+        ONE_OF,
         /** a group whose keys all have their own default */
         IMPLIED
     }
@@ -29,6 +33,19 @@ public record Presence(Kind kind, String value, String why) {
     static final Presence REQUIRED = new Presence(Kind.REQUIRED, "", "");
     static final Presence OPTIONAL = new Presence(Kind.OPTIONAL, "", "");
     static final Presence IMPLIED = new Presence(Kind.IMPLIED, "", "");
+
+    /** The default in a few words. */
+    String words() {
+        return switch (kind) {
+            case REQUIRED -> "required";
+            case OPTIONAL -> "optional";
+            case ONE_OF -> "one of " + value;
+            case IMPLIED -> "by its keys";
+            case LIKE -> "as " + value;
+            case IF_NEEDED -> value + " if needed";
+            case DEFAULT, LEFT_OUT -> value;
+        };
+    }
 
     static Presence taken(String value, String why) {
         return new Presence(Kind.DEFAULT, value, why);
@@ -40,6 +57,10 @@ public record Presence(Kind kind, String value, String why) {
 
     static Presence ifNeeded(String value, String why) {
         return new Presence(Kind.IF_NEEDED, value, why);
+    }
+
+    static Presence oneOf(List<String> keys) {
+        return new Presence(Kind.ONE_OF, String.join(", ", keys), "");
     }
 
     static Presence leftOut(String value, String why) {

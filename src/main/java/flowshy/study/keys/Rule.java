@@ -6,7 +6,6 @@ import java.util.Arrays;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.stream.Collectors;
 
 /**
  * Ways of stating one thing: only one of them may be taken.
@@ -64,9 +63,10 @@ public record Rule(Need need, String beside, List<List<String>> ways) {
                 : List.of();
     }
 
-    /** Whether a group has keys for the rule: a deciding word may leave it none. */
-    boolean concerns(List<String> known) {
-        return need == Need.BESIDE ? known.contains(beside) : ways.stream().anyMatch(way -> known.contains(way.get(0)));
+    /** The rule where all its ways are known; without ways where a deciding word leaves out some of them. */
+    Rule within(List<String> known) {
+        boolean whole = known.containsAll(leads()) && (need != Need.BESIDE || known.contains(beside));
+        return new Rule(need, beside, whole ? ways : List.of());
     }
 
     /** The ways of which something is written. */
@@ -91,7 +91,11 @@ public record Rule(Need need, String beside, List<List<String>> ways) {
             String below = path.isEmpty() ? lead : path + "." + lead;
             reading.problem(mapping.position(), below, "missing", beside + " goes with it");
         } else if (taken.isEmpty() && needed(mapping)) {
-            reading.problem(mapping.position(), path, "one of " + leads() + " is missing", "state one of them");
+            reading.problem(
+                    mapping.position(),
+                    path,
+                    "one of " + String.join(", ", leads()) + " is missing",
+                    "state one of them");
         } else if (taken.size() > 1) {
             String first = written(taken.get(0), mapping).key();
             Node.Entry second = written(taken.get(1), mapping);
@@ -109,17 +113,18 @@ public record Rule(Need need, String beside, List<List<String>> ways) {
         return way.stream().flatMap(k -> mapping.entry(k).stream()).findFirst().orElseThrow();
     }
 
-    private String leads() {
-        return ways.stream().map(way -> way.get(0)).collect(Collectors.joining(", "));
+    /** The first key of each way. */
+    List<String> leads() {
+        return ways.stream().map(way -> way.get(0)).toList();
     }
 
     /**
-     * The rule as JSON Schema keywords, one map each; nothing where its keys are not known.
+     * The rule as JSON Schema keywords, one map each.
      *
      * @param complete false where a missing key may come from a set of starting values
      */
-    List<Object> schema(List<String> known, boolean complete) {
-        if (!concerns(known)) {
+    List<Object> schema(boolean complete) {
+        if (ways.isEmpty()) {
             return List.of();
         }
         List<Object> all = new ArrayList<>();

@@ -74,7 +74,13 @@ final class SchemaJudge {
                                 || accepts(map(map(wanted).get(e.getKey())), e.getValue()));
             case "required" -> value.keySet().containsAll(list(wanted));
             case "additionalProperties" ->
-                map(schema.get("properties")).keySet().containsAll(value.keySet());
+                value.entrySet().stream()
+                        .filter(e -> !map(schema.getOrDefault("properties", Map.of()))
+                                .containsKey(e.getKey()))
+                        .allMatch(e -> !wanted.equals(Boolean.FALSE) && accepts(map(wanted), e.getValue()));
+            case "propertyNames" -> value.keySet().stream().allMatch(name -> accepts(map(wanted), name));
+            case "minProperties" -> value.size() >= (Integer) wanted;
+            case "maxProperties" -> value.size() <= (Integer) wanted;
             case "dependentRequired" ->
                 map(wanted).entrySet().stream()
                         .allMatch(e ->

@@ -45,6 +45,9 @@ class SchemaTest {
                 list(schema.get(keyword)).forEach(s -> collect(map(s), path, named));
             }
         }
+        if (schema.get("additionalProperties") instanceof Map<?, ?>) {
+            collect(map(schema.get("additionalProperties")), path + ".NAME", named);
+        }
         if (schema.containsKey("properties")) {
             map(schema.get("properties")).forEach((name, inner) -> {
                 String below = path.isEmpty() ? name : path + "." + name;
@@ -99,6 +102,17 @@ class SchemaTest {
                 "suspension: {resonance: {frequency: 3 Hz, in: {density: 1 g/cm3}}}",
                 "suspension: {resonance: {frequency: 3 Hz, in: {name: air, second: helium}}}",
                 "motion: {spectrum: [[3 Hz, 1 g2/Hz]]}",
+                "surroundings: {}",
+                "surroundings: {a.b: {like: still room}}",
+                "surroundings: {a: {like: stil room}}",
+                "surroundings: {a: {like: still room, kind: sound}}",
+                "surroundings: {a: {like: still room, level: 3 dB}}",
+                "surroundings: {a: {kind: stream}}",
+                "surroundings: {a: {kind: duct, diameter: 3 mm}}",
+                "surroundings: {a: {kind: duct, mean-speed: 3 mm/s, width: 3 mm}}",
+                "surroundings: {a: {kind: sound, level: 80 dB, to: 3 kHz}}",
+                "surroundings: {a: {kind: sound}}",
+                "surroundings: {a: {kind: spectrum, file: a.csv, columns: f, quantity: density, unit: Pa2/Hz}}",
                 "motion: {spectrum: {points: [[3 Hz, 1 g2/Hz], [4 Hz, 1 g2/Hz]], file: a.csv}}",
                 "finite-length: auto",
                 "candidates: [open, lid]",

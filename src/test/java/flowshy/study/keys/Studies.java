@@ -6,7 +6,8 @@ import java.util.List;
 final class Studies {
     static final String SMALLEST = "hair: {length: 610 um, diameter: 77 um, density: 1.3 g/cm3}\nmedium: air\n";
 
-    static final List<String> ALL = List.of(SMALLEST, """
+    static final List<String> ALL =
+            List.of(SMALLEST, """
             title: every key of a cylinder
             hair: {shape: cylinder, length: 0.61 mm, diameter: 77 µm, density: 1300 kg/m3, youngs-modulus: 3 GPa}
             suspension:
@@ -88,6 +89,20 @@ final class Studies {
             medium: nitrogen
             cover: {kind: measured, file: lid.csv}
             motion: {spectrum: {file: floor.csv}}
+            """, """
+            hair: {length: 610 um, diameter: 77 um, density: 1.3 g/cm3}
+            medium: nitrogen
+            surroundings:
+              air past the window: {like: ventilated room}
+              draught: {kind: stream, mean-speed: 0.3 m/s, turbulence: 35 %, length-scale: 60 mm, fetch: 8 mm, direction: 20 deg}
+              same again: {like: fan outlet, kind: stream, mean-speed: 2 m/s}
+              duct: {kind: duct, width: 200 mm, height: 120 mm, volume-flow: 30 L/s, turbulence: 6 %, length-scale: 2 cm}
+              pipe: {kind: duct, diameter: 2 in, mean-speed: 1 m/s}
+              fan tone: {kind: tone, frequency: 150 Hz, speed: 4 mm/s peak, direction: -30 deg}
+              hall: {kind: sound, level: 82 dB, from: 100 Hz, to: 2 kHz}
+              horn: {kind: sound, levels: [[100 Hz, 71 dB], [125 Hz, 74 dB]], distance: 20 cm}
+              logged: {kind: spectrum, file: a.csv, columns: [f, S], quantity: density, unit: (m/s)2/Hz, skip: 3, mean-speed: 0.2 m/s, fetch: 1 cm}
+              probe: {kind: record, file: b.csv, columns: ['t [ms]', '-', u], unit: m/s, skip: 1, rate: 2 kHz, resolution: 2 Hz, distance: 1 m}
             """);
 
     private Studies() {}
