@@ -156,7 +156,7 @@ final class StudyBuilder {
 
     /** The name in a path of the surroundings, empty for any other. */
     private static String source(String path) {
-        String[] words = path.split("\\.");
+        String[] words = path.split("\\.", -1);
         return words.length > 1 && words[0].equals("surroundings") ? words[1] : "";
     }
 

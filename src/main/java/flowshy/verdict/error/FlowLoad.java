@@ -18,6 +18,7 @@ import flowshy.torque.finite.LengthFactors;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.TreeSet;
 import org.hipparchus.complex.Complex;
 import org.hipparchus.util.FastMath;
 
@@ -124,12 +125,13 @@ final class FlowLoad {
         double[] variances = new double[heights.length];
         for (Exposure exposure : exposures) {
             Source source = exposure.source();
-            double low = source.support().low();
-            double step = FastMath.log(source.support().high() / low) / SAMPLES;
-            for (int n = 0; n <= SAMPLES; n++) {
-                double frequency = low * FastMath.exp(n * step);
-                double weight = (n == 0 || n == SAMPLES ? 0.5 : 1.0) * step * frequency;
-                double meanSquare = weight * source.density(frequency);
+            List<Double> grid = samples(source);
+            for (int n = 0; n < grid.size(); n++) {
+                double frequency = grid.get(n);
+                double from = grid.get(FastMath.max(0, n - 1));
+                double to = grid.get(FastMath.min(grid.size() - 1, n + 1));
+                // trapezoids over ln f of f·S
+                double meanSquare = 0.5 * FastMath.log(to / from) * frequency * source.density(frequency);
                 if (meanSquare > 0.0) {
                     add(variances, heights, exposure.along(2.0 * FastMath.PI * frequency), meanSquare);
                 }
@@ -143,6 +145,21 @@ final class FlowLoad {
             }
         }
         return variances;
+    }
+
+    /** Frequencies even on a logarithmic scale over the source's support, and close beside each of its steps and corners. */
+    private static List<Double> samples(Source source) {
+        double low = source.support().low();
+        double high = source.support().high();
+        TreeSet<Double> samples = new TreeSet<>();
+        for (int n = 0; n <= SAMPLES; n++) {
+            samples.add(low * FastMath.pow(high / low, (double) n / SAMPLES));
+        }
+        for (double edge : source.breaks()) {
+            samples.add(FastMath.min(high, FastMath.max(low, edge * (1.0 - 1e-9))));
+            samples.add(FastMath.min(high, FastMath.max(low, edge * (1.0 + 1e-9))));
+        }
+        return List.copyOf(samples);
     }
 
     private static void add(double[] variances, double[] heights, HeightShare share, double meanSquare) {

@@ -77,7 +77,7 @@ final class SchemaJudge {
                 value.entrySet().stream()
                         .filter(e -> !map(schema.getOrDefault("properties", Map.of()))
                                 .containsKey(e.getKey()))
-                        .allMatch(e -> !wanted.equals(Boolean.FALSE) && accepts(map(wanted), e.getValue()));
+                        .allMatch(e -> !wanted.equals(false) && accepts(map(wanted), e.getValue()));
             case "propertyNames" -> value.keySet().stream().allMatch(name -> accepts(map(wanted), name));
             case "minProperties" -> value.size() >= (Integer) wanted;
             case "maxProperties" -> value.size() <= (Integer) wanted;
