@@ -43,8 +43,8 @@ public record VentedCover(
     @Override
     public String words() {
         return say(
-                "vented, %s holes of %.4g mm by %.4g mm %s, cavity %.4g mm3",
-                holes,
+                "vented, %s of %.4g mm by %.4g mm %s, cavity %.4g mm3",
+                holes == 1 ? "1 hole" : holes + " holes",
                 1e3 * holeDiameter,
                 1e3 * holeDepth,
                 through ? "on both sides" : "on one side",

@@ -30,8 +30,6 @@ final class Remedies {
     /** Factors tried before the least one that does is narrowed down: not every limit comes nearer steadily. */
     private static final int STEPS = 8;
 
-    private static final double ACCURACY = 1e-5;
-
     private final BandsQuestion question;
     private final Device device;
 
@@ -78,32 +76,32 @@ final class Remedies {
         return device.with(device.hair().ofDensity(by * device.hair().density()));
     }
 
-    /** Least factor above one that does, rounded up to the three digits printed so that it still does. */
+    /** Least factor above one that does, in the hundredths that are printed: no question is asked more finely than it is answered. */
     private OptionalDouble factor(DoubleFunction<Device> changed, double room) {
-        double most = FastMath.min(REACH, room);
-        double before = 1.0;
+        double most = FastMath.min(REACH, room * (1.0 - 1e-9)); // rounding must not take it over the edge
+        int fails = 100;
         for (int i = 1; i <= STEPS && most > 1.0; i++) {
-            double tried = down(FastMath.pow(most, (double) i / STEPS), 3);
-            if (tried > before && meets(changed.apply(tried))) {
-                return OptionalDouble.of(narrowed(changed, before, tried));
+            int tried = (int) FastMath.floor(100.0 * FastMath.pow(most, (double) i / STEPS));
+            if (tried > fails && meets(changed.apply(tried / 100.0))) {
+                return OptionalDouble.of(least(changed, fails, tried) / 100.0);
             }
-            before = FastMath.max(before, tried);
+            fails = FastMath.max(fails, tried);
         }
         return OptionalDouble.empty();
     }
 
-    private double narrowed(DoubleFunction<Device> changed, double fails, double does) {
-        double low = fails;
-        double high = does;
-        while (high - low > ACCURACY * high) {
-            double middle = 0.5 * (low + high);
-            if (meets(changed.apply(middle))) {
+    private int least(DoubleFunction<Device> changed, int fails, int does) {
+        int low = fails;
+        int high = does;
+        while (high - low > 1) {
+            int middle = (low + high) >>> 1;
+            if (meets(changed.apply(middle / 100.0))) {
                 high = middle;
             } else {
                 low = middle;
             }
         }
-        return FastMath.min(does, up(high, 3));
+        return high;
     }
 
     private static double down(double value, int digits) {
