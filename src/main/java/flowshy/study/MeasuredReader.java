@@ -1,5 +1,7 @@
 package flowshy.study;
 
+import static flowshy.math.Figures.say;
+
 import flowshy.stream.record.Declaration;
 import flowshy.stream.record.DeclarationException;
 import flowshy.stream.record.MeasuredSpectrum;
@@ -36,7 +38,7 @@ final class MeasuredReader {
      * @return the signal; empty if there is a problem, told at its key or at the line of the file
      */
     Optional<MeasuredSpectrum> read(String path, Quantity quantity) {
-        double skip = form.si(path + ".skip");
+        double skip = form.siIfAny(path + ".skip").orElse(0.0);
         if (skip != Math.rint(skip)) {
             problems.add(form.position(path + ".skip"), path + ".skip", "a share of a line", "a whole number");
             return Optional.empty();
@@ -65,6 +67,16 @@ final class MeasuredReader {
             e.problems().forEach(problems::add);
         }
         return Optional.empty();
+    }
+
+    /** How a record became a density, in place of a written resolution. */
+    static Optional<Form.Taken> averaged(String path, MeasuredSpectrum spectrum) {
+        return spectrum.averaging()
+                .map(averaging -> new Form.Taken(
+                        path + ".resolution",
+                        say("%.4g Hz", averaging.resolution()),
+                        "Welch's method: " + averaging.words()
+                                + say(", random error of a line %.2g %%", 100.0 * averaging.randomError())));
     }
 
     private List<String> columns(String path) {

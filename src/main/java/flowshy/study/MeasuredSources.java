@@ -1,7 +1,5 @@
 package flowshy.study;
 
-import static flowshy.math.Figures.say;
-
 import flowshy.medium.Medium;
 import flowshy.stream.Source;
 import flowshy.stream.SourceKind;
@@ -51,14 +49,7 @@ final class MeasuredSources {
         if (spectrum.isEmpty()) {
             return Optional.empty();
         }
-        spectrum.get()
-                .averaging()
-                .ifPresent(averaging -> note(
-                        path,
-                        "resolution",
-                        say("%.4g Hz", averaging.resolution()),
-                        "Welch's method: " + averaging.words()
-                                + say(", random error of a line %.2g %%", 100.0 * averaging.randomError())));
+        MeasuredReader.averaged(path, spectrum.get()).ifPresent(taken::add);
         return source(name, path, record ? SourceKind.RECORD : SourceKind.SPECTRUM, spectrum.get());
     }
 

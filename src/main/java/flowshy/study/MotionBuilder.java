@@ -1,6 +1,10 @@
 package flowshy.study;
 
+import flowshy.math.Density;
 import flowshy.math.LogLogDensity;
+import flowshy.stream.record.MeasuredSpectrum;
+import flowshy.stream.record.Quantity;
+import flowshy.stream.record.Signal;
 import flowshy.study.ColumnFile.Column;
 import flowshy.study.keys.Form;
 import flowshy.study.text.Position;
@@ -22,11 +26,17 @@ final class MotionBuilder {
     private final Form form;
     private final Problems problems;
     private final FilesRead files;
+    private final List<Form.Taken> taken = new ArrayList<>();
 
     MotionBuilder(Form form, Problems problems, FilesRead files) {
         this.form = form;
         this.problems = problems;
         this.files = files;
+    }
+
+    /** What was computed in place of written keys. */
+    List<Form.Taken> taken() {
+        return List.copyOf(taken);
     }
 
     /** The motion; nothing stated if the group is not there or has a problem. */
@@ -50,10 +60,33 @@ final class MotionBuilder {
         return new Motion(smallest, fullScale, form.has(SPECTRUM) ? spectrum() : Optional.empty());
     }
 
+    /** A file of any columns, as its keys declare it. */
+    private Optional<Density> declared() {
+        Quantity quantity =
+                Quantity.of(form.word(SPECTRUM + ".quantity").orElseThrow()).orElseThrow();
+        Optional<MeasuredSpectrum> read = new MeasuredReader(form, problems, files).read(SPECTRUM, quantity);
+        if (read.isEmpty()) {
+            return Optional.empty();
+        }
+        if (read.get().signal() != Signal.ACCELERATION) {
+            refuse(
+                    form.position(SPECTRUM + ".unit"),
+                    SPECTRUM + ".unit",
+                    form.word(SPECTRUM + ".unit").orElseThrow() + " is no unit of an acceleration",
+                    "m/s2 or g, in the form that the quantity asks for");
+            return Optional.empty();
+        }
+        MeasuredReader.averaged(SPECTRUM, read.get()).ifPresent(taken::add);
+        return read.get().density();
+    }
+
     /** A break point [Hz], [(m/s²)²/Hz], and where its frequency stands. */
     private record Break(double frequency, double density, Position at) {}
 
-    private Optional<LogLogDensity> spectrum() {
+    private Optional<Density> spectrum() {
+        if (form.has(SPECTRUM + ".columns")) {
+            return declared();
+        }
         int before = problems.count();
         boolean listed = form.has(SPECTRUM + ".points");
         List<Break> breaks = listed ? points() : rows();
@@ -102,7 +135,7 @@ final class MotionBuilder {
         }
     }
 
-    private Optional<LogLogDensity> curve(List<Break> breaks, String path) {
+    private Optional<Density> curve(List<Break> breaks, String path) {
         if (breaks.size() < 2) {
             refuse(form.position(path), path, "one break point", "two or more");
             return Optional.empty();

@@ -79,6 +79,10 @@ public final class Starter {
         add(lines, "medium|{name: air, temperature: 20 degC, pressure: 101.325 kPa, humidity: 50 %}");
         chosen(COVERS, "--cover", cover).forEach(line -> add(lines, line));
         add(lines, "band|{from: 30 Hz, to: 300 Hz}");
+        add(lines, "motion|{smallest: 0.05 m/s2, full-scale: 20 m/s2}");
+        add(lines, "surroundings", "");
+        lines.add("  room air:");
+        add(lines, "surroundings.NAME.like|still room");
         add(lines, "accept|{rejection: 20 dB}");
         add(lines, "calibration|{frequency: 100 Hz, cover: " + cover + "}");
         add(lines, "document|{project: first trial, revision: A}");

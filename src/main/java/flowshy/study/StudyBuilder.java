@@ -52,8 +52,10 @@ final class StudyBuilder {
         SuspensionBuilder suspensions = new SuspensionBuilder(form, problems, media, covers, files, hair);
         Optional<Suspension> suspension = suspensions.build();
         Optional<Calibration> calibration = calibration(cover);
-        Motion motion = new MotionBuilder(form, problems, files).build();
+        MotionBuilder motions = new MotionBuilder(form, problems, files);
+        Motion motion = motions.build();
         List<Form.Taken> fitted = new ArrayList<>(suspensions.taken());
+        fitted.addAll(motions.taken());
         List<Source> surroundings = new ArrayList<>();
         if (outside.isPresent() && hair.isPresent()) {
             SurroundingsBuilder sources = new SurroundingsBuilder(form, problems, files, outside.get(), hair.get());

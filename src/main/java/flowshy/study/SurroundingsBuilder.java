@@ -3,6 +3,7 @@ package flowshy.study;
 import static flowshy.math.Figures.say;
 
 import flowshy.hair.Hair;
+import flowshy.math.Figures;
 import flowshy.math.StepDensity;
 import flowshy.math.ThirdOctave;
 import flowshy.medium.Medium;
@@ -221,7 +222,7 @@ final class SurroundingsBuilder {
                 refuse(
                         key + ".frequency",
                         form.word(key + ".frequency").orElseThrow() + " is no mid-band frequency of a third-octave",
-                        say("the nearest is %.6g Hz", band.nominal()));
+                        "the nearest is " + Figures.full(band.nominal()) + " Hz");
             } else if (band.index() <= last) {
                 refuse(key + ".frequency", "a third-octave that does not rise", "each above the one before");
             } else {

@@ -3,7 +3,7 @@ package flowshy.study;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
-import flowshy.math.LogLogDensity;
+import flowshy.math.Density;
 import flowshy.study.text.Problem;
 import flowshy.study.text.StudyException;
 import flowshy.verdict.error.Motion;
@@ -11,6 +11,7 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
@@ -67,11 +68,11 @@ class MotionTest {
     @Test
     void breakPointsAreStraightOnDoublyLogarithmicPaper() {
         String points = "[[20 Hz, 0.01 g2/Hz], [80 Hz, 0.04 g2/Hz], [350 Hz, 0.04 g2/Hz], [2 kHz, 0.007 g2/Hz]]";
-        LogLogDensity spectrum = read("{spectrum: " + points + "}").spectrum().orElseThrow();
+        Density spectrum = read("{spectrum: " + points + "}").spectrum().orElseThrow();
         assertThat(Math.sqrt(spectrum.meanSquare() / G2)).isCloseTo(6.0582, within(5e-4));
         assertThat(spectrum.at(80.0) / G2).isCloseTo(0.04, within(1e-15));
         assertThat(read("{spectrum: {points: " + points + "}}").spectrum()).contains(spectrum);
-        LogLogDensity metric = read("{spectrum: [[20 Hz, 3 (m/s2)2/Hz], [40 Hz, 1500000 (mm/s²)²/Hz]]}")
+        Density metric = read("{spectrum: [[20 Hz, 3 (m/s2)2/Hz], [40 Hz, 1500000 (mm/s²)²/Hz]]}")
                 .spectrum()
                 .orElseThrow();
         assertThat(metric.at(20.0)).isEqualTo(3.0);
@@ -89,6 +90,59 @@ class MotionTest {
         assertThat(study("{spectrum: {file: floor.csv}}", table).motion().spectrum())
                 .isEqualTo(study.motion().spectrum());
         assertThat(study.question().motion()).isEqualTo(study.motion());
+    }
+
+    /** Any columns of numbers, as they are declared: a density by rows, band levels, or a record that Welch's method turns into one. */
+    @Test
+    void declaredColumnsAreReadAsTheyAreDeclared() {
+        String rows = "measured on the stand\n20;x;0.01\n80;x;0.04\n".replace("x", "1");
+        Study density = study(
+                "{spectrum: {file: floor.csv, columns: [f, '-', G], quantity: density, unit: g2/Hz, skip: 1}}", rows);
+        Density curve = density.motion().spectrum().orElseThrow();
+        assertThat(curve.at(20.0) / G2).isCloseTo(0.01, within(1e-16));
+        // straight on log-log paper: twice the frequency, twice the density
+        assertThat(curve.at(40.0) / G2).isCloseTo(0.02, within(1e-15));
+        Density bands = study(
+                        "{spectrum: {file: floor.csv, columns: [f, a], quantity: band levels, unit: m/s2}}",
+                        "100 0.3\n125 0.4\n")
+                .motion()
+                .spectrum()
+                .orElseThrow();
+        assertThat(bands.meanSquare()).isCloseTo(0.25, within(1e-15));
+        StringBuilder sine = new StringBuilder();
+        for (int i = 0; i < 4096; i++) {
+            sine.append(String.format(Locale.ROOT, "%.6f%n", 0.5 * Math.sin(2.0 * Math.PI * 50.0 * i / 1000.0)));
+        }
+        Study record = study(
+                "{spectrum: {file: floor.csv, columns: [a], quantity: time record, unit: g, rate: 1 kHz, resolution: 2 Hz}}",
+                sine.toString());
+        // a sine of 0.5 g has a mean square of 0.125 g², under a window of whole periods or not
+        assertThat(record.motion().spectrum().orElseThrow().meanSquare() / G2).isCloseTo(0.125, within(1e-4));
+        assertThat(record.takenAs())
+                .contains(
+                        new Study.TakenAs(
+                                "motion.spectrum.resolution",
+                                "1.953 Hz",
+                                "Welch's method: Hann window, 50 % overlap, 15 averages of 512 samples, random error of a line 27 %"));
+    }
+
+    @Test
+    void declarationsThatSayTooLittleOrSomethingElseAreRefused() {
+        assertThat(problems("{spectrum: {file: floor.csv, columns: [f, G], unit: g2/Hz}}", ""))
+                .containsExactly("s.yaml:3:20: motion.spectrum.quantity: missing; columns goes with it");
+        assertThat(problems("{spectrum: {file: floor.csv, skip: 2}}", ""))
+                .containsExactly("s.yaml:3:20: motion.spectrum.columns: missing; skip goes with it");
+        assertThat(problems(
+                        "{spectrum: {file: floor.csv, columns: [f, G], quantity: density, unit: (m/s)2/Hz}}",
+                        "1 2\n3 4\n"))
+                .containsExactly(
+                        "s.yaml:3:80: motion.spectrum.unit: (m/s)2/Hz is no unit of an acceleration; m/s2 or g, in the form that the quantity asks for");
+        assertThat(problems(
+                        "{spectrum: {file: floor.csv, columns: [f, G], quantity: density, unit: g/Hz}}", "1 2\n3 4\n"))
+                .singleElement()
+                .asString()
+                .startsWith(
+                        "s.yaml:3:80: motion.spectrum.unit: 'g/Hz': neither a density (a square per Hz) nor an amplitude density");
     }
 
     @ParameterizedTest

@@ -5,8 +5,8 @@ import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
 import flowshy.stream.cover.Covers;
 import flowshy.study.text.StudyException;
-import flowshy.verdict.BandsQuestion;
 import flowshy.verdict.Decision;
+import flowshy.verdict.Verdict;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -38,8 +38,10 @@ class StarterTest {
         assertThat(study.device().hair().profile().shape()).isEqualTo(shape);
         assertThat(study.device().cover()).isEqualTo(cover.equals("open") ? Covers.OPEN : Covers.SEALED);
         assertThat(study.device().suspension()).isPresent();
-        BandsQuestion question = new BandsQuestion(study.device(), study.band(), study.acceptance());
-        assertThat(question.answer().verdict().decision()).isEqualTo(Decision.MEETS);
+        assertThat(study.surroundings()).hasSize(1);
+        Verdict verdict = study.question().answer().verdict();
+        assertThat(verdict.decision()).isEqualTo(Decision.MEETS);
+        assertThat(verdict.limits()).hasSize(2);
         assertThat(study.understood()).hasSizeGreaterThan(20);
         assertThat(text.lines().filter(line -> line.contains("#")).count()).isGreaterThan(20);
         assertThat(text.lines())

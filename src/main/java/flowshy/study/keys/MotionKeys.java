@@ -1,6 +1,7 @@
 package flowshy.study.keys;
 
 import flowshy.study.units.Dimension;
+import java.util.ArrayList;
 import java.util.List;
 
 /** Keys of the motion that is to be read. */
@@ -25,15 +26,25 @@ final class MotionKeys {
                         "density",
                         Measure.of(Dimension.ACCELERATION_DENSITY, "0 (m/s2)2/Hz", "1e18 (m/s2)2/Hz"),
                         "one-sided density there"));
+        List<Key> keys = new ArrayList<>();
+        keys.add(Key.optional("points", points, "break points, straight between them on log-log paper"));
+        keys.add(Key.optional(
+                "file",
+                Text.FILE,
+                "table with columns frequency and density, units in its header; or any columns of numbers, declared by the"
+                        + " keys below"));
+        keys.addAll(RecordKeys.declaration("density", "amplitude density", "band levels", "time record"));
         return Group.of(
                         "motion spectrum",
-                        List.of(
-                                Key.optional("points", points, "break points, straight between them on log-log paper"),
-                                Key.optional(
-                                        "file",
-                                        Text.FILE,
-                                        "the same as a table with columns frequency and density, units in its header")),
-                        Rule.exactlyOne("points", "file"))
+                        keys,
+                        Rule.exactlyOne("points", "file columns quantity unit skip rate resolution"),
+                        Rule.oneBeside("columns", "quantity"),
+                        Rule.oneBeside("columns", "unit"),
+                        Rule.oneBeside("quantity", "columns"),
+                        Rule.oneBeside("unit", "columns"),
+                        Rule.oneBeside("skip", "columns"),
+                        Rule.oneBeside("rate", "columns"),
+                        Rule.oneBeside("resolution", "columns"))
                 .shortFor("file")
                 .listFor("points");
     }

@@ -103,11 +103,12 @@ public final class Overlay {
         if (!entry.key().equals(selector.key().name()) || !(entry.value() instanceof Node.Scalar word)) {
             return List.of();
         }
-        List<Key> stay = selector.of(word.text().strip());
+        List<String> stay =
+                selector.of(word.text().strip()).stream().map(Key::name).toList();
         return selector.keys().values().stream()
                 .flatMap(List::stream)
-                .filter(key -> !stay.contains(key))
                 .map(Key::name)
+                .filter(name -> !stay.contains(name))
                 .distinct()
                 .toList();
     }

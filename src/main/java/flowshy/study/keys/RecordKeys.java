@@ -2,6 +2,7 @@ package flowshy.study.keys;
 
 import flowshy.study.units.Dimension;
 import java.util.List;
+import java.util.stream.Stream;
 
 /** Keys that say what the columns of a measured file hold. */
 final class RecordKeys {
@@ -31,6 +32,13 @@ final class RecordKeys {
 
     static Key quantity(String... words) {
         return Key.required("quantity", Words.of(words), "in what form the values are");
+    }
+
+    /** The same where a table with a header may stand in place of a declaration. */
+    static List<Key> declaration(String... quantities) {
+        return Stream.of(COLUMNS, quantity(quantities), UNIT, SKIP, RATE, RESOLUTION)
+                .map(key -> Key.optional(key.name(), key.value(), key.meaning()))
+                .toList();
     }
 
     /** Keys of a file that runs over frequency. */

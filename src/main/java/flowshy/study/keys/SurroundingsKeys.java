@@ -58,8 +58,7 @@ final class SurroundingsKeys {
     private static Key like() {
         String[] names =
                 NamedSurroundings.all().stream().map(NamedSurrounding::name).toArray(String[]::new);
-        return Key.optional(
-                "like", Words.of(names), "starting values under our own names; any key that is written overrides them");
+        return Key.optional("like", Words.of(names), "starting values under our own names; written keys override them");
     }
 
     private static List<Key> stream() {

@@ -88,7 +88,7 @@ final class Studies {
             hair: {length: 610 um, diameter: 77 um, density: 1.3 g/cm3}
             medium: nitrogen
             cover: {kind: measured, file: lid.csv}
-            motion: {spectrum: {file: floor.csv}}
+            motion: {spectrum: {file: floor.csv, columns: [t, a], quantity: time record, unit: g, skip: 2, rate: 1 kHz, resolution: 2 Hz}}
             """, """
             hair: {length: 610 um, diameter: 77 um, density: 1.3 g/cm3}
             medium: nitrogen
