@@ -253,7 +253,7 @@ class SurroundingsTest {
         assertThat(study.takenAs().stream()
                         .map(Study.TakenAs::key)
                         .filter(key -> key.startsWith("surroundings."))
-                        .map(key -> key.split("\\.")[1])
+                        .map(key -> key.split("\\.", -1)[1])
                         .distinct()
                         .toList())
                 .containsExactly("z", "fan tone", "A");
