@@ -98,8 +98,7 @@ final class AttenuationReader {
                     form.position(key),
                     key,
                     say("%s covers %.4g Hz to %.4g Hz", name, measured.low(), measured.high()),
-                    (used ? "calibration.frequency" : "the whole band of use")
-                            + " lies inside; nothing is extrapolated: move it, or measure more");
+                    (used ? "calibration.frequency" : "the whole band of use") + " inside it: nothing is extrapolated");
             return false;
         }
         return true;
