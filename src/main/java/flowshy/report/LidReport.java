@@ -5,6 +5,7 @@ import flowshy.study.Study;
 import flowshy.verdict.BandsAnswer;
 import flowshy.verdict.DeviceFacts.Swing;
 import flowshy.verdict.ReadingBand;
+import flowshy.verdict.Reads;
 import flowshy.verdict.error.ErrorBudget;
 import flowshy.verdict.lid.CoverRow;
 import flowshy.verdict.lid.LidAnswer;
@@ -16,6 +17,7 @@ import java.util.List;
 /** The lid decision as text, JSON and CSV. */
 public final class LidReport {
     private static final String NO_BOUND = "no flow enters: the rejection has no bound";
+    private static final String NOTHING = "the hair is as dense as the fluid carried with it: it reads nothing";
     private static final String NO_SUSPENSION = "no suspension is stated that holds the hair";
     private static final String NO_SURROUNDINGS = "no surroundings are given";
     private static final String NO_MOTION = "the fluid carried along leaves no motion to read";
@@ -24,8 +26,8 @@ public final class LidReport {
 
     private static List<Column<CoverRow>> columns() {
         return List.of(
-                new Column<>("rejection_from_db", "from", "dB", 4, row -> Cell.of(edge(row, false), NO_BOUND)),
-                new Column<>("rejection_to_db", "to", "dB", 4, row -> Cell.of(edge(row, true), NO_BOUND)),
+                new Column<>("rejection_from_db", "from", "dB", 4, row -> Cell.of(edge(row, false), unbounded(row))),
+                new Column<>("rejection_to_db", "to", "dB", 4, row -> Cell.of(edge(row, true), unbounded(row))),
                 new Column<>(
                         "least_rejection_db",
                         "least",
@@ -36,7 +38,7 @@ public final class LidReport {
                                         .least()
                                         .map(BandsAnswer.Extreme::rejection)
                                         .orElse(Double.NaN),
-                                NO_BOUND)),
+                                unbounded(row))),
                 new Column<>(
                         "resonance_hz",
                         "reson.",
@@ -93,6 +95,10 @@ public final class LidReport {
                         "m/s2/rtHz",
                         3,
                         row -> Cell.of(row.reference().thermalNoise(), NO_SUSPENSION)));
+    }
+
+    private static String unbounded(CoverRow row) {
+        return row.answer().bands().get(0).reads() == Reads.NOTHING ? NOTHING : NO_BOUND;
     }
 
     private static double edge(CoverRow row, boolean upper) {

@@ -1,5 +1,7 @@
 package flowshy.cli;
 
+import static org.assertj.core.api.Assertions.assertThat;
+
 import com.fasterxml.jackson.core.JsonFactory;
 import com.fasterxml.jackson.core.JsonParser;
 import com.fasterxml.jackson.core.JsonToken;
@@ -39,6 +41,30 @@ final class Json {
     @SuppressWarnings("unchecked") // an array of objects is read into a list of maps, see value()
     static List<Map<String, Object>> objects(Object value) {
         return (List<Map<String, Object>>) value;
+    }
+
+    /** Counts the numbers of an answer; every null must have its reason beside it. */
+    static int numbers(Object value, String about) {
+        int count = 0;
+        if (value instanceof Map<?, ?> map) {
+            for (Map.Entry<?, ?> entry : map.entrySet()) {
+                if (entry.getValue() == null) {
+                    assertThat(map.get(entry.getKey() + "_reason"))
+                            .as("%s in %s", entry.getKey(), about)
+                            .isNotNull();
+                } else {
+                    count += numbers(entry.getValue(), about);
+                }
+            }
+        } else if (value instanceof List<?> list) {
+            for (Object element : list) {
+                count += numbers(element, about);
+            }
+        } else if (value instanceof Double number) {
+            assertThat(number).as(about).isFinite();
+            count++;
+        }
+        return count;
     }
 
     private static Object value(JsonParser parser) throws IOException {

@@ -90,10 +90,10 @@ class CoverReadingTest {
 
     @Test
     void aFillIsHeldAtItsOwnStateAndOnlySealedCoversHaveOne() {
-        Study study = read(
-                "medium: {name: air, temperature: 60 degC}\n"
-                        + "cover: {kind: sealed, fill: {name: helium, temperature: 20 degC, pressure: 1 bar}}\n",
-                LEVELS);
+        Study study = read("""
+                medium: {name: air, temperature: 60 degC}
+                cover: {kind: sealed, fill: {name: helium, temperature: 20 degC, pressure: 1 bar}}
+                """, LEVELS);
         // a sealed gas keeps its density and takes the temperature of use: p V = n R T
         assertThat(study.device().around().temperature()).isCloseTo(333.15, within(1e-9));
         assertThat(study.device().around().density()).isCloseTo(0.1642, within(3e-4));
