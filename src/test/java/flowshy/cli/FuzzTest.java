@@ -92,8 +92,8 @@ class FuzzTest {
                 fills += accepted % FILL_EVERY == 0 ? answers("fill", file, mutant) : 0;
             }
         }
-        assertThat(lids).isGreaterThan(30);
-        assertThat(fills).isGreaterThan(10);
+        assertThat(lids).isGreaterThan(50);
+        assertThat(fills).isGreaterThan(15);
         assertThat(accepted + refused).isEqualTo(MUTANTS);
         assertThat(values).isGreaterThanOrEqualTo(MUTANTS * 30 / 100);
         assertThat(accepted).isGreaterThanOrEqualTo(MUTANTS * 10 / 100);
