@@ -39,13 +39,13 @@ final class CylinderCommand implements Callable<Integer> {
 
     @Option(
             names = "--at",
-            converter = QuantityConverters.Length.class,
+            converter = QuantityConverters.Height.class,
             description = "height of the strip above the wall, e.g. \"400 um\"; without it the free stream is taken")
     private Double at;
 
     @Option(
             names = "--diameter",
-            converter = QuantityConverters.Length.class,
+            converter = QuantityConverters.Diameter.class,
             description = "diameter of the strip, without a study")
     private Double diameter;
 
@@ -103,9 +103,6 @@ final class CylinderCommand implements Callable<Integer> {
         if (diameter == null || mediumName == null) {
             throw new ParameterException(spec.commandLine(), "name a STUDY, or both --diameter and --medium");
         }
-        if (!(diameter > 0.0)) {
-            throw new ParameterException(spec.commandLine(), "--diameter must be above zero");
-        }
         if (!settings.isEmpty()) {
             throw new ParameterException(spec.commandLine(), "--set overlays a study; none is named");
         }
@@ -123,7 +120,10 @@ final class CylinderCommand implements Callable<Integer> {
         if (at == null) {
             throw new ParameterException(spec.commandLine(), "--at HEIGHT says which strip of the hair");
         }
-        if (at > profile.length() || !(profile.radius(at) > 0.0)) {
+        if (at <= profile.length() && !(profile.radius(at) > 0.0)) {
+            throw new UserException("--at names the point of the hair, which has no diameter; go a little below");
+        }
+        if (at > profile.length()) {
             throw new UserException(String.format(
                     Locale.ROOT,
                     "--at %.6g um lies beyond the hair, which is %.6g um long",

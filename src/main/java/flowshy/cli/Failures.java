@@ -6,8 +6,12 @@ import flowshy.stream.cover.UnmeasuredFrequencyException;
 import flowshy.study.text.Problem;
 import flowshy.study.text.StudyException;
 import flowshy.study.units.QuantityException;
+import java.io.IOException;
 import java.io.PrintWriter;
 import java.io.StringWriter;
+import java.nio.file.AccessDeniedException;
+import java.nio.file.Files;
+import java.nio.file.Path;
 import java.util.List;
 import picocli.CommandLine;
 import picocli.CommandLine.ParameterException;
@@ -68,7 +72,7 @@ final class Failures {
             return WRONG_INPUT;
         }
         PrintWriter err = line.getErr();
-        err.println("flowshy: " + failure.getMessage());
+        err.println("flowshy: " + failure.getMessage().replaceFirst("^Error: ", ""));
         if (!UnmatchedArgumentException.printSuggestions(failure, err)) {
             err.println("Try: " + line.getCommandSpec().qualifiedName() + " --help");
         }
@@ -91,6 +95,28 @@ final class Failures {
             line.getErr().println(problems.size() == 1 ? "1 problem" : problems.size() + " problems");
         }
         line.getErr().flush();
+    }
+
+    /**
+     * Why a file could not be written, in plain words.
+     *
+     * @param target the file
+     * @param failure what was thrown
+     * @return the whole message
+     */
+    static String notWritten(Path target, IOException failure) {
+        Path folder = target.toAbsolutePath().getParent();
+        String why;
+        if (failure instanceof AccessDeniedException) {
+            why = "writing there is not allowed";
+        } else if (folder != null && !Files.isDirectory(folder)) {
+            why = "there is no folder " + folder;
+        } else if (Files.isDirectory(target)) {
+            why = "it is a folder";
+        } else {
+            why = failure.getMessage();
+        }
+        return "cannot write " + target + ": " + why + "; nothing was left behind";
     }
 
     private static void message(CommandLine line, String text, boolean json) {

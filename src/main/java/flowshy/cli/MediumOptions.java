@@ -34,7 +34,10 @@ final class MediumOptions {
             description = "of the named substance in water, e.g. \"60 %%\"")
     private Double massFraction;
 
-    @Option(names = "--salinity", description = "practical salinity of sea water, a pure number, e.g. 35")
+    @Option(
+            names = "--salinity",
+            converter = QuantityConverters.Salinity.class,
+            description = "practical salinity of sea water, a pure number, e.g. 35")
     private Double salinity;
 
     @Option(

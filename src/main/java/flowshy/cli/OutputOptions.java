@@ -89,8 +89,7 @@ final class OutputOptions {
         try {
             WholeFile.write(target, body);
         } catch (IOException e) {
-            throw new UserException("cannot write " + target + " ("
-                    + e.getClass().getSimpleName() + ": " + e.getMessage() + "); nothing was left behind");
+            throw new UserException(Failures.notWritten(target, e));
         }
     }
 

@@ -46,7 +46,7 @@ final class StartCommand implements Callable<Integer> {
         } catch (FileAlreadyExistsException e) {
             throw new UserException(file + " exists and is not written over; name a new file");
         } catch (IOException e) {
-            throw new UserException("cannot write " + file + " (" + e.getMessage() + ")");
+            throw new UserException(Failures.notWritten(file, e));
         }
         spec.commandLine().getOut().println("wrote " + file + "; next: flowshy bands " + file);
         return 0;

@@ -42,21 +42,24 @@ final class StudyOptions {
                     line, "a STUDY is missing: name a study file, or write one with the command start");
         }
         int worst = 0;
+        List<Problem> problems = new ArrayList<>();
         for (Path study : studies) {
             int code;
             try {
                 code = work.applyAsInt(StudyReader.read(study, settings));
             } catch (StudyException e) {
-                Failures.problems(line, e.problems(), json);
+                problems.addAll(e.problems());
                 code = Failures.WRONG_INPUT;
             } catch (StreamTooFastException e) {
-                Problem problem = Problem.of(Position.label(study.toString()), "surroundings", e.getMessage(), "");
-                Failures.problems(line, List.of(problem), json);
+                problems.add(Problem.of(Position.label(study.toString()), "surroundings", e.getMessage(), ""));
                 code = Failures.WRONG_INPUT;
             }
             worst = code == Failures.WRONG_INPUT || worst == Failures.WRONG_INPUT
                     ? Failures.WRONG_INPUT
                     : Math.max(worst, code);
+        }
+        if (!problems.isEmpty()) {
+            Failures.problems(line, problems, json);
         }
         return worst;
     }

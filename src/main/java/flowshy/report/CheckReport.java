@@ -26,7 +26,8 @@ public final class CheckReport {
         page.heading("Taken as (not stated in the study)");
         study.takenAs().forEach(taken -> page.row(taken.key(), taken.value() + " (" + taken.why() + ")"));
         for (Study.FileRead file : study.origin().filesRead()) {
-            page.line("read " + file.file() + "  sha256 " + file.sha256());
+            page.line("read " + file.file());
+            page.line("  sha256 " + file.sha256());
         }
         return page.toString();
     }
@@ -73,7 +74,7 @@ public final class CheckReport {
         page.line("Keys of a study: kind and range; default; meaning");
         for (KeyRow row : rows) {
             page.line("");
-            page.line("  " + row.path() + (row.words().isEmpty() ? "" : "   (" + String.join(", ", row.words()) + ")"));
+            page.note(row.path(), row.words().isEmpty() ? "" : "(" + String.join(", ", row.words()) + ")");
             page.row("", row.value().kind() + "; " + row.defaultWords());
             page.row("", row.meaning());
             row.instead().ifPresent(instead -> page.row("", "not built yet in this version: " + instead));

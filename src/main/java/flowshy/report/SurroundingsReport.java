@@ -17,8 +17,10 @@ public final class SurroundingsReport {
      */
     public static String text(List<NamedSurrounding> all) {
         TextPage page = new TextPage();
-        page.line("Surroundings to start from, in a study:  surroundings: {any name: {like: still room}}");
-        page.line("Any key overrides; what is taken is listed in the answer, with half and twice of it.");
+        page.line("Surroundings to start from, in a study:");
+        page.line("  surroundings: {any name: {like: still room}}");
+        page.line("Any key overrides; what is taken is listed in the answer, with half and twice");
+        page.line("of it.");
         for (NamedSurrounding named : all) {
             page.line("");
             page.line("  " + named.name() + "   (" + named.kind().word() + ")");

@@ -11,6 +11,7 @@ import java.util.Map;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
 
 /** Commands as a user runs them: exit codes, where text goes, what wrong words are told. */
@@ -286,5 +287,82 @@ class CommandLineTest {
         assertThat(oil.out().replaceAll("\\s+", " "))
                 .contains("It rests on a density and a viscosity recalled from memory.");
         assertThat(Run.of("bands", WATER).out()).doesNotContain("recalled from memory");
+    }
+
+    /** Words between bars: the command line, and what its refusal names. */
+    @ParameterizedTest
+    @CsvSource(
+            delimiter = ';',
+            value = {
+                "media|air|--temperature|-300 degC; a temperature of 1 K to 3000 K",
+                "media|air|--pressure|0 Pa; a pressure of 1 mPa to 1 GPa",
+                "media|air|--humidity|-5 %; a share of 0 % to 100 %",
+                "media|sea water|--salinity|NaN; NaN is not a finite number",
+                "media|sea water|--salinity|35 g/kg; a pure number is wanted",
+                "media|silicone oil|--grade|0 cSt; of 0.1 cSt to 1e6 cSt",
+                "media|nitrogen|--share|10 %; --second",
+                "cylinder|--diameter|0 um|--medium|air|--frequencies|80 Hz; a length of 10 nm to 1 m",
+                "cylinder|--diameter|1e300 um|--medium|air|--frequencies|80 Hz; a length of 10 nm to 1 m",
+                "bands|examples/workbench-air/study.yaml|--frequencies|0 Hz; a frequency of 1 mHz to 10 MHz",
+                "bands|examples/workbench-air/study.yaml|--frequencies|1e99 Hz; a frequency of 1 mHz to 10 MHz",
+                "bands|examples/workbench-air/study.yaml|--frequencies|; nothing",
+                "bands|examples/workbench-air/study.yaml|--set|nonsense; no KEY=VALUE",
+                "bands|examples/workbench-air/study.yaml|--set|=; no KEY=VALUE",
+                "bands|examples/workbench-air/study.yaml|--set|hair=; a group of keys",
+                "bands|examples/workbench-air/study.yaml|--set|a.b.c=3; unknown key",
+                "fill|examples/workbench-air/study.yaml|--only|oi, water; no fill begins so",
+                "lid|examples/workbench-air/study.yaml|--set|candidates=[]; one to 50",
+            })
+    void nonsenseIsRefusedInPlainWords(String words, String named) {
+        Run run = Run.of(words.split("\\|", -1));
+        assertThat(run.code()).as(run.err()).isEqualTo(2);
+        assertThat(run.err()).contains(named).doesNotContain("Exception", "\tat ", "double", "java.");
+        assertThat(run.out()).isEmpty();
+    }
+
+    @Test
+    void problemsOfSeveralStudiesAreOneJson() throws IOException {
+        Path one = Files.writeString(folder.resolve("one.yaml"), "hair: 3\nmedium: air\n");
+        Path two = Files.writeString(folder.resolve("two.yaml"), "medium: air\n");
+        Run run = Run.of("bands", one.toString(), AIR, two.toString(), "--json");
+        assertThat(run.code()).isEqualTo(2);
+        assertThat(Json.objects(Json.object(Json.parse(run.err())).get("problems")))
+                .extracting(problem -> problem.get("file"))
+                .containsExactly(one.toString(), two.toString());
+        assertThat(Json.objects(Json.parse(run.out()))).hasSize(1);
+    }
+
+    @Test
+    void aFileThatCannotBeWrittenIsToldWithTheReason() throws IOException {
+        Path none = folder.resolve("none");
+        assertThat(Run.of("bands", AIR, "--csv", none.resolve("a.csv").toString())
+                        .err())
+                .contains("cannot write")
+                .contains("there is no folder " + none);
+        assertThat(Run.of("start", none.resolve("a.yaml").toString()).err()).contains("there is no folder " + none);
+        Path directory = Files.createDirectory(folder.resolve("d.csv"));
+        assertThat(Run.of("bands", AIR, "--csv", directory.toString()).err()).contains("it is a folder");
+    }
+
+    @ParameterizedTest
+    @ValueSource(
+            strings = {
+                "check examples/own-oil/study.yaml",
+                "check --keys",
+                "media",
+                "media air",
+                "surroundings",
+                "cylinder examples/air-duct/study.yaml --at 200um --frequencies 80Hz",
+                "--help",
+                "fill --help",
+                "media --help"
+            })
+    void everyPageFitsEightyColumns(String words) {
+        Run run = Run.of(words.split(" ", -1));
+        assertThat(run.code()).as(run.err()).isZero();
+        assertThat(run.out().lines())
+                .isNotEmpty()
+                .allSatisfy(line ->
+                        assertThat(line.codePointCount(0, line.length())).isLessThanOrEqualTo(80));
     }
 }

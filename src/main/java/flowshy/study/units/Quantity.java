@@ -127,10 +127,19 @@ public record Quantity(double value, Dimension dimension, String written, Swing 
         }
     }
 
-    /** Units of the wanted dimension first, then every symbol of the table. */
+    /** Units of the wanted dimension first, then every symbol of the table that gives the unit a sense here. */
     private static Optional<String> near(String whole, Optional<String> symbol, Dimension wanted) {
         return Nearest.among(whole, wanted.units())
-                .or(() -> symbol.flatMap(s -> Nearest.among(s, UnitTable.symbolsKnown())));
+                .or(() -> symbol.flatMap(s -> Nearest.among(s, UnitTable.symbolsKnown())
+                        .filter(near -> fits(whole.replace(s, near), wanted))));
+    }
+
+    private static boolean fits(String unit, Dimension wanted) {
+        try {
+            return wanted.accepts(UnitReader.read(unit, wanted.gravity()).exponents());
+        } catch (UnitReader.UnitFault e) {
+            return false;
+        }
     }
 
     private static QuantityException noNumber(String line, Dimension wanted) {
