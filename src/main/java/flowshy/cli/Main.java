@@ -5,6 +5,8 @@ import java.io.FileDescriptor;
 import java.io.FileOutputStream;
 import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
+import java.util.List;
+import java.util.concurrent.Callable;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.IVersionProvider;
@@ -23,18 +25,12 @@ import picocli.CommandLine.Spec;
             "",
             "Example: flowshy bands study.yaml",
             "Exit codes: 0 done; 2 wrong input or usage; 3 done, but a stated limit is not met or undecided."
-        },
-        subcommands = {
-            BandsCommand.class,
-            LidCommand.class,
-            FillCommand.class,
-            CylinderCommand.class,
-            MediaCommand.class,
-            SurroundingsCommand.class,
-            CheckCommand.class,
-            StartCommand.class
         })
 public final class Main implements Runnable {
+    /** In the order of the help; {@link #command} makes each. */
+    private static final List<String> COMMANDS =
+            List.of("bands", "lid", "fill", "cylinder", "media", "surroundings", "check", "start");
+
     @Spec
     private CommandSpec spec;
 
@@ -46,22 +42,42 @@ public final class Main implements Runnable {
      * @param args the words of the command line
      */
     public static void main(String[] args) {
-        System.exit(commandLine().execute(args));
+        System.exit(commandLine(args).execute(args));
     }
 
     /**
-     * The command line, as {@code main} runs it and tests run it.
+     * The command line, as {@code main} runs it and tests run it. Only the command that is named is made, all of them if none is: their
+     * options are found by reflection, which takes longer than most answers.
      *
+     * @param words of the command line
      * @return ready to execute
      */
-    public static CommandLine commandLine() {
+    public static CommandLine commandLine(String... words) {
         CommandLine line = new CommandLine(new Main());
+        boolean named = words.length > 0 && COMMANDS.contains(words[0]);
+        for (String name : named ? List.of(words[0]) : COMMANDS) {
+            line.addSubcommand(name, command(name));
+        }
         line.setOut(writer(FileDescriptor.out));
         line.setErr(writer(FileDescriptor.err));
         line.setCaseInsensitiveEnumValuesAllowed(true);
         line.setExecutionExceptionHandler(Failures::handle);
         line.setParameterExceptionHandler(Failures::usage);
         return line;
+    }
+
+    private static Callable<Integer> command(String name) {
+        return switch (name) {
+            case "bands" -> new BandsCommand();
+            case "lid" -> new LidCommand();
+            case "fill" -> new FillCommand();
+            case "cylinder" -> new CylinderCommand();
+            case "media" -> new MediaCommand();
+            case "surroundings" -> new SurroundingsCommand();
+            case "check" -> new CheckCommand();
+            case "start" -> new StartCommand();
+            default -> throw new IllegalArgumentException("no command " + name);
+        };
     }
 
     /** UTF-8 whatever the machine's own encoding, so that one answer is the same bytes everywhere. */

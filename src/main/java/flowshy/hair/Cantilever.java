@@ -3,6 +3,7 @@ package flowshy.hair;
 import flowshy.math.GaussLegendre;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.DoubleBinaryOperator;
 import java.util.function.DoubleUnaryOperator;
 import org.hipparchus.linear.Array2DRowRealMatrix;
 import org.hipparchus.linear.ArrayRealVector;
@@ -26,6 +27,12 @@ public final class Cantilever {
     private static final int ITERATIONS = 60;
 
     private static final double ACCURACY = 1e-13;
+
+    /** Rounds of added mass against frequency, at most; the added mass falls slowly with frequency, so few are needed. */
+    private static final int ROUNDS = 8;
+
+    /** A round that changes the frequency by less is the last. */
+    private static final double SETTLED = 1e-9;
 
     /** Exact to degree 9: on a straight taper the stiffness needs 6, the mass 8. */
     private static final GaussLegendre RULE = GaussLegendre.of(5);
@@ -94,23 +101,63 @@ public final class Cantilever {
      * @return frequency [Hz]
      */
     public double firstFrequency(DoubleUnaryOperator massPerLength) {
-        double[] masses = new double[points.size()];
-        for (int i = 0; i < masses.length; i++) {
-            masses[i] = points.get(i).weight()
-                    * massPerLength.applyAsDouble(points.get(i).radius());
+        return mode(masses(massPerLength), new ArrayRealVector(scaling.length, 1.0))
+                .frequency();
+    }
+
+    /**
+     * First natural frequency where the mass that moves along depends on the frequency, as a fluid's added mass does.
+     *
+     * @param massPerLength mass that moves with the hair [kg/m], by radius [m] and angular frequency [rad/s]
+     * @param without mass of the hair alone, by radius [kg/m]; the frequency is looked for from there
+     * @return frequency [Hz]
+     */
+    public double firstFrequency(DoubleBinaryOperator massPerLength, DoubleUnaryOperator without) {
+        Mode mode = mode(masses(without), new ArrayRealVector(scaling.length, 1.0));
+        double before = 0.0;
+        for (int i = 0; i < ROUNDS && FastMath.abs(mode.frequency() - before) > SETTLED * before; i++) {
+            before = mode.frequency();
+            double omega = 2.0 * FastMath.PI * before;
+            mode = mode(masses(radius -> massPerLength.applyAsDouble(radius, omega)), mode.shape());
         }
-        RealVector shape = new ArrayRealVector(scaling.length, 1.0);
+        return mode.frequency();
+    }
+
+    /**
+     * A way of swinging.
+     *
+     * @param frequency [Hz]
+     * @param shape in scaled unknowns, of unit length
+     */
+    private record Mode(double frequency, RealVector shape) {}
+
+    private Mode mode(double[] masses, RealVector start) {
+        RealVector shape = start;
         double eigenvalue = 0.0;
         for (int i = 0; i < ITERATIONS; i++) {
             RealVector next = stiffness.solve(inertia(masses, shape));
             double before = eigenvalue;
             eigenvalue = shape.dotProduct(shape) / shape.dotProduct(next);
+            shape = next.unitVector();
             if (FastMath.abs(eigenvalue - before) < ACCURACY * eigenvalue) {
                 break;
             }
-            shape = next.unitVector();
         }
-        return FastMath.sqrt(eigenvalue) / (2.0 * FastMath.PI);
+        return new Mode(FastMath.sqrt(eigenvalue) / (2.0 * FastMath.PI), shape);
+    }
+
+    private double[] masses(DoubleUnaryOperator massPerLength) {
+        double[] masses = new double[points.size()];
+        double radius = Double.NaN;
+        double mass = Double.NaN;
+        for (int i = 0; i < masses.length; i++) {
+            if (points.get(i).radius() != radius) { // a straight part has one mass
+                radius = points.get(i).radius();
+                mass = massPerLength.applyAsDouble(radius);
+            }
+            masses[i] = points.get(i).weight() * mass;
+        }
+        return masses;
     }
 
     /**

@@ -150,11 +150,17 @@ final class StudyBuilder {
         all.addAll(media.taken());
         List<String> sources = form.names("surroundings");
         return all.stream()
-                .sorted(Comparator.comparingInt((Form.Taken t) -> Keys.place(t.path()))
-                        .thenComparing(t -> sources.indexOf(source(t.path()))))
-                .map(t -> new Study.TakenAs(t.path(), t.value(), t.why()))
+                .map(t -> new Placed(
+                        Keys.place(t.path()),
+                        sources.indexOf(source(t.path())),
+                        new Study.TakenAs(t.path(), t.value(), t.why())))
+                .sorted(Comparator.comparingInt(Placed::place).thenComparingInt(Placed::source))
+                .map(Placed::taken)
                 .toList();
     }
+
+    /** A default with its place in the list of keys, and among the sources. */
+    private record Placed(int place, int source, Study.TakenAs taken) {}
 
     /** The name in a path of the surroundings, empty for any other. */
     private static String source(String path) {

@@ -63,12 +63,6 @@ public record DeviceFacts(
      */
     public record Swing(double resonance, Decay decay) {}
 
-    /** Rounds of added mass against frequency, at most; the added mass falls slowly with frequency, so few are needed. */
-    private static final int BENDING_ROUNDS = 8;
-
-    /** A round that changes the frequency by less is the last. */
-    private static final double BENDING_ACCURACY = 1e-9;
-
     /**
      * Figures of a device.
      *
@@ -117,15 +111,10 @@ public record DeviceFacts(
     }
 
     private static double bending(Hair hair, double modulus, Medium around) {
-        Cantilever beam = new Cantilever(hair.profile(), modulus);
-        double frequency = beam.firstFrequency(a -> FastMath.PI * a * a * hair.density());
-        double before = 0.0;
-        for (int i = 0; i < BENDING_ROUNDS && FastMath.abs(frequency - before) > BENDING_ACCURACY * frequency; i++) {
-            before = frequency;
-            double omega = 2.0 * FastMath.PI * frequency;
-            frequency = beam.firstFrequency(a -> FastMath.PI * a * a * (hair.density() + carried(a, around, omega)));
-        }
-        return frequency;
+        return new Cantilever(hair.profile(), modulus)
+                .firstFrequency(
+                        (a, omega) -> FastMath.PI * a * a * (hair.density() + carried(a, around, omega)),
+                        a -> FastMath.PI * a * a * hair.density());
     }
 
     /** Density that the fluid adds to a slice, ρ Re Γ [kg/m³]. */

@@ -16,7 +16,7 @@ record Run(int code, String out, String err) {
     static Run of(String... words) {
         StringWriter out = new StringWriter();
         StringWriter err = new StringWriter();
-        CommandLine line = Main.commandLine();
+        CommandLine line = Main.commandLine(words);
         line.setOut(new PrintWriter(out, true));
         line.setErr(new PrintWriter(err, true));
         int code = line.execute(words);

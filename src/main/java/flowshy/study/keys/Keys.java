@@ -8,15 +8,31 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.function.Consumer;
+import java.util.regex.Pattern;
 import java.util.stream.Collectors;
 
 /** The table of the keys of a study. A new key is one entry here; reader, list, schema and suggestions follow. */
 public final class Keys {
     static final Group STUDY = Group.of("study", top());
 
-    private static final List<KeyRow> ROWS = rows(STUDY, "");
+    private static final Pattern PLACE_IN_LIST = Pattern.compile("\\[\\d+]");
 
     private Keys() {}
+
+    /** Most studies are read without the list of keys: it is made when it is asked for. */
+    private static final class Listed {
+        static final List<KeyRow> ROWS = rows(STUDY, "");
+    }
+
+    /** Where each path stands in that list; every answer needs these. */
+    private static final class Places {
+        static final Map<String, Integer> BY_PATH = new LinkedHashMap<>();
+
+        static {
+            walk(STUDY, "", path -> BY_PATH.putIfAbsent(path, BY_PATH.size()));
+        }
+    }
 
     /**
      * Every key with its place, in the order of the table.
@@ -24,7 +40,7 @@ public final class Keys {
      * @return one row a path
      */
     public static List<KeyRow> rows() {
-        return ROWS;
+        return Listed.ROWS;
     }
 
     /**
@@ -34,7 +50,8 @@ public final class Keys {
      * @return the row of the key itself, empty if there is none
      */
     public static Optional<KeyRow> row(String path) {
-        Optional<KeyRow> row = ROWS.stream().filter(r -> r.path().equals(path)).findFirst();
+        Optional<KeyRow> row =
+                rows().stream().filter(r -> r.path().equals(path)).findFirst();
         if (row.isPresent()
                 && row.get().value() instanceof Group group
                 && group.shorthand().isPresent()) {
@@ -68,19 +85,40 @@ public final class Keys {
      * @return from zero, rising in the order of the list
      */
     public static int place(String path) {
-        List<String> listed = ROWS.stream().map(KeyRow::path).toList();
-        List<String> words = words(path);
-        for (int count = words.size(); count > 0; count--) {
-            int place = listed.indexOf(String.join(".", words.subList(0, count)));
-            if (place >= 0) {
+        String at = PLACE_IN_LIST.matcher(path).replaceAll("");
+        while (!at.isEmpty()) {
+            Integer place = Places.BY_PATH.get(at);
+            if (place != null) {
                 return place;
             }
+            at = at.substring(0, Math.max(0, at.lastIndexOf('.')));
         }
-        return listed.size();
+        return Places.BY_PATH.size();
     }
 
     private static List<String> words(String path) {
-        return List.of(path.replaceAll("\\[\\d+]", "").split("\\."));
+        return List.of(PLACE_IN_LIST.matcher(path).replaceAll("").split("\\."));
+    }
+
+    /** Every path in the order of the list: a group's deciding word, the keys that go with it, the keys of all its words. */
+    private static void walk(Group group, String above, Consumer<String> paths) {
+        for (Selector selector : group.selector().stream().toList()) {
+            walk(selector.key(), above, paths);
+            for (List<Key> keys : selector.keys().values()) {
+                keys.forEach(key -> walk(key, above, paths));
+            }
+        }
+        group.keys().forEach(key -> walk(key, above, paths));
+    }
+
+    private static void walk(Key key, String above, Consumer<String> paths) {
+        String path = above.isEmpty() ? key.name() : above + "." + key.name();
+        paths.accept(path);
+        if (key.value() instanceof Group inner) {
+            walk(inner, path, paths);
+        } else if (key.value() instanceof GroupMap map) {
+            walk(map.each(), path + "." + GroupMap.NAME, paths);
+        }
     }
 
     /**
@@ -91,7 +129,7 @@ public final class Keys {
      * @return the values that could be read; complete if there was no problem
      */
     public static Form read(Node.Mapping root, Problems problems) {
-        Reading reading = new Reading(ROWS, problems);
+        Reading reading = new Reading(problems);
         STUDY.read(reading, root, "");
         return reading.form();
     }

@@ -19,13 +19,11 @@ final class Reading {
     private final Map<String, Position> places = new LinkedHashMap<>();
     private final List<Form.Taken> taken = new ArrayList<>();
     private final List<String> mistyped = new ArrayList<>();
-    private final List<KeyRow> table;
     private final Problems problems;
     /** Above zero while a default is read: it is neither given nor may it list defaults of its own. */
     private int inDefault;
 
-    Reading(List<KeyRow> table, Problems problems) {
-        this.table = table;
+    Reading(Problems problems) {
         this.problems = problems;
     }
 
@@ -124,6 +122,7 @@ final class Reading {
 
     /** The same word at another place of the table, else the nearest one. */
     private Optional<String> elsewhere(String key) {
+        List<KeyRow> table = Keys.rows();
         List<String> last = table.stream()
                 .map(row -> row.path().substring(row.path().lastIndexOf('.') + 1))
                 .toList();

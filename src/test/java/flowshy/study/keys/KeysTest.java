@@ -355,4 +355,16 @@ class KeysTest {
                 .isEqualTo(Dimension.ACCELERATION);
         assertThat(Keys.rows().stream().map(KeyRow::path).toList()).contains("accept.error");
     }
+
+    @Test
+    void everyKeyHasItsPlaceInTheListOfKeys() {
+        List<String> listed = Keys.rows().stream().map(KeyRow::path).toList();
+        assertThat(listed).hasSizeGreaterThan(100).doesNotHaveDuplicates();
+        for (int i = 0; i < listed.size(); i++) {
+            assertThat(Keys.place(listed.get(i))).as(listed.get(i)).isEqualTo(i);
+        }
+        assertThat(Keys.place("candidates[3].gap")).isEqualTo(listed.indexOf("candidates"));
+        assertThat(Keys.place("hair.points[2].z")).isEqualTo(listed.indexOf("hair.points"));
+        assertThat(Keys.place("nothing.of.the.kind")).isEqualTo(listed.size());
+    }
 }
