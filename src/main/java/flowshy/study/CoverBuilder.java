@@ -51,6 +51,11 @@ final class CoverBuilder {
         return media.sealed(path + ".fill", outside.get().temperature()).map(fill -> new Fitted(cover.get(), fill));
     }
 
+    /** Whether a known cover also stands over another hair; the problem is told if not. */
+    boolean alsoFits(String path, Cover cover, Hair hair) {
+        return fits(path, cover, hair);
+    }
+
     /** The cover under which something was measured; empty if none is stated or the hair does not fit under it. */
     Optional<Cover> measuredUnder(String path, Optional<Hair> hair) {
         if (!form.word(path + ".kind").orElse("open").equals("sealed")) {

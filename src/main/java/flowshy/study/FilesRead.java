@@ -18,6 +18,8 @@ import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
+import java.util.concurrent.ConcurrentHashMap;
 import java.util.regex.Pattern;
 
 /** Reads the files that a study names, beside the study, and remembers their digests. */
@@ -27,9 +29,24 @@ final class FilesRead {
 
     private final Path folder;
     private final List<Study.FileRead> read = new ArrayList<>();
+    /** What was read once is not read again, also by {@link #again} others. */
+    private final Map<Path, TextFile> texts;
+
+    private final Map<String, MediumTable> tables;
 
     FilesRead(Path folder) {
+        this(folder, new ConcurrentHashMap<>(), new ConcurrentHashMap<>());
+    }
+
+    private FilesRead(Path folder, Map<Path, TextFile> texts, Map<String, MediumTable> tables) {
         this.folder = folder;
+        this.texts = texts;
+        this.tables = tables;
+    }
+
+    /** The same files for another study of this folder, as they were read; its list of files read begins anew. */
+    FilesRead again() {
+        return new FilesRead(folder, texts, tables);
     }
 
     /**
@@ -71,8 +88,16 @@ final class FilesRead {
     MediumTable medium(Form form, String key) {
         String name = form.word(key).orElseThrow();
         TextFile file = text(name, form.position(key), key);
+        MediumTable known = tables.get(name);
+        return known == null ? table(file, name, key) : known;
+    }
+
+    private MediumTable table(TextFile file, String name, String key) {
         try {
-            return MediumTable.read(new ByteArrayInputStream(file.text().getBytes(StandardCharsets.UTF_8)), name);
+            MediumTable table =
+                    MediumTable.read(new ByteArrayInputStream(file.text().getBytes(StandardCharsets.UTF_8)), name);
+            tables.put(name, table);
+            return table;
         } catch (MediumTableException e) {
             Problems problems = new Problems();
             e.problems()
@@ -95,11 +120,15 @@ final class FilesRead {
         } catch (InvalidPathException e) {
             throw new StudyException(Problem.of(at, key, Printable.of(name) + " is no file name", "name a text file"));
         }
-        if (!Files.isRegularFile(path)) {
-            String found = Files.exists(path) ? " is not a plain file" : ": no such file beside the study";
-            throw new StudyException(Problem.of(at, key, Printable.of(name) + found, "name a text file"));
+        TextFile file = texts.get(path);
+        if (file == null) {
+            if (!Files.isRegularFile(path)) {
+                String found = Files.exists(path) ? " is not a plain file" : ": no such file beside the study";
+                throw new StudyException(Problem.of(at, key, Printable.of(name) + found, "name a text file"));
+            }
+            file = TextFile.read(path, name, LIMIT);
+            texts.put(path, file);
         }
-        TextFile file = TextFile.read(path, name, LIMIT);
         Study.FileRead entry = new Study.FileRead(name, file.sha256());
         if (!read.contains(entry)) {
             read.add(entry);

@@ -38,6 +38,12 @@ final class HairBuilder {
         return profile.map(p -> new Hair(p, form.si("hair.density"), form.siIfAny("hair.youngs-modulus"), model));
     }
 
+    /** The hair of a known shape, where nothing but its material changes. */
+    Hair of(Hair base) {
+        return new Hair(
+                base.profile(), form.si("hair.density"), form.siIfAny("hair.youngs-modulus"), base.lengthModel());
+    }
+
     private Optional<Profile> cylinder() {
         return slender("hair.diameter")
                 ? Optional.of(new Cylinder(form.si("hair.length"), radius("hair.diameter")))

@@ -18,7 +18,6 @@ import flowshy.verdict.Acceptance;
 import flowshy.verdict.Band;
 import flowshy.verdict.error.Motion;
 import flowshy.verdict.lid.Candidate;
-import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.LinkedHashMap;
@@ -35,10 +34,10 @@ final class StudyBuilder {
     private final FilesRead files;
     private final MediumBuilder media;
 
-    StudyBuilder(Form form, Problems problems, Path folder) {
+    StudyBuilder(Form form, Problems problems, FilesRead files) {
         this.form = form;
         this.problems = problems;
-        this.files = new FilesRead(folder);
+        this.files = files;
         this.media = new MediumBuilder(form, problems, files);
     }
 
@@ -74,9 +73,7 @@ final class StudyBuilder {
                 new Study.Origin(file.name(), file.sha256(), files.read(), settings),
                 device,
                 band.orElseThrow(),
-                new Acceptance(
-                        form.given("accept.rejection") ? form.siIfAny("accept.rejection") : OptionalDouble.empty(),
-                        form.siIfAny("accept.error")),
+                acceptance(),
                 calibration,
                 candidates,
                 motion,
@@ -96,7 +93,13 @@ final class StudyBuilder {
         return candidates;
     }
 
-    private Optional<Band> band() {
+    Acceptance acceptance() {
+        return new Acceptance(
+                form.given("accept.rejection") ? form.siIfAny("accept.rejection") : OptionalDouble.empty(),
+                form.siIfAny("accept.error"));
+    }
+
+    Optional<Band> band() {
         OptionalDouble from = form.siIfAny("band.from");
         OptionalDouble to = form.siIfAny("band.to");
         if (from.isEmpty() || to.isEmpty()) {

@@ -1,5 +1,6 @@
 package flowshy.study;
 
+import flowshy.response.Hold;
 import flowshy.study.keys.Form;
 import flowshy.study.keys.Keys;
 import flowshy.study.keys.Overlay;
@@ -74,6 +75,27 @@ public final class StudyReader {
     }
 
     /**
+     * The numbers of the study that can be varied.
+     *
+     * @return by the path of their key
+     * @throws StudyException with every problem
+     */
+    public NumberKeys numbers() {
+        return new NumberKeys(form());
+    }
+
+    /**
+     * What of the suspension stays when another hair takes the place of the one measured.
+     *
+     * @return as the study says, else the stiffness
+     * @throws StudyException with every problem
+     */
+    public Hold hold() {
+        String word = form().word("hold").orElse(Hold.STIFFNESS.word());
+        return word.equals(Hold.RESONANCE.word()) ? Hold.RESONANCE : Hold.STIFFNESS;
+    }
+
+    /**
      * The study of changed values; nothing is parsed again.
      *
      * @param form values by path
@@ -84,8 +106,13 @@ public final class StudyReader {
         return build(form, new Problems());
     }
 
+    /** Folder in which the files that the study names are looked for. */
+    Path folder() {
+        return folder;
+    }
+
     private Study build(Form form, Problems problems) {
-        return new StudyBuilder(form, problems, folder).build(text.file(), settings);
+        return new StudyBuilder(form, problems, new FilesRead(folder)).build(text.file(), settings);
     }
 
     private Node.Mapping overlaid(Problems problems) {

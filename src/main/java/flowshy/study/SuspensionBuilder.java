@@ -60,6 +60,11 @@ final class SuspensionBuilder {
 
     /** The suspension; empty if none is stated or it has a problem. */
     Optional<Suspension> build() {
+        return statement().flatMap(statement -> solved(hair.orElseThrow(), statement));
+    }
+
+    /** What is stated of the suspension; empty if nothing is, or it or the hair has a problem. */
+    Optional<SuspensionStatement> statement() {
         if (!form.has(GROUP) || problems.touches(GROUP)) {
             return Optional.empty();
         }
@@ -80,16 +85,19 @@ final class SuspensionBuilder {
         if (problems.touches(GROUP) || hair.isEmpty()) {
             return Optional.empty();
         }
-        return solved(
-                hair.get(),
-                new SuspensionStatement(
-                        stiffness,
-                        damping,
-                        form.si("suspension.plate-inertia"),
-                        form.si("suspension.pivot-depth"),
-                        attitude(),
-                        form.siIfAny("suspension.readout-noise"),
-                        film()));
+        return Optional.of(new SuspensionStatement(
+                stiffness,
+                damping,
+                form.si("suspension.plate-inertia"),
+                form.si("suspension.pivot-depth"),
+                attitude(),
+                form.siIfAny("suspension.readout-noise"),
+                film()));
+    }
+
+    /** The suspension of a statement on the hair that was measured; empty if there is no statement or no solution. */
+    Optional<Suspension> solved(Optional<SuspensionStatement> statement, Hair measured) {
+        return statement.flatMap(stated -> solved(measured, stated));
     }
 
     private Optional<Suspension> solved(Hair hair, SuspensionStatement statement) {

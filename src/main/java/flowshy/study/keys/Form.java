@@ -14,6 +14,8 @@ public final class Form {
     private final Map<String, Field> fields;
     private final Map<String, Position> places;
     private final List<Taken> taken;
+    /** Numbers laid over the fields; few, and cheap to change. */
+    private final Map<String, Double> changed;
 
     /**
      * A default that was used, or something left out.
@@ -28,6 +30,14 @@ public final class Form {
         this.fields = Collections.unmodifiableMap(new LinkedHashMap<>(fields));
         this.places = Collections.unmodifiableMap(new LinkedHashMap<>(places));
         this.taken = List.copyOf(taken);
+        this.changed = Map.of();
+    }
+
+    private Form(Form base, Map<String, Double> changed) {
+        this.fields = base.fields;
+        this.places = base.places;
+        this.taken = base.taken;
+        this.changed = changed;
     }
 
     /**
@@ -36,7 +46,9 @@ public final class Form {
      * @return in the order of the key table
      */
     public List<Field> fields() {
-        return List.copyOf(fields.values());
+        return changed.isEmpty()
+                ? List.copyOf(fields.values())
+                : fields.keySet().stream().map(this::at).toList();
     }
 
     /**
@@ -45,7 +57,9 @@ public final class Form {
      * @return in the order of the key table
      */
     public List<Taken> taken() {
-        return taken;
+        return changed.isEmpty()
+                ? taken
+                : taken.stream().filter(t -> !changed.containsKey(t.path())).toList();
     }
 
     /**
@@ -65,7 +79,8 @@ public final class Form {
      * @return false for a default and for nothing at all
      */
     public boolean given(String path) {
-        return fields.containsKey(path) && fields.get(path).given();
+        return changed.containsKey(path)
+                || (fields.containsKey(path) && fields.get(path).given());
     }
 
     /**
@@ -86,7 +101,11 @@ public final class Form {
      * @return in SI, empty if the key is not there
      */
     public OptionalDouble siIfAny(String path) {
-        Optional<Quantity> quantity = field(path).flatMap(Field::quantity);
+        Double over = changed.get(path);
+        if (over != null) {
+            return OptionalDouble.of(over);
+        }
+        Optional<Quantity> quantity = Optional.ofNullable(fields.get(path)).flatMap(Field::quantity);
         return quantity.isPresent() ? OptionalDouble.of(quantity.get().value()) : OptionalDouble.empty();
     }
 
@@ -107,7 +126,17 @@ public final class Form {
      * @return the field, empty if the key is not there
      */
     public Optional<Field> field(String path) {
-        return Optional.ofNullable(fields.get(path));
+        return fields.containsKey(path) ? Optional.of(at(path)) : Optional.empty();
+    }
+
+    private Field at(String path) {
+        Field field = fields.get(path);
+        Double over = changed.get(path);
+        if (over == null) {
+            return field;
+        }
+        Quantity quantity = field.quantity().orElseThrow().at(over);
+        return new Field(path, quantity.written(), Optional.of(quantity), field.position(), true);
     }
 
     /**
@@ -131,7 +160,10 @@ public final class Form {
      * @return its reason, empty for what is written or not there
      */
     public Optional<String> why(String path) {
-        return taken.stream().filter(t -> t.path().equals(path)).map(Taken::why).findFirst();
+        return taken().stream()
+                .filter(t -> t.path().equals(path))
+                .map(Taken::why)
+                .findFirst();
     }
 
     /**
@@ -163,13 +195,26 @@ public final class Form {
      * @throws IllegalStateException if there is no number at that path
      */
     public Form with(String path, double value) {
-        Field old = field(path)
-                .filter(f -> f.quantity().isPresent())
-                .orElseThrow(() -> new IllegalStateException("no number at " + path));
-        Quantity changed = old.quantity().orElseThrow().at(value);
-        Map<String, Field> copy = new LinkedHashMap<>(fields);
-        copy.put(path, new Field(path, changed.written(), Optional.of(changed), old.position(), true));
-        return new Form(
-                copy, places, taken.stream().filter(t -> !t.path().equals(path)).toList());
+        return with(List.of(path), value);
+    }
+
+    /**
+     * The same with some numbers replaced, unchecked likewise.
+     *
+     * @param paths of numbers that are there
+     * @param values in SI, same order
+     * @return another form
+     * @throws IllegalStateException if there is no number at one of these paths
+     */
+    public Form with(List<String> paths, double... values) {
+        Map<String, Double> over = new LinkedHashMap<>(changed);
+        for (int i = 0; i < paths.size(); i++) {
+            Field old = fields.get(paths.get(i));
+            if (old == null || old.quantity().isEmpty()) {
+                throw new IllegalStateException("no number at " + paths.get(i));
+            }
+            over.put(paths.get(i), values[i]);
+        }
+        return new Form(this, over);
     }
 }

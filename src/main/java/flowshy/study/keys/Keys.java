@@ -79,6 +79,26 @@ public final class Keys {
     }
 
     /**
+     * What a number behind a key may be.
+     *
+     * @param path of a key, also below an entry of a list or a name that the user gave; a group that stands for one of its keys may be
+     *     named instead of that key
+     * @return path of the key itself and the bounds, empty if no number is wanted there
+     */
+    public static Optional<Map.Entry<String, Measure>> measure(String path) {
+        Optional<Value> value = Optional.of(STUDY);
+        for (String word : words(path)) {
+            value = value.flatMap(v -> v.below(word));
+        }
+        if (value.isPresent() && value.get() instanceof Measure measure) {
+            return Optional.of(Map.entry(path, measure));
+        }
+        return value.filter(Group.class::isInstance)
+                .flatMap(group -> ((Group) group).shorthand())
+                .flatMap(key -> measure(path + "." + key));
+    }
+
+    /**
      * Where a key stands in the list of keys; all that is below one list, or below the names that a user gave, stands at one place.
      *
      * @param path of a key
@@ -169,6 +189,11 @@ public final class Keys {
                         Words.of("off", "on").later("write on: the whole hair is solved; off: strip theory", "auto"),
                         Presence.taken("off", "strip theory"),
                         "correction for tip and wall"),
+                Key.optional(
+                        "hold",
+                        Words.of("stiffness", "resonance"),
+                        "what of the suspension stays when another hair takes the place of the one measured; stiffness unless"
+                                + " written"),
                 Key.optional("document", document(), "entries of the title block"));
     }
 

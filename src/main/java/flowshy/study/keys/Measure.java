@@ -62,17 +62,40 @@ public record Measure(Dimension dimension, boolean amplitude, boolean zero, Stri
         }
     }
 
+    /**
+     * The number of a text, checked like the text of a file.
+     *
+     * @param text number and unit
+     * @return within the bounds
+     * @throws QuantityException if it is no such number
+     */
+    public Quantity read(String text) {
+        Quantity quantity = parse(text);
+        if (!admits(quantity.value())) {
+            throw new QuantityException(quantity.written(), wanted(), Optional.empty());
+        }
+        return quantity;
+    }
+
+    /**
+     * Whether a number lies within the bounds.
+     *
+     * @param value in SI
+     * @return false also for what is no number
+     */
+    public boolean admits(double value) {
+        return (value >= parse(least).value() && value <= parse(most).value()) || (zero && value == 0.0);
+    }
+
+    private String wanted() {
+        return dimension.phrase() + (zero ? ", " : " of ") + range() + " is wanted here";
+    }
+
     private void keep(Reading reading, Node.Scalar scalar, String path, Quantity quantity) {
-        double value = quantity.value();
-        boolean inside = value >= parse(least).value() && value <= parse(most).value();
-        if (inside || (zero && value == 0.0)) {
+        if (admits(quantity.value())) {
             reading.field(path, scalar, Optional.of(quantity));
         } else {
-            reading.problem(
-                    scalar.position(),
-                    path,
-                    quantity.written(),
-                    dimension.phrase() + (zero ? ", " : " of ") + range() + " is wanted here");
+            reading.problem(scalar.position(), path, quantity.written(), wanted());
         }
     }
 

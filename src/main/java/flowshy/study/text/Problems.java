@@ -2,6 +2,7 @@ package flowshy.study.text;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 
 /** Collects problems while a study is read, so that all of them are told at once. */
 public final class Problems {
@@ -34,6 +35,15 @@ public final class Problems {
      */
     public void add(Position position, String path, String was, String accepted) {
         add(Problem.of(position, path, was, accepted));
+    }
+
+    /**
+     * The problem that was found first.
+     *
+     * @return empty if there is none
+     */
+    public Optional<Problem> first() {
+        return found.stream().findFirst();
     }
 
     /**

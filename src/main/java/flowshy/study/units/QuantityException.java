@@ -11,7 +11,14 @@ public final class QuantityException extends RuntimeException {
     /** Empty for none: an exception holds plain, serializable parts only. */
     private final String nearest;
 
-    QuantityException(String found, String accepted, Optional<String> nearest) {
+    /**
+     * A refusal.
+     *
+     * @param found what was found, plain words without control characters
+     * @param accepted what would be right
+     * @param nearest unit that was most likely meant, if any
+     */
+    public QuantityException(String found, String accepted, Optional<String> nearest) {
         super(found + "; " + accepted
                 + nearest.map(word -> "; did you mean " + word + "?").orElse(""));
         this.found = found;

@@ -1,0 +1,252 @@
+package flowshy.study;
+
+import flowshy.hair.Hair;
+import flowshy.medium.Medium;
+import flowshy.response.Device;
+import flowshy.response.Hold;
+import flowshy.response.Suspension;
+import flowshy.response.SuspensionException;
+import flowshy.response.SuspensionStatement;
+import flowshy.stream.Source;
+import flowshy.study.keys.Form;
+import flowshy.study.text.Problem;
+import flowshy.study.text.Problems;
+import flowshy.study.text.StudyException;
+import flowshy.verdict.Acceptance;
+import flowshy.verdict.Band;
+import flowshy.verdict.BandsQuestion;
+import flowshy.verdict.design.DesignSpace;
+import flowshy.verdict.design.NoDesignException;
+import flowshy.verdict.error.Motion;
+import java.util.List;
+import java.util.Optional;
+
+/**
+ * A study some of whose numbers vary: only what depends on them is made anew, the rest is the base's. What was measured of the
+ * suspension is solved on the base and held; a number of the measurement itself that varies, such as {@code suspension.quality.value}, is
+ * solved anew on the base's hair. A default that the base took from another key stays as it was taken: a can filled at the base's temperature
+ * is then used at another.
+ */
+public final class VariedStudy implements DesignSpace {
+    /** Keys of the suspension that were measured; the others say how it is built. */
+    private static final List<String> MEASURED = List.of(
+            "suspension.stiffness",
+            "suspension.resonance.",
+            "suspension.damping.",
+            "suspension.quality.",
+            "suspension.ring-down.");
+
+    private static final List<String> MATERIAL = List.of("hair.density", "hair.youngs-modulus");
+
+    private final Form form;
+    private final FilesRead files;
+    private final Study base;
+    private final Hold hold;
+    private final List<NumberKey> numbers;
+    private final List<String> paths;
+    private final boolean surrounded;
+
+    private VariedStudy(
+            Form form, FilesRead files, Study base, Hold hold, List<NumberKey> numbers, boolean surrounded) {
+        this.form = form;
+        this.files = files;
+        this.base = base;
+        this.hold = hold;
+        this.numbers = List.copyOf(numbers);
+        this.paths = numbers.stream().map(NumberKey::path).toList();
+        this.surrounded = surrounded;
+    }
+
+    /**
+     * A study with numbers that vary; what the study says under {@code hold} is held.
+     *
+     * @param reader of the study
+     * @param numbers the numbers, of {@link StudyReader#numbers}
+     * @return the space of these numbers
+     * @throws StudyException with every problem of the study
+     */
+    public static VariedStudy of(StudyReader reader, List<NumberKey> numbers) {
+        return of(reader, numbers, reader.hold());
+    }
+
+    /**
+     * A study with numbers that vary.
+     *
+     * @param reader of the study
+     * @param numbers the numbers, of {@link StudyReader#numbers}
+     * @param hold what of the suspension stays
+     * @return the space of these numbers
+     * @throws StudyException with every problem of the study
+     */
+    public static VariedStudy of(StudyReader reader, List<NumberKey> numbers, Hold hold) {
+        Form form = reader.form();
+        return new VariedStudy(form, new FilesRead(reader.folder()), reader.study(form), hold, numbers, true);
+    }
+
+    /**
+     * The study as it stands.
+     *
+     * @return the base
+     */
+    public Study base() {
+        return base;
+    }
+
+    /**
+     * What of the suspension stays.
+     *
+     * @return as chosen
+     */
+    public Hold hold() {
+        return hold;
+    }
+
+    /**
+     * The numbers that vary.
+     *
+     * @return in the order of the values
+     */
+    public List<NumberKey> numbers() {
+        return numbers;
+    }
+
+    @Override
+    public List<String> keys() {
+        return paths;
+    }
+
+    @Override
+    public DesignSpace still() {
+        return new VariedStudy(form, files, base, hold, numbers, false);
+    }
+
+    @Override
+    public BandsQuestion at(double... values) {
+        if (values.length != numbers.size()) {
+            throw new IllegalArgumentException(values.length + " values for " + numbers.size() + " keys");
+        }
+        for (int i = 0; i < values.length; i++) {
+            NumberKey key = numbers.get(i);
+            if (!key.admits(values[i])) {
+                throw new NoDesignException(key.path() + ": " + key.written(values[i]) + " lies outside "
+                        + key.written(key.least()) + " to " + key.written(key.most()));
+            }
+        }
+        Problems problems = new Problems();
+        try {
+            Optional<BandsQuestion> question = new Point(form.with(paths, values), problems).question();
+            if (question.isPresent() && problems.count() == 0) {
+                return question.get();
+            }
+        } catch (StudyException e) {
+            e.problems().forEach(problems::add);
+        } catch (SuspensionException e) {
+            throw new NoDesignException("suspension." + e.key() + ": " + e.getMessage());
+        }
+        throw new NoDesignException(problems.first().map(VariedStudy::said).orElse("the values make no device"));
+    }
+
+    private static String said(Problem problem) {
+        String accepted = problem.accepted().isEmpty() ? "" : "; " + problem.accepted();
+        return problem.path() + ": " + problem.found() + accepted;
+    }
+
+    private boolean varies(String... beginnings) {
+        for (String path : paths) {
+            for (String beginning : beginnings) {
+                if (path.startsWith(beginning)) {
+                    return true;
+                }
+            }
+        }
+        return false;
+    }
+
+    /** One point of the space: each part made anew only where it depends on what varies. */
+    private final class Point {
+        private final Form now;
+        private final Problems problems;
+        private final FilesRead read = files.again();
+        private final MediumBuilder media;
+        private final CoverBuilder covers;
+
+        Point(Form now, Problems problems) {
+            this.now = now;
+            this.problems = problems;
+            this.media = new MediumBuilder(now, problems, read);
+            this.covers = new CoverBuilder(now, problems, read, media);
+        }
+
+        Optional<BandsQuestion> question() {
+            Optional<Hair> hair = hair();
+            Optional<Medium> outside = varies("medium.")
+                    ? media.build("medium")
+                    : Optional.of(base.device().outside());
+            StudyBuilder builder = new StudyBuilder(now, problems, read);
+            Optional<Band> band = varies("band.") ? builder.band() : Optional.of(base.band());
+            if (hair.isEmpty() || outside.isEmpty() || band.isEmpty()) {
+                return Optional.empty();
+            }
+            Optional<CoverBuilder.Fitted> cover = cover(hair.get(), outside.get(), band.get());
+            if (cover.isEmpty()) {
+                return Optional.empty();
+            }
+            Device device = new Device(
+                    hair.get(),
+                    suspension(hair.get()),
+                    outside.get(),
+                    cover.get().cover(),
+                    cover.get().around());
+            Acceptance acceptance = varies("accept.") ? builder.acceptance() : base.acceptance();
+            Motion motion = varies("motion.") ? new MotionBuilder(now, problems, read).build() : base.motion();
+            List<Source> sources = surrounded ? sources(hair.get(), outside.get()) : List.of();
+            return Optional.of(new BandsQuestion(device, band.get(), acceptance, motion, sources));
+        }
+
+        private Optional<Hair> hair() {
+            if (!varies("hair.")) {
+                return Optional.of(base.device().hair());
+            }
+            HairBuilder builder = new HairBuilder(now, problems, read);
+            boolean shape = paths.stream().anyMatch(path -> path.startsWith("hair.") && !MATERIAL.contains(path));
+            return shape
+                    ? builder.build()
+                    : Optional.of(builder.of(base.device().hair()));
+        }
+
+        private Optional<CoverBuilder.Fitted> cover(Hair hair, Medium outside, Band band) {
+            if (varies("cover.", "medium.", "band.")) {
+                return covers.build("cover", Optional.of(hair), Optional.of(outside), Optional.of(band));
+            }
+            Device known = base.device();
+            return covers.alsoFits("cover", known.cover(), hair)
+                    ? Optional.of(new CoverBuilder.Fitted(known.cover(), known.around()))
+                    : Optional.empty();
+        }
+
+        private Optional<Suspension> suspension(Hair hair) {
+            Optional<Suspension> known = base.device().suspension();
+            if (known.isEmpty() || !varies("suspension.", "hair.")) {
+                return known;
+            }
+            if (!varies("suspension.") && hold == Hold.STIFFNESS) {
+                return known;
+            }
+            Hair measured = base.device().hair();
+            SuspensionBuilder builder =
+                    new SuspensionBuilder(now, problems, media, covers, read, Optional.of(measured));
+            Optional<SuspensionStatement> statement = builder.statement();
+            Optional<Suspension> solved =
+                    varies(MEASURED.toArray(String[]::new)) ? builder.solved(statement, measured) : known;
+            return statement.isEmpty() || solved.isEmpty()
+                    ? Optional.empty()
+                    : Optional.of(hold.on(hair, measured, solved.get(), statement.get()));
+        }
+
+        private List<Source> sources(Hair hair, Medium outside) {
+            return base.surroundings().isEmpty() || !varies("surroundings.", "medium.", "hair.")
+                    ? base.surroundings()
+                    : new SurroundingsBuilder(now, problems, read, outside, hair).build();
+        }
+    }
+}
