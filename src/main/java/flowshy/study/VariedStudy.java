@@ -128,8 +128,9 @@ public final class VariedStudy implements DesignSpace {
         for (int i = 0; i < values.length; i++) {
             NumberKey key = numbers.get(i);
             if (!key.admits(values[i])) {
-                throw new NoDesignException(key.path() + ": " + key.written(values[i]) + " lies outside "
-                        + key.written(key.least()) + " to " + key.written(key.most()));
+                String found = Double.isFinite(values[i]) ? key.written(values[i]) : "no finite number";
+                throw new NoDesignException(key.path() + ": " + found + " lies outside " + key.written(key.least())
+                        + " to " + key.written(key.most()));
             }
         }
         Problems problems = new Problems();

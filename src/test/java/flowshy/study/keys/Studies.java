@@ -25,6 +25,7 @@ final class Studies {
             accept: {rejection: 10 dB, error: 0.2 m/s2 peak}
             calibration: {frequency: 60 Hz, cover: open}
             finite-length: off
+            hold: resonance
             document: {project: p, part: "7", revision: 2.10, prepared-by: a, checked-by: b, approved-by: c, remarks: d}
             """, """
             hair: {shape: taper, length: 700 um, base-diameter: 90 um, tip-diameter: 0 um, density: 1.2 g/cm3}
