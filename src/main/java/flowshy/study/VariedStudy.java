@@ -19,7 +19,9 @@ import flowshy.verdict.design.DesignSpace;
 import flowshy.verdict.design.NoDesignException;
 import flowshy.verdict.error.Motion;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
+import java.util.concurrent.ConcurrentHashMap;
 
 /**
  * A study some of whose numbers vary: only what depends on them is made anew, the rest is the base's. What was measured of the
@@ -36,6 +38,9 @@ public final class VariedStudy implements DesignSpace {
             "suspension.quality.",
             "suspension.ring-down.");
 
+    /** Media kept for a grid that comes back to them; moist air takes twenty times as long as the rest of a point. */
+    private static final int KEPT = 4096;
+
     private static final List<String> MATERIAL = List.of("hair.density", "hair.youngs-modulus");
 
     private final Form form;
@@ -45,6 +50,7 @@ public final class VariedStudy implements DesignSpace {
     private final List<NumberKey> numbers;
     private final List<String> paths;
     private final boolean surrounded;
+    private final Map<List<Double>, Medium> known = new ConcurrentHashMap<>();
 
     private VariedStudy(
             Form form, FilesRead files, Study base, Hold hold, List<NumberKey> numbers, boolean surrounded) {
@@ -204,6 +210,23 @@ public final class VariedStudy implements DesignSpace {
             return Optional.of(new BandsQuestion(device, band.get(), acceptance, motion, sources));
         }
 
+        private Optional<Medium> medium() {
+            List<Double> state = paths.stream()
+                    .filter(path -> path.startsWith("medium."))
+                    .map(now::si)
+                    .toList();
+            Optional<Medium> kept = Optional.ofNullable(known.get(state));
+            if (kept.isPresent()) {
+                return kept;
+            }
+            Optional<Medium> made = media.build("medium");
+            if (known.size() >= KEPT) {
+                known.clear();
+            }
+            made.ifPresent(medium -> known.put(state, medium));
+            return made;
+        }
+
         private Optional<Hair> hair() {
             if (!varies("hair.")) {
                 return Optional.of(base.device().hair());
@@ -219,26 +242,26 @@ public final class VariedStudy implements DesignSpace {
             if (varies("cover.", "medium.", "band.")) {
                 return covers.build("cover", Optional.of(hair), Optional.of(outside), Optional.of(band));
             }
-            Device known = base.device();
-            return covers.alsoFits("cover", known.cover(), hair)
-                    ? Optional.of(new CoverBuilder.Fitted(known.cover(), known.around()))
+            Device there = base.device();
+            return covers.alsoFits("cover", there.cover(), hair)
+                    ? Optional.of(new CoverBuilder.Fitted(there.cover(), there.around()))
                     : Optional.empty();
         }
 
         private Optional<Suspension> suspension(Hair hair) {
-            Optional<Suspension> known = base.device().suspension();
-            if (known.isEmpty() || !varies("suspension.", "hair.")) {
-                return known;
+            Optional<Suspension> there = base.device().suspension();
+            if (there.isEmpty() || !varies("suspension.", "hair.")) {
+                return there;
             }
             if (!varies("suspension.") && hold == Hold.STIFFNESS) {
-                return known;
+                return there;
             }
             Hair measured = base.device().hair();
             SuspensionBuilder builder =
                     new SuspensionBuilder(now, problems, media, covers, read, Optional.of(measured));
             Optional<SuspensionStatement> statement = builder.statement();
             Optional<Suspension> solved =
-                    varies(MEASURED.toArray(String[]::new)) ? builder.solved(statement, measured) : known;
+                    varies(MEASURED.toArray(String[]::new)) ? builder.solved(statement, measured) : there;
             return statement.isEmpty() || solved.isEmpty()
                     ? Optional.empty()
                     : Optional.of(hold.on(hair, measured, solved.get(), statement.get()));
