@@ -165,6 +165,7 @@ public final class BandsJson {
         String none = limit.reason().isEmpty() ? "it belongs to no single frequency" : limit.reason();
         json.text("limit", limit.name());
         json.text("unit", limit.unit());
+        json.text("sense", limit.sense().word());
         json.number("required", limit.required());
         json.cell("found", Cell.of(limit.found(), none));
         json.cell("at_hz", Cell.of(limit.at(), none));

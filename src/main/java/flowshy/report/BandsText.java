@@ -69,16 +69,25 @@ public final class BandsText {
         page.heading("Decision: " + answer.verdict().decision().word());
         page.paragraph(answer.verdict().sentence());
         for (Limit limit : answer.verdict().limits()) {
-            String found = limit.found().isPresent()
-                    ? "found " + Figures.of(limit.found().getAsDouble(), 4) + " " + limit.unit()
-                    : "no figure";
+            String found =
+                    limit.found().isPresent() ? "found " + figure(limit.found().getAsDouble(), limit) : "no figure";
             String at = limit.at().isPresent() ? " at " + Figures.of(limit.at().getAsDouble(), 4) + " Hz" : "";
             String reason = limit.reason().isEmpty() ? "" : " (" + limit.reason() + ")";
             page.row(
                     limit.name(),
-                    limit.decision().word() + ": required " + Figures.of(limit.required(), 4) + " " + limit.unit()
-                            + ", " + found + at + reason);
+                    limit.decision().word() + ": required " + sense(limit) + Figures.of(limit.required(), 4) + " "
+                            + limit.unit() + ", " + found + at + reason);
         }
+    }
+
+    private static String figure(double value, Limit limit) {
+        return (Figures.of(value, 4) + " " + limit.unit()).strip();
+    }
+
+    /** Rejection and error are limits in one sense only, which needs no word. */
+    private static String sense(Limit limit) {
+        boolean plain = limit.name().equals("rejection") || limit.name().equals("error");
+        return plain ? "" : limit.sense().words() + " ";
     }
 
     private void taken() {

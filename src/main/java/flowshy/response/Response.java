@@ -19,7 +19,8 @@ public final class Response {
 
     private final Device device;
     private final TorqueModel model;
-    private final Optional<Oscillator> oscillator;
+    /** Made when first asked for, null until then: a map of the rejection never asks. */
+    private volatile Oscillator oscillator;
 
     /**
      * The response of a device.
@@ -29,9 +30,6 @@ public final class Response {
     public Response(Device device) {
         this.device = device;
         this.model = TorqueModel.of(device.hair(), device.around(), device.pivotDepth(), device.cover());
-        this.oscillator = device.suspension()
-                .map(suspension ->
-                        new Oscillator(device.hair(), suspension, Optional.of(device.around()), device.cover()));
     }
 
     /**
@@ -49,7 +47,11 @@ public final class Response {
      * @return empty without a suspension
      */
     public Optional<Oscillator> oscillator() {
-        return oscillator;
+        if (oscillator == null && device.suspension().isPresent()) {
+            oscillator = new Oscillator(
+                    device.hair(), device.suspension().get(), Optional.of(device.around()), device.cover());
+        }
+        return Optional.ofNullable(oscillator);
     }
 
     /**
@@ -89,7 +91,7 @@ public final class Response {
         Complex motionTorque = torques.motion(factor);
         Complex flowTorque = torques.flow(factor);
         Optional<Complex> denominator =
-                oscillator.filter(Oscillator::stands).map(swing -> swing.denominator(omega, torques.fluidInertia()));
+                oscillator().filter(Oscillator::stands).map(swing -> swing.denominator(omega, torques.fluidInertia()));
         OptionalDouble thermal = thermalNoise(omega, torques, motionTorque);
         OptionalDouble readout = denominator.isPresent()
                         && device.suspension().orElseThrow().readoutNoise().isPresent()
@@ -110,10 +112,11 @@ public final class Response {
     }
 
     private OptionalDouble thermalNoise(double omega, Torques torques, Complex motionTorque) {
-        if (oscillator.isEmpty()) {
+        Optional<Oscillator> swing = oscillator();
+        if (swing.isEmpty()) {
             return OptionalDouble.empty();
         }
-        double damping = oscillator.get().totalDamping(omega, torques.fluidInertia());
+        double damping = swing.get().totalDamping(omega, torques.fluidInertia());
         double torque = FastMath.sqrt(4.0 * BOLTZMANN * device.around().temperature() * damping);
         return OptionalDouble.of(torque / motionTorque.norm());
     }

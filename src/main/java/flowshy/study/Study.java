@@ -13,7 +13,6 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import org.hipparchus.util.FastMath;
 
 /**
  * A study as understood: SI inside, checked, nothing left to ask.
@@ -59,7 +58,7 @@ public record Study(
      * @return about its device, with its limits, motion and surroundings
      */
     public BandsQuestion question() {
-        return new BandsQuestion(device, band, acceptance, motion, surroundings);
+        return new BandsQuestion(device, band, acceptance, motion, surroundings, reference());
     }
 
     /**
@@ -68,7 +67,7 @@ public record Study(
      * @return the calibration's, or the middle of the band on a logarithmic scale [Hz]
      */
     public double reference() {
-        return calibration.map(Calibration::frequency).orElseGet(() -> FastMath.sqrt(band.from() * band.to()));
+        return calibration.map(Calibration::frequency).orElseGet(band::middle);
     }
 
     /**

@@ -61,6 +61,7 @@ final class StudyBuilder {
             surroundings.addAll(sources.build());
             fitted.addAll(sources.taken());
         }
+        Acceptance acceptance = acceptance();
         problems.throwIfAny();
         Device device = new Device(
                 hair.orElseThrow(),
@@ -73,7 +74,7 @@ final class StudyBuilder {
                 new Study.Origin(file.name(), file.sha256(), files.read(), settings),
                 device,
                 band.orElseThrow(),
-                acceptance(),
+                acceptance,
                 calibration,
                 candidates,
                 motion,
@@ -94,9 +95,7 @@ final class StudyBuilder {
     }
 
     Acceptance acceptance() {
-        return new Acceptance(
-                form.given("accept.rejection") ? form.siIfAny("accept.rejection") : OptionalDouble.empty(),
-                form.siIfAny("accept.error"));
+        return new AcceptanceBuilder(form, problems).build();
     }
 
     Optional<Band> band() {

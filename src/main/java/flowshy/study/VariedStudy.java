@@ -207,7 +207,12 @@ public final class VariedStudy implements DesignSpace {
             Acceptance acceptance = varies("accept.") ? builder.acceptance() : base.acceptance();
             Motion motion = varies("motion.") ? new MotionBuilder(now, problems, read).build() : base.motion();
             List<Source> sources = surrounded ? sources(hair.get(), outside.get()) : List.of();
-            return Optional.of(new BandsQuestion(device, band.get(), acceptance, motion, sources));
+            return Optional.of(new BandsQuestion(
+                    device, band.get(), acceptance, motion, sources, reference(band.get())));
+        }
+
+        private double reference(Band band) {
+            return base.calibration().isPresent() ? now.si("calibration.frequency") : band.middle();
         }
 
         private Optional<Medium> medium() {

@@ -36,11 +36,23 @@ final class Assumptions {
 
     private Assumptions() {}
 
+    /** Whether a model has ended that a quantity rests on. */
+    static boolean ended(List<Caveat> caveats, Subject subject) {
+        return caveats.stream().anyMatch(caveat -> caveat.weight() == Weight.OUT_OF_RANGE && caveat.about() == subject);
+    }
+
+    /** The same for the rejection alone, whose laws have few ends: without the work of all that stands beside a whole answer. */
+    static boolean rejectionEnds(Device device, Band band) {
+        Set<Caveat> caveats = new LinkedHashSet<>();
+        surroundedBy(device, caveats);
+        rarefaction(device, band, caveats);
+        caveats.addAll(device.cover().assumptions(device.around()));
+        return ended(List.copyOf(caveats), Subject.REJECTION);
+    }
+
     static List<Caveat> of(Device device, Band band, DeviceFacts facts) {
-        // nothing outside touches a hair in a closed cavity
-        Set<Caveat> caveats = new LinkedHashSet<>(
-                device.cover().closed() ? List.of() : device.outside().caveats());
-        caveats.addAll(device.around().caveats());
+        Set<Caveat> caveats = new LinkedHashSet<>();
+        surroundedBy(device, caveats);
         fromMemory(device, caveats);
         rarefaction(device, band, caveats);
         if (!device.cover().closed()) {
@@ -53,6 +65,13 @@ final class Assumptions {
         film(device, band, facts, caveats);
         bending(device, facts, caveats);
         return new ArrayList<>(caveats);
+    }
+
+    private static void surroundedBy(Device device, Set<Caveat> caveats) {
+        if (!device.cover().closed()) { // nothing outside touches a hair in a closed cavity
+            caveats.addAll(device.outside().caveats());
+        }
+        caveats.addAll(device.around().caveats());
     }
 
     private static void fromMemory(Device device, Set<Caveat> caveats) {

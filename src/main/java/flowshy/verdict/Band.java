@@ -32,4 +32,13 @@ public record Band(double from, double to) {
         frequencies.add(to);
         return frequencies;
     }
+
+    /**
+     * The middle on a logarithmic scale.
+     *
+     * @return √(from · to) [Hz]
+     */
+    public double middle() {
+        return FastMath.sqrt(from * to);
+    }
 }

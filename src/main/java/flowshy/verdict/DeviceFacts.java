@@ -94,13 +94,35 @@ public record DeviceFacts(
                 device.suspension().flatMap(held -> swing(hair, held, Optional.of(around), device.cover())),
                 there.map(Oscillator::gravityStiffness).orElse(0.0),
                 there.map(Oscillator::staticTilt).orElse(0.0),
-                hair.youngsModulus().isPresent()
-                        ? OptionalDouble.of(bending(hair, hair.youngsModulus().getAsDouble(), around))
-                        : OptionalDouble.empty(),
-                hair.youngsModulus().isPresent()
-                        ? OptionalDouble.of(Cantilever.stiffness(
-                                profile, hair.youngsModulus().getAsDouble()))
-                        : OptionalDouble.empty());
+                bendingFrequency(device),
+                bendingStiffness(device));
+    }
+
+    /**
+     * First bending frequency of a device's hair.
+     *
+     * @param device the device
+     * @return in the medium around the hair [Hz], absent without a modulus
+     */
+    public static OptionalDouble bendingFrequency(Device device) {
+        Hair hair = device.hair();
+        return hair.youngsModulus().isPresent()
+                ? OptionalDouble.of(bending(hair, hair.youngsModulus().getAsDouble(), device.around()))
+                : OptionalDouble.empty();
+    }
+
+    /**
+     * Bending stiffness of a device's hair.
+     *
+     * @param device the device
+     * @return EI/L in the sense of {@link Cantilever#stiffness} [N·m/rad], absent without a modulus
+     */
+    public static OptionalDouble bendingStiffness(Device device) {
+        Hair hair = device.hair();
+        return hair.youngsModulus().isPresent()
+                ? OptionalDouble.of(Cantilever.stiffness(
+                        hair.profile(), hair.youngsModulus().getAsDouble()))
+                : OptionalDouble.empty();
     }
 
     private static Optional<Swing> swing(Hair hair, Suspension held, Optional<Medium> in, Cover cover) {

@@ -4,10 +4,13 @@ import static flowshy.math.Figures.say;
 
 import flowshy.math.Caveat;
 import flowshy.medium.PropertySource;
-import flowshy.response.Device;
 import flowshy.verdict.BandsAnswer.Extreme;
 import flowshy.verdict.error.ErrorBudget;
 import flowshy.verdict.error.Motion;
+import flowshy.verdict.figure.Evaluated;
+import flowshy.verdict.figure.Figure;
+import flowshy.verdict.figure.Found;
+import flowshy.verdict.figure.Sense;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -24,14 +27,16 @@ final class Judgement {
 
     private final Acceptance acceptance;
     private final Motion motion;
-    private final Device device;
+    private final Evaluated device;
     private final Optional<ErrorBudget> budget;
+    private final List<Caveat> caveats;
 
-    Judgement(Acceptance acceptance, Motion motion, Device device, Optional<ErrorBudget> budget) {
-        this.acceptance = acceptance;
-        this.motion = motion;
+    Judgement(Evaluated device, List<Caveat> caveats) {
+        this.acceptance = device.question().acceptance();
+        this.motion = device.question().motion();
         this.device = device;
-        this.budget = budget;
+        this.budget = device.error();
+        this.caveats = caveats;
     }
 
     Verdict of(List<ReadingBand> bands, Optional<Extreme> least) {
@@ -39,8 +44,32 @@ final class Judgement {
         List<Limit> limits = new ArrayList<>();
         acceptance.rejection().ifPresent(margin -> limits.add(rejection(margin, first, least)));
         error(first).ifPresent(limits::add);
+        acceptance.others().forEach(limit -> limits.add(other(limit)));
         Decision decision = Verdict.worst(limits);
         return new Verdict(decision, limits, sentence(decision, bands, least, first));
+    }
+
+    /** A limit on any other quantity: it fails on a device that has no such quantity, and stays open where the study lacks what it needs. */
+    private Limit other(FigureLimit limit) {
+        Figure figure = limit.figure();
+        Found found = figure.of(device);
+        Decision decision = switch (found.state()) {
+            case NUMBER, UNBOUNDED ->
+                limit.sense().keeps(found.value(), limit.value()) ? Decision.MEETS : Decision.FAILS;
+            case NOT_STATED -> Decision.NOT_ASKED;
+            case HAS_NONE -> Decision.FAILS;
+            case ENDED -> Decision.UNDECIDED;
+        };
+        boolean ended = Assumptions.ended(caveats, figure.subject()) && found.state() == Found.State.NUMBER;
+        return new Limit(
+                figure.word(),
+                figure.unit().si(),
+                limit.sense(),
+                limit.value(),
+                found.number(),
+                found.at(),
+                ended ? Decision.UNDECIDED : decision,
+                ended ? ENDED : found.reason());
     }
 
     /** The error limit: as stated, or with surroundings the smallest motion to be read. */
@@ -55,6 +84,7 @@ final class Judgement {
             return Optional.of(new Limit(
                     "error",
                     "m/s2",
+                    Sense.AT_MOST,
                     required,
                     OptionalDouble.empty(),
                     OptionalDouble.empty(),
@@ -62,10 +92,11 @@ final class Judgement {
                     NOTHING));
         }
         if (budget.isEmpty()) {
-            boolean closed = device.cover().closed();
+            boolean closed = device.device().cover().closed();
             return Optional.of(new Limit(
                     "error",
                     "m/s2",
+                    Sense.AT_MOST,
                     required,
                     closed ? OptionalDouble.of(0.0) : OptionalDouble.empty(),
                     OptionalDouble.empty(),
@@ -79,6 +110,7 @@ final class Judgement {
         return Optional.of(new Limit(
                 "error",
                 "m/s2",
+                Sense.AT_MOST,
                 required,
                 OptionalDouble.of(found),
                 OptionalDouble.empty(),
@@ -89,12 +121,20 @@ final class Judgement {
     private static Limit rejection(double margin, Reads first, Optional<Extreme> least) {
         if (first == Reads.NOTHING) {
             return new Limit(
-                    "rejection", "dB", margin, OptionalDouble.empty(), OptionalDouble.empty(), Decision.FAILS, NOTHING);
+                    "rejection",
+                    "dB",
+                    Sense.AT_LEAST,
+                    margin,
+                    OptionalDouble.empty(),
+                    OptionalDouble.empty(),
+                    Decision.FAILS,
+                    NOTHING);
         }
         if (least.isEmpty()) {
             return new Limit(
                     "rejection",
                     "dB",
+                    Sense.AT_LEAST,
                     margin,
                     OptionalDouble.empty(),
                     OptionalDouble.empty(),
@@ -105,6 +145,7 @@ final class Judgement {
         return new Limit(
                 "rejection",
                 "dB",
+                Sense.AT_LEAST,
                 margin,
                 OptionalDouble.of(least.get().rejection()),
                 OptionalDouble.of(least.get().frequency()),
@@ -135,7 +176,7 @@ final class Judgement {
 
     /** Density and viscosity decide; a verdict that rests on a recalled one says so. */
     private String memory() {
-        List<String> recalled = device.around().recalled().stream()
+        List<String> recalled = device.device().around().recalled().stream()
                 .filter(source ->
                         source.property().equals("density") || source.property().equals("viscosity"))
                 .map(PropertySource::property)

@@ -1,5 +1,6 @@
 package flowshy.verdict;
 
+import flowshy.verdict.figure.Sense;
 import java.util.OptionalDouble;
 
 /**
@@ -7,6 +8,7 @@ import java.util.OptionalDouble;
  *
  * @param name key under {@code accept}, e.g. {@code rejection}
  * @param unit unit of both numbers, e.g. {@code dB}
+ * @param sense whether it is a least or a largest value
  * @param required what was asked
  * @param found what was found; absent where infinite or undefined
  * @param at frequency at which it was found [Hz], absent where it belongs to none
@@ -16,6 +18,7 @@ import java.util.OptionalDouble;
 public record Limit(
         String name,
         String unit,
+        Sense sense,
         double required,
         OptionalDouble found,
         OptionalDouble at,

@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import flowshy.response.Device;
+import flowshy.verdict.figure.Sense;
 import java.util.List;
 import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
@@ -110,7 +111,8 @@ class JudgementTest {
     }
 
     private static Limit limit(Decision decision) {
-        return new Limit("rejection", "dB", 20.0, OptionalDouble.empty(), OptionalDouble.empty(), decision, "");
+        return new Limit(
+                "rejection", "dB", Sense.AT_LEAST, 20.0, OptionalDouble.empty(), OptionalDouble.empty(), decision, "");
     }
 
     @Test

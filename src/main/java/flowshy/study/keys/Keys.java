@@ -2,7 +2,6 @@ package flowshy.study.keys;
 
 import flowshy.study.text.Node;
 import flowshy.study.text.Problems;
-import flowshy.study.units.Dimension;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -178,7 +177,7 @@ public final class Keys {
                 Key.optional("motion", MotionKeys.group(), "the motion that is to be read"),
                 Key.optional(
                         "surroundings", SurroundingsKeys.map(), "streams, tones and sound around, each under a name"),
-                Key.of("accept", accept(), Presence.IMPLIED, "limits that the device must meet"),
+                Key.of("accept", AcceptKeys.group(), Presence.IMPLIED, "limits that the device must meet"),
                 Key.optional("calibration", calibration(), "where the sensitivity is stated"),
                 Key.later("tolerances", "spread of any number", "change the number with --set"),
                 Key.later("envelope", "states the device must bear", "change medium.temperature and others with --set"),
@@ -211,21 +210,6 @@ public final class Keys {
                                 SuspensionKeys.FREQUENCY,
                                 Presence.taken("10 kHz", "wide enough for most uses"),
                                 "upper end")));
-    }
-
-    private static Group accept() {
-        return Group.of(
-                "accept",
-                List.of(
-                        Key.of(
-                                "rejection",
-                                Measure.of(Dimension.LEVEL, "0 dB", "300 dB"),
-                                Presence.taken("20 dB", "ten to one, common practice; splits the bands, is no limit"),
-                                "least rejection over the band"),
-                        Key.optional(
-                                "error",
-                                Measure.amplitude(Dimension.ACCELERATION, "1e-12 m/s2", "1e9 m/s2"),
-                                "largest error by flow")));
     }
 
     private static Group calibration() {

@@ -52,6 +52,16 @@ public enum Dimension {
     INERTIA("a moment of inertia", "kg.m2", "kg.m2 g.mm2 mg.mm2"),
     /** amplitude density of an angle [rad/√Hz] */
     ANGLE_NOISE("an angle noise", "rad/rtHz", "rad/rtHz urad/rtHz nrad/rtHz"),
+    /** amplitude density of an acceleration [m/s²/√Hz]; in its units g is standard gravity */
+    ACCELERATION_NOISE("an acceleration noise", "m/s2/rtHz", "m/s2/rtHz ug/rtHz mg/rtHz"),
+    /** torque per acceleration [N·m per m/s²] */
+    TORQUE_PER_ACCELERATION("a torque per acceleration", "N.m/(m/s2)", "N.m/(m/s2) kg.m"),
+    /** angle per acceleration [rad per m/s²] */
+    ANGLE_PER_ACCELERATION("an angle per acceleration", "rad/(m/s2)", "rad/(m/s2) mrad/(m/s2) urad/(m/s2)"),
+    /** angle per speed [rad per m/s] */
+    ANGLE_PER_SPEED("an angle per speed", "rad/(m/s)", "rad/(m/s) mrad/(m/s)"),
+    /** acceleration per speed [m/s² per m/s] */
+    ACCELERATION_PER_SPEED("an acceleration per speed", "m/s2/(m/s)", "m/s2/(m/s) mm/s2/(mm/s)"),
     /** level [dB], kept in decibels */
     LEVEL("a level", "dB", "dB"),
     /** share of a whole [-] */
@@ -138,6 +148,11 @@ public enum Dimension {
             case DAMPING -> Exponents.of(2, 1, -1).with(-1, 0);
             case INERTIA -> Exponents.of(2, 1, 0);
             case ANGLE_NOISE -> new Exponents(0, 0, 1, 0, 2, -1, 0);
+            case ACCELERATION_NOISE -> new Exponents(2, 0, -3, 0, 0, -1, 0);
+            case TORQUE_PER_ACCELERATION -> Exponents.of(1, 1, 0);
+            case ANGLE_PER_ACCELERATION -> Exponents.of(-1, 0, 2).with(1, 0);
+            case ANGLE_PER_SPEED -> Exponents.of(-1, 0, 1).with(1, 0);
+            case ACCELERATION_PER_SPEED -> Exponents.of(0, 0, -1);
             case LEVEL -> new Exponents(0, 0, 0, 0, 0, 0, 2);
             case SHARE, NUMBER -> Exponents.NONE;
         };
@@ -145,7 +160,7 @@ public enum Dimension {
 
     /** Whether {@code g} in its units is standard gravity, not the gram. */
     boolean gravity() {
-        return this == ACCELERATION || this == ACCELERATION_DENSITY;
+        return this == ACCELERATION || this == ACCELERATION_DENSITY || this == ACCELERATION_NOISE;
     }
 
     /** Whether a unit of these exponents fits. Leaving out the radian is usual for stiffness; an angle must have it. */

@@ -108,7 +108,10 @@ public record Quantity(double value, Dimension dimension, String written, Swing 
         String other = found.sameKind(Dimension.FREQUENCY.exponents())
                 ? "a rate per second, not a frequency in cycles (1 Hz is 2π rad/s)"
                 : "something else";
-        return Dimension.of(found).map(Dimension::phrase).orElse(other);
+        return Dimension.of(found)
+                .filter(dimension -> dimension != Dimension.ACCELERATION_PER_SPEED) // who writes 1/s means a rate
+                .map(Dimension::phrase)
+                .orElse(other);
     }
 
     private static Unit unit(String symbol, Dimension wanted, String line) {

@@ -97,6 +97,18 @@ public record SurroundingsQuestion(Device device, Band band, double margin, Moti
                 caveats(load));
     }
 
+    /**
+     * Thermal and readout noise over a band where no flow acts.
+     *
+     * @param response of a device whose suspension holds the hair
+     * @param band band of use
+     * @return as acceleration [m/s² rms]
+     */
+    public static double noise(Response response, Band band) {
+        Spectrum spectrum = new Spectrum(response, new FlowLoad(response.device(), List.of()), band);
+        return FastMath.sqrt(spectrum.noiseMeanSquare(band.from(), band.to()));
+    }
+
     private SourceError source(int index, FlowLoad load, Spectrum spectrum, double square, double all, double offset) {
         Source source = sources.get(index);
         Exposure exposure = load.exposures().get(index);

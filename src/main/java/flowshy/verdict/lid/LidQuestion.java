@@ -140,7 +140,8 @@ public record LidQuestion(BandsQuestion base, double reference, List<Candidate> 
         for (Limit limit : answer.verdict().limits()) {
             if (limit.decision() == Decision.FAILS && limit.found().isPresent()) {
                 double by = FastMath.abs(limit.required() - limit.found().getAsDouble());
-                misses.add(say("%s misses by %.3g %s", limit.name(), by, limit.unit()));
+                misses.add(say("%s misses by %.3g %s", limit.name(), by, limit.unit())
+                        .strip());
             } else if (limit.decision() == Decision.FAILS) {
                 misses.add(limit.name() + ": " + limit.reason());
             } else if (limit.decision() == Decision.UNDECIDED) {

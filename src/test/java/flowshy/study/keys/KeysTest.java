@@ -13,6 +13,7 @@ import flowshy.study.text.StudyException;
 import flowshy.study.text.StudyText;
 import flowshy.study.units.Dimension;
 import flowshy.study.units.Quantity;
+import flowshy.verdict.figure.Figure;
 import java.nio.charset.StandardCharsets;
 import java.util.LinkedHashSet;
 import java.util.List;
@@ -293,7 +294,13 @@ class KeysTest {
         assertThat(problems(with("accept: {rejection: 0,5 dB}")))
                 .containsExactly(
                         "s.yaml:3:21: accept.rejection: 0 has no unit; a level is wanted here, with its unit: dB; did you mean 0 dB?",
-                        "s.yaml:3:23: accept.5 dB: unknown key; known here: rejection, error; a decimal comma splits a value in two: write a point");
+                        "s.yaml:3:23: accept.5 dB: unknown key; known here: rejection, error, "
+                                + String.join(
+                                        ", ",
+                                        AcceptKeys.figures().stream()
+                                                .map(Figure::word)
+                                                .toList())
+                                + "; a decimal comma splits a value in two: write a point");
     }
 
     @Test

@@ -22,7 +22,42 @@ final class Studies {
             cover: {kind: sealed, fill: {name: helium, temperature: 25 degC, pressure: 1 bar}}
             band: {from: 5 Hz, to: 2 kHz}
             motion: {smallest: 0.1 m/s2 peak, full-scale: 2 g, spectrum: [[20 Hz, 0.01 g2/Hz], [2 kHz, 1e-4 g2/Hz]]}
-            accept: {rejection: 10 dB, error: 0.2 m/s2 peak}
+            accept:
+              rejection: 10 dB
+              error: 0.2 m/s2 peak
+              mass: 5 ug
+              volume: {at-least: 1e-3 mm3, at-most: 0.01 mm3}
+              inertia: {at-least: 1e-16 kg.m2, at-most: 1e-15 kg.m2}
+              inertial-torque: 1e-12 N.m/(m/s2)
+              footprint: 90 um
+              length: 1 mm
+              slenderness: 5
+              resonance: {at-least: 200 Hz, at-most: 400 Hz}
+              quality: {at-least: 0.8, at-most: 4}
+              sensitivity: 0.2 mrad/(m/s2)
+              flow-sensitivity: 1 mrad/(m/s)
+              noise: 10 ug/rtHz
+              worst-noise: 0.2 mm/s2/rtHz
+              noise-rms: 1 mm/s2
+              rejection-from: -3 dB
+              rejection-to: 30 dB
+              motion-width: 200 Hz
+              motion-octaves: 3
+              motion-from: 20 Hz
+              motion-to: 1 kHz
+              equivalent: 20 m/s2/(m/s)
+              largest-speed: 1 mm/s
+              offset: 0.1 m/s2
+              smallest-readable: 5 mm/s2
+              dynamic-range: 60 dB
+              static-tilt: 1 mrad
+              gravity-tilt: 1 mrad
+              stream-tilt: 1 mrad
+              bending-frequency: 10 kHz
+              bending-ratio: 10
+              bending-stiffness: 1 uN.m/rad
+              bending-stiffness-ratio: 10
+              tip-clearance: 100 um
             calibration: {frequency: 60 Hz, cover: open}
             finite-length: off
             hold: resonance
