@@ -207,8 +207,8 @@ public final class VariedStudy implements DesignSpace {
             Acceptance acceptance = varies("accept.") ? builder.acceptance() : base.acceptance();
             Motion motion = varies("motion.") ? new MotionBuilder(now, problems, read).build() : base.motion();
             List<Source> sources = surrounded ? sources(hair.get(), outside.get()) : List.of();
-            return Optional.of(new BandsQuestion(
-                    device, band.get(), acceptance, motion, sources, reference(band.get())));
+            return Optional.of(
+                    new BandsQuestion(device, band.get(), acceptance, motion, sources, reference(band.get())));
         }
 
         private double reference(Band band) {
