@@ -186,9 +186,8 @@ public final class VariedStudy implements DesignSpace {
 
         Optional<BandsQuestion> question() {
             Optional<Hair> hair = hair();
-            Optional<Medium> outside = varies("medium.")
-                    ? media.build("medium")
-                    : Optional.of(base.device().outside());
+            Optional<Medium> outside =
+                    varies("medium.") ? medium() : Optional.of(base.device().outside());
             StudyBuilder builder = new StudyBuilder(now, problems, read);
             Optional<Band> band = varies("band.") ? builder.band() : Optional.of(base.band());
             if (hair.isEmpty() || outside.isEmpty() || band.isEmpty()) {
