@@ -1,0 +1,99 @@
+package flowshy.verdict.map;
+
+import java.util.ArrayList;
+import java.util.Collections;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.OptionalInt;
+
+/**
+ * A number on a grid.
+ *
+ * @param across the side that runs along a line
+ * @param down the side that runs from line to line
+ * @param spots one a place, line after line
+ */
+public record Grid(Axis across, Axis down, List<Spot> spots) {
+    /** @throws IllegalArgumentException if there is not one spot a place */
+    public Grid {
+        spots = List.copyOf(spots);
+        if (spots.size() != across.count() * down.count()) {
+            throw new IllegalArgumentException(
+                    spots.size() + " spots on a grid of " + across.count() + " by " + down.count());
+        }
+    }
+
+    /**
+     * What is found at a place.
+     *
+     * @param i index across
+     * @param j index down
+     * @return the spot
+     */
+    public Spot at(int i, int j) {
+        return spots.get(j * across.count() + i);
+    }
+
+    /**
+     * The same with its sides exchanged.
+     *
+     * @return lines become columns
+     */
+    public Grid turned() {
+        List<Spot> turned = new ArrayList<>(spots.size());
+        for (int i = 0; i < across.count(); i++) {
+            for (int j = 0; j < down.count(); j++) {
+                turned.add(at(i, j));
+            }
+        }
+        return new Grid(/* across= */ down, /* down= */ across, turned);
+    }
+
+    /**
+     * The place of the least number, the first one if there are several.
+     *
+     * @return index into the spots, empty if no place has a number
+     */
+    public OptionalInt least() {
+        int best = -1;
+        for (int k = 0; k < spots.size(); k++) {
+            if (spots.get(k).there()
+                    && (best < 0 || spots.get(k).value() < spots.get(best).value())) {
+                best = k;
+            }
+        }
+        return best < 0 ? OptionalInt.empty() : OptionalInt.of(best);
+    }
+
+    /**
+     * The place of the largest number, the first one if there are several.
+     *
+     * @return index into the spots, empty if no place has a number
+     */
+    public OptionalInt largest() {
+        int best = -1;
+        for (int k = 0; k < spots.size(); k++) {
+            if (spots.get(k).there()
+                    && (best < 0 || spots.get(k).value() > spots.get(best).value())) {
+                best = k;
+            }
+        }
+        return best < 0 ? OptionalInt.empty() : OptionalInt.of(best);
+    }
+
+    /**
+     * Why places have no number, or one that counts little, and how many each reason has.
+     *
+     * @return in the order met, line after line
+     */
+    public Map<String, Integer> reasons() {
+        Map<String, Integer> reasons = new LinkedHashMap<>();
+        for (Spot spot : spots) {
+            if (!spot.reason().isEmpty()) {
+                reasons.merge(spot.reason(), 1, Integer::sum);
+            }
+        }
+        return Collections.unmodifiableMap(reasons);
+    }
+}

@@ -1,0 +1,166 @@
+package flowshy.verdict.size;
+
+import flowshy.verdict.size.Sized.End;
+import flowshy.verdict.size.Sized.VariableSlopes;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.concurrent.atomic.AtomicInteger;
+import java.util.stream.IntStream;
+import org.hipparchus.util.FastMath;
+
+/**
+ * Solves a sizing: first what keeps every limit, then the best of that.
+ *
+ * @param seed of everything drawn at random: one seed, one answer
+ */
+public record Sizer(long seed) {
+    /** A limit binds if it is kept by less than this, in its scale. */
+    private static final double BINDS = 1e-5;
+
+    /** Change of a limit, in its scale, that shows its price; and of a variable, as a share of its value. */
+    private static final double LIMIT_STEP = 0.01;
+
+    private static final double VARIABLE_STEP = 1e-3;
+
+    /** First step of a search that starts at the optimum of a problem hardly different, in shares of the ranges. */
+    private static final double NEAR = 0.02;
+
+    /**
+     * Solves a problem.
+     *
+     * @param problem what is asked
+     * @param known choices to start from beside the own sample, each inside the ranges; may be empty
+     * @return the answer
+     */
+    public Sized solve(SizingProblem problem, List<List<Double>> known) {
+        AtomicInteger trials = new AtomicInteger();
+        SizingProblem counted =
+                new SizingProblem(problem.variables(), problem.maximize(), problem.constraints(), values -> {
+                    trials.incrementAndGet();
+                    return problem.trials().at(values);
+                });
+        Candidate best = best(counted, known);
+        return answer(counted, problem, best, trials);
+    }
+
+    /**
+     * The same question about given values: what binds there, and what would move it.
+     *
+     * @param problem what is asked
+     * @param values one a variable, inside the ranges
+     * @param before trials that led to them
+     * @return the answer at these values
+     */
+    public Sized at(SizingProblem problem, List<Double> values, int before) {
+        AtomicInteger trials = new AtomicInteger(before);
+        SizingProblem counted =
+                new SizingProblem(problem.variables(), problem.maximize(), problem.constraints(), tried -> {
+                    trials.incrementAndGet();
+                    return problem.trials().at(tried);
+                });
+        return answer(counted, problem, counted.at(values), trials);
+    }
+
+    private Candidate best(SizingProblem problem, List<List<Double>> known) {
+        List<Candidate> starts = known.stream().map(problem::at).toList();
+        Candidate best = problem.variables().size() == 1
+                ? new OneVariable(problem).best()
+                : new SeveralVariables(problem, seed).best(starts);
+        for (Candidate start : starts) {
+            best = Candidate.better(best, start);
+        }
+        return best;
+    }
+
+    private Sized answer(SizingProblem counted, SizingProblem problem, Candidate best, AtomicInteger trials) {
+        boolean fits = best.keepsAll();
+        List<Integer> binding = new ArrayList<>();
+        for (int c = 0; c < best.shortfalls().size(); c++) {
+            if (best.shortfalls().get(c) > -BINDS) {
+                binding.add(c);
+            }
+        }
+        List<End> ends = new ArrayList<>();
+        for (int i = 0; i < best.values().size(); i++) {
+            double share = problem.variables().get(i).share(best.values().get(i));
+            ends.add(share < 1e-6 ? End.FROM : share > 1.0 - 1e-6 ? End.TO : End.INSIDE);
+        }
+        List<Slope> prices = fits ? prices(counted, best) : List.of();
+        List<VariableSlopes> slopes = best.trial().there() ? slopes(counted, best) : List.of();
+        return new Sized(
+                problem,
+                fits,
+                best.values(),
+                best.trial(),
+                best.shortfalls(),
+                binding,
+                ends,
+                prices,
+                slopes,
+                trials.get());
+    }
+
+    private List<Slope> prices(SizingProblem problem, Candidate best) {
+        return IntStream.range(0, problem.constraints().size())
+                .mapToObj(c -> {
+                    Constraint constraint = problem.constraints().get(c);
+                    return Slope.of(
+                                    change -> optimum(
+                                            problem.withLimit(c, constraint.limit() + change * constraint.scale()),
+                                            best,
+                                            c),
+                                    LIMIT_STEP,
+                                    true,
+                                    true)
+                            .per(constraint.scale());
+                })
+                .toList();
+    }
+
+    /** The objective at the optimum of a problem with one limit moved a little; NaN if nothing fits. */
+    private double optimum(SizingProblem moved, Candidate best, int constraint) {
+        Candidate start = moved.at(best.values());
+        if (best.shortfalls().get(constraint) < -2.0 * LIMIT_STEP) { // the limit is far away: moved, it changes nothing
+            return start.trial().objective();
+        }
+        Candidate found = moved.variables().size() == 1
+                ? new OneVariable(moved).best()
+                : new AugmentedLagrangian(moved, size(best), 1e3).from(start, NEAR, AugmentedLagrangian.MANY);
+        return found.keepsAll() ? found.trial().objective() : Double.NaN;
+    }
+
+    private static double size(Candidate best) {
+        return best.cost() == 0.0 ? 1.0 : FastMath.abs(best.cost());
+    }
+
+    private static List<VariableSlopes> slopes(SizingProblem problem, Candidate best) {
+        List<VariableSlopes> slopes = new ArrayList<>();
+        for (int i = 0; i < best.values().size(); i++) {
+            int variable = i;
+            List<Slope> found = IntStream.range(0, best.shortfalls().size())
+                    .mapToObj(c -> slope(problem, best, variable, c))
+                    .toList();
+            slopes.add(new VariableSlopes(slope(problem, best, variable, -1), found));
+        }
+        return slopes;
+    }
+
+    /** Slope of a limited figure, or of the objective (−1), along one variable; steps end at the ends of its range. */
+    private static Slope slope(SizingProblem problem, Candidate best, int variable, int constraint) {
+        Variable range = problem.variables().get(variable);
+        double value = best.values().get(variable);
+        double step = VARIABLE_STEP * (value == 0.0 ? range.to() - range.from() : FastMath.abs(value));
+        return Slope.of(
+                change -> {
+                    List<Double> moved = new ArrayList<>(best.values());
+                    moved.set(variable, value + change);
+                    Trial trial = problem.trials().at(moved);
+                    return !trial.there()
+                            ? Double.NaN
+                            : constraint < 0 ? trial.objective() : trial.found().get(constraint);
+                },
+                step,
+                value - step >= range.from(),
+                value + step <= range.to());
+    }
+}
