@@ -15,7 +15,9 @@ import flowshy.study.units.Dimension;
 import flowshy.study.units.Quantity;
 import flowshy.study.units.QuantityException;
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
@@ -34,6 +36,7 @@ final class ColumnFile {
     private final char separator;
     private final List<List<Double>> rows = new ArrayList<>();
     private final List<Integer> lineNumbers = new ArrayList<>();
+    private int headerLine;
     private List<Integer> places = List.of();
     private List<String> units = List.of();
 
@@ -45,10 +48,26 @@ final class ColumnFile {
      */
     record Column(String name, Optional<Dimension> dimension) {}
 
-    private ColumnFile(TextFile file) {
+    /**
+     * Columns as a study declares them, in place of a header.
+     *
+     * @param columns names in the order of the file, {@code -} for one to pass over
+     * @param units one a column
+     * @param skip lines at the top that hold no numbers
+     */
+    record Layout(List<String> columns, List<String> units, int skip) {
+        /** Copies the lists. */
+        Layout {
+            columns = List.copyOf(columns);
+            units = List.copyOf(units);
+        }
+    }
+
+    private ColumnFile(TextFile file, int skip) {
         this.file = file;
         this.lines = file.text().lines().toList();
         String header = lines.stream()
+                .skip(skip)
                 .filter(line -> !line.isBlank() && !line.startsWith("#"))
                 .findFirst()
                 .orElse("");
@@ -65,10 +84,56 @@ final class ColumnFile {
      * @throws flowshy.study.text.StudyException with every problem
      */
     static ColumnFile read(TextFile file, List<Column> wanted, int most) {
-        ColumnFile table = new ColumnFile(file);
-        table.parse(wanted, most);
+        ColumnFile table = new ColumnFile(file, 0);
+        table.parse(wanted, most, 0, false);
         table.problems.throwIfAny();
         return table;
+    }
+
+    /**
+     * Reads a table without a header of its own, or with one that does not count.
+     *
+     * @param file its text
+     * @param wanted columns to read, each of them in the layout
+     * @param layout what the columns hold
+     * @param most rows at most
+     * @return the table
+     * @throws flowshy.study.text.StudyException with every problem
+     */
+    static ColumnFile read(TextFile file, List<Column> wanted, Layout layout, int most) {
+        ColumnFile table = new ColumnFile(file, layout.skip());
+        table.places = wanted.stream()
+                .map(column -> layout.columns().indexOf(column.name()))
+                .toList();
+        table.units = table.places.stream().map(layout.units()::get).toList();
+        for (int i = 0; i < wanted.size(); i++) {
+            String unit = table.units.get(i);
+            wanted.get(i).dimension().ifPresent(d -> table.checkUnit(unit, d, Position.label(table.name())));
+        }
+        table.problems.throwIfAny();
+        table.parse(wanted, most, layout.skip(), true);
+        table.problems.throwIfAny();
+        return table;
+    }
+
+    /**
+     * The columns that the header of a file names, with their units.
+     *
+     * @param file its text
+     * @return unit by name, in the order of the file; empty if there is no header
+     */
+    static Map<String, String> heads(TextFile file) {
+        ColumnFile table = new ColumnFile(file, 0);
+        Map<String, String> heads = new LinkedHashMap<>();
+        try {
+            for (CsvRecord cells : table.reader()) {
+                cells.getFields().forEach(cell -> heads.putIfAbsent(part(cell, 1), part(cell, 2)));
+                return heads;
+            }
+        } catch (CsvParseException e) {
+            return heads; // told when the table itself is read
+        }
+        return heads;
     }
 
     /** Numbers in SI, one list a row, in the order of the wanted columns. */
@@ -76,17 +141,31 @@ final class ColumnFile {
         return rows;
     }
 
+    /** The unit of a wanted column, as written. */
+    String unit(int column) {
+        return units.get(column);
+    }
+
+    /** Where the heading of a wanted column stands; the file itself where it has no header that counts. */
+    Position head(int column) {
+        return headerLine == 0 ? Position.label(name()) : cell(headerLine, places.get(column));
+    }
+
     /** Where a number stands. */
     Position position(int row, int column) {
         return cell(lineNumbers.get(row), places.get(column));
     }
 
-    private void parse(List<Column> wanted, int most) {
-        boolean headed = false;
+    private void parse(List<Column> wanted, int most, int skip, boolean declared) {
+        boolean headed = declared;
         try {
             for (CsvRecord cells : reader()) {
                 int line = (int) cells.getStartingLineNumber();
+                if (line <= skip) {
+                    continue;
+                }
                 if (!headed) {
+                    headerLine = line;
                     header(cells.getFields(), wanted, line);
                     headed = true;
                     problems.throwIfAny();
@@ -101,7 +180,11 @@ final class ColumnFile {
             problems.add(Position.label(name()), "", "not readable as a table: " + Printable.of(e.getMessage()), "");
         }
         if (rows.isEmpty() && problems.count() == 0) {
-            problems.add(Position.label(name()), "", "no rows", "a header with units, then numbers");
+            problems.add(
+                    Position.label(name()),
+                    "",
+                    "no rows",
+                    declared ? "numbers below the skipped lines" : "a header with units, then numbers");
         }
     }
 

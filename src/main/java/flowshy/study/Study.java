@@ -8,6 +8,7 @@ import flowshy.verdict.Band;
 import flowshy.verdict.BandsQuestion;
 import flowshy.verdict.error.Motion;
 import flowshy.verdict.lid.Candidate;
+import flowshy.verdict.measured.MeasuredResponse;
 import java.util.Collections;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -26,6 +27,7 @@ import java.util.Optional;
  * @param candidates covers to choose from, in order of preference; empty if not stated
  * @param motion what is to be read
  * @param surroundings flows that are there, in the order written; empty if not stated
+ * @param measurements measured responses to lay beside the model, in the order written
  * @param document entries of the document block, in the order of the key table
  * @param takenAs every default that was used
  * @param understood every value that was written, and every one of the surroundings in full, in the order of the key table
@@ -40,6 +42,7 @@ public record Study(
         List<Candidate> candidates,
         Motion motion,
         List<Source> surroundings,
+        List<MeasuredResponse> measurements,
         Map<String, String> document,
         List<TakenAs> takenAs,
         List<Understood> understood) {
@@ -48,6 +51,7 @@ public record Study(
         document = Collections.unmodifiableMap(new LinkedHashMap<>(document));
         candidates = List.copyOf(candidates);
         surroundings = List.copyOf(surroundings);
+        measurements = List.copyOf(measurements);
         takenAs = List.copyOf(takenAs);
         understood = List.copyOf(understood);
     }

@@ -18,6 +18,7 @@ import flowshy.verdict.Acceptance;
 import flowshy.verdict.Band;
 import flowshy.verdict.error.Motion;
 import flowshy.verdict.lid.Candidate;
+import flowshy.verdict.measured.MeasuredResponse;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.LinkedHashMap;
@@ -62,6 +63,9 @@ final class StudyBuilder {
             fitted.addAll(sources.taken());
         }
         Acceptance acceptance = acceptance();
+        MeasurementBuilder measured = new MeasurementBuilder(form, problems, files);
+        List<MeasuredResponse> measurements = measured.build();
+        fitted.addAll(measured.taken());
         problems.throwIfAny();
         Device device = new Device(
                 hair.orElseThrow(),
@@ -79,6 +83,7 @@ final class StudyBuilder {
                 candidates,
                 motion,
                 surroundings,
+                measurements,
                 document(),
                 takenAs(fitted),
                 understood());

@@ -182,7 +182,10 @@ public final class Keys {
                 Key.later("tolerances", "spread of any number", "change the number with --set"),
                 Key.later("envelope", "states the device must bear", "change medium.temperature and others with --set"),
                 Key.later("variants", "other devices beside this one", "name several studies in one call"),
-                Key.later("measurements", "points drawn over the model", "leave it out"),
+                Key.optional(
+                        "measurements",
+                        MeasurementKeys.map(),
+                        "measured responses beside the model, each under a name"),
                 Key.of(
                         "finite-length",
                         Words.of("off", "on").later("write on: the whole hair is solved; off: strip theory", "auto"),

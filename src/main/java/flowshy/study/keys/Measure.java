@@ -99,7 +99,8 @@ public record Measure(Dimension dimension, boolean amplitude, boolean zero, Stri
         }
     }
 
-    private Quantity parse(String text) {
+    /** The number in a text; the range is not judged. */
+    Quantity parse(String text) {
         return amplitude ? Quantity.readAmplitude(text, dimension) : Quantity.read(text, dimension);
     }
 }

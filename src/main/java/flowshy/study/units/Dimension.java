@@ -56,12 +56,18 @@ public enum Dimension {
     ACCELERATION_NOISE("an acceleration noise", "m/s2/rtHz", "m/s2/rtHz ug/rtHz mg/rtHz"),
     /** torque per acceleration [N·m per m/s²] */
     TORQUE_PER_ACCELERATION("a torque per acceleration", "N.m/(m/s2)", "N.m/(m/s2) kg.m"),
-    /** angle per acceleration [rad per m/s²] */
-    ANGLE_PER_ACCELERATION("an angle per acceleration", "rad/(m/s2)", "rad/(m/s2) mrad/(m/s2) urad/(m/s2)"),
+    /** angle per acceleration [rad per m/s²]; in its units g is standard gravity */
+    ANGLE_PER_ACCELERATION("an angle per acceleration", "rad/(m/s2)", "rad/(m/s2) mrad/(m/s2) urad/(m/s2) mrad/g"),
     /** angle per speed [rad per m/s] */
     ANGLE_PER_SPEED("an angle per speed", "rad/(m/s)", "rad/(m/s) mrad/(m/s)"),
     /** acceleration per speed [m/s² per m/s] */
     ACCELERATION_PER_SPEED("an acceleration per speed", "m/s2/(m/s)", "m/s2/(m/s) mm/s2/(mm/s)"),
+    /** gain of a readout [V/rad] */
+    READOUT_GAIN("a gain of a readout", "V/rad", "V/rad mV/mrad V/deg"),
+    /** response of a device behind its readout [V per m/s²]; in its units g is standard gravity */
+    VOLTAGE_PER_ACCELERATION("a voltage per acceleration", "V/(m/s2)", "V/(m/s2) mV/(m/s2) mV/g"),
+    /** response of a device behind its readout [V per m/s] */
+    VOLTAGE_PER_SPEED("a voltage per speed", "V/(m/s)", "V/(m/s) mV/(m/s)"),
     /** level [dB], kept in decibels */
     LEVEL("a level", "dB", "dB"),
     /** share of a whole [-] */
@@ -134,7 +140,7 @@ public enum Dimension {
             case TIME -> Exponents.of(0, 0, 1);
             case FREQUENCY -> Exponents.of(0, 0, -1).with(0, 1);
             case ANGLE -> Exponents.NONE.with(1, 0);
-            case TEMPERATURE, TEMPERATURE_STEP -> new Exponents(0, 0, 0, 2, 0, 0, 0);
+            case TEMPERATURE, TEMPERATURE_STEP -> new Exponents(0, 0, 0, 2, 0, 0, 0, 0);
             case PRESSURE, ELASTIC_MODULUS -> Exponents.of(-1, 1, -2);
             case DENSITY -> Exponents.of(-3, 1, 0);
             case VISCOSITY -> Exponents.of(-1, 1, -1);
@@ -147,25 +153,38 @@ public enum Dimension {
             case STIFFNESS -> Exponents.of(2, 1, -2).with(-1, 0);
             case DAMPING -> Exponents.of(2, 1, -1).with(-1, 0);
             case INERTIA -> Exponents.of(2, 1, 0);
-            case ANGLE_NOISE -> new Exponents(0, 0, 1, 0, 2, -1, 0);
-            case ACCELERATION_NOISE -> new Exponents(2, 0, -3, 0, 0, -1, 0);
+            case ANGLE_NOISE -> new Exponents(0, 0, 1, 0, 2, -1, 0, 0);
+            case ACCELERATION_NOISE -> new Exponents(2, 0, -3, 0, 0, -1, 0, 0);
             case TORQUE_PER_ACCELERATION -> Exponents.of(1, 1, 0);
             case ANGLE_PER_ACCELERATION -> Exponents.of(-1, 0, 2).with(1, 0);
             case ANGLE_PER_SPEED -> Exponents.of(-1, 0, 1).with(1, 0);
             case ACCELERATION_PER_SPEED -> Exponents.of(0, 0, -1);
-            case LEVEL -> new Exponents(0, 0, 0, 0, 0, 0, 2);
+            case READOUT_GAIN -> Exponents.NONE.with(-1, 0).volts(1);
+            case VOLTAGE_PER_ACCELERATION -> Exponents.of(-1, 0, 2).volts(1);
+            case VOLTAGE_PER_SPEED -> Exponents.of(-1, 0, 1).volts(1);
+            case LEVEL -> new Exponents(0, 0, 0, 0, 0, 0, 2, 0);
             case SHARE, NUMBER -> Exponents.NONE;
         };
     }
 
     /** Whether {@code g} in its units is standard gravity, not the gram. */
     boolean gravity() {
-        return this == ACCELERATION || this == ACCELERATION_DENSITY || this == ACCELERATION_NOISE;
+        return this == ACCELERATION
+                || this == ACCELERATION_DENSITY
+                || this == ACCELERATION_NOISE
+                || this == ANGLE_PER_ACCELERATION
+                || this == VOLTAGE_PER_ACCELERATION;
+    }
+
+    /** Whether its units must name the angle. */
+    private boolean angular() {
+        return this == ANGLE || this == ANGLE_PER_ACCELERATION || this == ANGLE_PER_SPEED;
     }
 
     /** Whether a unit of these exponents fits. Leaving out the radian is usual for stiffness; an angle must have it. */
     boolean accepts(Exponents found) {
-        boolean radian = found.radian() == exponents().radian() || (found.radian() == 0 && this != ANGLE);
+        boolean radian = found.radian() == exponents().radian()
+                || (found.radian() == 0 && !angular());
         boolean cycle = found.cycle() == exponents().cycle() || (found.cycle() == 0 && this != FREQUENCY);
         return this != NUMBER && radian && cycle && found.sameKind(exponents());
     }

@@ -117,6 +117,7 @@ final class UnitTable {
         SYMBOLS.put("dyn", unit("1", "100000", Exponents.of(1, 1, -2)));
         SYMBOLS.put("Gal", unit("1", "100", Dimension.ACCELERATION));
         SYMBOLS.put("gn", FREE_FALL);
+        SYMBOLS.put("V", unit("1", "1", Exponents.NONE.volts(1)));
     }
 
     private static void names() {
@@ -133,6 +134,7 @@ final class UnitTable {
         NAMES.put("newton", SYMBOLS.get("N"));
         NAMES.put("pascal", SYMBOLS.get("Pa"));
         NAMES.put("kelvin", SYMBOLS.get("K"));
+        NAMES.put("volt", SYMBOLS.get("V"));
         NAMES.put("poise", SYMBOLS.get("P"));
         NAMES.put("stokes", SYMBOLS.get("St"));
         NAMES.put("degree", degree("1"));
