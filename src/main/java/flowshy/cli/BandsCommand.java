@@ -10,6 +10,8 @@ import flowshy.verdict.BandsQuestion;
 import flowshy.verdict.Decision;
 import flowshy.verdict.Levers;
 import flowshy.verdict.ThirdOctaves;
+import flowshy.verdict.measured.BesideModel;
+import flowshy.verdict.measured.Compared;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.concurrent.Callable;
@@ -61,10 +63,14 @@ final class BandsCommand implements Callable<Integer> {
             BandsAnswer answer =
                     question.answer(frequencies == null ? ThirdOctaves.in(study.band()) : frequencies.values());
             List<Levers> levers = why ? Levers.of(answer) : List.of();
-            texts.add(BandsText.of(study, answer, levers));
-            objects.add(() -> BandsJson.write(json, study, answer, levers));
+            List<Compared> measured = BesideModel.of(study.device(), study.measurements());
+            texts.add(BandsText.of(study, answer, levers, measured));
+            objects.add(() -> BandsJson.write(json, study, answer, levers, measured));
             if (output.csv()) {
                 tables.add(table(study, question, answer));
+                if (!measured.isEmpty()) {
+                    tables.add(TableCsv.measured(measured));
+                }
             }
             Decision decision = answer.verdict().decision();
             return decision == Decision.FAILS || decision == Decision.UNDECIDED ? Failures.LIMIT : 0;

@@ -10,6 +10,7 @@ import flowshy.verdict.DeviceFacts.Swing;
 import flowshy.verdict.Levers;
 import flowshy.verdict.Limit;
 import flowshy.verdict.ReadingBand;
+import flowshy.verdict.measured.Compared;
 import java.util.List;
 import java.util.Optional;
 
@@ -31,8 +32,10 @@ public final class BandsJson {
      * @param study what was asked
      * @param answer what was found
      * @param why explanations, left out if empty
+     * @param measured what was measured, beside the model, left out if empty
      */
-    public static void write(JsonPage json, Study study, BandsAnswer answer, List<Levers> why) {
+    public static void write(
+            JsonPage json, Study study, BandsAnswer answer, List<Levers> why, List<Compared> measured) {
         BandsJson page = new BandsJson(json);
         json.object(() -> {
             StudyJson.write(json, study);
@@ -62,6 +65,9 @@ public final class BandsJson {
                 json.array("why", why, page::levers);
             }
             answer.error().ifPresent(budget -> ErrorReport.write(json, budget));
+            if (!measured.isEmpty()) {
+                MeasuredReport.write(json, "measured", measured);
+            }
             CaveatJson.write(json, answer.caveats());
             json.object("verdict", () -> page.verdict(answer));
         });

@@ -15,6 +15,7 @@ import flowshy.verdict.DeviceFacts;
 import flowshy.verdict.Levers;
 import flowshy.verdict.Limit;
 import flowshy.verdict.ReadingBand;
+import flowshy.verdict.measured.Compared;
 import java.util.EnumSet;
 import java.util.List;
 import java.util.Optional;
@@ -43,9 +44,10 @@ public final class BandsText {
      * @param study what was asked
      * @param answer what was found
      * @param why explanations of edges and failed limits; none if the list is empty
+     * @param measured what was measured, beside the model; empty if nothing was
      * @return text with a line end after every line
      */
-    public static String of(Study study, BandsAnswer answer, List<Levers> why) {
+    public static String of(Study study, BandsAnswer answer, List<Levers> why, List<Compared> measured) {
         BandsText text = new BandsText(study, answer);
         text.decision();
         text.taken();
@@ -54,6 +56,7 @@ public final class BandsText {
         text.bands();
         answer.error().ifPresent(budget -> ErrorReport.print(text.page, budget, text.spectral()));
         text.points();
+        MeasuredReport.print(text.page, "Measured beside the model", measured);
         text.explain(why);
         text.page.line("");
         text.page.paragraph(Cautions.SHORT);

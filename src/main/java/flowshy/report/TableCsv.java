@@ -4,6 +4,7 @@ import de.siegmar.fastcsv.writer.CsvWriter;
 import de.siegmar.fastcsv.writer.LineDelimiter;
 import flowshy.math.Figures;
 import flowshy.verdict.BandsAnswer;
+import flowshy.verdict.measured.Compared;
 import java.io.IOException;
 import java.io.StringWriter;
 import java.io.UncheckedIOException;
@@ -21,6 +22,16 @@ public final class TableCsv {
      */
     public static String points(BandsAnswer answer) {
         return of(answer.points(), PointTable.all(answer.acceptance()));
+    }
+
+    /**
+     * What was measured, beside the model, point by point.
+     *
+     * @param measured as compared
+     * @return text; empty if there is nothing
+     */
+    public static String measured(List<Compared> measured) {
+        return MeasuredReport.csv(measured);
     }
 
     /**

@@ -124,6 +124,7 @@ final class MeasurementBuilder {
                     units.size() + " units for " + columns.size() + " columns",
                     "one a column, '-' for one that is passed over");
         }
+        int before = problems.count();
         for (int i = 0; i < columns.size(); i++) {
             String column = columns.get(i);
             String key = path + ".columns[" + i + "]";
@@ -138,11 +139,13 @@ final class MeasurementBuilder {
                 refuse(key, "column " + column + " again", "each once");
             }
         }
-        if (!columns.contains("frequency")) {
+        boolean known = problems.count() == before;
+        if (known && !columns.contains("frequency")) {
             refuse(path + ".columns", "no column frequency", "frequency and amplitude must be there");
         }
-        if (columns.stream()
-                .noneMatch(c -> c.equals("amplitude") || Measurand.of(c).isPresent())) {
+        if (known
+                && columns.stream()
+                        .noneMatch(c -> c.equals("amplitude") || Measurand.of(c).isPresent())) {
             refuse(path + ".columns", "no column amplitude", "frequency and amplitude must be there");
         }
         double skip = form.siIfAny(path + ".skip").orElse(0.0);

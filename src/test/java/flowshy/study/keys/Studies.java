@@ -139,6 +139,14 @@ final class Studies {
               horn: {kind: sound, levels: [[100 Hz, 71 dB], [125 Hz, 74 dB]], distance: 20 cm}
               logged: {kind: spectrum, file: a.csv, columns: [f, S], quantity: density, unit: (m/s)2/Hz, skip: 3, mean-speed: 0.2 m/s, fetch: 1 cm}
               probe: {kind: record, file: b.csv, columns: ['t [ms]', '-', u], unit: m/s, skip: 1, rate: 2 kHz, resolution: 2 Hz, distance: 1 m}
+            """, """
+            hair: {length: 610 um, diameter: 77 um, density: 1.3 g/cm3}
+            suspension: {stiffness: 3 nN.m/rad}
+            medium: nitrogen
+            measurements:
+              shaker run 7: {file: run7.csv, of: motion, gain: -2.5 mV/mrad}
+              tunnel: {file: tunnel.csv, of: flow, gain: free, columns: [frequency, amplitude, '-'], units: [Hz, mV/(m/s), '-'], skip: 2}
+              both: {file: ratio.csv, of: rejection}
             """);
 
     private Studies() {}
