@@ -27,10 +27,10 @@ record ResponseUnit(Reading reading, Dimension dimension, double factor, boolean
     private static final Pattern ABOVE = Pattern.compile("dB\\s+re\\.?:?\\s*([0-9.eE+-]+\\s+)?(\\S.*)");
 
     private static final List<Dimension> RESPONSES = List.of(
-            Dimension.ANGLE_RESPONSE,
-            Dimension.ANGLE_RESPONSE_TO_SPEED,
-            Dimension.VOLTAGE_RESPONSE,
-            Dimension.VOLTAGE_RESPONSE_TO_SPEED);
+            Dimension.ANGLE_PER_ACCELERATION,
+            Dimension.ANGLE_PER_SPEED,
+            Dimension.VOLTAGE_PER_ACCELERATION,
+            Dimension.VOLTAGE_PER_SPEED);
 
     /** The unit in a heading; empty if it is none of a response. */
     static Optional<ResponseUnit> of(String text, Measurand of) {
@@ -54,9 +54,8 @@ record ResponseUnit(Reading reading, Dimension dimension, double factor, boolean
             Optional<Double> factor = factor(count, symbol, dimension);
             if (factor.isPresent() && factor.get() > 0.0) {
                 boolean volts =
-                        dimension == Dimension.VOLTAGE_RESPONSE || dimension == Dimension.VOLTAGE_RESPONSE_TO_SPEED;
-                boolean speed = dimension == Dimension.ANGLE_RESPONSE_TO_SPEED
-                        || dimension == Dimension.VOLTAGE_RESPONSE_TO_SPEED;
+                        dimension == Dimension.VOLTAGE_PER_ACCELERATION || dimension == Dimension.VOLTAGE_PER_SPEED;
+                boolean speed = dimension == Dimension.ANGLE_PER_SPEED || dimension == Dimension.VOLTAGE_PER_SPEED;
                 return Optional.of(new ResponseUnit(new Reading(volts, speed), dimension, factor.get(), false));
             }
         }

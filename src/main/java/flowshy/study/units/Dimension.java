@@ -183,8 +183,7 @@ public enum Dimension {
 
     /** Whether a unit of these exponents fits. Leaving out the radian is usual for stiffness; an angle must have it. */
     boolean accepts(Exponents found) {
-        boolean radian = found.radian() == exponents().radian()
-                || (found.radian() == 0 && !angular());
+        boolean radian = found.radian() == exponents().radian() || (found.radian() == 0 && !angular());
         boolean cycle = found.cycle() == exponents().cycle() || (found.cycle() == 0 && this != FREQUENCY);
         return this != NUMBER && radian && cycle && found.sameKind(exponents());
     }
