@@ -41,6 +41,12 @@ class ArchitectureTest {
     @ArchTest
     static final ArchRule WINDOWS_AT_HOME = onlyIn("flowshy.report..", "java.awt..");
 
+    @ArchTest
+    static final ArchRule CHARTS_AT_HOME = onlyIn("flowshy.report.chart.paper..", "org.jfree..");
+
+    @ArchTest
+    static final ArchRule SVG_AT_HOME = onlyIn("flowshy.report.chart.paper..", "org.apache.batik..");
+
     /** The two numerics libraries share ancestry: one does not check the other, and no class mixes their types. */
     @ArchTest
     static final ArchRule ONE_NUMERICS_LIBRARY_A_CLASS = noClasses()

@@ -4,6 +4,8 @@ import flowshy.report.BandsJson;
 import flowshy.report.BandsText;
 import flowshy.report.JsonPage;
 import flowshy.report.TableCsv;
+import flowshy.report.chart.BandsCharts;
+import flowshy.report.chart.Chart;
 import flowshy.study.Study;
 import flowshy.verdict.BandsAnswer;
 import flowshy.verdict.BandsQuestion;
@@ -37,6 +39,9 @@ final class BandsCommand implements Callable<Integer> {
     @Mixin
     private OutputOptions output;
 
+    @Mixin
+    private ChartOptions charts;
+
     @Option(
             names = "--frequencies",
             paramLabel = "LIST",
@@ -65,7 +70,9 @@ final class BandsCommand implements Callable<Integer> {
             List<Levers> levers = why ? Levers.of(answer) : List.of();
             List<Compared> measured = BesideModel.of(study.device(), study.measurements());
             texts.add(BandsText.of(study, answer, levers, measured));
-            objects.add(() -> BandsJson.write(json, study, answer, levers, measured));
+            List<Chart> drawn = charts.asked() ? BandsCharts.of(study, answer) : List.of();
+            charts.add(drawn);
+            objects.add(() -> BandsJson.write(json, study, answer, levers, measured, drawn));
             if (output.csv()) {
                 tables.add(table(study, question, answer));
                 if (!measured.isEmpty()) {
@@ -75,6 +82,7 @@ final class BandsCommand implements Callable<Integer> {
             Decision decision = answer.verdict().decision();
             return decision == Decision.FAILS || decision == Decision.UNDECIDED ? Failures.LIMIT : 0;
         });
+        charts.write();
         studies.send(spec.commandLine(), output, json, texts, objects, tables);
         return code;
     }

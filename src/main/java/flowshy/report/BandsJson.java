@@ -1,5 +1,6 @@
 package flowshy.report;
 
+import flowshy.report.chart.Chart;
 import flowshy.response.Calibration;
 import flowshy.response.Device;
 import flowshy.response.ResponsePoint;
@@ -33,9 +34,15 @@ public final class BandsJson {
      * @param answer what was found
      * @param why explanations, left out if empty
      * @param measured what was measured, beside the model, left out if empty
+     * @param charts drawn of it, their numbers are left out if there are none
      */
     public static void write(
-            JsonPage json, Study study, BandsAnswer answer, List<Levers> why, List<Compared> measured) {
+            JsonPage json,
+            Study study,
+            BandsAnswer answer,
+            List<Levers> why,
+            List<Compared> measured,
+            List<Chart> charts) {
         BandsJson page = new BandsJson(json);
         json.object(() -> {
             StudyJson.write(json, study);
@@ -70,6 +77,7 @@ public final class BandsJson {
             }
             CaveatJson.write(json, answer.caveats());
             json.object("verdict", () -> page.verdict(answer));
+            ChartTables.write(json, charts);
         });
     }
 

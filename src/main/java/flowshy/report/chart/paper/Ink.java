@@ -1,0 +1,84 @@
+package flowshy.report.chart.paper;
+
+import java.awt.BasicStroke;
+import java.awt.Color;
+import java.awt.Stroke;
+
+/**
+ * How a line is drawn: a colour that the colour-blind can tell apart and a dash that survives a black-and-white print. One meaning has one
+ * ink in every chart.
+ *
+ * <p>Hues after Okabe &amp; Ito 2008 (Color Universal Design, jfly.uni-koeln.de, from memory), the light ones darkened so that every line
+ * keeps a contrast of 3 : 1 on white.
+ */
+public enum Ink {
+    /** response to motion, and the hair's own inertia */
+    MOTION(0x0072B2, 2.0f),
+    /** response to flow, and its whole torque */
+    FLOW(0xC84E00, 2.0f, 7, 3),
+    /** pressure gradient that drives the flow */
+    GRADIENT(0x8A6500, 1.6f, 12, 3, 2, 3),
+    /** added mass */
+    ADDED_MASS(0x00805C, 1.6f, 5, 2, 1.5f, 2),
+    /** viscous drag and damping */
+    DAMPING(0xA34E86, 1.6f, 2, 2),
+    /** noise of the device itself */
+    NOISE(0x5A5A5A, 1.6f, 1.2f, 2.4f),
+    /** a limit asked for */
+    LIMIT(0x111111, 1.4f, 10, 4),
+    /** what was measured */
+    MEASURED(0x111111, 1.2f),
+    /** first of several alike */
+    FIRST(0x0072B2, 1.8f),
+    /** second of several alike */
+    SECOND(0xA34E86, 1.8f, 9, 3),
+    /** third of several alike */
+    THIRD(0x00805C, 1.8f, 5, 2, 1.5f, 2),
+    /** fourth of several alike */
+    FOURTH(0x8A6500, 1.8f, 2.5f, 2),
+    /** fifth of several alike */
+    FIFTH(0x3B3B8F, 1.8f, 12, 3, 2, 3, 2, 3),
+    /** sixth of several alike */
+    SIXTH(0x6B4A3A, 1.8f, 1.2f, 3);
+
+    private final int rgb;
+    private final float width;
+    private final float[] dash;
+
+    Ink(int rgb, float width, float... dash) {
+        this.rgb = rgb;
+        this.width = width;
+        this.dash = dash.clone();
+    }
+
+    /**
+     * Its colour.
+     *
+     * @return opaque
+     */
+    public Color colour() {
+        return new Color(rgb);
+    }
+
+    /**
+     * Its stroke.
+     *
+     * @return width and dash in units of the sheet
+     */
+    public Stroke stroke() {
+        return dash.length == 0
+                ? new BasicStroke(width, BasicStroke.CAP_BUTT, BasicStroke.JOIN_ROUND)
+                : new BasicStroke(width, BasicStroke.CAP_BUTT, BasicStroke.JOIN_ROUND, 10.0f, dash, 0.0f);
+    }
+
+    /**
+     * Ink of one of several things of one kind that have no meaning of their own.
+     *
+     * @param index from zero; after the sixth they begin anew
+     * @return the ink
+     */
+    public static Ink alike(int index) {
+        Ink[] several = {FIRST, SECOND, THIRD, FOURTH, FIFTH, SIXTH};
+        return several[index % several.length];
+    }
+}
