@@ -13,42 +13,43 @@ import java.awt.Stroke;
  */
 public enum Ink {
     /** response to motion, and the hair's own inertia */
-    MOTION(0x0072B2, 2.0f),
+    MOTION(0x0072B2, 2.0f, ""),
     /** response to flow, and its whole torque */
-    FLOW(0xC84E00, 2.0f, 7, 3),
+    FLOW(0xC84E00, 2.0f, "7 3"),
     /** pressure gradient that drives the flow */
-    GRADIENT(0x8A6500, 1.6f, 12, 3, 2, 3),
+    GRADIENT(0x8A6500, 1.6f, "12 3 2 3"),
     /** added mass */
-    ADDED_MASS(0x00805C, 1.6f, 5, 2, 1.5f, 2),
+    ADDED_MASS(0x00805C, 1.6f, "5 2 1.5 2"),
     /** viscous drag and damping */
-    DAMPING(0xA34E86, 1.6f, 2, 2),
+    DAMPING(0xA34E86, 1.6f, "2 2"),
     /** noise of the device itself */
-    NOISE(0x5A5A5A, 1.6f, 1.2f, 2.4f),
+    NOISE(0x5A5A5A, 1.6f, "1.2 2.4"),
     /** a limit asked for */
-    LIMIT(0x111111, 1.4f, 10, 4),
+    LIMIT(0x111111, 1.4f, "10 4"),
     /** what was measured */
-    MEASURED(0x111111, 1.2f),
+    MEASURED(0x111111, 1.2f, ""),
     /** first of several alike */
-    FIRST(0x0072B2, 1.8f),
+    FIRST(0x0072B2, 1.8f, ""),
     /** second of several alike */
-    SECOND(0xA34E86, 1.8f, 9, 3),
+    SECOND(0xA34E86, 1.8f, "9 3"),
     /** third of several alike */
-    THIRD(0x00805C, 1.8f, 5, 2, 1.5f, 2),
+    THIRD(0x00805C, 1.8f, "5 2 1.5 2"),
     /** fourth of several alike */
-    FOURTH(0x8A6500, 1.8f, 2.5f, 2),
+    FOURTH(0x8A6500, 1.8f, "2.5 2"),
     /** fifth of several alike */
-    FIFTH(0x3B3B8F, 1.8f, 12, 3, 2, 3, 2, 3),
+    FIFTH(0x3B3B8F, 1.8f, "12 3 2 3 2 3"),
     /** sixth of several alike */
-    SIXTH(0x6B4A3A, 1.8f, 1.2f, 3);
+    SIXTH(0x6B4A3A, 1.8f, "1.2 3");
 
     private final int rgb;
     private final float width;
-    private final float[] dash;
+    /** Lengths on and off, separated by spaces; empty for a whole line. */
+    private final String dash;
 
-    Ink(int rgb, float width, float... dash) {
+    Ink(int rgb, float width, String dash) {
         this.rgb = rgb;
         this.width = width;
-        this.dash = dash.clone();
+        this.dash = dash;
     }
 
     /**
@@ -66,9 +67,15 @@ public enum Ink {
      * @return width and dash in units of the sheet
      */
     public Stroke stroke() {
-        return dash.length == 0
-                ? new BasicStroke(width, BasicStroke.CAP_BUTT, BasicStroke.JOIN_ROUND)
-                : new BasicStroke(width, BasicStroke.CAP_BUTT, BasicStroke.JOIN_ROUND, 10.0f, dash, 0.0f);
+        if (dash.isEmpty()) {
+            return new BasicStroke(width, BasicStroke.CAP_BUTT, BasicStroke.JOIN_ROUND);
+        }
+        String[] lengths = dash.split(" ", -1);
+        float[] pattern = new float[lengths.length];
+        for (int i = 0; i < pattern.length; i++) {
+            pattern[i] = Float.parseFloat(lengths[i]);
+        }
+        return new BasicStroke(width, BasicStroke.CAP_BUTT, BasicStroke.JOIN_ROUND, 10.0f, pattern, 0.0f);
     }
 
     /**

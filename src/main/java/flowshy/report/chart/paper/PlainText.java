@@ -9,7 +9,7 @@ final class PlainText {
         text.codePoints().forEach(point -> {
             if (Character.isWhitespace(point) || Character.isSpaceChar(point)) {
                 plain.append(' ');
-            } else if (point >= Character.MIN_SURROGATE && point <= Character.MAX_SURROGATE
+            } else if ((point >= Character.MIN_SURROGATE && point <= Character.MAX_SURROGATE)
                     || point == 0xFFFE
                     || point == 0xFFFF) {
                 plain.append('\uFFFD');
