@@ -39,6 +39,9 @@ class ArchitectureTest {
     static final ArchRule JSON_AT_HOME = onlyIn("flowshy.report..", "com.fasterxml..");
 
     @ArchTest
+    static final ArchRule PAPER_AT_HOME = onlyIn("flowshy.report.pdf..", "com.openhtmltopdf..", "org.apache.pdfbox..");
+
+    @ArchTest
     static final ArchRule WINDOWS_AT_HOME = onlyIn("flowshy.report..", "java.awt..");
 
     @ArchTest
@@ -74,8 +77,8 @@ class ArchitectureTest {
         return layers.whereLayer(TOP_DOWN.get(0)).mayNotBeAccessedByAnyLayer();
     }
 
-    private static ArchRule onlyIn(String home, String library) {
+    private static ArchRule onlyIn(String home, String... libraries) {
         DescribedPredicate<JavaClass> away = DescribedPredicate.not(resideInAPackage(home));
-        return noClasses().that(away).should().dependOnClassesThat().resideInAPackage(library);
+        return noClasses().that(away).should().dependOnClassesThat().resideInAnyPackage(libraries);
     }
 }

@@ -29,7 +29,7 @@ import picocli.CommandLine.Spec;
 public final class Main implements Runnable {
     /** In the order of the help; {@link #command} makes each. */
     private static final List<String> COMMANDS =
-            List.of("bands", "lid", "fill", "cylinder", "media", "surroundings", "check", "start");
+            List.of("bands", "lid", "fill", "cylinder", "media", "surroundings", "check", "start", "report");
 
     @Spec
     private CommandSpec spec;
@@ -76,6 +76,7 @@ public final class Main implements Runnable {
             case "surroundings" -> new SurroundingsCommand();
             case "check" -> new CheckCommand();
             case "start" -> new StartCommand();
+            case "report" -> new ReportCommand();
             default -> throw new IllegalArgumentException("no command " + name);
         };
     }

@@ -29,6 +29,15 @@ final class StudyOptions {
     private List<String> settings = new ArrayList<>();
 
     /**
+     * The studies named.
+     *
+     * @return their files, in order
+     */
+    List<Path> files() {
+        return List.copyOf(studies);
+    }
+
+    /**
      * Reads every study and works on it; the problems of one do not stop the others.
      *
      * @param line the command, for its error writer

@@ -1,9 +1,9 @@
 package flowshy.report;
 
 /** The cautions that stand under every answer. */
-final class Cautions {
+public final class Cautions {
     /** For a terminal. */
-    static final String SHORT =
+    public static final String SHORT =
             "An estimate for design, to be confirmed by test. Where a wrong reading can hurt someone, follow local"
                     + " codes and licensed practice.";
 

@@ -16,7 +16,7 @@ public record Cell(OptionalDouble value, String reason) {
      * @param reason why it is missing if it is not finite
      * @return the cell
      */
-    static Cell of(double value, String reason) {
+    public static Cell of(double value, String reason) {
         return Double.isFinite(value) ? new Cell(OptionalDouble.of(value), "") : missing(reason);
     }
 
@@ -27,7 +27,7 @@ public record Cell(OptionalDouble value, String reason) {
      * @param reason why it is absent
      * @return the cell
      */
-    static Cell of(OptionalDouble value, String reason) {
+    public static Cell of(OptionalDouble value, String reason) {
         return value.isPresent() ? of(value.getAsDouble(), reason) : missing(reason);
     }
 
@@ -37,7 +37,7 @@ public record Cell(OptionalDouble value, String reason) {
      * @param reason why
      * @return the cell
      */
-    static Cell missing(String reason) {
+    public static Cell missing(String reason) {
         return new Cell(OptionalDouble.empty(), reason);
     }
 }

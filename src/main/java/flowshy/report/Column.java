@@ -12,4 +12,4 @@ import java.util.function.Function;
  * @param digits significant digits printed
  * @param cell takes the number from a row
  */
-record Column<T>(String name, String label, String unit, int digits, Function<T, Cell> cell) {}
+public record Column<T>(String name, String label, String unit, int digits, Function<T, Cell> cell) {}

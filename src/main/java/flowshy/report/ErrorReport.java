@@ -9,14 +9,19 @@ import flowshy.verdict.error.SourceError;
 import java.util.List;
 
 /** The error budget as a part of an answer: text and JSON from one set of columns. */
-final class ErrorReport {
+public final class ErrorReport {
     private static final String NO_FLOW = "no flow acts in this band";
     private static final String NO_SUSPENSION = "no suspension is stated that holds the hair";
     private static final String NO_FULL_SCALE = "motion.full-scale is not stated";
 
     private ErrorReport() {}
 
-    private static List<Column<SourceError>> sources() {
+    /**
+     * What each source adds, column by column.
+     *
+     * @return columns in the order printed
+     */
+    public static List<Column<SourceError>> sources() {
         return List.of(
                 new Column<>("rms_m_s2", "error", "m/s2 rms", 3, source -> Cell.of(source.rms(), "")),
                 new Column<>("offset_m_s2", "offset", "m/s2", 3, source -> Cell.of(source.offset(), "")),
@@ -31,7 +36,12 @@ final class ErrorReport {
                         source -> Cell.of(source.cutOff(), "only a stream that carries turbulence has one")));
     }
 
-    private static List<Column<ThirdOctaveLevel>> levels() {
+    /**
+     * Signal against error by third-octave.
+     *
+     * @return columns in the order printed
+     */
+    public static List<Column<ThirdOctaveLevel>> levels() {
         return List.of(
                 new Column<>("frequency_hz", "freq.", "Hz", 5, level -> Cell.of(level.middle(), "")),
                 new Column<>("signal_m_s2", "motion", "m/s2 rms", 3, level -> Cell.of(level.signal(), "")),

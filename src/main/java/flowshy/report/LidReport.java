@@ -24,7 +24,12 @@ public final class LidReport {
 
     private LidReport() {}
 
-    private static List<Column<CoverRow>> columns() {
+    /**
+     * What each cover does, column by column.
+     *
+     * @return columns in the order of the file
+     */
+    public static List<Column<CoverRow>> columns() {
         return List.of(
                 new Column<>("rejection_from_db", "from", "dB", 4, row -> Cell.of(edge(row, false), unbounded(row))),
                 new Column<>("rejection_to_db", "to", "dB", 4, row -> Cell.of(edge(row, true), unbounded(row))),
@@ -172,7 +177,12 @@ public final class LidReport {
         return page.toString();
     }
 
-    private static List<Column<RequiredAttenuation>> required() {
+    /**
+     * The attenuation a cover must give, by frequency.
+     *
+     * @return two columns
+     */
+    public static List<Column<RequiredAttenuation>> required() {
         return List.of(
                 new Column<>("frequency_hz", "freq.", "Hz", 5, point -> Cell.of(point.frequency(), "")),
                 new Column<>(

@@ -10,7 +10,7 @@ import org.hipparchus.complex.Complex;
 import org.hipparchus.util.FastMath;
 
 /** Columns of the response table: one list for terminal, CSV and JSON. */
-final class PointTable {
+public final class PointTable {
     private static final String NO_BOUND = "no flow reaches the hair under a sealed cover, the rejection has no bound";
     private static final String NEITHER = "neither motion nor flow turns the hair";
     private static final String NO_SUSPENSION = "no suspension is stated that holds the hair";
@@ -30,7 +30,7 @@ final class PointTable {
      * @param acceptance gives the error limit
      * @return columns in the order of the file
      */
-    static List<Column<ResponsePoint>> all(Acceptance acceptance) {
+    public static List<Column<ResponsePoint>> all(Acceptance acceptance) {
         List<Column<ResponsePoint>> columns = new ArrayList<>();
         columns.add(new Column<>("frequency_hz", "freq.", "Hz", 5, point -> Cell.of(point.frequency(), "")));
         columns.add(new Column<>("rejection_db", "reject.", "dB", 4, PointTable::rejection));
@@ -70,7 +70,7 @@ final class PointTable {
      * @param moving whether the responses are known
      * @return columns in the order printed
      */
-    static List<Column<ResponsePoint>> printed(Acceptance acceptance, boolean moving) {
+    public static List<Column<ResponsePoint>> printed(Acceptance acceptance, boolean moving) {
         return all(acceptance).stream()
                 .filter(column -> !column.name().contains("noise"))
                 .filter(column -> moving || !MOVEMENT.contains(column.name()))

@@ -25,11 +25,22 @@ public final class WholeFile {
      * @throws IOException if the folder cannot be written or is full; nothing is left behind then
      */
     public static void write(Path target, String text) throws IOException {
+        write(target, text.getBytes(StandardCharsets.UTF_8));
+    }
+
+    /**
+     * Writes bytes over whatever was there.
+     *
+     * @param target file to be written
+     * @param bytes its content
+     * @throws IOException if the folder cannot be written or is full; nothing is left behind then
+     */
+    public static void write(Path target, byte[] bytes) throws IOException {
         // beside the target and not a system temporary file: that would be its owner's alone, and perhaps on another
         // disk
         Path half = half(target);
         try {
-            Files.write(half, text.getBytes(StandardCharsets.UTF_8), StandardOpenOption.CREATE_NEW);
+            Files.write(half, bytes, StandardOpenOption.CREATE_NEW);
             move(half, target);
         } finally {
             Files.deleteIfExists(half);

@@ -78,11 +78,12 @@ public record Study(
      * Where a study came from.
      *
      * @param file name of the study file as given on the command line
+     * @param text of the study file, without a byte order mark
      * @param sha256 digest of its bytes, 64 hexadecimal digits
      * @param filesRead every further file that was read, in order
      * @param settings KEY=VALUE words that overlaid the file, in order
      */
-    public record Origin(String file, String sha256, List<FileRead> filesRead, List<String> settings) {
+    public record Origin(String file, String text, String sha256, List<FileRead> filesRead, List<String> settings) {
         /** Copies the lists. */
         public Origin {
             filesRead = List.copyOf(filesRead);

@@ -75,7 +75,7 @@ final class StudyBuilder {
                 cover.orElseThrow().around());
         return new Study(
                 form.word("title").orElse(""),
-                new Study.Origin(file.name(), file.sha256(), files.read(), settings),
+                new Study.Origin(file.name(), file.text(), file.sha256(), files.read(), settings),
                 device,
                 band.orElseThrow(),
                 acceptance,

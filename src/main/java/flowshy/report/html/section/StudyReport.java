@@ -1,0 +1,110 @@
+package flowshy.report.html.section;
+
+import flowshy.math.Caveat;
+import flowshy.math.Caveat.Subject;
+import flowshy.math.Caveat.Weight;
+import flowshy.report.html.Typography;
+import flowshy.stream.Source;
+import flowshy.stream.cover.Covers;
+import flowshy.study.Study;
+import flowshy.verdict.BandsAnswer;
+import flowshy.verdict.Decision;
+import flowshy.verdict.Levers;
+import flowshy.verdict.Limit;
+import flowshy.verdict.lid.Candidate;
+import flowshy.verdict.lid.LidAnswer;
+import flowshy.verdict.lid.LidQuestion;
+import java.util.ArrayList;
+import java.util.EnumSet;
+import java.util.List;
+import java.util.Optional;
+import java.util.Set;
+
+/**
+ * What the report tells: a study and everything found about it.
+ *
+ * @param study what was asked
+ * @param answer bands, points, error and verdict of its device
+ * @param lid covers side by side, where the study names candidates or a cover
+ * @param why what would move edges of bands and failed limits, empty where there is none
+ */
+public record StudyReport(Study study, BandsAnswer answer, Optional<LidAnswer> lid, List<Levers> why) {
+    /** A weakness here weakens the rejection, and so the bands. */
+    private static final Set<Subject> ALWAYS =
+            EnumSet.of(Subject.MEDIUM, Subject.HAIR, Subject.REJECTION, Subject.COVER);
+
+    /** Copies the list. */
+    public StudyReport {
+        why = List.copyOf(why);
+    }
+
+    /**
+     * Answers every question of a study.
+     *
+     * @param study what is asked
+     * @return what the report tells
+     */
+    public static StudyReport of(Study study) {
+        BandsAnswer answer = study.question().answer();
+        return new StudyReport(study, answer, lid(study), Levers.of(answer));
+    }
+
+    private static Optional<LidAnswer> lid(Study study) {
+        List<Candidate> candidates = new ArrayList<>(study.candidates());
+        if (candidates.isEmpty() && !study.device().cover().equals(Covers.OPEN)) {
+            candidates.add(new Candidate(study.device().cover(), study.device().around()));
+        }
+        return candidates.isEmpty()
+                ? Optional.empty()
+                : Optional.of(new LidQuestion(study.question(), study.reference(), candidates).answer());
+    }
+
+    /**
+     * How the device of the study comes out.
+     *
+     * @return the decision under the cover that the study states
+     */
+    public Decision decision() {
+        return answer.verdict().decision();
+    }
+
+    /**
+     * What a page is called.
+     *
+     * @return the study's title, or its file where it has none
+     */
+    public String title() {
+        return study.title().isEmpty() ? study.origin().file() : study.title();
+    }
+
+    /**
+     * Sentences of ours may repeat these words of the user: names of sources and of files.
+     *
+     * @return typography that leaves them as they are
+     */
+    public Typography typography() {
+        List<String> words = new ArrayList<>();
+        study.surroundings().stream().map(Source::name).forEach(words::add);
+        study.origin().filesRead().stream().map(Study.FileRead::file).forEach(words::add);
+        return new Typography(words);
+    }
+
+    /**
+     * Whether the decision rests on what a caveat weakens.
+     *
+     * @param caveat one of the answer
+     * @return true for a model that has ended, and for a weakness of the rejection or, where an error limit was judged, of the error
+     */
+    public boolean touches(Caveat caveat) {
+        return caveat.weight() == Weight.OUT_OF_RANGE
+                || (caveat.weight() == Weight.WEAK && (ALWAYS.contains(caveat.about()) || errorJudged()));
+    }
+
+    private boolean errorJudged() {
+        return answer.verdict().limits().stream().anyMatch(limit -> limit.name().equals("error") && judged(limit));
+    }
+
+    private static boolean judged(Limit limit) {
+        return limit.decision() != Decision.NOT_ASKED;
+    }
+}
