@@ -18,6 +18,7 @@ final class Couplings {
     static final int UNLIKE = 1;
     static final int AXIAL = 2;
     static final int CROSS = 3;
+    static final int KINDS = 4;
 
     /** Which kernel joins test density c and source density t. */
     private static final int[][] KIND = {{LIKE, UNLIKE, CROSS}, {UNLIKE, LIKE, CROSS}, {CROSS, CROSS, AXIAL}};
@@ -25,14 +26,14 @@ final class Couplings {
     /** Sign of the cross kernel for a test above its source. */
     private static final int[][] TURN = {{1, 1, 1}, {1, 1, -1}, {-1, 1, 1}};
 
-    final double[] valueRe = new double[4];
-    final double[] valueIm = new double[4];
-    final double[] slopeRe = new double[4];
-    final double[] slopeIm = new double[4];
+    final double[] valueRe = new double[KINDS];
+    final double[] valueIm = new double[KINDS];
+    final double[] slopeRe = new double[KINDS];
+    final double[] slopeIm = new double[KINDS];
     /** Wall: factor of S S′ a kind. */
-    final double[] wallRe = new double[4];
+    final double[] wallRe = new double[KINDS];
 
-    final double[] wallIm = new double[4];
+    final double[] wallIm = new double[KINDS];
     /** Wall: −s κ (q+κ) and −s κ. */
     final double farRe;
 

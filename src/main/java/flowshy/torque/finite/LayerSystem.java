@@ -3,6 +3,7 @@ package flowshy.torque.finite;
 import java.util.Arrays;
 import java.util.List;
 import org.hipparchus.complex.Complex;
+import org.hipparchus.util.FastMath;
 
 /**
  * Galerkin matrix of the ring layer over a no-slip wall, and the velocities that displaced fluid and a moving foot give, each
@@ -24,26 +25,38 @@ final class LayerSystem {
     private final double[][] columnRe;
     private final double[][] columnIm;
 
-    private final RingTransform[] rings;
-    private final boolean[] active;
+    private final List<Ring> outline;
+    private final RingTransform[] all;
     private final FootSlot slot;
-    private final double lowest;
     private final double[] through = new double[Twin.SIZE];
     private final double[] seen = new double[RingTransform.DENSITIES * Twin.SIZE];
     private final double[] product = new double[Twin.SIZE];
+    private final TestTwins test = new TestTwins();
+    private final RadialFactors radial = new RadialFactors();
     private final WallWave wall;
 
+    /** Rings that still act at the wavenumbers of the panel, from the foot to the tip, and the way up to each. */
+    private int active;
+
+    private final int[] index;
+    private final RingTransform[] rings;
+    private final double[] gap;
+    private final double[] between;
+
     private LayerSystem(List<Ring> rings, FootSlot slot) {
-        this.rings = rings.stream().map(RingTransform::new).toArray(RingTransform[]::new);
+        this.outline = rings;
+        this.all = rings.stream().map(RingTransform::new).toArray(RingTransform[]::new);
         this.size = RingTransform.SURFACE * rings.size();
         this.re = new double[size][size];
         this.im = new double[size][size];
         this.columnRe = new double[COLUMNS][size];
         this.columnIm = new double[COLUMNS][size];
-        this.active = new boolean[rings.size()];
         this.slot = slot;
-        this.lowest = rings.get(0).bottom();
         this.wall = new WallWave(rings.size());
+        this.index = new int[rings.size()];
+        this.rings = new RingTransform[rings.size()];
+        this.gap = new double[rings.size()];
+        this.between = new double[Twin.SIZE * rings.size()];
     }
 
     /**
@@ -61,18 +74,34 @@ final class LayerSystem {
         }
         double[] reached = new double[rings.size()];
         for (WavePanels panel : WavePanels.over(rings, cutoffs)) {
-            for (int i = 0; i < cutoffs.length; i++) {
-                system.active[i] = cutoffs[i] > panel.from();
-                reached[i] = system.active[i] ? panel.to() : reached[i];
-            }
+            system.choose(panel, cutoffs, reached);
             for (int n = 0; n < panel.size(); n++) {
                 system.add(panel.wave(n, beta));
             }
         }
         for (int i = 0; i < cutoffs.length; i++) {
             system.addTail(i, RingTail.of(rings.get(i), reached[i], beta));
+            if (i > 0) {
+                double from = FastMath.min(reached[i - 1], reached[i]);
+                system.addJoint(i, RingTail.joint(rings.get(i), rings.get(i - 1), from));
+            }
         }
         return system;
+    }
+
+    private void choose(WavePanels panel, double[] cutoffs, double[] reached) {
+        active = 0;
+        double top = 0.0;
+        for (int i = 0; i < cutoffs.length; i++) {
+            if (cutoffs[i] > panel.from()) {
+                reached[i] = panel.to();
+                index[active] = i;
+                rings[active] = all[i];
+                gap[active] = outline.get(i).bottom() - top;
+                top = outline.get(i).top();
+                active++;
+            }
+        }
     }
 
     int size() {
@@ -92,26 +121,20 @@ final class LayerSystem {
     }
 
     private void add(Wave wave) {
-        RadialFactors transform = new RadialFactors();
         Couplings couplings = new Couplings(wave);
-        for (int i = 0; i < rings.length; i++) {
-            if (active[i]) {
-                rings[i].at(wave, transform);
-            } else {
-                rings[i].passOnly(wave);
-            }
+        for (int i = 0; i < active; i++) {
+            rings[i].at(wave, radial);
+            wave.pass(gap[i], between, Twin.SIZE * i);
         }
-        for (int i = 0; i < rings.length; i++) {
-            if (active[i]) {
-                within(i, couplings);
-                below(i, wave, couplings);
-            }
+        for (int i = 0; i < active; i++) {
+            within(i, couplings);
+            below(i, wave, couplings);
         }
         volumes(wave, couplings);
-        wall.set(wave, rings, active, lowest);
-        wall.addPairs(couplings, active, re, im);
-        wall.addVolumes(couplings, active, columnRe, columnIm);
-        wall.addFoot(wave, slot, active, columnRe, columnIm);
+        wall.set(wave, rings, between, active);
+        wall.addPairs(couplings, index, re, im);
+        wall.addVolumes(couplings, index, columnRe, columnIm);
+        wall.addFoot(wave, slot, index, columnRe, columnIm);
     }
 
     private void within(int i, Couplings couplings) {
@@ -119,15 +142,15 @@ final class LayerSystem {
         for (int c = 0; c < RingTransform.SURFACE; c++) {
             for (int d = 0; d < RingTransform.DENSITIES; d++) {
                 int at = (c * RingTransform.DENSITIES + d) * Twin.SIZE;
-                couple(couplings, i, c, i, d, 0, ring.level, at);
+                couple(couplings, i, c, d, 0, ring.level, at);
                 if (!ring.single()) {
                     // of surface densities, c below d is d above c
                     int turned = (d * RingTransform.DENSITIES + c) * Twin.SIZE;
-                    couple(couplings, i, c, i, d, 1, ring.above, at);
+                    couple(couplings, i, c, d, 1, ring.above, at);
                     if (d < RingTransform.SURFACE) {
-                        couple(couplings, i, c, i, d, -1, ring.above, turned);
+                        couple(couplings, i, c, d, -1, ring.above, turned);
                     } else {
-                        couple(couplings, i, c, i, d, -1, ring.below, at);
+                        couple(couplings, i, c, d, -1, ring.below, at);
                     }
                 }
             }
@@ -136,17 +159,16 @@ final class LayerSystem {
 
     /** Ring i as test of every ring below it; the matrix is symmetric. */
     private void below(int i, Wave wave, Couplings couplings) {
+        test.set(couplings, rings[i].up, wave);
         Twin.one(through, 0);
+        int row = RingTransform.SURFACE * index[i];
         for (int j = i - 1; j >= 0; j--) {
-            if (active[j]) {
-                for (int d = 0; d < RingTransform.SURFACE; d++) {
-                    int at = d * Twin.SIZE;
-                    Twin.multiply(through, 0, rings[j].down, at, seen, at, wave.dRe, wave.dIm);
-                    for (int c = 0; c < RingTransform.SURFACE; c++) {
-                        Twin.multiply(rings[i].up, c * Twin.SIZE, seen, at, product, 0, wave.dRe, wave.dIm);
-                        couple(couplings, i, c, j, d, 1, product, 0);
-                    }
-                }
+            if (gap[j + 1] > 0.0) {
+                Twin.multiply(through, 0, between, Twin.SIZE * (j + 1), through, 0, wave.dRe, wave.dIm);
+            }
+            for (int d = 0; d < RingTransform.SURFACE; d++) {
+                Twin.multiply(through, 0, rings[j].down, d * Twin.SIZE, seen, 0, wave.dRe, wave.dIm);
+                test.add(d, seen, re, im, row, RingTransform.SURFACE * index[j] + d);
             }
             Twin.multiply(through, 0, rings[j].pass, 0, through, 0, wave.dRe, wave.dIm);
             if (through[0] < FADED) {
@@ -158,32 +180,39 @@ final class LayerSystem {
     /** What the displaced fluid below and above each ring does to it: two sweeps. */
     private void volumes(Wave wave, Couplings couplings) {
         Arrays.fill(seen, 0.0);
-        for (int i = 0; i < rings.length; i++) {
+        for (int i = 0; i < active; i++) {
+            cross(i, wave);
             pass(i, 1, wave, couplings);
         }
         Arrays.fill(seen, 0.0);
-        for (int i = rings.length - 1; i >= 0; i--) {
+        for (int i = active - 1; i >= 0; i--) {
             pass(i, -1, wave, couplings);
+            cross(i, wave);
+        }
+    }
+
+    /** The waves of the volumes through the gap under ring i. */
+    private void cross(int i, Wave wave) {
+        for (int d = RingTransform.SURFACE; gap[i] > 0.0 && d < RingTransform.DENSITIES; d++) {
+            Twin.multiply(seen, d * Twin.SIZE, between, Twin.SIZE * i, seen, d * Twin.SIZE, wave.dRe, wave.dIm);
         }
     }
 
     private void pass(int i, int side, Wave wave, Couplings couplings) {
-        double[] test = side > 0 ? rings[i].up : rings[i].down;
+        double[] met = side > 0 ? rings[i].up : rings[i].down;
         double[] source = side > 0 ? rings[i].down : rings[i].up;
         for (int d = RingTransform.SURFACE; d < RingTransform.DENSITIES; d++) {
             int at = d * Twin.SIZE;
-            for (int c = 0; active[i] && c < RingTransform.SURFACE; c++) {
-                Twin.multiply(test, c * Twin.SIZE, seen, at, product, 0, wave.dRe, wave.dIm);
-                couple(couplings, i, c, i, d, side, product, 0);
+            for (int c = 0; c < RingTransform.SURFACE; c++) {
+                Twin.multiply(met, c * Twin.SIZE, seen, at, product, 0, wave.dRe, wave.dIm);
+                couple(couplings, i, c, d, side, product, 0);
             }
             Twin.multiply(seen, at, rings[i].pass, 0, seen, at, wave.dRe, wave.dIm);
-            if (active[i]) {
-                Twin.addScaled(1.0, source, at, seen, at);
-            }
+            Twin.addScaled(1.0, source, at, seen, at);
         }
     }
 
-    private void couple(Couplings k, int i, int c, int j, int d, int side, double[] twin, int at) {
+    private void couple(Couplings k, int i, int c, int d, int side, double[] twin, int at) {
         int source = RingTransform.kind(d);
         int kind = Couplings.kind(c, source);
         int sign = Couplings.sign(c, source, side);
@@ -191,10 +220,10 @@ final class LayerSystem {
                 sign * (k.valueRe[kind] * twin[at] + k.slopeRe[kind] * twin[at + 1] - k.slopeIm[kind] * twin[at + 2]);
         double imaginary =
                 sign * (k.valueIm[kind] * twin[at] + k.slopeRe[kind] * twin[at + 2] + k.slopeIm[kind] * twin[at + 1]);
-        int row = RingTransform.SURFACE * i + c;
+        int row = RingTransform.SURFACE * index[i] + c;
         if (d < RingTransform.SURFACE) {
-            re[row][RingTransform.SURFACE * j + d] += real;
-            im[row][RingTransform.SURFACE * j + d] += imaginary;
+            re[row][row - c + d] += real;
+            im[row][row - c + d] += imaginary;
         } else {
             columnRe[d - RingTransform.SURFACE][row] += real;
             columnIm[d - RingTransform.SURFACE][row] += imaginary;
@@ -207,6 +236,15 @@ final class LayerSystem {
             for (int d = 0; d < RingTransform.SURFACE; d++) {
                 re[at + c][at + d] += tail[c][d].getReal();
                 im[at + c][at + d] += tail[c][d].getImaginary();
+            }
+        }
+    }
+
+    private void addJoint(int i, double[][] tail) {
+        int at = RingTransform.SURFACE * i;
+        for (int c = 0; c < RingTransform.SURFACE; c++) {
+            for (int d = 0; d < RingTransform.SURFACE; d++) {
+                re[at + c][at - RingTransform.SURFACE + d] += tail[c][d];
             }
         }
     }

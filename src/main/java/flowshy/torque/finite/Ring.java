@@ -11,9 +11,12 @@ import org.hipparchus.util.FastMath;
  */
 record Ring(List<RingPiece> pieces) {
     /** Cut-off times length; an upright ring costs one piece however high it is. */
-    private static final double STRAIGHT_CUTOFF = 30.0;
+    private static final double STRAIGHT_CUTOFF = 10.0;
 
-    private static final double SLANTED_CUTOFF = 20.0;
+    private static final double SLANTED_CUTOFF = 10.0;
+
+    /** Largest step of the stairs over their radius: a ring near a point is no cylinder. */
+    private static final double STEP = 0.15;
 
     /** Largest cut-off times step of the stairs that stand for a slope. */
     private static final double STAIR = 0.6;
@@ -27,7 +30,8 @@ record Ring(List<RingPiece> pieces) {
         RingPiece chord = RingPiece.between(from, to);
         double minor = FastMath.min(FastMath.abs(chord.width()), chord.thickness());
         double highest = FastMath.max(SLANTED_CUTOFF / chord.length(), cutoff);
-        return (int) FastMath.max(1.0, FastMath.ceil(highest * minor / STAIR));
+        double steps = FastMath.max(highest * minor / STAIR, minor / (STEP * chord.radius()));
+        return (int) FastMath.max(1.0, FastMath.ceil(steps));
     }
 
     static Ring through(List<MeridianPoint> points) {
@@ -51,8 +55,15 @@ record Ring(List<RingPiece> pieces) {
     }
 
     double top() {
-        RingPiece last = pieces.get(pieces.size() - 1);
-        return last.from().height() + last.thickness();
+        return highest().from().height() + highest().thickness();
+    }
+
+    RingPiece lowest() {
+        return pieces.get(0);
+    }
+
+    RingPiece highest() {
+        return pieces.get(pieces.size() - 1);
     }
 
     double outerRadius() {

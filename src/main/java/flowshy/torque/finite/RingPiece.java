@@ -24,6 +24,11 @@ record RingPiece(MeridianPoint from, double width, double thickness) {
         return FastMath.hypot(width, thickness);
     }
 
+    /** Angle against the axis, positive where the body grows wider upward. */
+    double lean() {
+        return FastMath.atan2(width, thickness);
+    }
+
     /** Length along the surface over extent along z (upright) or r (flat). */
     double stretch() {
         return length() / (upright() ? thickness : FastMath.abs(width));

@@ -15,6 +15,7 @@ final class WallWave {
 
     private static final int[] SIGN_R = {1, -1, -1};
 
+    private int count;
     private final double[] size;
     /** S = ± e and R = ± D of {@link Couplings}, complex, at 2 (6 i + d). */
     private final double[] s;
@@ -26,6 +27,10 @@ final class WallWave {
     private final double[] base = new double[Twin.SIZE];
     private final double[] twin = new double[Twin.SIZE];
     private final double[] transforms = new double[2];
+    /** Of one test density: factor of R′, then of S′ a kind. */
+    private final double[] factorR = new double[2];
+
+    private final double[] factorS = new double[2 * Couplings.KINDS];
 
     WallWave(int rings) {
         size = new double[rings];
@@ -34,11 +39,14 @@ final class WallWave {
         value = new double[DENSITIES * rings];
     }
 
-    void set(Wave wave, RingTransform[] rings, boolean[] active, double lowest) {
-        wave.pass(lowest, base, 0);
-        for (int i = 0; i < rings.length; i++) {
+    /** The first rings of a list, with the way up to each from the one before, or from the wall. */
+    void set(Wave wave, RingTransform[] rings, double[] between, int active) {
+        count = active;
+        Twin.one(base, 0);
+        for (int i = 0; i < count; i++) {
+            Twin.multiply(base, 0, between, Twin.SIZE * i, base, 0, wave.dRe, wave.dIm);
             size[i] = FastMath.abs(base[0]);
-            for (int d = 0; active[i] && d < DENSITIES; d++) {
+            for (int d = 0; d < DENSITIES; d++) {
                 Twin.multiply(base, 0, rings[i].up, d * Twin.SIZE, twin, 0, wave.dRe, wave.dIm);
                 int kind = RingTransform.kind(d);
                 int at = 2 * (DENSITIES * i + d);
@@ -52,17 +60,19 @@ final class WallWave {
         }
     }
 
-    void addPairs(Couplings k, boolean[] active, double[][] re, double[][] im) {
-        double[] sum = new double[2];
-        for (int i = 0; i < size.length; i++) {
-            // the waves fall from the wall up, so the first pair that has faded is the last to look at
-            for (int j = 0; active[i] && j <= i && size[i] * size[j] > FADED; j++) {
-                for (int c = 0; active[j] && c < SURFACE; c++) {
+    void addPairs(Couplings k, int[] index, double[][] re, double[][] im) {
+        for (int i = 0; i < count; i++) {
+            for (int c = 0; c < SURFACE; c++) {
+                test(k, 2 * (DENSITIES * i + c));
+                int row = SURFACE * index[i] + c;
+                // the waves fall from the wall up, so the first pair that has faded is the last to look at
+                for (int j = 0; j <= i && size[i] * size[j] > FADED; j++) {
                     for (int d = 0; d < SURFACE; d++) {
                         int other = 2 * (DENSITIES * j + d);
-                        term(k, Couplings.kind(c, d), 2 * (DENSITIES * i + c), s, r, other, sum);
-                        re[SURFACE * i + c][SURFACE * j + d] += sum[0];
-                        im[SURFACE * i + c][SURFACE * j + d] += sum[1];
+                        int column = SURFACE * index[j] + d;
+                        int kind = 2 * Couplings.kind(c, d);
+                        re[row][column] += real(kind, s, r, other);
+                        im[row][column] += imaginary(kind, s, r, other);
                     }
                 }
             }
@@ -70,26 +80,27 @@ final class WallWave {
     }
 
     /** All volumes together: the wall's part has the same form for every height, so their sums over the kinds are enough. */
-    void addVolumes(Couplings k, boolean[] active, double[][] re, double[][] im) {
-        double[] sum = new double[2];
+    void addVolumes(Couplings k, int[] index, double[][] re, double[][] im) {
+        double[] totalS = new double[2];
+        double[] totalR = new double[2];
         for (int d = SURFACE; d < DENSITIES; d++) {
-            double[] totalS = new double[2];
-            double[] totalR = new double[2];
-            for (int j = 0; j < size.length; j++) {
+            totalS[0] = 0.0;
+            totalS[1] = 0.0;
+            totalR[0] = 0.0;
+            totalR[1] = 0.0;
+            for (int j = 0; j < count; j++) {
                 int at = 2 * (DENSITIES * j + d);
-                if (active[j]) {
-                    totalS[0] += s[at];
-                    totalS[1] += s[at + 1];
-                    totalR[0] += r[at];
-                    totalR[1] += r[at + 1];
-                }
+                totalS[0] += s[at];
+                totalS[1] += s[at + 1];
+                totalR[0] += r[at];
+                totalR[1] += r[at + 1];
             }
-            for (int i = 0; i < size.length; i++) {
-                for (int c = 0; active[i] && c < SURFACE; c++) {
-                    int kind = Couplings.kind(c, RingTransform.kind(d));
-                    term(k, kind, 2 * (DENSITIES * i + c), totalS, totalR, 0, sum);
-                    re[d - SURFACE][SURFACE * i + c] += sum[0];
-                    im[d - SURFACE][SURFACE * i + c] += sum[1];
+            for (int i = 0; i < count; i++) {
+                for (int c = 0; c < SURFACE; c++) {
+                    test(k, 2 * (DENSITIES * i + c));
+                    int kind = 2 * Couplings.kind(c, RingTransform.kind(d));
+                    re[d - SURFACE][SURFACE * index[i] + c] += real(kind, totalS, totalR, 0);
+                    im[d - SURFACE][SURFACE * index[i] + c] += imaginary(kind, totalS, totalR, 0);
                 }
             }
         }
@@ -99,13 +110,13 @@ final class WallWave {
      * Foot that slides with unit velocity, U_x = p(r), and that tilts, U_z = −x p(r). A wall moving with U_L, U_z gives
      * u_L = q(U_L + iU_z) D + U_L e^{−κz}, u_z = i[(U_L + iU_z)(qD − e) + U_L e^{−κz}], and across e U_T (own, as the kernels).
      */
-    void addFoot(Wave wave, FootSlot slot, boolean[] active, double[][] re, double[][] im) {
+    void addFoot(Wave wave, FootSlot slot, int[] index, double[][] re, double[][] im) {
         slot.transforms(wave.kappa, transforms);
         double slide = wave.weight * transforms[0];
         double tilt = wave.weight * transforms[1];
-        for (int i = 0; i < size.length; i++) {
-            for (int c = 0; active[i] && c < SURFACE; c++) {
-                int row = SURFACE * i + c;
+        for (int i = 0; i < count && size[i] > FADED; i++) {
+            for (int c = 0; c < SURFACE; c++) {
+                int row = SURFACE * index[i] + c;
                 int at = 2 * (DENSITIES * i + c);
                 // D and e with the plain sign of the Bessel function
                 double dRe = SIGN_R[c] * r[at];
@@ -130,19 +141,33 @@ final class WallWave {
         }
     }
 
-    /** far R R′ + near (R S′ + S R′) + wall S S′. */
-    private void term(Couplings k, int kind, int at, double[] otherS, double[] otherR, int o, double[] out) {
+    /** far R R′ + near (R S′ + S R′) + wall S S′ as factors of R′ and S′. */
+    private void test(Couplings k, int at) {
         double sRe = s[at];
         double sIm = s[at + 1];
         double rRe = r[at];
         double rIm = r[at + 1];
-        // factor of R′
-        double aRe = k.farRe * rRe - k.farIm * rIm + k.nearRe * sRe - k.nearIm * sIm;
-        double aIm = k.farRe * rIm + k.farIm * rRe + k.nearRe * sIm + k.nearIm * sRe;
-        // factor of S′
-        double bRe = k.nearRe * rRe - k.nearIm * rIm + k.wallRe[kind] * sRe - k.wallIm[kind] * sIm;
-        double bIm = k.nearRe * rIm + k.nearIm * rRe + k.wallRe[kind] * sIm + k.wallIm[kind] * sRe;
-        out[0] = aRe * otherR[o] - aIm * otherR[o + 1] + bRe * otherS[o] - bIm * otherS[o + 1];
-        out[1] = aRe * otherR[o + 1] + aIm * otherR[o] + bRe * otherS[o + 1] + bIm * otherS[o];
+        factorR[0] = k.farRe * rRe - k.farIm * rIm + k.nearRe * sRe - k.nearIm * sIm;
+        factorR[1] = k.farRe * rIm + k.farIm * rRe + k.nearRe * sIm + k.nearIm * sRe;
+        double nearRe = k.nearRe * rRe - k.nearIm * rIm;
+        double nearIm = k.nearRe * rIm + k.nearIm * rRe;
+        for (int kind = 0; kind < Couplings.KINDS; kind++) {
+            factorS[2 * kind] = nearRe + k.wallRe[kind] * sRe - k.wallIm[kind] * sIm;
+            factorS[2 * kind + 1] = nearIm + k.wallRe[kind] * sIm + k.wallIm[kind] * sRe;
+        }
+    }
+
+    private double real(int kind, double[] otherS, double[] otherR, int o) {
+        return factorR[0] * otherR[o]
+                - factorR[1] * otherR[o + 1]
+                + factorS[kind] * otherS[o]
+                - factorS[kind + 1] * otherS[o + 1];
+    }
+
+    private double imaginary(int kind, double[] otherS, double[] otherR, int o) {
+        return factorR[0] * otherR[o + 1]
+                + factorR[1] * otherR[o]
+                + factorS[kind] * otherS[o + 1]
+                + factorS[kind + 1] * otherS[o];
     }
 }

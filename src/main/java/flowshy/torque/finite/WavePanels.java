@@ -14,12 +14,12 @@ import org.hipparchus.util.FastMath;
  */
 record WavePanels(double from, double to) {
     /** First panel in units of one over the height. */
-    private static final double FIRST = 0.1;
+    private static final double FIRST = 0.5;
 
     /** Width in units of one over the radius: the product of two Bessel functions turns by 20 in it, three times. */
     private static final double TURN = 10.0;
 
-    private static final GaussLegendre RULE = GaussLegendre.of(16);
+    private static final GaussLegendre RULE = GaussLegendre.of(8);
 
     static List<WavePanels> over(List<Ring> rings, double[] cutoffs) {
         double height = 0.0;
