@@ -9,9 +9,15 @@ import java.util.OptionalDouble;
  * @param density ρ_h [kg/m³]
  * @param youngsModulus E [Pa], absent if not stated; needed only for bending
  * @param lengthModel how the medium's forces see its length
+ * @param footGap gap between the foot and the wall around it that the turning leaves [m]; absent: the usual share of the radius
  */
-public record Hair(Profile profile, double density, OptionalDouble youngsModulus, LengthModel lengthModel) {
-    /** @throws IllegalArgumentException if density or modulus is not positive and finite */
+public record Hair(
+        Profile profile,
+        double density,
+        OptionalDouble youngsModulus,
+        LengthModel lengthModel,
+        OptionalDouble footGap) {
+    /** @throws IllegalArgumentException if density, modulus or gap is not positive and finite */
     public Hair {
         if (!(density > 0.0) || Double.isInfinite(density)) {
             throw new IllegalArgumentException("hair density must be positive and finite, was " + density + " kg/m3");
@@ -21,6 +27,23 @@ public record Hair(Profile profile, double density, OptionalDouble youngsModulus
                 throw new IllegalArgumentException("Young's modulus must be positive and finite, was " + modulus);
             }
         });
+        footGap.ifPresent(gap -> {
+            if (!(gap > 0.0) || Double.isInfinite(gap)) {
+                throw new IllegalArgumentException("foot gap must be positive and finite, was " + gap + " m");
+            }
+        });
+    }
+
+    /**
+     * A hair with the usual gap at its foot.
+     *
+     * @param profile its shape
+     * @param density ρ_h [kg/m³]
+     * @param youngsModulus E [Pa], absent if not stated
+     * @param lengthModel how the medium's forces see its length
+     */
+    public Hair(Profile profile, double density, OptionalDouble youngsModulus, LengthModel lengthModel) {
+        this(profile, density, youngsModulus, lengthModel, OptionalDouble.empty());
     }
 
     /**
@@ -37,11 +60,11 @@ public record Hair(Profile profile, double density, OptionalDouble youngsModulus
     /**
      * The same hair under another model of its length.
      *
-     * @param model strips, or the whole hair
+     * @param model strip theory, repaired or corrected
      * @return a hair
      */
     public Hair seenAs(LengthModel model) {
-        return new Hair(profile, density, youngsModulus, model);
+        return new Hair(profile, density, youngsModulus, model, footGap);
     }
 
     /**
@@ -51,7 +74,7 @@ public record Hair(Profile profile, double density, OptionalDouble youngsModulus
      * @return a hair
      */
     public Hair ofDensity(double other) {
-        return new Hair(profile, other, youngsModulus, lengthModel);
+        return new Hair(profile, other, youngsModulus, lengthModel, footGap);
     }
 
     /**
@@ -61,7 +84,7 @@ public record Hair(Profile profile, double density, OptionalDouble youngsModulus
      * @return a hair of this density and modulus
      */
     public Hair reshaped(Profile other) {
-        return new Hair(other, density, youngsModulus, lengthModel);
+        return new Hair(other, density, youngsModulus, lengthModel, footGap);
     }
 
     /**

@@ -254,13 +254,16 @@ public final class BandsText {
     private void points() {
         boolean moving =
                 answer.points().stream().allMatch(point -> point.motion().isPresent());
+        boolean corrected =
+                answer.points().stream().anyMatch(point -> point.finiteLength().isPresent());
         page.heading("Response by frequency");
         page.table(
-                PointTable.printed(answer.acceptance(), moving),
+                PointTable.printed(answer.acceptance(), moving, corrected),
                 answer.points(),
                 point -> point.frequency() < answer.band().from() * (1.0 - 1e-9)
                         || point.frequency() > answer.band().to() * (1.0 + 1e-9));
-        page.paragraph("equiv.: acceleration of the base that reads as much as flow of unit velocity."
+        page.paragraph((corrected ? "finite: what tip and wall change in the rejection of strip theory. " : "")
+                + "equiv.: acceleration of the base that reads as much as flow of unit velocity."
                 + (answer.acceptance().error().isPresent()
                         ? " speed: largest flow speed that keeps the error limit."
                         : "")

@@ -19,6 +19,9 @@ public final class PointTable {
     private static final String NO_READOUT = "no readout noise is stated";
     private static final String NO_PHASE = "the response is zero";
 
+    private static final String STRIPS = "strip theory is used";
+    private static final String FINITE_LENGTH = "finite_length_db";
+
     private static final List<String> MOVEMENT =
             List.of("motion_rad_per_m_s2", "motion_phase_deg", "flow_rad_per_m_s2", "flow_phase_deg");
 
@@ -34,6 +37,7 @@ public final class PointTable {
         List<Column<ResponsePoint>> columns = new ArrayList<>();
         columns.add(new Column<>("frequency_hz", "freq.", "Hz", 5, point -> Cell.of(point.frequency(), "")));
         columns.add(new Column<>("rejection_db", "reject.", "dB", 4, PointTable::rejection));
+        columns.add(new Column<>(FINITE_LENGTH, "finite", "dB", 3, PointTable::finiteLength));
         columns.add(new Column<>(
                 "motion_rad_per_m_s2",
                 "motion",
@@ -68,10 +72,12 @@ public final class PointTable {
      *
      * @param acceptance gives the error limit
      * @param moving whether the responses are known
+     * @param corrected whether strip theory is corrected for finite length; the Womersley number makes room
      * @return columns in the order printed
      */
-    public static List<Column<ResponsePoint>> printed(Acceptance acceptance, boolean moving) {
+    public static List<Column<ResponsePoint>> printed(Acceptance acceptance, boolean moving, boolean corrected) {
         return all(acceptance).stream()
+                .filter(column -> !column.name().equals(corrected ? "womersley" : FINITE_LENGTH))
                 .filter(column -> !column.name().contains("noise"))
                 .filter(column -> moving || !MOVEMENT.contains(column.name()))
                 .filter(column ->
@@ -82,6 +88,11 @@ public final class PointTable {
     private static Cell rejection(ResponsePoint point) {
         double rejection = point.rejection();
         return Cell.of(rejection, Double.isNaN(rejection) ? NEITHER : NO_BOUND);
+    }
+
+    private static Cell finiteLength(ResponsePoint point) {
+        Cell rejection = rejection(point);
+        return Cell.of(point.finiteLength(), rejection.reason().isEmpty() ? STRIPS : rejection.reason());
     }
 
     private static double size(Optional<Complex> response) {

@@ -33,6 +33,16 @@ public final class Response {
     }
 
     /**
+     * Says over which frequencies the response will be asked for.
+     *
+     * @param lowest [Hz]
+     * @param highest above the lowest [Hz]
+     */
+    public void expect(double lowest, double highest) {
+        model.expect(2.0 * FastMath.PI * lowest, 2.0 * FastMath.PI * highest);
+    }
+
+    /**
      * The device.
      *
      * @return as given
@@ -71,11 +81,32 @@ public final class Response {
      * @return 20 lg |T_motion/T_flow| [dB]; +∞ where no flow reaches the hair
      */
     public double rejection(double frequency) {
-        Torques torques = torques(frequency);
+        return rejection(torques(frequency));
+    }
+
+    private double rejection(Torques torques) {
         Complex factor = device.cover().factor(torques.omega(), device.around());
         return 20.0
                 * FastMath.log10(
                         torques.motion(factor).norm() / torques.flow(factor).norm());
+    }
+
+    /**
+     * What tip and wall do to the rejection.
+     *
+     * @param frequency [Hz]
+     * @return rejection less that of strip theory [dB]; absent under strip theory, or where no flow reaches the hair
+     */
+    public OptionalDouble finiteLength(double frequency) {
+        return finiteLength(torques(frequency));
+    }
+
+    private OptionalDouble finiteLength(Torques torques) {
+        if (model.strips() == model) {
+            return OptionalDouble.empty();
+        }
+        double change = rejection(torques) - rejection(model.strips().at(torques.omega()));
+        return Double.isFinite(change) ? OptionalDouble.of(change) : OptionalDouble.empty();
     }
 
     /**
@@ -107,6 +138,7 @@ public final class Response {
                 denominator.map(motionTorque::divide),
                 denominator.map(flowTorque::divide),
                 new OscillatingCylinder(device.hair().profile().largestRadius(), device.around()).womersley(omega),
+                finiteLength(torques),
                 thermal,
                 readout);
     }

@@ -14,6 +14,8 @@ import org.hipparchus.util.FastMath;
  * @param motion angle per acceleration of the base [rad per m/s²], empty without a suspension
  * @param flow angle per acceleration of the fluid outside [rad per m/s²], empty without a suspension
  * @param womersley a√(ω/ν) of the thickest part [-]
+ * @param finiteLength what tip and wall do to the rejection, less that of strip theory [dB]; absent under strip theory, or where no
+ *     flow reaches the hair
  * @param thermalNoise acceleration that equals the thermal torque noise [m/s²/√Hz], absent without a suspension
  * @param readoutNoise acceleration that equals the readout noise [m/s²/√Hz], absent unless stated
  */
@@ -24,6 +26,7 @@ public record ResponsePoint(
         Optional<Complex> motion,
         Optional<Complex> flow,
         double womersley,
+        OptionalDouble finiteLength,
         OptionalDouble thermalNoise,
         OptionalDouble readoutNoise) {
     /**

@@ -33,15 +33,19 @@ final class HairBuilder {
             case "club" -> club();
             default -> new ProfileReader(form, problems, files).read();
         };
-        LengthModel model =
-                form.word("finite-length").orElse("off").equals("on") ? LengthModel.FINITE : LengthModel.STRIPS;
-        return profile.map(p -> new Hair(p, form.si("hair.density"), form.siIfAny("hair.youngs-modulus"), model));
+        LengthModel model = LengthModel.of(form.word("finite-length").orElseThrow());
+        return profile.map(p -> new Hair(
+                p, form.si("hair.density"), form.siIfAny("hair.youngs-modulus"), model, form.siIfAny("hair.foot-gap")));
     }
 
     /** The hair of a known shape, where nothing but its material changes. */
     Hair of(Hair base) {
         return new Hair(
-                base.profile(), form.si("hair.density"), form.siIfAny("hair.youngs-modulus"), base.lengthModel());
+                base.profile(),
+                form.si("hair.density"),
+                form.siIfAny("hair.youngs-modulus"),
+                base.lengthModel(),
+                form.siIfAny("hair.foot-gap"));
     }
 
     private Optional<Profile> cylinder() {

@@ -41,7 +41,7 @@ public final class VariedStudy implements DesignSpace {
     /** Media kept for a grid that comes back to them; moist air takes twenty times as long as the rest of a point. */
     private static final int KEPT = 4096;
 
-    private static final List<String> MATERIAL = List.of("hair.density", "hair.youngs-modulus");
+    private static final List<String> MATERIAL = List.of("hair.density", "hair.youngs-modulus", "hair.foot-gap");
 
     private final Form form;
     private final FilesRead files;
@@ -232,14 +232,23 @@ public final class VariedStudy implements DesignSpace {
         }
 
         private Optional<Hair> hair() {
+            Optional<Hair> hair = made();
+            boolean solvedAnew = varies("suspension.pivot-depth") || shape();
+            return solvedAnew ? hair.map(h -> h.seenAs(h.lengthModel().overShapes())) : hair;
+        }
+
+        private Optional<Hair> made() {
             if (!varies("hair.")) {
                 return Optional.of(base.device().hair());
             }
             HairBuilder builder = new HairBuilder(now, problems, read);
-            boolean shape = paths.stream().anyMatch(path -> path.startsWith("hair.") && !MATERIAL.contains(path));
-            return shape
+            return shape()
                     ? builder.build()
                     : Optional.of(builder.of(base.device().hair()));
+        }
+
+        private boolean shape() {
+            return paths.stream().anyMatch(path -> path.startsWith("hair.") && !MATERIAL.contains(path));
         }
 
         private Optional<CoverBuilder.Fitted> cover(Hair hair, Medium outside, Band band) {

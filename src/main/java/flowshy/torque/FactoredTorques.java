@@ -6,13 +6,14 @@ import org.hipparchus.complex.Complex;
 import org.hipparchus.util.FastMath;
 
 /**
- * Strip theory times the factors of the whole hair: one on the torque of flow, one on the fluid's inertia. T_open = T_carried − T_flow
+ * Strip theory times factors for finite length: one on the torque of flow, one on the fluid's inertia. T_open = T_carried − T_flow
  * still holds, each from its own integral.
  *
  * @param strips strip theory
- * @param factors of the finite hair
+ * @param factors of the finite hair on an open wall
+ * @param confined whether a cavity confines the fluid that the turning moves: then its inertia stays that of the confined strips
  */
-record FactoredTorques(TorqueModel strips, LengthFactors factors) implements TorqueModel {
+record FactoredTorques(TorqueModel strips, LengthFactors factors, boolean confined) implements TorqueModel {
     @Override
     public Torques at(double omega) {
         Torques base = strips.at(omega);
@@ -22,14 +23,21 @@ record FactoredTorques(TorqueModel strips, LengthFactors factors) implements Tor
                 base.flow().multiply(factor.stream()),
                 base.open().subtract(base.carried()).multiply(factor.stream()).add(base.carried()),
                 base.carried(),
-                base.fluidInertia().multiply(factor.rocking()));
+                confined ? base.fluidInertia() : base.fluidInertia().multiply(factor.rocking()));
     }
 
     /** {@inheritDoc} The factor is that of the real frequency |s|: it changes by a few per cent a decade. */
     @Override
     public Complex fluidInertia(Complex s) {
-        return strips.fluidInertia(s)
-                .multiply(factors.at(FastMath.hypot(s.getReal(), s.getImaginary()))
+        Complex inertia = strips.fluidInertia(s);
+        return confined
+                ? inertia
+                : inertia.multiply(factors.at(FastMath.hypot(s.getReal(), s.getImaginary()))
                         .rocking());
+    }
+
+    @Override
+    public void expect(double lowest, double highest) {
+        factors.expect(lowest, highest);
     }
 }

@@ -2,7 +2,6 @@ package flowshy.torque;
 
 import flowshy.hair.Cylinder;
 import flowshy.hair.Hair;
-import flowshy.hair.LengthModel;
 import flowshy.medium.Medium;
 import flowshy.stream.StokesLayer;
 import flowshy.stream.cover.Cover;
@@ -29,6 +28,23 @@ public interface TorqueModel {
     Complex fluidInertia(Complex s);
 
     /**
+     * Says which frequencies will be asked for, so that what they share can be worked out at once.
+     *
+     * @param lowest angular frequency, positive [rad/s]
+     * @param highest above the lowest [rad/s]
+     */
+    default void expect(double lowest, double highest) {}
+
+    /**
+     * The same hair by strip theory alone.
+     *
+     * @return this, where nothing corrects it
+     */
+    default TorqueModel strips() {
+        return this;
+    }
+
+    /**
      * The model for a hair: closed form for a cylinder, strips for every other shape.
      *
      * @param hair the hair
@@ -50,14 +66,14 @@ public interface TorqueModel {
      * @return the model; flow and open are those under the cover at φ = 1
      */
     static TorqueModel of(Hair hair, Medium medium, double pivotDepth, Cover cover) {
-        TorqueModel strips = strips(hair, medium, pivotDepth, cover);
-        // a cavity confines the fluid: the whole hair's solution has no wall but the one it stands on
-        return hair.lengthModel() == LengthModel.STRIPS || cover.cavityRadius().isPresent()
-                ? strips
-                : new FactoredTorques(strips, LengthFactors.of(hair.profile(), medium, pivotDepth));
+        TorqueModel strips = endless(hair, medium, pivotDepth, cover);
+        boolean confined = cover.cavityRadius().isPresent();
+        return LengthFactors.of(hair, medium, pivotDepth)
+                .<TorqueModel>map(factors -> new FactoredTorques(strips, factors, confined))
+                .orElse(strips);
     }
 
-    private static TorqueModel strips(Hair hair, Medium medium, double pivotDepth, Cover cover) {
+    private static TorqueModel endless(Hair hair, Medium medium, double pivotDepth, Cover cover) {
         if (hair.profile() instanceof Cylinder cylinder && cover.profile(medium) instanceof StokesLayer) {
             return new CylinderTorques(
                     cylinder, hair.density(), medium, pivotDepth, new Confinement(cover.cavityRadius(), medium));

@@ -3,7 +3,6 @@ package flowshy.verdict;
 import static flowshy.math.Figures.say;
 
 import flowshy.cylinder.OscillatingCylinder;
-import flowshy.hair.LengthModel;
 import flowshy.hair.Profile;
 import flowshy.math.Caveat;
 import flowshy.math.Caveat.Subject;
@@ -13,7 +12,6 @@ import flowshy.medium.PropertySource.Reading;
 import flowshy.response.Device;
 import flowshy.response.Suspension;
 import flowshy.torque.ThinStrips;
-import flowshy.torque.finite.FiniteFactors;
 import flowshy.torque.finite.LengthFactors;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
@@ -58,6 +56,9 @@ final class Assumptions {
         if (!device.cover().closed()) {
             finiteLength(device, band, facts, caveats);
             excursion(device, band, facts, caveats);
+        }
+        if (device.cover().cavityRadius().isPresent()) {
+            caveats.addAll(FiniteLength.inCavity(device));
         }
         density(device, caveats);
         caveats.addAll(device.cover().assumptions(device.around()));
@@ -114,26 +115,10 @@ final class Assumptions {
 
     private static void finiteLength(Device device, Band band, DeviceFacts facts, Set<Caveat> caveats) {
         double length = device.hair().profile().length();
-        if (device.hair().lengthModel() == LengthModel.FINITE) {
-            LengthFactors factors = LengthFactors.of(device.hair().profile(), device.around(), device.pivotDepth());
-            FiniteFactors low = factors.at(2.0 * FastMath.PI * band.from());
-            FiniteFactors high = factors.at(2.0 * FastMath.PI * band.to());
-            caveats.add(new Caveat(
-                    Subject.REJECTION,
-                    Weight.NOTE,
-                    say(
-                            "Finite length: with its tip on its wall the hair takes %.4g times the flow torque of strip theory at %.4g Hz"
-                                    + " and %.4g times at %.4g Hz (turned by %.2g and %.2g deg); the solver's own error is %.2g %%.",
-                            low.stream().norm(),
-                            band.from(),
-                            high.stream().norm(),
-                            band.to(),
-                            FastMath.toDegrees(low.stream().getArgument()),
-                            FastMath.toDegrees(high.stream().getArgument()),
-                            100.0 * FastMath.max(low.streamError(), high.streamError()))));
-        } else {
-            strips(device, facts, caveats);
-        }
+        LengthFactors.of(device.hair(), device.around(), device.pivotDepth())
+                .ifPresentOrElse(
+                        factors -> caveats.addAll(FiniteLength.of(device, band, factors)),
+                        () -> strips(device, facts, caveats));
         caveats.add(new Caveat(
                 Subject.FLOW,
                 Weight.NOTE,
@@ -152,7 +137,7 @@ final class Assumptions {
                         "Strip theory: each slice counts as part of an endless cylinder. Layer over length runs from %.2g to %.2g"
                                 + " here, length over diameter is %.3g. For a cylinder of 10 : 1 an independent finite-element"
                                 + " solution has %s more flow torque at a ratio of 0.5, 6 %% at 0.3, 3 %% at 0.15, none at 0.05;"
-                                + " 50 %% for a post of 2 : 1. With finite-length: on the whole hair is solved.",
+                                + " 50 %% for a post of 2 : 1. With finite-length: auto or on the whole hair is solved.",
                         facts.layer().least() / length,
                         facts.layer().largest() / length,
                         facts.slenderness(),

@@ -82,6 +82,7 @@ public record BandsQuestion(
      */
     public BandsAnswer answer(List<Double> frequencies) {
         Response response = new Response(device);
+        response.expect(band.from(), band.to());
         DeviceFacts facts = DeviceFacts.of(device, band);
         List<Caveat> caveats = new ArrayList<>(Assumptions.of(device, band, facts));
         List<ResponsePoint> points = frequencies.stream().map(response::at).toList();

@@ -44,7 +44,8 @@ class FactoredTorquesTest {
 
     @Test
     void theCurveBetweenNodesIsTheSolution() {
-        LengthFactors factors = LengthFactors.of(HAIR.profile(), AIR, 0.0);
+        LengthFactors factors =
+                LengthFactors.of(HAIR.seenAs(LengthModel.FINITE), AIR, 0.0).orElseThrow();
         FiniteHair hair = new FiniteHair(HAIR.profile(), AIR, 0.0);
         for (double frequency : new double[] {31.0, 170.0, 760.0}) {
             double omega = 2.0 * Math.PI * frequency;

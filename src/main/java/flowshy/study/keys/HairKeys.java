@@ -63,7 +63,13 @@ final class HairKeys {
                         "youngs-modulus",
                         Measure.of(Dimension.ELASTIC_MODULUS, "1 kPa", "2000 GPa"),
                         Presence.leftOut("none", "bending is not checked"),
-                        "elastic modulus of its material"));
+                        "elastic modulus of its material"),
+                Key.of(
+                        "foot-gap",
+                        DIAMETER,
+                        Presence.leftOut(
+                                "a tenth of the foot's radius", "an own choice, matters for blunt posts alone"),
+                        "gap between the foot and the wall around it, which the turning leaves"));
         // file and points shut each other out, and their absence is told where the profile is built
         return Group.of("hair", common, Rule.atMostOne("file", "points")).selectedBy(shape, shapes);
     }

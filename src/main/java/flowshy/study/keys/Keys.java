@@ -188,9 +188,11 @@ public final class Keys {
                         "measured responses beside the model, each under a name"),
                 Key.of(
                         "finite-length",
-                        Words.of("off", "on").later("write on: the whole hair is solved; off: strip theory", "auto"),
-                        Presence.taken("off", "strip theory"),
-                        "correction for tip and wall"),
+                        Words.of("off", "estimate", "auto", "on"),
+                        Presence.taken("auto", "the whole hair with its tip on its wall, solved to one per cent"),
+                        "correction for tip and wall: off is strip theory, estimate its repair in closed form (3 to 13 %,"
+                                + " microseconds), auto the whole hair solved to one per cent, on the same on finer meshes"
+                                + " and twice the frequencies"),
                 Key.optional(
                         "hold",
                         Words.of("stiffness", "resonance"),

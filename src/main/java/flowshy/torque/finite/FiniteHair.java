@@ -36,6 +36,8 @@ public final class FiniteHair {
     private final double footGap;
     private final double scale;
     private final Meridian meridian;
+    /** Layer without inertia, made when first asked for: it serves every slow stream. */
+    private RingLayer slow;
 
     /**
      * A hair with the default foot gap.
@@ -46,7 +48,17 @@ public final class FiniteHair {
      * @throws IllegalArgumentException if the depth is negative or not finite
      */
     public FiniteHair(Profile profile, Medium medium, double pivotDepth) {
-        this(profile, medium, pivotDepth, DEFAULT_GAP_SHARE * profile.radius(0.0));
+        this(profile, medium, pivotDepth, defaultGap(profile));
+    }
+
+    /**
+     * The gap at the foot of a hair that states none.
+     *
+     * @param profile its shape
+     * @return gap [m]
+     */
+    public static double defaultGap(Profile profile) {
+        return DEFAULT_GAP_SHARE * profile.radius(0.0);
     }
 
     /**
@@ -93,13 +105,25 @@ public final class FiniteHair {
     }
 
     /**
-     * Forces of the medium at one frequency, from two meshes.
+     * Forces of the medium at one frequency, from the two finer meshes.
      *
      * @param omega angular frequency, positive [rad/s]
      * @return torques, forces, their errors and the distribution along the hair
      * @throws IllegalArgumentException if ω is not positive and finite, or δ is below the range {@link #LAYER_SHARE}
      */
     public FiniteTorques at(double omega) {
+        return at(omega, Accuracy.FINE);
+    }
+
+    /**
+     * Forces of the medium at one frequency.
+     *
+     * @param omega angular frequency, positive [rad/s]
+     * @param accuracy how fine the two meshes are
+     * @return torques, forces, their errors and the distribution along the hair
+     * @throws IllegalArgumentException if ω is not positive and finite, or δ is below the range {@link #LAYER_SHARE}
+     */
+    public FiniteTorques at(double omega, Accuracy accuracy) {
         if (!(omega > 0.0) || Double.isInfinite(omega)) {
             throw new IllegalArgumentException("angular frequency must be positive and finite, was " + omega);
         }
@@ -109,8 +133,9 @@ public final class FiniteHair {
                     "the medium's layer is " + share + " of the largest radius; the solver holds for " + LAYER_SHARE);
         }
         double beta = omega * scale * scale / medium.kinematicViscosity();
-        Answer rough = new Answer(mesh(Refinement.COARSE, 1.0, beta), omega);
-        Answer answer = new Answer(mesh(Refinement.FINE, 0.5, beta), omega);
+        Answer rough = new Answer(mesh(accuracy.first(), 1.0, beta), omega);
+        double gapShare = accuracy == Accuracy.FINE ? 0.5 : 1.0;
+        Answer answer = new Answer(mesh(accuracy.second(), gapShare, beta), omega);
         StripForces strips = new StripForces(medium, pivotDepth, omega);
         Complex[] strip = strips.torques(profile);
         FluidLoad stream = load(answer, answer.stream, rough, rough.stream, velocity());
@@ -131,12 +156,19 @@ public final class FiniteHair {
      * @return torque about the pivot per unit velocity of the free stream [N·m per m/s], axial traction included
      */
     public double creepingTorque(DoubleUnaryOperator velocity) {
-        RingLayer layer = new RingLayer(mesh(Refinement.FINE, 1.0, 0.0), FootSlot.NONE, 0.0);
+        RingLayer layer = creeping();
         Complex[] density = layer.inStream(z -> new Complex(velocity.applyAsDouble(z * scale)));
         return RingLayer.dot(layer.motion(pivotDepth / scale, 1.0, 1.0), density)
                         .getReal()
                 * velocity()
                 * scale;
+    }
+
+    private synchronized RingLayer creeping() {
+        if (slow == null) {
+            slow = new RingLayer(mesh(Refinement.FINE, 1.0, 0.0), FootSlot.NONE, 0.0);
+        }
+        return slow;
     }
 
     private List<Ring> mesh(Refinement refinement, double gapShare, double beta) {

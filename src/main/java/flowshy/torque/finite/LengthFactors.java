@@ -1,109 +1,66 @@
 package flowshy.torque.finite;
 
-import flowshy.hair.Profile;
+import flowshy.hair.Hair;
 import flowshy.medium.Medium;
-import java.util.LinkedHashMap;
-import java.util.Map;
-import java.util.concurrent.ConcurrentHashMap;
-import org.hipparchus.complex.Complex;
-import org.hipparchus.util.FastMath;
+import java.util.Optional;
+import java.util.function.DoubleUnaryOperator;
 
-/**
- * Factors of the whole hair on strip theory at any frequency, solved where they are needed: nodes four a decade, between them cubic
- * Hermite curves in ln ω with central slopes. The solver's curve between such nodes holds to 0.1 %. Above the frequency where the layer
- * is thinner than the solver takes, the factors stay as they are there.
- */
-public final class LengthFactors {
-    private static final double PER_DECADE = 4.0;
-
-    /** A study asks for a handful of hairs and media; a sweep must not fill the memory. */
-    private static final int KEPT = 64;
-
-    private static final Map<Key, LengthFactors> KNOWN = new LinkedHashMap<>(16, 0.75F, true) {
-        private static final long serialVersionUID = 1L;
-
-        @Override
-        protected boolean removeEldestEntry(Map.Entry<Key, LengthFactors> eldest) {
-            return size() > KEPT;
-        }
-    };
-
-    private record Key(Profile profile, double density, double viscosity, double pivotDepth) {}
-
-    private final FiniteHair hair;
-    private final Map<Integer, FiniteFactors> nodes = new ConcurrentHashMap<>();
-
-    private LengthFactors(FiniteHair hair) {
-        this.hair = hair;
-    }
-
-    /**
-     * The factors of a hair; those asked for lately are kept.
-     *
-     * @param profile its shape
-     * @param medium what it stands in
-     * @param pivotDepth h [m]
-     * @return factors, not solved yet
-     */
-    public static LengthFactors of(Profile profile, Medium medium, double pivotDepth) {
-        Key key = new Key(profile, medium.density(), medium.viscosity(), pivotDepth);
-        synchronized (KNOWN) {
-            return KNOWN.computeIfAbsent(key, k -> new LengthFactors(new FiniteHair(profile, medium, pivotDepth)));
-        }
-    }
-
+/** Factors on strip theory for a hair of finite length in a medium, by any of the models that know them. */
+public interface LengthFactors {
     /**
      * Factors at a frequency.
      *
      * @param omega angular frequency, positive [rad/s]
-     * @return factors and the larger of the solver's errors at the two nodes beside
+     * @return factors with their errors; an infinite error where the model's is not known
      */
-    public FiniteFactors at(double omega) {
-        double place = PER_DECADE * FastMath.log10(FastMath.min(omega, hair.highestFrequency()));
-        int below = (int) FastMath.floor(place);
-        double t = place - below;
-        FiniteFactors before = node(below - 1);
-        FiniteFactors left = node(below);
-        FiniteFactors right = node(below + 1);
-        FiniteFactors after = node(below + 2);
-        return new FiniteFactors(
-                between(before.stream(), left.stream(), right.stream(), after.stream(), t),
-                between(before.rocking(), left.rocking(), right.rocking(), after.rocking(), t),
-                FastMath.max(left.streamError(), right.streamError()),
-                FastMath.max(left.rockingError(), right.rockingError()));
+    FiniteFactors at(double omega);
+
+    /**
+     * Says which frequencies will be asked for, so that they can be worked out together.
+     *
+     * @param lowest angular frequency, positive [rad/s]
+     * @param highest above the lowest [rad/s]
+     */
+    default void expect(double lowest, double highest) {}
+
+    /**
+     * Torque of a slow steady stream along the wall: a lower bound for the torque at any Reynolds number.
+     *
+     * @param velocity undisturbed velocity at height z [m] above the wall [m/s]
+     * @return torque about the pivot [N·m]; zero, which is no bound, from a model that does not know it
+     */
+    default double creepingTorque(DoubleUnaryOperator velocity) {
+        return 0.0;
     }
 
     /**
-     * Angular frequency above which the factors stay as they are.
+     * Angular frequency above which the factors are held at their last value.
      *
-     * @return [rad/s]
+     * @return [rad/s]; infinite where there is none
      */
-    public double heldAbove() {
-        return hair.highestFrequency();
+    default double heldAbove() {
+        return Double.POSITIVE_INFINITY;
     }
 
-    private FiniteFactors node(int index) {
-        return nodes.computeIfAbsent(index, k -> {
-            double omega = FastMath.min(FastMath.pow(10.0, k / PER_DECADE), hair.highestFrequency());
-            return hair.at(omega).factors();
-        });
+    /**
+     * The factors that a hair's model of its length asks for.
+     *
+     * @param hair the hair
+     * @param medium what it stands in
+     * @param pivotDepth h [m]
+     * @return factors; empty for strip theory alone
+     */
+    static Optional<LengthFactors> of(Hair hair, Medium medium, double pivotDepth) {
+        return switch (hair.lengthModel()) {
+            case STRIPS -> Optional.empty();
+            case ESTIMATE -> Optional.of(new RepairedStrips(hair.profile(), medium, pivotDepth));
+            case AUTO -> Optional.of(solved(hair, medium, pivotDepth, Accuracy.ONE_PER_CENT));
+            case FINITE -> Optional.of(solved(hair, medium, pivotDepth, Accuracy.FINE));
+        };
     }
 
-    private static Complex between(Complex before, Complex left, Complex right, Complex after, double t) {
-        return new Complex(
-                between(before.getReal(), left.getReal(), right.getReal(), after.getReal(), t),
-                between(before.getImaginary(), left.getImaginary(), right.getImaginary(), after.getImaginary(), t));
-    }
-
-    /** Cubic Hermite curve with slopes (right − before)/2 and (after − left)/2. */
-    private static double between(double before, double left, double right, double after, double t) {
-        double m0 = 0.5 * (right - before);
-        double m1 = 0.5 * (after - left);
-        double t2 = t * t;
-        double t3 = t2 * t;
-        return (2.0 * t3 - 3.0 * t2 + 1.0) * left
-                + (t3 - 2.0 * t2 + t) * m0
-                + (3.0 * t2 - 2.0 * t3) * right
-                + (t3 - t2) * m1;
+    private static LengthFactors solved(Hair hair, Medium medium, double pivotDepth, Accuracy accuracy) {
+        double gap = hair.footGap().orElse(FiniteHair.defaultGap(hair.profile()));
+        return new SolvedFactors(FactorGrid.of(hair.profile(), pivotDepth, gap, accuracy), medium);
     }
 }

@@ -14,7 +14,7 @@ record Meridian(List<List<MeridianPoint>> parts) {
     /** A turn of the outline above this is an edge, one below it is smoothed over by the rings [rad]. */
     private static final double EDGE = 0.3;
 
-    private static final int SAMPLES = 2000;
+    private static final int SAMPLES = 600;
 
     private static final int FEWEST_SAMPLES = 40;
 

@@ -12,6 +12,8 @@ import org.hipparchus.util.FastMath;
  * @param growth growth of the ring's length per length along the outline
  */
 record Refinement(double longest, double widest, double edge, double foot, double growth) {
+    static final Refinement ROUGH = new Refinement(1.0 / 6.0, 0.5, 0.15, 0.2, 1.2);
+
     static final Refinement COARSE = new Refinement(1.0 / 8.0, 0.35, 0.08, 0.12, 0.9);
 
     static final Refinement FINE = new Refinement(1.0 / 13.0, 0.2, 0.03, 0.05, 0.55);

@@ -25,7 +25,7 @@ import org.hipparchus.util.FastMath;
  * @param medium what it stands in; its slip is left out
  * @param pivotDepth h, depth of the pivot below the wall [m]
  */
-public record RepairedStrips(Profile profile, Medium medium, double pivotDepth) {
+public record RepairedStrips(Profile profile, Medium medium, double pivotDepth) implements LengthFactors {
     /** Length over largest diameter for which the errors were found. */
     public static final Range SLENDERNESS = new Range("L/d", 3.5, 50.0);
 
@@ -54,7 +54,8 @@ public record RepairedStrips(Profile profile, Medium medium, double pivotDepth) 
      * @param omega angular frequency, positive [rad/s]
      * @return factors with the errors stated above; outside the two ranges the errors are not known and infinite
      */
-    public FiniteFactors factors(double omega) {
+    @Override
+    public FiniteFactors at(double omega) {
         Complex[] strips = new StripForces(medium, pivotDepth, omega).torques(profile);
         Complex[] repaired = torques(omega);
         double slenderness = profile.length() / (2.0 * profile.largestRadius());

@@ -5,7 +5,6 @@ import flowshy.cylinder.excursion.CombinedResistance;
 import flowshy.cylinder.excursion.Fluctuation;
 import flowshy.cylinder.excursion.OperatingPoint;
 import flowshy.cylinder.excursion.Regime;
-import flowshy.hair.LengthModel;
 import flowshy.hair.Profile;
 import flowshy.hair.Strip;
 import flowshy.response.Device;
@@ -13,7 +12,6 @@ import flowshy.stream.HeightShare;
 import flowshy.stream.Line;
 import flowshy.stream.Source;
 import flowshy.stream.cover.Exposure;
-import flowshy.torque.finite.FiniteHair;
 import flowshy.torque.finite.LengthFactors;
 import java.util.ArrayList;
 import java.util.List;
@@ -51,9 +49,7 @@ final class FlowLoad {
                 .map(source -> new Exposure(source, device.cover(), device.around()))
                 .toList();
         this.strips = strips(device.hair().profile());
-        this.finite = device.hair().lengthModel() == LengthModel.FINITE
-                ? Optional.of(LengthFactors.of(device.hair().profile(), device.around(), device.pivotDepth()))
-                : Optional.empty();
+        this.finite = LengthFactors.of(device.hair(), device.around(), device.pivotDepth());
         this.means = strips.stream().map(strip -> mean(strip.height())).toList();
         double[] variances =
                 variances(strips.stream().mapToDouble(Strip::height).toArray());
@@ -228,7 +224,7 @@ final class FlowLoad {
     /**
      * Steady torque of the mean streams about the sensitive axis.
      *
-     * @return ∫ E[f] cos α ℓ dz [N·m], α the direction of the local mean; for a whole hair at least its creeping torque in the same
+     * @return ∫ E[f] cos α ℓ dz [N·m], α the direction of the local mean; for a hair solved whole at least its creeping torque in the same
      *     streams, which the endless cylinder's law falls short of
      */
     double steadyTorque() {
@@ -247,8 +243,7 @@ final class FlowLoad {
         if (finite.isEmpty() || torque == 0.0) {
             return torque;
         }
-        double creeping = new FiniteHair(device.hair().profile(), device.around(), device.pivotDepth())
-                .creepingTorque(height -> mean(height)[0]);
+        double creeping = finite.get().creepingTorque(height -> mean(height)[0]);
         return FastMath.abs(creeping) > FastMath.abs(torque) ? creeping : torque;
     }
 

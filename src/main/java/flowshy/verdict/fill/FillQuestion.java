@@ -1,6 +1,5 @@
 package flowshy.verdict.fill;
 
-import flowshy.hair.LengthModel;
 import flowshy.medium.Media;
 import flowshy.medium.Medium;
 import flowshy.medium.OutOfTableException;
@@ -37,8 +36,6 @@ public record FillQuestion(
         Device device, Band band, Acceptance acceptance, double reference, List<Fill> fills, List<Cover> covers) {
     /** Copies the list. */
     public FillQuestion {
-        // forty fluids, each with a solution of its own, would take minutes: fluids are compared by strip theory
-        device = device.with(device.hair().seenAs(LengthModel.STRIPS));
         fills = List.copyOf(fills);
         covers = List.copyOf(covers);
     }

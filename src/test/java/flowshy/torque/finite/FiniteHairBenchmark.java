@@ -50,22 +50,43 @@ public class FiniteHairBenchmark {
         repaired = new RepairedStrips(profile, air, 0.0);
     }
 
-    /** One frequency; it moves, so that nothing is constant. */
+    /** One frequency to one per cent; it moves, so that nothing is constant. */
     @Benchmark
     public FiniteTorques oneFrequency() {
-        return hair.at(next());
+        return hair.at(next(), Accuracy.ONE_PER_CENT);
     }
 
-    /** The whole grid of a study. */
+    /** One frequency on the finer meshes. */
     @Benchmark
-    public FactorCurve studyGrid() {
-        return new FactorCurve(hair, 2.0 * FastMath.PI, 2.0 * FastMath.PI * 1e4);
+    public FiniteTorques oneFrequencyFine() {
+        return hair.at(next(), Accuracy.FINE);
+    }
+
+    /** The whole grid of a study, on one core after the other. */
+    @Benchmark
+    public FiniteFactors studyGrid() {
+        return grid(Accuracy.ONE_PER_CENT);
+    }
+
+    /** The same on the finer meshes, twice as close. */
+    @Benchmark
+    public FiniteFactors studyGridFine() {
+        return grid(Accuracy.FINE);
+    }
+
+    private FiniteFactors grid(Accuracy accuracy) {
+        FactorGrid grid = new FactorGrid(hair, accuracy);
+        FiniteFactors last = grid.at(2.0 * FastMath.PI);
+        for (double decade = 10.0; decade < 2e4; decade *= 3.0) {
+            last = grid.at(2.0 * FastMath.PI * decade);
+        }
+        return last;
     }
 
     /** The cheap repair. */
     @Benchmark
     public FiniteFactors repairedStrips() {
-        return repaired.factors(next());
+        return repaired.at(next());
     }
 
     private double next() {

@@ -57,7 +57,7 @@ class RepairedStripsValidationTest {
             double delta = share * profile.length();
             double omega = 2.0 / (delta * delta);
             FiniteTorques exact = new FiniteHair(profile, UNIT, 0.0).at(omega);
-            FiniteFactors repaired = new RepairedStrips(profile, UNIT, 0.0).factors(omega);
+            FiniteFactors repaired = new RepairedStrips(profile, UNIT, 0.0).at(omega);
             assertThat(repaired.streamError()).isEqualTo(RepairedStrips.STREAM_ERROR);
             assertThat(repaired.rockingError()).isEqualTo(RepairedStrips.ROCKING_ERROR);
             double streamError = error(repaired.stream(), exact.streamFactor());
@@ -79,8 +79,8 @@ class RepairedStripsValidationTest {
         for (Map<String, String> row : table.rows()) {
             Profile profile = "taper".equals(row.get("shape")) ? new Taper(20.0, 1.0, 0.25) : new Cylinder(20.0, 1.0);
             double delta = ReferenceTable.number(row, "delta");
-            FiniteFactors found = new RepairedStrips(profile, UNIT, ReferenceTable.number(row, "pivot"))
-                    .factors(2.0 / (delta * delta));
+            FiniteFactors found =
+                    new RepairedStrips(profile, UNIT, ReferenceTable.number(row, "pivot")).at(2.0 / (delta * delta));
             hold(found.stream(), row, "stream");
             hold(found.rocking(), row, "rocking");
         }
@@ -94,9 +94,9 @@ class RepairedStripsValidationTest {
 
     @Test
     void saysWhereItsErrorIsNotKnown() {
-        FiniteFactors blunt = new RepairedStrips(new Cylinder(4.0, 1.0), UNIT, 0.0).factors(2.0);
+        FiniteFactors blunt = new RepairedStrips(new Cylinder(4.0, 1.0), UNIT, 0.0).at(2.0);
         assertThat(blunt.streamError()).isEqualTo(Double.POSITIVE_INFINITY);
-        FiniteFactors slow = new RepairedStrips(new Cylinder(20.0, 1.0), UNIT, 0.0).factors(1e-4);
+        FiniteFactors slow = new RepairedStrips(new Cylinder(20.0, 1.0), UNIT, 0.0).at(1e-4);
         assertThat(slow.rockingError()).isEqualTo(Double.POSITIVE_INFINITY);
     }
 
