@@ -33,7 +33,7 @@ final class HairBuilder {
             case "club" -> club();
             default -> new ProfileReader(form, problems, files).read();
         };
-        LengthModel model = LengthModel.of(form.word("finite-length").orElseThrow());
+        LengthModel model = form.word("finite-length").map(LengthModel::of).orElse(LengthModel.AUTO);
         return profile.map(p -> new Hair(
                 p, form.si("hair.density"), form.siIfAny("hair.youngs-modulus"), model, form.siIfAny("hair.foot-gap")));
     }

@@ -115,7 +115,7 @@ class CommandLineTest {
         assertThat(Json.object(Json.parse(Files.readString(json)))).containsKey("verdict");
         List<String> lines = Files.readAllLines(csv);
         assertThat(lines).hasSize(402);
-        assertThat(lines.get(0)).startsWith("frequency_hz,rejection_db,motion_rad_per_m_s2");
+        assertThat(lines.get(0)).startsWith("frequency_hz,rejection_db,finite_length_db,motion_rad_per_m_s2");
         Run blocked = Run.of(
                 "bands", AIR, "--json", folder.resolve("none/answer.json").toString());
         assertThat(blocked.code()).isEqualTo(2);

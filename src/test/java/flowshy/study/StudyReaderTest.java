@@ -8,6 +8,7 @@ import static org.assertj.core.api.Assertions.within;
 import flowshy.hair.Club;
 import flowshy.hair.Cylinder;
 import flowshy.hair.Hair;
+import flowshy.hair.LengthModel;
 import flowshy.hair.Taper;
 import flowshy.math.Caveat;
 import flowshy.medium.Media;
@@ -54,7 +55,8 @@ import org.junit.jupiter.params.provider.CsvSource;
 /** From text to the domain's records, and what does not go together. */
 class StudyReaderTest {
     private static final String HAIR = "hair: {length: 610 um, diameter: 77 um, density: 1.3 g/cm3}\n";
-    private static final Hair PLAIN = new Hair(new Cylinder(610e-6, 38.5e-6), 1300.0, OptionalDouble.empty());
+    private static final Hair PLAIN =
+            new Hair(new Cylinder(610e-6, 38.5e-6), 1300.0, OptionalDouble.empty(), LengthModel.AUTO);
 
     @TempDir
     private Path folder;
@@ -117,7 +119,10 @@ class StudyReaderTest {
                         + "head-diameter: 130 um, end: round, density: 1 g/cm3, youngs-modulus: 3 GPa}\nmedium: air\n");
         assertThat(club.device().hair())
                 .isEqualTo(new Hair(
-                        new Club(900e-6, 25e-6, 400e-6, 60e-6, 65e-6, Club.End.ROUND), 1000.0, OptionalDouble.of(3e9)));
+                        new Club(900e-6, 25e-6, 400e-6, 60e-6, 65e-6, Club.End.ROUND),
+                        1000.0,
+                        OptionalDouble.of(3e9),
+                        LengthModel.AUTO));
         Study points = read(
                 "hair: {shape: profile, points: [[0 um, 90 um], [300 um, 80 um], [0.6 mm, 0 um]], density: 1 g/cm3}\nmedium: air\n");
         assertThat(points.device().hair().profile().breaks()).containsExactly(0.0, 300e-6, 600e-6);
@@ -159,6 +164,25 @@ class StudyReaderTest {
                         PLAIN,
                         new SuspensionStatement(stiffness, damping, 0.0, 0.0, Attitude.UPRIGHT, OptionalDouble.empty()))
                 .solve();
+    }
+
+    /** Each word of the length's model, and the gap at the foot, reach the hair. */
+    @Test
+    void theLengthsModelAndTheFootsGapArrive() {
+        for (LengthModel model : LengthModel.values()) {
+            assertThat(read(HAIR + "medium: air\nfinite-length: " + model.word() + "\n")
+                            .device()
+                            .hair()
+                            .lengthModel())
+                    .isEqualTo(model);
+        }
+        Hair hair = read(HAIR.replace("}", ", foot-gap: 3 um}") + "medium: air\n")
+                .device()
+                .hair();
+        assertThat(hair.footGap()).hasValue(3e-6);
+        assertThat(problems(HAIR + "medium: air\nfinite-length: maybe\n"))
+                .containsExactly(
+                        "s.yaml:3:16: finite-length: unknown word maybe; one of off, estimate, auto, on is wanted here");
     }
 
     /** Each way of stating stiffness and damping reaches the solver as its own statement. */

@@ -185,7 +185,7 @@ class SurroundingsTest {
                         tuple("surroundings.draught.length-scale", "0.1 m"),
                         tuple("surroundings.draught.fetch", "0.02 m"),
                         tuple("surroundings.draught.direction", "0 deg"),
-                        tuple("finite-length", "off"));
+                        tuple("finite-length", "auto"));
         Study stated = study("draught: {kind: stream, mean-speed: 0.3 m/s, turbulence: 40 %}");
         assertThat(stated.surroundings().get(0).assumed())
                 .extracting(Stated::key)

@@ -114,7 +114,7 @@ class SchemaTest {
                 "surroundings: {a: {kind: sound}}",
                 "surroundings: {a: {kind: spectrum, file: a.csv, columns: f, quantity: density, unit: Pa2/Hz}}",
                 "motion: {spectrum: {points: [[3 Hz, 1 g2/Hz], [4 Hz, 1 g2/Hz]], file: a.csv}}",
-                "finite-length: auto",
+                "finite-length: maybe",
                 "candidates: [open, lid]",
                 "calibration: {cover: open}",
                 "band: {from: 3 Hz, to: 5 Hz, by: 1 Hz}",

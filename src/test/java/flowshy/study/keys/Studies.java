@@ -9,7 +9,7 @@ final class Studies {
     static final List<String> ALL =
             List.of(SMALLEST, """
             title: every key of a cylinder
-            hair: {shape: cylinder, length: 0.61 mm, diameter: 77 µm, density: 1300 kg/m3, youngs-modulus: 3 GPa}
+            hair: {shape: cylinder, length: 0.61 mm, diameter: 77 µm, density: 1300 kg/m3, youngs-modulus: 3 GPa, foot-gap: 3 um}
             suspension:
               stiffness: 3 nN.m/rad
               damping: {value: 2e-13 N.m.s/rad, in: {name: air, temperature: 21 degC, pressure: 99 kPa, humidity: 30 %}, cover: open}
@@ -59,7 +59,7 @@ final class Studies {
               bending-stiffness-ratio: 10
               tip-clearance: 100 um
             calibration: {frequency: 60 Hz, cover: open}
-            finite-length: off
+            finite-length: estimate
             hold: resonance
             document: {project: p, part: "7", revision: 2.10, prepared-by: a, checked-by: b, approved-by: c, remarks: d}
             """, """
