@@ -47,13 +47,18 @@ final class StudyOptions {
      * @return the worst exit code: wrong input before a limit before success
      */
     int each(CommandLine line, boolean json, ToIntFunction<Study> work) {
+        return each(line, json, StudyReader::study, work);
+    }
+
+    /** The same where more than the study itself is to be read and checked. */
+    int each(CommandLine line, boolean json, Function<StudyReader, Study> reading, ToIntFunction<Study> work) {
         named(line);
         int worst = 0;
         List<Problem> problems = new ArrayList<>();
         for (Path study : studies) {
             int code;
             try {
-                code = work.applyAsInt(StudyReader.read(study, settings));
+                code = work.applyAsInt(reading.apply(StudyReader.open(study, settings)));
             } catch (StudyException e) {
                 problems.addAll(e.problems());
                 code = Failures.WRONG_INPUT;

@@ -109,8 +109,7 @@ public final class CompareJson {
     private static void scaled(JsonPage json, Scaled scaled) {
         json.text("quantity", scaled.figure().word());
         json.text("changed", scaled.what());
-        json.text("from", scaled.from());
-        json.text("to", scaled.to());
+        json.text("change", scaled.change());
         json.number("ratio", scaled.ratio());
         json.number("before_" + scaled.figure().column(), scaled.before());
         json.number("after_" + scaled.figure().column(), scaled.after());

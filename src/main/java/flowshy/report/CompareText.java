@@ -23,12 +23,15 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.Function;
+import java.util.regex.Pattern;
 import org.hipparchus.util.FastMath;
 
 /** Devices side by side for a terminal: who they are, what they meet, then one line a quantity and one column a device. */
 public final class CompareText {
     /** Columns that fit a page beside the names of the quantities. */
     private static final int ABREAST = 4;
+
+    private static final Pattern FIGURE = Pattern.compile("[0-9][0-9.e+-]*");
 
     private static final List<Figure> SHOWN = List.of(
             Figure.MASS,
@@ -112,19 +115,18 @@ public final class CompareText {
         boolean base = variant.changes().isEmpty();
         String name = base ? (families.size() == 1 ? "the study as it stands" : variant.name()) : variant.name();
         Compared compared = devices.get(index);
-        String what = compared.question()
-                .map(asked -> ": " + described(asked.device()))
-                .orElse("");
-        page.note("  " + letter(index), name + what);
+        List<String> sentences = new ArrayList<>();
+        compared.question().ifPresent(asked -> sentences.add(described(asked.device())));
         if (!base) {
-            page.note("    ", "stated: " + String.join("; ", variant.changes()));
+            sentences.add("Stated: " + String.join("; ", variant.changes()));
         } else if (families.size() > 1 && !family.study().title().isEmpty()) {
-            page.note("    ", family.study().title());
+            sentences.add(family.study().title());
         }
-        compared.scaled().ifPresent(scaled -> page.note("    ", scaled(scaled)));
+        compared.scaled().ifPresent(scaled -> sentences.add(scaled(scaled)));
         if (!compared.reason().isEmpty()) {
-            page.note("    ", "no solution: " + compared.reason());
+            sentences.add("No solution: " + compared.reason());
         }
+        page.note(letter(index), name + " - " + String.join(". ", sentences) + ".");
     }
 
     private static String described(Device device) {
@@ -140,17 +142,16 @@ public final class CompareText {
 
     private static String scaled(Scaled scaled) {
         if (scaled.ratio() == 1.0) {
-            return say("%s is equal as it stands", scaled.figure().word());
+            return "Its " + scaled.figure().word() + " is A's as it stands";
         }
         return say(
-                "scaled: %s, %s to %s; %s from %.4g to %.6g %s",
-                scaled.what(),
-                scaled.from(),
-                scaled.to(),
-                scaled.figure().word(),
-                scaled.figure().unit().show(scaled.before()),
-                scaled.figure().unit().show(scaled.after()),
-                scaled.figure().unit().shown());
+                        "Made equal by %s: %s from %.4g to %.6g %s",
+                        scaled.change(),
+                        scaled.figure().word(),
+                        scaled.figure().unit().show(scaled.before()),
+                        scaled.figure().unit().show(scaled.after()),
+                        scaled.figure().unit().shown())
+                .strip();
     }
 
     private void held() {
@@ -347,25 +348,26 @@ public final class CompareText {
     }
 
     private void caveats() {
-        Map<String, List<String>> texts = new LinkedHashMap<>();
+        Map<String, Caveat> first = new LinkedHashMap<>();
+        Map<String, List<String>> letters = new LinkedHashMap<>();
         for (int i = 0; i < devices.size(); i++) {
-            String letter = letter(i);
-            devices.get(i)
-                    .answer()
-                    .ifPresent(answer -> answer.caveats().stream()
-                            .filter(caveat -> caveat.weight() != Caveat.Weight.NOTE)
-                            .forEach(caveat -> texts.computeIfAbsent(
-                                            "[" + caveat.weight().words() + "]\n" + caveat.text(),
-                                            text -> new ArrayList<>())
-                                    .add(letter)));
+            List<Caveat> caveats =
+                    devices.get(i).answer().map(BandsAnswer::caveats).orElse(List.of());
+            for (Caveat caveat : caveats) {
+                if (caveat.weight() != Caveat.Weight.NOTE) {
+                    // the same sentence with other figures is told once
+                    String sort = caveat.weight().words()
+                            + FIGURE.matcher(caveat.text()).replaceAll("#");
+                    first.putIfAbsent(sort, caveat);
+                    letters.computeIfAbsent(sort, key -> new ArrayList<>()).add(letter(i));
+                }
+            }
         }
-        if (texts.isEmpty()) {
+        if (first.isEmpty()) {
             return;
         }
-        page.heading("What weakens the numbers");
-        texts.forEach((text, letters) -> {
-            String[] parts = text.split("\n", -1);
-            page.note(String.join(", ", letters) + " " + parts[0], parts[1]);
-        });
+        page.heading("What weakens the numbers (with the figures of the first device named)");
+        first.forEach((sort, caveat) -> page.note(
+                String.join(", ", letters.get(sort)) + " [" + caveat.weight().words() + "]", caveat.text()));
     }
 }

@@ -70,6 +70,11 @@ final class DiameterScaling implements Scaling {
     }
 
     @Override
+    public String change(double value) {
+        return words() + " " + written(value);
+    }
+
+    @Override
     public BandsQuestion at(double factor) {
         Device device = question.device();
         Hair hair = device.hair().reshaped(device.hair().profile().thickened(factor));

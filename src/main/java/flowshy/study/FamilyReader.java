@@ -49,11 +49,20 @@ final class FamilyReader {
         return Overlay.merge(root.without(List.of(VARIANTS)), part.over());
     }
 
-    /** Notes what is wrong with the keys of variants; what is wrong with the base already is not told again. */
-    void check(Problems problems) {
+    /** Every value that variants state, as understood; notes what is wrong with their keys, but not what the base has wrong already. */
+    List<Study.Understood> understood(Problems problems) {
+        List<Study.Understood> values = new ArrayList<>();
         for (Part part : parts()) {
-            form(part, problems);
+            for (Field field : form(part, problems).fields()) {
+                if (field.given() && part.says(field.position())) {
+                    values.add(new Study.Understood(
+                            part.path(field.path()),
+                            field.written(),
+                            field.quantity().map(Quantity::si).orElse(field.written())));
+                }
+            }
         }
+        return values;
     }
 
     private Form form(Part part, Problems problems) {
@@ -70,29 +79,14 @@ final class FamilyReader {
                 .forEach(problems::add);
     }
 
-    /** Every value that variants state, as understood. */
-    List<Study.Understood> understood() {
-        List<Study.Understood> values = new ArrayList<>();
-        for (Part part : parts()) {
-            for (Field field : form(part, new Problems()).fields()) {
-                if (field.given() && part.says(field.position())) {
-                    values.add(new Study.Understood(
-                            part.path(field.path()),
-                            field.written(),
-                            field.quantity().map(Quantity::si).orElse(field.written())));
-                }
-            }
-        }
-        return values;
-    }
-
     /** The variants of a base. */
     List<Variant> variants(Study base, Hold hold, boolean chosen) {
         Problems problems = new Problems();
         List<Variant> variants = new ArrayList<>();
         for (Part part : parts()) {
+            int before = problems.count();
             Form form = form(part, problems);
-            if (problems.count() > 0) {
+            if (problems.count() > before) {
                 continue;
             }
             Hold own = chosen || part.over().entry("hold").isEmpty() ? hold : StudyReader.hold(form);

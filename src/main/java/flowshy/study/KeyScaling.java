@@ -1,6 +1,8 @@
 package flowshy.study;
 
 import flowshy.math.Figures;
+import flowshy.study.units.Dimension;
+import flowshy.study.units.Quantity;
 import flowshy.verdict.BandsQuestion;
 import flowshy.verdict.compare.Scaling;
 
@@ -33,7 +35,27 @@ record KeyScaling(VariedStudy space, NumberKey number) implements Scaling {
 
     @Override
     public String written(double value) {
-        return (Figures.of(value, 5) + " " + number.dimension().siUnit()).strip();
+        return (Figures.of(value / unit(), 5) + " " + unitName()).strip();
+    }
+
+    @Override
+    public String change(double value) {
+        return words() + " from " + written(start()) + " to " + written(value);
+    }
+
+    /** The likeliest unit of its dimension, as a study would write it. */
+    private String unitName() {
+        boolean plain = number.dimension().siUnit().equals("1") || number.dimension() == Dimension.TEMPERATURE;
+        return plain
+                ? number.dimension().siUnit().replace("1", "")
+                : number.dimension().units().get(0);
+    }
+
+    private double unit() {
+        boolean plain = number.dimension().siUnit().equals("1") || number.dimension() == Dimension.TEMPERATURE;
+        return plain
+                ? 1.0
+                : Quantity.read("1 " + unitName(), number.dimension()).value();
     }
 
     @Override

@@ -1,5 +1,7 @@
 package flowshy.study;
 
+import flowshy.study.keys.Keys;
+import flowshy.study.keys.Overrides;
 import flowshy.study.text.Node;
 import flowshy.study.text.Position;
 import flowshy.study.text.Problem;
@@ -51,7 +53,7 @@ final class Part {
     }
 
     Node.Mapping over() {
-        return (Node.Mapping) entry.value();
+        return ((Node.Mapping) entry.value()).without(Overrides.NOT_HERE);
     }
 
     boolean says(Position position) {
@@ -80,7 +82,7 @@ final class Part {
                 path(problem.path()),
                 problem.found(),
                 problem.accepted(),
-                problem.nearest().map(this::path));
+                problem.nearest().map(near -> Keys.presence(near).isPresent() ? path(near) : near));
     }
 
     /** Where the deepest group stands that the part says on the way to a key. */

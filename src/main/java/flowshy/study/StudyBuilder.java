@@ -56,8 +56,8 @@ final class StudyBuilder {
         CoverBuilder covers = new CoverBuilder(form, problems, files, media);
         Optional<CoverBuilder.Fitted> cover = covers.build("cover", hair, outside, band);
         List<Candidate> candidates = candidates(covers, hair, outside, band);
-        Optional<Hair> measured = held.map(HeldSuspension::measured).or(() -> hair);
-        SuspensionBuilder suspensions = new SuspensionBuilder(form, problems, media, covers, files, measured);
+        Optional<Hair> measuredOn = held.map(HeldSuspension::measured).or(() -> hair);
+        SuspensionBuilder suspensions = new SuspensionBuilder(form, problems, media, covers, files, measuredOn);
         Optional<Suspension> suspension =
                 held.isPresent() ? hair.flatMap(own -> held.get().under(own, suspensions)) : suspensions.build();
         Optional<Calibration> calibration = calibration(cover);

@@ -60,8 +60,8 @@ public final class StudyReader {
         Problems problems = new Problems();
         Node.Mapping root = overlaid(problems);
         Form form = Keys.read(root, problems);
-        family(root).check(problems);
-        return build(form, problems);
+        List<Study.Understood> variants = family(root).understood(problems);
+        return build(form, problems).alsoUnderstood(variants);
     }
 
     /**
@@ -79,15 +79,6 @@ public final class StudyReader {
                 Variant.of(base.origin().file(), List.of(), hold, form, folder, base),
                 hold,
                 family(overlaid(new Problems())).variants(base, hold, chosen.isPresent()));
-    }
-
-    /**
-     * Every value that the variants state.
-     *
-     * @return as understood, in the order of the text
-     */
-    public List<Study.Understood> variantValues() {
-        return family(overlaid(new Problems())).understood();
     }
 
     private FamilyReader family(Node.Mapping root) {

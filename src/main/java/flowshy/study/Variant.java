@@ -2,6 +2,7 @@ package flowshy.study;
 
 import flowshy.response.Hold;
 import flowshy.study.keys.Form;
+import flowshy.study.keys.Keys;
 import flowshy.study.text.Problem;
 import flowshy.study.text.StudyException;
 import flowshy.verdict.compare.Contender;
@@ -96,6 +97,7 @@ public final class Variant {
      * @param option what to print as the place of a fault
      * @param key path of the number
      * @return the contender; without a scaling, and with the reason, where it has no such number
+     * @throws StudyException if no study can have such a number
      */
     public Contender contender(String option, String key) {
         try {
@@ -103,6 +105,9 @@ public final class Variant {
             return contender(
                     study.map(own -> new KeyScaling(VariedStudy.of(form, folder, own, hold, List.of(number)), number)));
         } catch (StudyException e) {
+            if (Keys.measure(key).isEmpty()) { // no device ever has it
+                throw e;
+            }
             Problem problem = e.problems().get(0);
             return new Contender(
                     name,

@@ -16,7 +16,7 @@ public record Overrides() implements Value {
     private static final int MOST = 50;
 
     /** Keys that concern the study as a whole. */
-    private static final List<String> NOT_HERE = List.of("variants");
+    public static final List<String> NOT_HERE = List.of("variants");
 
     @Override
     public String kind() {

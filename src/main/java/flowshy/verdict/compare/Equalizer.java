@@ -87,14 +87,7 @@ final class Equalizer {
                     say("at %s its %s jumps past the value wanted", scaling.written(value), figure.word()));
         }
         return new Scaled(
-                figure,
-                scaling.words(),
-                scaling.written(scaling.start()),
-                scaling.written(value),
-                value / scaling.start(),
-                now.value(),
-                after,
-                question);
+                figure, scaling.words(), scaling.change(value), value / scaling.start(), now.value(), after, question);
     }
 
     private double root(double now) {

@@ -7,20 +7,12 @@ import flowshy.verdict.figure.Figure;
  * What was done to make a device equal.
  *
  * @param figure the quantity that is equal now
- * @param what was changed, in words
- * @param from its number before, for people
- * @param to its number after, for people
- * @param ratio after over before [-]
+ * @param what is changed, in words, or the path of a key
+ * @param change what was done, for people
+ * @param ratio of the number changed, after over before [-]
  * @param before the quantity before, SI
  * @param after the quantity after, worked out anew on the scaled device, SI
  * @param question about the scaled device
  */
 public record Scaled(
-        Figure figure,
-        String what,
-        String from,
-        String to,
-        double ratio,
-        double before,
-        double after,
-        BandsQuestion question) {}
+        Figure figure, String what, String change, double ratio, double before, double after, BandsQuestion question) {}

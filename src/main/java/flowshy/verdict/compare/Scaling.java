@@ -42,6 +42,14 @@ public interface Scaling {
     String written(double value);
 
     /**
+     * What was done, for people.
+     *
+     * @param value the number it was changed to, in SI, or a factor
+     * @return words with both numbers
+     */
+    String change(double value);
+
+    /**
      * The device with that number.
      *
      * @param value in SI, or a factor
