@@ -2,13 +2,10 @@ package flowshy.cli;
 
 import flowshy.report.CheckReport;
 import flowshy.report.JsonPage;
-import flowshy.study.Study;
-import flowshy.study.StudyReader;
 import flowshy.study.keys.Keys;
 import flowshy.study.keys.Schema;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Optional;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -49,7 +46,7 @@ final class CheckCommand implements Callable<Integer> {
         List<String> texts = new ArrayList<>();
         List<Runnable> objects = new ArrayList<>();
         List<String> tables = new ArrayList<>();
-        int code = studies.each(spec.commandLine(), output.json(), CheckCommand::whole, study -> {
+        int code = studies.each(spec.commandLine(), output.json(), study -> {
             texts.add(CheckReport.text(study));
             objects.add(() -> CheckReport.write(json, study));
             if (output.csv()) {
@@ -59,10 +56,5 @@ final class CheckCommand implements Callable<Integer> {
         });
         studies.send(spec.commandLine(), output, json, texts, objects, tables);
         return code;
-    }
-
-    /** A study is right only if its variants are. */
-    private static Study whole(StudyReader reader) {
-        return reader.family(Optional.empty()).study();
     }
 }

@@ -97,6 +97,26 @@ public final class JsonPage {
     }
 
     /**
+     * A named array of numbers; what is not finite is null, and its reason stands beside the array.
+     *
+     * @param name of the field
+     * @param values in order
+     */
+    void numbers(String name, List<Double> values) {
+        run(() -> {
+            generator.writeArrayFieldStart(name);
+            for (double value : values) {
+                if (Double.isFinite(value)) {
+                    generator.writeNumber(Figures.full(value));
+                } else {
+                    generator.writeNull();
+                }
+            }
+            generator.writeEndArray();
+        });
+    }
+
+    /**
      * A text.
      *
      * @param name of the field

@@ -86,9 +86,12 @@ public final class WholeFile {
         }
     }
 
+    /** Gone also when the program is stopped from outside while it is written. */
     private static Path half(Path target) {
-        return target.resolveSibling(
+        Path half = target.resolveSibling(
                 "." + target.toFile().getName() + "." + ProcessHandle.current().pid() + ".part");
+        half.toFile().deleteOnExit();
+        return half;
     }
 
     private static void move(Path half, Path target) throws IOException {

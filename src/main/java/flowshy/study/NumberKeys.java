@@ -10,6 +10,7 @@ import flowshy.study.text.Printable;
 import flowshy.study.text.Problem;
 import flowshy.study.text.StudyException;
 import flowshy.study.units.QuantityException;
+import flowshy.study.units.WrittenUnit;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -111,6 +112,16 @@ public final class NumberKeys {
                     "the lower end stands first, the upper end above it"));
         }
         return new KeyRange(key, from, to);
+    }
+
+    /**
+     * The unit in which the study states a number.
+     *
+     * @param key one of its numbers
+     * @return as written, or as its default is written
+     */
+    public WrittenUnit unit(NumberKey key) {
+        return WrittenUnit.of(form.word(key.path()).orElseThrow(), key.dimension());
     }
 
     private static double end(String option, NumberKey key, String text) {

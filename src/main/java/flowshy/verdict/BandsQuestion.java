@@ -118,6 +118,15 @@ public record BandsQuestion(
     }
 
     /**
+     * Whether a model has ended that the rejection of this device rests on.
+     *
+     * @return true if a caveat of an answer would say so
+     */
+    public boolean rejectionEnds() {
+        return Assumptions.rejectionEnds(device, band);
+    }
+
+    /**
      * What the surroundings do.
      *
      * @return their error over the band, empty where none are given

@@ -87,7 +87,6 @@ final class MediumKeys {
                         Rule.atMostOne("second share"),
                         Rule.oneBeside("second", "share"),
                         Rule.oneBeside("density", "viscosity", "kinematic-viscosity"))
-                .shortFor("name")
-                .withKeysOfTheWord("humidity", "mass-fraction", "salinity", "grade", "second", "share");
+                .shortFor("name");
     }
 }

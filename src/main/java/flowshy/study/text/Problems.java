@@ -47,15 +47,6 @@ public final class Problems {
     }
 
     /**
-     * Those noted, the first hundred.
-     *
-     * @return in the order noted
-     */
-    public List<Problem> all() {
-        return List.copyOf(found);
-    }
-
-    /**
      * How many were noted.
      *
      * @return the count, those beyond the hundredth included

@@ -42,6 +42,9 @@ public record GridRun(int threads, Progress progress) {
          * @param left time that the rest will take if it goes on so [s]; NaN at the very beginning
          */
         void at(double done, double left);
+
+        /** The run has ended, well or not. */
+        default void end() {}
     }
 
     /**
@@ -84,6 +87,7 @@ public record GridRun(int threads, Progress progress) {
             }
         } finally {
             pool.shutdownNow();
+            progress.end();
         }
         return new Grid(across, down, Arrays.asList(spots));
     }

@@ -18,7 +18,6 @@ public final class ReportPage {
             new WhySection(),
             new ErrorSection(),
             new LidSection(),
-            new FurtherChartsSection(),
             new DefaultsSection(),
             new MemorySection(),
             new LimitsSection(),
