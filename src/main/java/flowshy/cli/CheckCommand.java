@@ -2,10 +2,13 @@ package flowshy.cli;
 
 import flowshy.report.CheckReport;
 import flowshy.report.JsonPage;
+import flowshy.study.Study;
+import flowshy.study.StudyReader;
 import flowshy.study.keys.Keys;
 import flowshy.study.keys.Schema;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -46,7 +49,7 @@ final class CheckCommand implements Callable<Integer> {
         List<String> texts = new ArrayList<>();
         List<Runnable> objects = new ArrayList<>();
         List<String> tables = new ArrayList<>();
-        int code = studies.each(spec.commandLine(), output.json(), study -> {
+        int code = studies.each(spec.commandLine(), output.json(), CheckCommand::whole, study -> {
             texts.add(CheckReport.text(study));
             objects.add(() -> CheckReport.write(json, study));
             if (output.csv()) {
@@ -56,5 +59,10 @@ final class CheckCommand implements Callable<Integer> {
         });
         studies.send(spec.commandLine(), output, json, texts, objects, tables);
         return code;
+    }
+
+    /** A study is right only if its variants are. */
+    private static Study whole(StudyReader reader) {
+        return reader.family(Optional.empty()).study();
     }
 }

@@ -28,8 +28,8 @@ import picocli.CommandLine.Spec;
         })
 public final class Main implements Runnable {
     /** In the order of the help; {@link #command} makes each. */
-    private static final List<String> COMMANDS =
-            List.of("bands", "lid", "fill", "map", "cylinder", "media", "surroundings", "check", "start", "report");
+    private static final List<String> COMMANDS = List.of(
+            "bands", "lid", "fill", "compare", "map", "cylinder", "media", "surroundings", "check", "start", "report");
 
     @Spec
     private CommandSpec spec;
@@ -71,6 +71,7 @@ public final class Main implements Runnable {
             case "bands" -> new BandsCommand();
             case "lid" -> new LidCommand();
             case "fill" -> new FillCommand();
+            case "compare" -> new CompareCommand();
             case "map" -> new MapCommand();
             case "cylinder" -> new CylinderCommand();
             case "media" -> new MediaCommand();

@@ -11,6 +11,7 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Function;
 import java.util.function.ToIntFunction;
 import picocli.CommandLine;
 import picocli.CommandLine.Option;
@@ -46,7 +47,12 @@ final class StudyOptions {
      * @return the worst exit code: wrong input before a limit before success
      */
     int each(CommandLine line, boolean json, ToIntFunction<Study> work) {
-        return eachOpened(line, json, reader -> work.applyAsInt(reader.study()));
+        return each(line, json, StudyReader::study, work);
+    }
+
+    /** The same where more than the study itself is to be read and checked. */
+    int each(CommandLine line, boolean json, Function<StudyReader, Study> reading, ToIntFunction<Study> work) {
+        return eachOpened(line, json, reader -> work.applyAsInt(reading.apply(reader)));
     }
 
     /**
@@ -58,10 +64,7 @@ final class StudyOptions {
      * @return the worst exit code
      */
     int eachOpened(CommandLine line, boolean json, ToIntFunction<StudyReader> work) {
-        if (studies.isEmpty()) {
-            throw new ParameterException(
-                    line, "a STUDY is missing: name a study file, or write one with the command start");
-        }
+        named(line);
         int worst = 0;
         List<Problem> problems = new ArrayList<>();
         for (Path study : studies) {
@@ -83,6 +86,40 @@ final class StudyOptions {
             Failures.problems(line, problems, json);
         }
         return worst;
+    }
+
+    /**
+     * Reads every study for one answer about all of them.
+     *
+     * @param line the command, for its error writer
+     * @param json whether problems are printed as JSON
+     * @param reading takes from a reader what is needed
+     * @param <T> what that is
+     * @return one a study; empty if any had a problem, which is printed then
+     */
+    <T> Optional<List<T>> all(CommandLine line, boolean json, Function<StudyReader, T> reading) {
+        named(line);
+        List<T> read = new ArrayList<>();
+        List<Problem> problems = new ArrayList<>();
+        for (Path study : studies) {
+            try {
+                read.add(reading.apply(StudyReader.open(study, settings)));
+            } catch (StudyException e) {
+                problems.addAll(e.problems());
+            }
+        }
+        if (!problems.isEmpty()) {
+            Failures.problems(line, problems, json);
+            return Optional.empty();
+        }
+        return Optional.of(read);
+    }
+
+    private void named(CommandLine line) {
+        if (studies.isEmpty()) {
+            throw new ParameterException(
+                    line, "a STUDY is missing: name a study file, or write one with the command start");
+        }
     }
 
     /**
@@ -115,5 +152,26 @@ final class StudyOptions {
                 String.join("\n", texts),
                 output.json() ? Optional.of(json.finish()) : Optional.empty(),
                 output.csv() ? Optional.of(String.join("\n", tables)) : Optional.empty());
+    }
+
+    /**
+     * Sends one answer about all studies on.
+     *
+     * @param line the command, for its writer
+     * @param output where to
+     * @param json the page the object writes on
+     * @param text for people
+     * @param object writes the answer as an object
+     * @param table as CSV
+     */
+    void send(CommandLine line, OutputOptions output, JsonPage json, String text, Runnable object, String table) {
+        if (output.json()) {
+            object.run();
+        }
+        output.send(
+                line,
+                text,
+                output.json() ? Optional.of(json.finish()) : Optional.empty(),
+                output.csv() ? Optional.of(table) : Optional.empty());
     }
 }

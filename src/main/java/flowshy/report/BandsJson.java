@@ -9,7 +9,6 @@ import flowshy.verdict.BandsAnswer;
 import flowshy.verdict.DeviceFacts;
 import flowshy.verdict.DeviceFacts.Swing;
 import flowshy.verdict.Levers;
-import flowshy.verdict.Limit;
 import flowshy.verdict.ReadingBand;
 import flowshy.verdict.measured.Compared;
 import java.util.List;
@@ -171,21 +170,7 @@ public final class BandsJson {
 
     private void verdict(BandsAnswer answer) {
         json.text("decision", answer.verdict().decision().word());
-        json.array("limits", answer.verdict().limits(), this::limit);
+        json.array("limits", answer.verdict().limits(), limit -> LimitJson.write(json, limit));
         json.text("sentence", answer.verdict().sentence());
-    }
-
-    private void limit(Limit limit) {
-        String none = limit.reason().isEmpty() ? "it belongs to no single frequency" : limit.reason();
-        json.text("limit", limit.name());
-        json.text("unit", limit.unit());
-        json.text("sense", limit.sense().word());
-        json.number("required", limit.required());
-        json.cell("found", Cell.of(limit.found(), none));
-        json.cell("at_hz", Cell.of(limit.at(), none));
-        json.text("decision", limit.decision().word());
-        if (!limit.reason().isEmpty()) {
-            json.text("reason", limit.reason());
-        }
     }
 }

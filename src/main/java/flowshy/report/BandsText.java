@@ -78,8 +78,8 @@ public final class BandsText {
             String reason = limit.reason().isEmpty() ? "" : " (" + limit.reason() + ")";
             page.row(
                     limit.name(),
-                    limit.decision().word() + ": required " + sense(limit) + Figures.of(limit.required(), 4) + " "
-                            + limit.unit() + ", " + found + at + reason);
+                    limit.decision().word() + ": required " + sense(limit) + figure(limit.required(), limit) + ", "
+                            + found + at + reason);
         }
     }
 

@@ -105,6 +105,9 @@ final class TextPage {
                                 .map(width -> width + 1)
                                 .sum());
         for (int r = 0; r < lines.size(); r++) {
+            if (r == 1 && lines.get(r).stream().allMatch(String::isEmpty)) {
+                continue; // pure numbers all over
+            }
             String name = r == 0 ? title : r == 1 ? "" : names.get(r - 2);
             if (name.length() > left) {
                 wrap("  ", "    ", name);

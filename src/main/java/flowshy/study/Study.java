@@ -9,6 +9,7 @@ import flowshy.verdict.BandsQuestion;
 import flowshy.verdict.error.Motion;
 import flowshy.verdict.lid.Candidate;
 import flowshy.verdict.measured.MeasuredResponse;
+import java.util.ArrayList;
 import java.util.Collections;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -54,6 +55,29 @@ public record Study(
         measurements = List.copyOf(measurements);
         takenAs = List.copyOf(takenAs);
         understood = List.copyOf(understood);
+    }
+
+    /** The same study with more values understood. */
+    Study alsoUnderstood(List<Understood> more) {
+        if (more.isEmpty()) {
+            return this;
+        }
+        List<Understood> all = new ArrayList<>(understood);
+        all.addAll(more);
+        return new Study(
+                title,
+                origin,
+                device,
+                band,
+                acceptance,
+                calibration,
+                candidates,
+                motion,
+                surroundings,
+                measurements,
+                document,
+                takenAs,
+                all);
     }
 
     /**

@@ -34,8 +34,15 @@ final class StudyBuilder {
     private final Problems problems;
     private final FilesRead files;
     private final MediumBuilder media;
+    private final Optional<HeldSuspension> held;
 
     StudyBuilder(Form form, Problems problems, FilesRead files) {
+        this(form, problems, files, Optional.empty());
+    }
+
+    /** A variant, whose suspension was measured on another hair. */
+    StudyBuilder(Form form, Problems problems, FilesRead files, Optional<HeldSuspension> held) {
+        this.held = held;
         this.form = form;
         this.problems = problems;
         this.files = files;
@@ -49,8 +56,10 @@ final class StudyBuilder {
         CoverBuilder covers = new CoverBuilder(form, problems, files, media);
         Optional<CoverBuilder.Fitted> cover = covers.build("cover", hair, outside, band);
         List<Candidate> candidates = candidates(covers, hair, outside, band);
-        SuspensionBuilder suspensions = new SuspensionBuilder(form, problems, media, covers, files, hair);
-        Optional<Suspension> suspension = suspensions.build();
+        Optional<Hair> measuredOn = held.map(HeldSuspension::measured).or(() -> hair);
+        SuspensionBuilder suspensions = new SuspensionBuilder(form, problems, media, covers, files, measuredOn);
+        Optional<Suspension> suspension =
+                held.isPresent() ? hair.flatMap(own -> held.get().under(own, suspensions)) : suspensions.build();
         Optional<Calibration> calibration = calibration(cover);
         MotionBuilder motions = new MotionBuilder(form, problems, files);
         Motion motion = motions.build();

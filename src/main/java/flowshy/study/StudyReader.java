@@ -11,6 +11,7 @@ import flowshy.study.text.StudyException;
 import flowshy.study.text.StudyText;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Optional;
 
 /** From a file and the settings of the command line to a study; every problem is told at once. */
 public final class StudyReader {
@@ -57,8 +58,31 @@ public final class StudyReader {
      */
     public Study study() {
         Problems problems = new Problems();
-        Form form = Keys.read(overlaid(problems), problems);
-        return build(form, problems);
+        Node.Mapping root = overlaid(problems);
+        Form form = Keys.read(root, problems);
+        List<Study.Understood> variants = family(root).understood(problems);
+        return build(form, problems).alsoUnderstood(variants);
+    }
+
+    /**
+     * The study with its variants, each held to the base's suspension.
+     *
+     * @param chosen what of the suspension stays, empty for what the study or a variant says
+     * @return base and variants
+     * @throws StudyException with every problem
+     */
+    public Family family(Optional<Hold> chosen) {
+        Study base = study();
+        Form form = form();
+        Hold hold = chosen.orElseGet(() -> hold(form));
+        return new Family(
+                Variant.of(base.origin().file(), List.of(), hold, form, folder, base),
+                hold,
+                family(overlaid(new Problems())).variants(base, hold, chosen.isPresent()));
+    }
+
+    private FamilyReader family(Node.Mapping root) {
+        return new FamilyReader(root, text.file(), folder, settings);
     }
 
     /**
@@ -91,7 +115,11 @@ public final class StudyReader {
      * @throws StudyException with every problem
      */
     public Hold hold() {
-        String word = form().word("hold").orElse(Hold.STIFFNESS.word());
+        return hold(form());
+    }
+
+    static Hold hold(Form form) {
+        String word = form.word("hold").orElse(Hold.STIFFNESS.word());
         return word.equals(Hold.RESONANCE.word()) ? Hold.RESONANCE : Hold.STIFFNESS;
     }
 

@@ -18,6 +18,7 @@ import flowshy.verdict.BandsQuestion;
 import flowshy.verdict.design.DesignSpace;
 import flowshy.verdict.design.NoDesignException;
 import flowshy.verdict.error.Motion;
+import java.nio.file.Path;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -87,6 +88,11 @@ public final class VariedStudy implements DesignSpace {
     public static VariedStudy of(StudyReader reader, List<NumberKey> numbers, Hold hold) {
         Form form = reader.form();
         return new VariedStudy(form, new FilesRead(reader.folder()), reader.study(form), hold, numbers, true);
+    }
+
+    /** The space of a study that is made already. */
+    static VariedStudy of(Form form, Path folder, Study base, Hold hold, List<NumberKey> numbers) {
+        return new VariedStudy(form, new FilesRead(folder), base, hold, numbers, true);
     }
 
     /**

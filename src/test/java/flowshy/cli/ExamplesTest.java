@@ -72,6 +72,55 @@ class ExamplesTest {
         assertThat(printed.lines()).allSatisfy(line -> assertThat(line.length()).isLessThanOrEqualTo(80));
     }
 
+    static List<Path> compareExamples() {
+        return examples().stream()
+                .filter(example -> Files.exists(example.resolve("expected-compare.txt")))
+                .toList();
+    }
+
+    @Test
+    void thereAreCompareExamples() {
+        assertThat(compareExamples()).isNotEmpty();
+    }
+
+    /** With the moments of inertia made equal: then every line of the answer has something to say. */
+    @ParameterizedTest
+    @MethodSource("compareExamples")
+    void comparesAsExpected(Path example) throws IOException {
+        Run run = Run.of("compare", study(example), "--equal", "inertia");
+        String printed = run.out() + "exit code " + run.code() + "\n";
+        Path expected = example.resolve("expected-compare.txt");
+        if (REWRITE) {
+            Files.writeString(expected, printed);
+        }
+        assertThat(run.err()).isEmpty();
+        assertThat(printed).isEqualTo(Files.readString(expected));
+    }
+
+    /** Devices beside the base, worked apart from the program ({@code by-hand-compare.csv}). */
+    @ParameterizedTest
+    @MethodSource("compareExamples")
+    void devicesBesideTheBaseAgreeWithFiguresWorkedApart(Path example) throws IOException {
+        List<String> lines = Files.readAllLines(example.resolve("by-hand-compare.csv"));
+        assertThat(lines).hasSizeGreaterThanOrEqualTo(4);
+        Map<String, Object> plain = answer(Run.of("compare", study(example), "--json"));
+        Map<String, Object> equal = answer(Run.of("compare", study(example), "--json", "--equal", "inertia"));
+        for (String line : lines.subList(1, lines.size())) {
+            String[] fields = line.split(",", -1);
+            double value = Double.parseDouble(fields[2]);
+            boolean ratio = fields[1].equals("ratio");
+            Map<String, Object> device = Json.objects((ratio ? equal : plain).get("devices")).stream()
+                    .filter(one -> one.get("name").equals(fields[0]))
+                    .findFirst()
+                    .orElseThrow();
+            Map<String, Object> part = Json.object(device.get(ratio ? "scaled" : "figures"));
+            assertThat((double) part.get(fields[1]))
+                    .as("%s %s of %s", example, fields[1], fields[0])
+                    .isFinite()
+                    .isCloseTo(value, within(Math.abs(value) * Double.parseDouble(fields[3])));
+        }
+    }
+
     @ParameterizedTest
     @MethodSource("examples")
     void fitsEightyColumns(Path example) {

@@ -2,6 +2,10 @@ package flowshy.cli;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import flowshy.math.Figures;
+import flowshy.report.chart.Chart;
+import flowshy.report.html.section.StudyReport;
+import flowshy.study.StudyReader;
 import java.io.IOException;
 import java.io.StringReader;
 import java.io.UncheckedIOException;
@@ -261,6 +265,45 @@ class ReportTest {
         List<Element> listings = elements(section(page, "reproduce"), "pre");
         assertThat(listings.get(listings.size() - 1).getTextContent()).isEqualTo(read(Path.of(study)));
         assertThat(words(section(page, "cautions"))).contains("confirmed by test");
+    }
+
+    /** The picture is drawn from the table behind it, and each of its points stands in the JSON: see the test of the charts. */
+    @ParameterizedTest
+    @MethodSource("examples")
+    void hasEveryChartOnceWithTheNumbersBehindIt(String study) {
+        Document page = parse(made(study).page());
+        List<Chart> charts =
+                StudyReport.of(StudyReader.read(Path.of(study), List.of())).charts();
+        List<Element> figures = elements(page, "figure");
+        assertThat(figures.stream().map(figure -> figure.getAttribute("id")).toList())
+                .containsExactlyInAnyOrderElementsOf(
+                        charts.stream().map(chart -> "chart-" + chart.name()).toList())
+                .contains("chart-rejection");
+        assertThat(elements(section(page, "decision"), "svg")).hasSize(1);
+        List<Element> folded = elements(page, "details");
+        assertThat(folded).hasSameSizeAs(charts);
+        for (Chart chart : charts) {
+            Element numbers = folded.stream()
+                    .filter(details ->
+                            elements(details, "caption").get(0).getTextContent().equals(chart.title()))
+                    .findFirst()
+                    .orElseThrow();
+            assertThat(values(numbers))
+                    .containsExactlyElementsOf(chart.table().rows().stream()
+                            .flatMap(row -> row.values().stream())
+                            .filter(Double::isFinite)
+                            .map(value -> Double.valueOf(Figures.full(value)))
+                            .toList());
+            Element drawing = elements(
+                            figures.stream()
+                                    .filter(figure -> figure.getAttribute("id").equals("chart-" + chart.name()))
+                                    .findFirst()
+                                    .orElseThrow(),
+                            "svg")
+                    .get(0);
+            assertThat(elements(drawing, "title").get(0).getTextContent()).isEqualTo(chart.title());
+            assertThat(elements(drawing, "desc").get(0).getTextContent()).isNotBlank();
+        }
     }
 
     @ParameterizedTest

@@ -5,6 +5,7 @@ import java.io.InputStream;
 import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
 import java.util.function.Consumer;
+import java.util.regex.MatchResult;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 
@@ -19,6 +20,10 @@ public final class Page {
 
     /** What stands before it in the palette holds in the light and on paper. */
     private static final Pattern LIGHT = Pattern.compile("@media");
+
+    /** A shape or group of a drawing with an opacity: what stands before it, the share, what stands behind. */
+    private static final Pattern SHEER = Pattern.compile(
+            "<((?:g|rect|path|line|polygon|polyline|circle|ellipse|text)\\b[^>]*?) opacity=\"([^\"]*)\"([^>/]*)");
 
     private Page() {}
 
@@ -45,7 +50,16 @@ public final class Page {
         while (colour.find()) {
             style = style.replace("var(--" + colour.group(1) + ")", colour.group(2));
         }
-        return STYLE.matcher(page).replaceFirst(Matcher.quoteReplacement("<style>" + style + "</style>"));
+        String paper = STYLE.matcher(page).replaceFirst(Matcher.quoteReplacement("<style>" + style + "</style>"));
+        return SHEER.matcher(paper).replaceAll(shape -> Matcher.quoteReplacement(sheer(shape)));
+    }
+
+    /** The maker stumbles over the opacity of a shape as a whole; that of its filling and its line, it can. */
+    private static String sheer(MatchResult shape) {
+        String others = shape.group(1) + shape.group(3);
+        String share = shape.group(2);
+        return "<" + others + (others.contains(" fill-opacity=") ? "" : " fill-opacity=\"" + share + "\"")
+                + (others.contains(" stroke-opacity=") ? "" : " stroke-opacity=\"" + share + "\"");
     }
 
     private static String of(String title, Consumer<Html> body, String style) {

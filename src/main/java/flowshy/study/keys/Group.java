@@ -17,6 +17,7 @@ import java.util.Optional;
  * @param rules which keys shut each other out
  * @param selector the word that decides on further keys, if there is one
  * @param starts sets of starting values, if it has any
+ * @param ofTheWord keys that belong to what the shorthand's word names, and go with it when it changes
  */
 record Group(
         String name,
@@ -25,32 +26,46 @@ record Group(
         Optional<String> listing,
         List<Rule> rules,
         Optional<Selector> selector,
-        Optional<Starts> starts)
+        Optional<Starts> starts,
+        List<String> ofTheWord)
         implements Value {
     Group {
         keys = List.copyOf(keys);
         rules = List.copyOf(rules);
+        ofTheWord = List.copyOf(ofTheWord);
     }
 
     static Group of(String name, List<Key> keys, Rule... rules) {
         return new Group(
-                name, keys, Optional.empty(), Optional.empty(), List.of(rules), Optional.empty(), Optional.empty());
+                name,
+                keys,
+                Optional.empty(),
+                Optional.empty(),
+                List.of(rules),
+                Optional.empty(),
+                Optional.empty(),
+                List.of());
     }
 
     Group shortFor(String key) {
-        return new Group(name, keys, Optional.of(key), listing, rules, selector, starts);
+        return new Group(name, keys, Optional.of(key), listing, rules, selector, starts, ofTheWord);
     }
 
     Group listFor(String key) {
-        return new Group(name, keys, shorthand, Optional.of(key), rules, selector, starts);
+        return new Group(name, keys, shorthand, Optional.of(key), rules, selector, starts, ofTheWord);
     }
 
     Group selectedBy(Key key, Map<String, List<Key>> further) {
-        return new Group(name, keys, shorthand, listing, rules, Optional.of(new Selector(key, further)), starts);
+        return new Group(
+                name, keys, shorthand, listing, rules, Optional.of(new Selector(key, further)), starts, ofTheWord);
     }
 
     Group startingFrom(Starts sets) {
-        return new Group(name, keys, shorthand, listing, rules, selector, Optional.of(sets));
+        return new Group(name, keys, shorthand, listing, rules, selector, Optional.of(sets), ofTheWord);
+    }
+
+    Group withKeysOfTheWord(String... names) {
+        return new Group(name, keys, shorthand, listing, rules, selector, starts, List.of(names));
     }
 
     /** Every key of the group where the deciding word is known: deciding key, its own keys, common keys. */

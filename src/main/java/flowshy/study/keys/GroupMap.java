@@ -31,7 +31,7 @@ public record GroupMap(Group each) implements Value {
     @Override
     public Map<String, Object> schema() {
         Map<String, Object> schema = GroupSchema.map("type", "object");
-        schema.put("propertyNames", GroupSchema.map("pattern", "^[^.\\[\\]=]{1," + LONGEST + "}$"));
+        schema.put("propertyNames", GroupSchema.map("pattern", pattern()));
         schema.put("additionalProperties", each.schema());
         schema.put("minProperties", 1);
         schema.put("maxProperties", MOST);
@@ -60,11 +60,8 @@ public record GroupMap(Group each) implements Value {
             String name = entry.key().strip();
             Optional<String> fault = names.contains(name) ? Optional.of("a repeated name") : fault(name);
             if (fault.isPresent()) {
-                reading.problem(Problem.of(
-                        entry.position(),
-                        path,
-                        fault.get() + ": " + Printable.of(entry.key()),
-                        "a name has up to " + LONGEST + " characters, none of " + String.join(" ", PARTING.split(""))));
+                reading.problem(
+                        Problem.of(entry.position(), path, fault.get() + ": " + Printable.of(entry.key()), accepted()));
             } else {
                 names.add(name);
                 each.read(reading, entry.value(), path + "." + name);
@@ -72,7 +69,18 @@ public record GroupMap(Group each) implements Value {
         }
     }
 
-    private static Optional<String> fault(String name) {
+    /** What a name may be. */
+    static String accepted() {
+        return "a name has up to " + LONGEST + " characters, none of " + String.join(" ", PARTING.split(""));
+    }
+
+    /** The pattern of a name, for editors. */
+    static String pattern() {
+        return "^[^.\\[\\]=]{1," + LONGEST + "}$";
+    }
+
+    /** What is wrong with a name that the user gave; empty if it may stand in a path. */
+    static Optional<String> fault(String name) {
         if (name.isEmpty()) {
             return Optional.of("an empty name");
         }

@@ -181,7 +181,10 @@ public final class Keys {
                 Key.optional("calibration", calibration(), "where the sensitivity is stated"),
                 Key.later("tolerances", "spread of any number", "change the number with --set"),
                 Key.later("envelope", "states the device must bear", "change medium.temperature and others with --set"),
-                Key.later("variants", "other devices beside this one", "name several studies in one call"),
+                Key.optional(
+                        "variants",
+                        new Overrides(),
+                        "devices to be compared with this one: the keys that differ, laid over the study; for the command compare"),
                 Key.optional(
                         "measurements",
                         MeasurementKeys.map(),

@@ -87,6 +87,7 @@ final class MediumKeys {
                         Rule.atMostOne("second share"),
                         Rule.oneBeside("second", "share"),
                         Rule.oneBeside("density", "viscosity", "kinematic-viscosity"))
-                .shortFor("name");
+                .shortFor("name")
+                .withKeysOfTheWord("humidity", "mass-fraction", "salinity", "grade", "second", "share");
     }
 }

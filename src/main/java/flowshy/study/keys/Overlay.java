@@ -11,7 +11,7 @@ import java.util.Optional;
  * Lays changes over a study before it is read, so that they are checked like the text of the file.
  *
  * <p>A change pushes out what it contradicts: {@code suspension.stiffness} the resonance, another {@code hair.shape} the
- * keys that only the old shape has.
+ * keys that only the old shape has, another {@code medium.name} what only the old medium has, such as its humidity.
  */
 public final class Overlay {
     private Overlay() {}
@@ -28,7 +28,8 @@ public final class Overlay {
     }
 
     /**
-     * The study with a part of another one laid over it: groups are merged, anything else is replaced.
+     * The study with a part of another one laid over it: groups are merged, anything else is replaced. What the part itself says never
+     * pushes out what it also says: the reader then tells that the two do not go together.
      *
      * @param root the study
      * @param over keys to override, of any depth
@@ -52,7 +53,7 @@ public final class Overlay {
                     ? set(inner, old, rest, value, position)
                     : new Node.Mapping(List.of(entry(rest, value, position)), position);
         }
-        return put(kind, mapping, new Node.Entry(name, position, below));
+        return put(kind, mapping, new Node.Entry(name, position, below), List.of());
     }
 
     /** Under a key that is not a group nothing can be set; the reader refuses what stands there then. */
@@ -64,21 +65,23 @@ public final class Overlay {
     }
 
     private static Node.Mapping merge(Optional<Value> kind, Node.Mapping base, Node.Mapping over) {
-        Node.Mapping merged = base;
+        Node.Mapping merged = new Node.Mapping(base.entries(), over.position());
+        List<String> said = over.entries().stream().map(Node.Entry::key).toList();
         for (Node.Entry entry : over.entries()) {
             Optional<Value> inner = inner(kind, entry.key());
             Optional<Node.Mapping> old = merged.entry(entry.key()).flatMap(e -> opened(inner, e.value()));
             Node value = entry.value() instanceof Node.Mapping part && old.isPresent()
                     ? merge(inner, old.get(), part)
                     : entry.value();
-            merged = put(kind, merged, new Node.Entry(entry.key(), entry.position(), value));
+            merged = put(kind, merged, new Node.Entry(entry.key(), entry.position(), value), said);
         }
         return merged;
     }
 
     /** What keys may stand below, for a group or for names with groups. */
     private static Optional<Value> inner(Optional<Value> kind, String name) {
-        return kind.flatMap(k -> k.below(name)).filter(v -> v instanceof Group || v instanceof GroupMap);
+        return kind.flatMap(k -> k.below(name))
+                .filter(v -> v instanceof Group || v instanceof GroupMap || v instanceof Overrides);
     }
 
     /** A group that is written as a single word or as a list is opened into its keys first. */
@@ -89,13 +92,25 @@ public final class Overlay {
         return kind.filter(Group.class::isInstance).flatMap(k -> ((Group) k).mapping(node));
     }
 
-    private static Node.Mapping put(Optional<Value> kind, Node.Mapping mapping, Node.Entry entry) {
+    private static Node.Mapping put(Optional<Value> kind, Node.Mapping mapping, Node.Entry entry, List<String> stay) {
         List<String> gone = new ArrayList<>();
         if (kind.isPresent() && kind.get() instanceof Group group) {
             group.rules().forEach(rule -> gone.addAll(rule.rivals(entry.key())));
             group.selector().ifPresent(selector -> gone.addAll(strangers(selector, entry)));
+            if (group.shorthand().filter(entry.key()::equals).isPresent() && !sameWord(mapping, entry)) {
+                gone.addAll(group.ofTheWord());
+            }
         }
+        gone.removeAll(stay);
         return mapping.without(gone).with(entry);
+    }
+
+    private static boolean sameWord(Node.Mapping mapping, Node.Entry entry) {
+        return mapping.entry(entry.key())
+                .filter(old -> old.value() instanceof Node.Scalar before
+                        && entry.value() instanceof Node.Scalar now
+                        && before.text().strip().equals(now.text().strip()))
+                .isPresent();
     }
 
     /** Keys that do not go with the new deciding word. */

@@ -6,7 +6,6 @@ import java.util.List;
 /** Keys of the suspension: the ways of stating stiffness and damping, each with what surrounded the hair. */
 final class SuspensionKeys {
     static final Measure FREQUENCY = Measure.of(Dimension.FREQUENCY, "1 mHz", "10 MHz");
-    private static final String LATER = "leave it out";
 
     private SuspensionKeys() {}
 
@@ -57,8 +56,8 @@ final class SuspensionKeys {
                         Measure.of(Dimension.ANGLE_NOISE, "0 rad/rtHz", "1 rad/rtHz"),
                         Presence.leftOut("none", "only thermal noise is counted"),
                         "noise of the readout as an angle"),
-                Key.optional("film", film(), "film of the medium under the tilting plate, if its damping counts apart"),
-                Key.later("hold", "what variants keep, stiffness or resonance", LATER));
+                Key.optional(
+                        "film", film(), "film of the medium under the tilting plate, if its damping counts apart"));
         return Group.of(
                 "suspension",
                 keys,

@@ -5,7 +5,8 @@ import java.util.Map;
 import java.util.Optional;
 
 /** What may stand behind a key; each kind reads itself and describes itself. */
-public sealed interface Value permits Measure, Words, WordOr, Text, TextList, Points, Group, GroupList, GroupMap {
+public sealed interface Value
+        permits Measure, Words, WordOr, Text, TextList, Points, Group, GroupList, GroupMap, Overrides {
     /**
      * Its kind in a few words, for the list of keys.
      *

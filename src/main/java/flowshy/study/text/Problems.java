@@ -47,6 +47,15 @@ public final class Problems {
     }
 
     /**
+     * Those noted, the first hundred.
+     *
+     * @return in the order noted
+     */
+    public List<Problem> all() {
+        return List.copyOf(found);
+    }
+
+    /**
      * How many were noted.
      *
      * @return the count, those beyond the hundredth included

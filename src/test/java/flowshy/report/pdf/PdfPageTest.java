@@ -29,7 +29,7 @@ class PdfPageTest {
                     html.listing("hair: {length: 5 um}\n");
                     html.drawing(
                             "<svg xmlns=\"http://www.w3.org/2000/svg\" viewBox=\"0 0 100 50\" width=\"100\" height=\"50\"><title>t</title>"
-                                    + "<rect width=\"100\" height=\"50\" style=\"fill:#0b5d36\"/><text x=\"5\" y=\"20\">drawn µ</text></svg>");
+                                    + "<rect width=\"100\" height=\"50\" style=\"fill:#0b5d36\"/><g opacity=\"0.4\"><rect width=\"5\" height=\"5\" opacity=\"0.5\"/></g><text x=\"5\" y=\"20\">drawn µ</text></svg>");
                     for (int i = 0; i < 120; i++) {
                         html.tag("p", "line " + i);
                     }

@@ -123,10 +123,7 @@ class OverlayTest {
                 .singleElement()
                 .asString()
                 .startsWith("--set cover: cover.lid: unknown key");
-        assertThat(problems("variants={a: {medium: water}}"))
-                .singleElement()
-                .asString()
-                .startsWith("--set variants: known, but not built yet in this version");
+        assertThat(problems("variants=water")).singleElement().asString().startsWith("--set variants: water; names");
     }
 
     @Test
@@ -145,6 +142,23 @@ class OverlayTest {
         assertThat(form.has("suspension.resonance")).isFalse();
         assertThat(form.si("suspension.quality.value")).isEqualTo(3.0);
         assertThat(form.word("title")).contains("changed");
+    }
+
+    /** What a part says itself is never pushed out by another word of it: the reader tells that the two do not go together. */
+    @Test
+    void aPartNeverPushesOutItsOwnWords() {
+        Form moist = read(Overlay.merge(tree(BASE), tree("medium: {humidity: 20 %, name: air}")));
+        assertThat(moist.si("medium.humidity")).isEqualTo(0.2);
+        Form helium =
+                read(Overlay.merge(laid("medium.humidity=70 %"), tree("medium: {name: helium, temperature: 30 degC}")));
+        assertThat(helium.has("medium.humidity")).isFalse();
+        Problems problems = new Problems();
+        Keys.read(Overlay.merge(tree(BASE), tree("suspension: {stiffness: 1 nN.m/rad, resonance: 2 Hz}")), problems);
+        assertThat(problems.count()).isEqualTo(1);
+    }
+
+    private static Node.Mapping laid(String setting) {
+        return Overlay.set(tree(BASE), Setting.read("--set", setting));
     }
 
     @Test

@@ -46,6 +46,7 @@ final class DecisionSection implements ReportSection {
                 limits(html, words, judged);
             }
         });
+        words.charts(id());
         words.paragraph(verdict.sentence());
         report.lid().filter(lid -> !report.study().candidates().isEmpty()).ifPresent(lid -> lid(html, words, lid));
         if (report.answer().caveats().stream().anyMatch(report::touches)) {

@@ -28,6 +28,7 @@ final class DeviceSection implements ReportSection {
     public void write(Html html, StudyReport report) {
         Words words = new Words(html, report);
         Device device = report.answer().device();
+        words.charts(id());
         words.facts("Hair", () -> hair(html, words, report.answer().facts(), device));
         if (device.suspension().isPresent()) {
             words.facts("Suspension and movement", () -> movement(html, words, report));

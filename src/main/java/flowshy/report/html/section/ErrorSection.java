@@ -33,6 +33,7 @@ final class ErrorSection implements ReportSection {
         Words words = new Words(html, report);
         ErrorBudget budget = report.answer().error().orElseThrow();
         words.paragraph("Flow of the surroundings as equivalent acceleration, over the band of use.");
+        words.charts(id());
         Tables.of(html, "Sources", ErrorReport.sources(), budget.sources())
                 .named("source", ErrorSection::name)
                 .write();

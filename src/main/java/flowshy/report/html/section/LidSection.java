@@ -52,6 +52,7 @@ final class LidSection implements ReportSection {
             words.amount(answer.reference(), "Hz", 4);
             html.text(". Error and offset are those of the surroundings.");
         });
+        words.charts(id());
         Tables.of(html, "Covers side by side", columns(answer), answer.covers())
                 .named("cover", LidSection::name)
                 .write();

@@ -18,6 +18,7 @@ public final class ReportPage {
             new WhySection(),
             new ErrorSection(),
             new LidSection(),
+            new FurtherChartsSection(),
             new DefaultsSection(),
             new MemorySection(),
             new LimitsSection(),

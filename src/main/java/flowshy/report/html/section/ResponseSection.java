@@ -39,6 +39,7 @@ final class ResponseSection implements ReportSection {
                         ? " Largest speed: the flow that keeps the error limit."
                         : "")
                 + (moving ? "" : " Responses are left out: no suspension is stated that holds the hair."));
+        words.charts(id());
         Tables.of(html, "Response at third-octave frequencies", columns, answer.points())
                 .marked(point -> point.frequency() < answer.band().from() * (1.0 - ROUNDING)
                         || point.frequency() > answer.band().to() * (1.0 + ROUNDING))

@@ -3,6 +3,8 @@ package flowshy.report.html.section;
 import flowshy.math.Caveat;
 import flowshy.math.Caveat.Subject;
 import flowshy.math.Caveat.Weight;
+import flowshy.report.chart.BandsCharts;
+import flowshy.report.chart.Chart;
 import flowshy.report.html.Typography;
 import flowshy.stream.Source;
 import flowshy.stream.cover.Covers;
@@ -27,15 +29,18 @@ import java.util.Set;
  * @param answer bands, points, error and verdict of its device
  * @param lid covers side by side, where the study names candidates or a cover
  * @param why what would move edges of bands and failed limits, empty where there is none
+ * @param charts a picture of every result, in the order of the report
  */
-public record StudyReport(Study study, BandsAnswer answer, Optional<LidAnswer> lid, List<Levers> why) {
+public record StudyReport(
+        Study study, BandsAnswer answer, Optional<LidAnswer> lid, List<Levers> why, List<Chart> charts) {
     /** A weakness here weakens the rejection, and so the bands. */
     private static final Set<Subject> ALWAYS =
             EnumSet.of(Subject.MEDIUM, Subject.HAIR, Subject.REJECTION, Subject.COVER);
 
-    /** Copies the list. */
+    /** Copies the lists. */
     public StudyReport {
         why = List.copyOf(why);
+        charts = List.copyOf(charts);
     }
 
     /**
@@ -46,7 +51,7 @@ public record StudyReport(Study study, BandsAnswer answer, Optional<LidAnswer> l
      */
     public static StudyReport of(Study study) {
         BandsAnswer answer = study.question().answer();
-        return new StudyReport(study, answer, lid(study), Levers.of(answer));
+        return new StudyReport(study, answer, lid(study), Levers.of(answer), BandsCharts.of(study, answer));
     }
 
     private static Optional<LidAnswer> lid(Study study) {

@@ -2,11 +2,16 @@ package flowshy.report.html.section;
 
 import flowshy.math.Caveat;
 import flowshy.math.Caveat.Subject;
+import flowshy.report.Cell;
+import flowshy.report.Column;
+import flowshy.report.chart.Chart;
+import flowshy.report.chart.ChartTable;
 import flowshy.report.html.Amount;
 import flowshy.report.html.Html;
 import flowshy.report.html.Tables;
 import flowshy.report.html.Typography;
 import flowshy.verdict.Decision;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Set;
@@ -14,6 +19,8 @@ import java.util.function.Predicate;
 
 /** Turns of phrase that several sections share. */
 final class Words {
+    private static final int DIGITS = 4;
+
     private final Html html;
     private final StudyReport report;
     private final Typography typography;
@@ -118,5 +125,43 @@ final class Words {
                         html.tag("th").with("scope", "col").holds(cell);
                     }
                 }));
+    }
+
+    /** Every chart that belongs to a section, each with its description and, folded away, the numbers behind it. */
+    void charts(String section) {
+        report.charts().stream()
+                .filter(chart -> FurtherChartsSection.home(chart).equals(section))
+                .forEach(this::chart);
+    }
+
+    private void chart(Chart chart) {
+        html.tag("figure").with("id", "chart-" + chart.name()).holds(() -> {
+            html.drawing(chart.svg(chart.name()));
+            html.tag("figcaption").holds(() -> {
+                html.tag("strong", chart.title());
+                html.text(". ");
+                sentence(chart.description());
+            });
+        });
+        html.tag("details").holds(() -> {
+            html.tag("summary", "The numbers behind this chart");
+            numbers(chart.title(), chart.table());
+        });
+    }
+
+    private void numbers(String caption, ChartTable table) {
+        List<Column<ChartTable.Row>> columns = new ArrayList<>();
+        for (int c = 0; c < table.heads().size(); c++) {
+            int at = c;
+            ChartTable.Head head = table.heads().get(c);
+            columns.add(new Column<>(
+                    head.words(),
+                    head.words(),
+                    head.unit(),
+                    DIGITS,
+                    row -> Cell.of(row.values().get(at), "no value there")));
+        }
+        Tables<ChartTable.Row> numbers = Tables.of(html, caption, columns, table.rows());
+        (table.labelled() ? numbers.named("curve", (page, row) -> page.user(row.label())) : numbers).write();
     }
 }

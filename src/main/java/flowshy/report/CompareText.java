@@ -1,0 +1,373 @@
+package flowshy.report;
+
+import static flowshy.math.Figures.say;
+
+import flowshy.hair.Profile;
+import flowshy.math.Caveat;
+import flowshy.response.Device;
+import flowshy.study.Family;
+import flowshy.study.Study;
+import flowshy.study.Variant;
+import flowshy.verdict.BandsAnswer;
+import flowshy.verdict.Decision;
+import flowshy.verdict.Limit;
+import flowshy.verdict.compare.CompareQuestion;
+import flowshy.verdict.compare.Compared;
+import flowshy.verdict.compare.Scaled;
+import flowshy.verdict.figure.Figure;
+import flowshy.verdict.figure.Found;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.function.Function;
+import java.util.regex.Pattern;
+import org.hipparchus.util.FastMath;
+
+/** Devices side by side for a terminal: who they are, what they meet, then one line a quantity and one column a device. */
+public final class CompareText {
+    /** Columns that fit a page beside the names of the quantities. */
+    private static final int ABREAST = 4;
+
+    private static final Pattern FIGURE = Pattern.compile("[0-9][0-9.e+-]*");
+
+    private static final List<Figure> SHOWN = List.of(
+            Figure.MASS,
+            Figure.INERTIA,
+            Figure.INERTIAL_TORQUE,
+            Figure.FOOTPRINT,
+            Figure.LENGTH,
+            Figure.RESONANCE,
+            Figure.QUALITY,
+            Figure.SENSITIVITY,
+            Figure.NOISE,
+            Figure.REJECTION_FROM,
+            Figure.REJECTION_TO,
+            Figure.LEAST_REJECTION,
+            Figure.MOTION_WIDTH,
+            Figure.MOTION_OCTAVES,
+            Figure.EQUIVALENT,
+            Figure.ERROR,
+            Figure.OFFSET,
+            Figure.STATIC_TILT,
+            Figure.BENDING_FREQUENCY,
+            Figure.BENDING_RATIO,
+            Figure.TIP_CLEARANCE);
+
+    private final TextPage page = new TextPage();
+    private final List<Family> families;
+    private final CompareQuestion question;
+    private final List<Compared> devices;
+
+    private CompareText(List<Family> families, CompareQuestion question, List<Compared> devices) {
+        this.families = families;
+        this.question = question;
+        this.devices = devices;
+    }
+
+    /**
+     * The printed comparison.
+     *
+     * @param families the studies with their variants
+     * @param question what was asked
+     * @param devices what was found, one a study or variant, same order
+     * @return text with a line end after every line
+     */
+    public static String of(List<Family> families, CompareQuestion question, List<Compared> devices) {
+        CompareText text = new CompareText(families, question, devices);
+        text.head();
+        text.decisions();
+        text.sideBySide();
+        text.missing();
+        text.taken();
+        text.caveats();
+        text.page.line("");
+        text.page.paragraph(Cautions.SHORT);
+        return text.page.toString();
+    }
+
+    /** Letters as column heads: names are as long as users like. */
+    static String letter(int index) {
+        return index < 26 ? String.valueOf((char) ('A' + index)) : letter(index / 26 - 1) + letter(index % 26);
+    }
+
+    private void head() {
+        Study first = families.get(0).study();
+        page.line(
+                "Flowshy " + Version.number() + "   compare   " + first.origin().file());
+        if (!first.title().isEmpty()) {
+            page.line(first.title());
+        }
+        first.origin().settings().forEach(setting -> page.line("with --set " + setting));
+        page.heading("Devices");
+        int index = 0;
+        for (Family family : families) {
+            for (Variant variant : family.all()) {
+                device(index++, family, variant);
+            }
+        }
+        held();
+    }
+
+    private void device(int index, Family family, Variant variant) {
+        boolean base = variant.changes().isEmpty();
+        String name = base ? (families.size() == 1 ? "the study as it stands" : variant.name()) : variant.name();
+        Compared compared = devices.get(index);
+        List<String> sentences = new ArrayList<>();
+        compared.question().ifPresent(asked -> sentences.add(described(asked.device())));
+        if (!base) {
+            sentences.add("Stated: " + String.join("; ", variant.changes()));
+        } else if (families.size() > 1 && !family.study().title().isEmpty()) {
+            sentences.add(family.study().title());
+        }
+        compared.scaled().ifPresent(scaled -> sentences.add(scaled(scaled)));
+        if (!compared.reason().isEmpty()) {
+            sentences.add("No solution: " + compared.reason());
+        }
+        page.note(letter(index), name + " - " + String.join(". ", sentences) + ".");
+    }
+
+    private static String described(Device device) {
+        Profile profile = device.hair().profile();
+        return say(
+                "%s, %.4g um long, %.4g um at the widest, cover %s, in %s",
+                profile.shape(),
+                1e6 * profile.length(),
+                2e6 * profile.largestRadius(),
+                device.cover().words(),
+                device.around().name());
+    }
+
+    private static String scaled(Scaled scaled) {
+        if (scaled.ratio() == 1.0) {
+            return "Its " + scaled.figure().word() + " is A's as it stands";
+        }
+        return say(
+                        "Made equal by %s: %s from %.4g to %.6g %s",
+                        scaled.change(),
+                        scaled.figure().word(),
+                        scaled.figure().unit().show(scaled.before()),
+                        scaled.figure().unit().show(scaled.after()),
+                        scaled.figure().unit().shown())
+                .strip();
+    }
+
+    private void held() {
+        List<String> words = new ArrayList<>();
+        for (Family family : families) {
+            for (Variant variant : family.all()) {
+                String word = variant.hold().word();
+                if (!words.contains(word)
+                        && family.study().device().suspension().isPresent()) {
+                    words.add(word);
+                }
+            }
+        }
+        if (words.isEmpty()) {
+            return;
+        }
+        page.paragraph("Held of the suspension, as measured on its study's own hair: " + String.join(", or ", words)
+                + ", and the structural damping."
+                + say(
+                        " Sensitivity, noise and equivalent at %.4g Hz.",
+                        question.contenders().get(0).question().orElseThrow().reference()));
+    }
+
+    private void decisions() {
+        page.heading("Decisions");
+        for (int i = 0; i < devices.size(); i++) {
+            Compared device = devices.get(i);
+            String decision = device.answer()
+                    .map(answer -> answer.verdict().decision().word() + misses(answer))
+                    .orElse("not compared");
+            page.row(letter(i) + "  " + cut(shortName(i)), decision);
+        }
+    }
+
+    private String shortName(int index) {
+        return question.contenders().get(index).changes().isEmpty() && families.size() == 1
+                ? "as it stands"
+                : question.contenders().get(index).name();
+    }
+
+    private static String cut(String name) {
+        return name.codePointCount(0, name.length()) > 19
+                ? name.substring(0, name.offsetByCodePoints(0, 18)) + "…"
+                : name;
+    }
+
+    private static String misses(BandsAnswer answer) {
+        List<String> misses = new ArrayList<>();
+        for (Limit limit : answer.verdict().limits()) {
+            if (limit.decision() == Decision.FAILS || limit.decision() == Decision.UNDECIDED) {
+                misses.add(
+                        limit.found().isPresent()
+                                ? say(
+                                        "%s %.4g, required %s %.4g %s",
+                                        limit.name(),
+                                        limit.found().getAsDouble(),
+                                        limit.sense().words(),
+                                        limit.required(),
+                                        limit.unit())
+                                : limit.name() + ": " + limit.reason());
+            }
+        }
+        return misses.isEmpty() ? "" : ": " + String.join("; ", misses).strip();
+    }
+
+    /** One line of the table. */
+    private record Row(String name, Function<Compared, OptionalDouble> value) {}
+
+    private void sideBySide() {
+        List<Row> rows = rows().stream()
+                .filter(row -> devices.stream()
+                        .anyMatch(device -> row.value().apply(device).isPresent()))
+                .toList();
+        page.heading("Side by side");
+        List<Integer> others = new ArrayList<>();
+        for (int i = 1; i < devices.size(); i++) {
+            others.add(i);
+        }
+        int from = 0;
+        do {
+            List<Integer> shown = new ArrayList<>(List.of(0));
+            shown.addAll(others.subList(from, FastMath.min(others.size(), from + ABREAST - 1)));
+            if (from > 0) {
+                page.line("");
+            }
+            page.namedTable("", rows.stream().map(Row::name).toList(), columns(shown), rows);
+            from += ABREAST - 1;
+        } while (from < others.size());
+    }
+
+    private List<Column<Row>> columns(List<Integer> shown) {
+        List<Column<Row>> columns = new ArrayList<>();
+        for (int index : shown) {
+            columns.add(new Column<>(
+                    "", letter(index), "", 4, row -> Cell.of(row.value().apply(devices.get(index)), "")));
+        }
+        return columns;
+    }
+
+    private List<Row> rows() {
+        List<Row> rows = new ArrayList<>();
+        for (Figure figure : SHOWN) {
+            String unit = figure.unit().shown();
+            rows.add(new Row(figure.word() + (unit.isEmpty() ? "" : ", " + unit), device -> shown(figure, device)));
+            if (figure == Figure.LEAST_REJECTION) {
+                rows.add(new Row(
+                        "  found at, Hz",
+                        device -> found(figure, device).map(Found::at).orElse(OptionalDouble.empty())));
+            }
+        }
+        rows.add(new Row("least-rejection less A's, dB", device -> difference(Figure.LEAST_REJECTION, device)));
+        rows.add(new Row("sensitivity over A's, dB", device -> level(Figure.SENSITIVITY, device)));
+        rows.add(new Row("noise over A's, dB", device -> level(Figure.NOISE, device)));
+        return rows;
+    }
+
+    private static Optional<Found> found(Figure figure, Compared device) {
+        return Optional.ofNullable(device.figures().get(figure));
+    }
+
+    private static OptionalDouble number(Figure figure, Compared device) {
+        return found(figure, device).map(Found::number).orElse(OptionalDouble.empty());
+    }
+
+    private static OptionalDouble shown(Figure figure, Compared device) {
+        OptionalDouble number = number(figure, device);
+        return number.isPresent() ? OptionalDouble.of(figure.unit().show(number.getAsDouble())) : number;
+    }
+
+    private OptionalDouble difference(Figure figure, Compared device) {
+        OptionalDouble own = number(figure, device);
+        OptionalDouble first = number(figure, devices.get(0));
+        return own.isPresent() && first.isPresent()
+                ? OptionalDouble.of(own.getAsDouble() - first.getAsDouble())
+                : OptionalDouble.empty();
+    }
+
+    private OptionalDouble level(Figure figure, Compared device) {
+        OptionalDouble own = number(figure, device);
+        OptionalDouble first = number(figure, devices.get(0));
+        return own.isPresent() && first.isPresent()
+                ? OptionalDouble.of(20.0 * FastMath.log10(own.getAsDouble() / first.getAsDouble()))
+                : OptionalDouble.empty();
+    }
+
+    /** Why a dash stands where a number was looked for. */
+    private void missing() {
+        Map<String, Map<String, List<String>>> reasons = new LinkedHashMap<>();
+        for (int i = 0; i < devices.size(); i++) {
+            for (Figure figure : SHOWN) {
+                Optional<Found> found = found(figure, devices.get(i));
+                if (found.isPresent() && found.get().number().isEmpty()) {
+                    reasons.computeIfAbsent(found.get().reason(), reason -> new LinkedHashMap<>())
+                            .computeIfAbsent(figure.word(), word -> new ArrayList<>())
+                            .add(letter(i));
+                }
+            }
+        }
+        reasons.forEach((reason, figures) -> {
+            List<String> letters = figures.values().stream()
+                    .flatMap(List::stream)
+                    .distinct()
+                    .sorted()
+                    .toList();
+            page.note(
+                    "-",
+                    String.join(", ", figures.keySet()) + " (" + String.join(", ", letters) + "): " + reason + ".");
+        });
+    }
+
+    private void taken() {
+        Map<String, List<String>> all = new LinkedHashMap<>();
+        int index = 0;
+        for (Family family : families) {
+            for (Variant variant : family.all()) {
+                String letter = letter(index++);
+                variant.study()
+                        .ifPresent(study -> study.takenAs()
+                                .forEach(taken -> all.computeIfAbsent(
+                                                taken.key() + "\n" + taken.value() + " (" + taken.why() + ")",
+                                                line -> new ArrayList<>())
+                                        .add(letter)));
+            }
+        }
+        if (all.isEmpty()) {
+            return;
+        }
+        page.heading("Taken as (not stated in the study)");
+        all.forEach((line, letters) -> {
+            String who = letters.size() == devices.size() ? "" : String.join(", ", letters) + ": ";
+            String[] parts = line.split("\n", -1);
+            page.row(parts[0], who + parts[1]);
+        });
+    }
+
+    private void caveats() {
+        Map<String, Caveat> first = new LinkedHashMap<>();
+        Map<String, List<String>> letters = new LinkedHashMap<>();
+        for (int i = 0; i < devices.size(); i++) {
+            List<Caveat> caveats =
+                    devices.get(i).answer().map(BandsAnswer::caveats).orElse(List.of());
+            for (Caveat caveat : caveats) {
+                if (caveat.weight() != Caveat.Weight.NOTE) {
+                    // the same sentence with other figures is told once
+                    String sort = caveat.weight().words()
+                            + FIGURE.matcher(caveat.text()).replaceAll("#");
+                    first.putIfAbsent(sort, caveat);
+                    letters.computeIfAbsent(sort, key -> new ArrayList<>()).add(letter(i));
+                }
+            }
+        }
+        if (first.isEmpty()) {
+            return;
+        }
+        page.heading("What weakens the numbers (with the figures of the first device named)");
+        first.forEach((sort, caveat) -> page.note(
+                String.join(", ", letters.get(sort)) + " [" + caveat.weight().words() + "]", caveat.text()));
+    }
+}
