@@ -6,6 +6,7 @@ import flowshy.report.pdf.PdfPage;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
+import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -99,7 +100,7 @@ final class ReportFiles {
         Map<Path, byte[]> bytes = new LinkedHashMap<>();
         put(bytes, page, names.get(study) + ".html", text -> text.getBytes(StandardCharsets.UTF_8), html);
         put(bytes, sheet, names.get(study) + ".pdf", PdfPage::of, html);
-        bytes.forEach(ReportFiles::write);
+        writeAll(bytes);
         return bytes.entrySet().stream()
                 .map(file -> Written.of(file.getKey().toString(), file.getValue()))
                 .toList();
@@ -112,11 +113,18 @@ final class ReportFiles {
         }
     }
 
-    private static void write(Path target, byte[] bytes) {
+    /** All of them or none, and into folders that are there. */
+    private static void writeAll(Map<Path, byte[]> bytes) {
+        Path first = bytes.keySet().iterator().next();
+        for (Path target : bytes.keySet()) {
+            if (!Files.isDirectory(target.toAbsolutePath().getParent())) {
+                throw new UserException(Failures.notWritten(target, new NoSuchFileException(target.toString())));
+            }
+        }
         try {
-            WholeFile.write(target, bytes);
+            WholeFile.writeAll(first.toAbsolutePath().getParent(), bytes);
         } catch (IOException e) {
-            throw new UserException(Failures.notWritten(target, e));
+            throw new UserException(Failures.notWritten(first, e));
         }
     }
 }

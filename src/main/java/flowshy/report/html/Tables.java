@@ -21,6 +21,9 @@ public final class Tables<T> {
     private static final Pattern UNIT_OF_NAME = Pattern.compile(
             "_(?:hz|db|deg|rad_per_m_s2|m_s2_per_m_s|m_s2_per_rthz|m_s2|m_s|percent|kg_m3|pa_s|m|rad)$");
 
+    /** So many rows stand on one sheet of paper; a longer table may go on on the next. */
+    private static final int SHORT = 12;
+
     private final Html html;
     private final String caption;
     private final List<Column<T>> columns;
@@ -80,16 +83,18 @@ public final class Tables<T> {
         scrolled(
                 html,
                 caption,
-                () -> html.tag("table").with("class", "figures").holds(() -> {
-                    html.tag("caption", caption);
-                    html.tag("thead").holds(() -> html.tag("tr").holds(() -> head(scales)));
-                    html.tag("tbody")
-                            .holds(() -> rows.forEach(row -> {
-                                Html.Tag line = html.tag("tr");
-                                (marked.test(row) ? line.with("class", "outside") : line)
-                                        .holds(() -> cells(row, scales));
-                            }));
-                }));
+                () -> html.tag("table")
+                        .with("class", rows.size() <= SHORT ? "figures short" : "figures")
+                        .holds(() -> {
+                            html.tag("caption", caption);
+                            html.tag("thead").holds(() -> html.tag("tr").holds(() -> head(scales)));
+                            html.tag("tbody")
+                                    .holds(() -> rows.forEach(row -> {
+                                        Html.Tag line = html.tag("tr");
+                                        (marked.test(row) ? line.with("class", "outside") : line)
+                                                .holds(() -> cells(row, scales));
+                                    }));
+                        }));
         missing();
     }
 

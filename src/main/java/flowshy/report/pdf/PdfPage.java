@@ -11,6 +11,8 @@ import com.openhtmltopdf.svgsupport.BatikSVGDrawer;
 import com.openhtmltopdf.util.XRLog;
 import flowshy.report.Version;
 import flowshy.report.html.Page;
+import java.awt.Font;
+import java.awt.FontFormatException;
 import java.awt.color.ColorSpace;
 import java.awt.color.ICC_Profile;
 import java.io.ByteArrayOutputStream;
@@ -67,7 +69,7 @@ public final class PdfPage {
     private static PdfBoxRenderer renderer(String html, PDDocument document) {
         PdfRendererBuilder builder = new PdfRendererBuilder();
         builder.usePDDocument(document);
-        builder.withHtmlContent(Page.onPaper(html), null);
+        builder.withHtmlContent(numbered(Page.onPaper(html)), null);
         builder.withProducer("Flowshy " + Version.number());
         builder.useSVGDrawer(new BatikSVGDrawer());
         builder.useUnicodeBidiSplitter(new ICUBidiSplitter.ICUBidiSplitterFactory());
@@ -84,6 +86,28 @@ public final class PdfPage {
         typeface(builder, "DejaVuSans-Oblique.ttf", "DejaVu Sans", 400, FontStyle.ITALIC);
         typeface(builder, "DejaVuSansMono.ttf", "DejaVu Sans Mono", 400, FontStyle.NORMAL);
         return builder.buildPdfRenderer();
+    }
+
+    /** Characters that the typeface has not got, such as Chinese ones, stand as their numbers: none is lost. */
+    private static String numbered(String html) {
+        Font font = ours();
+        StringBuilder shown = new StringBuilder(html.length());
+        html.codePoints().forEach(c -> {
+            if (c < ' ' || font.canDisplay(c) || !Character.isDefined(c) || Character.getType(c) == Character.FORMAT) {
+                shown.appendCodePoint(c);
+            } else {
+                shown.append(String.format(Locale.ROOT, "[U+%04X]", c));
+            }
+        });
+        return shown.toString();
+    }
+
+    private static Font ours() {
+        try (InputStream file = open("DejaVuSans.ttf")) {
+            return Font.createFont(Font.TRUETYPE_FONT, file);
+        } catch (IOException | FontFormatException e) { // it lies in the program itself
+            throw new IllegalStateException(e);
+        }
     }
 
     private static void typeface(PdfRendererBuilder builder, String file, String family, int weight, FontStyle style) {

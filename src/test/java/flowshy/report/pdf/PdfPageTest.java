@@ -95,6 +95,14 @@ class PdfPageTest {
     }
 
     @Test
+    void losesNoCharacterThatItsTypefaceLacks() throws IOException {
+        String page = Page.of("t", html -> html.tag("p").holds(() -> html.user("a振b🙂c")));
+        try (PDDocument document = Loader.loadPDF(PdfPage.of(page))) {
+            assertThat(new PDFTextStripper().getText(document)).contains("a[U+632F]b[U+1F642]c");
+        }
+    }
+
+    @Test
     void setsRightToLeftTextFromRightToLeft() throws IOException {
         String page = Page.of("t", html -> html.tag("p").holds(() -> html.user("שלום")));
         try (PDDocument document = Loader.loadPDF(PdfPage.of(page))) {
