@@ -102,10 +102,17 @@ public final class Response {
     }
 
     private OptionalDouble finiteLength(Torques torques) {
-        if (model.strips() == model) {
+        Optional<Complex> factor = model.streamFactor(torques.omega());
+        if (factor.isEmpty()) {
             return OptionalDouble.empty();
         }
-        double change = rejection(torques) - rejection(model.strips().at(torques.omega()));
+        Torques strips = new Torques(
+                torques.omega(),
+                torques.flow().divide(factor.get()),
+                torques.open().subtract(torques.carried()).divide(factor.get()).add(torques.carried()),
+                torques.carried(),
+                torques.fluidInertia());
+        double change = rejection(torques) - rejection(strips);
         return Double.isFinite(change) ? OptionalDouble.of(change) : OptionalDouble.empty();
     }
 

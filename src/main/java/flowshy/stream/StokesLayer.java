@@ -16,6 +16,11 @@ public record StokesLayer(double kinematicViscosity) implements WallShare {
     /** Above this height in units of δ the rest, e^{-40}, is a hundredth of a rounding error. */
     private static final double FREE = 40.0;
 
+    /** Below this |x| the closed forms of the moment lose digits to cancellation and the series has converged in 20 terms. */
+    private static final double SERIES_BELOW = 1.0;
+
+    private static final int TERMS = 20;
+
     /** @throws IllegalArgumentException if the viscosity is not positive */
     public StokesLayer {
         if (!(kinematicViscosity > 0.0)) {
@@ -54,5 +59,49 @@ public record StokesLayer(double kinematicViscosity) implements WallShare {
         SinCos half = FastMath.sinCos(0.5 * y);
         double sine = fall * 2.0 * half.sin();
         return new Complex(rise + sine * half.sin(), sine * half.cos());
+    }
+
+    /**
+     * Moment of the share along a hair, ∫₀ᴸ s (z + h) dz.
+     *
+     * <p>With x = kL: L² M₁ + hL M₀, M₀ = 1 − (1 − e^{−x})/x, M₁ = ½ − (1 − (1+x)e^{−x})/x², own integration.
+     *
+     * @param length L [m]
+     * @param pivotDepth h, depth of the pivot below the wall [m]
+     * @param delta thickness δ of the layer [m]
+     * @return the moment [m²]
+     */
+    public static Complex lever(double length, double pivotDepth, double delta) {
+        double y = length / delta;
+        Complex first;
+        Complex zeroth;
+        if (y * FastMath.sqrt(2.0) < SERIES_BELOW) {
+            first = series(y, true);
+            zeroth = series(y, false);
+        } else {
+            Complex x = new Complex(y, y);
+            double fall = FastMath.exp(-y);
+            Complex e = new Complex(fall * FastMath.cos(y), -fall * FastMath.sin(y));
+            Complex once = e.negate().add(1.0).divide(x);
+            zeroth = once.negate().add(1.0);
+            // (1 − (1+x)e)/x² = (once − e)/x
+            first = once.subtract(e).divide(x).negate().add(0.5);
+        }
+        return first.multiply(length * length).add(zeroth.multiply(length * pivotDepth));
+    }
+
+    /** M₁ = −Σ_{n≥3} (−1)ⁿ x^{n−2}(n−1)/n!, M₀ = Σ_{n≥2} (−1)ⁿ x^{n−1}/n!. */
+    private static Complex series(double y, boolean moment) {
+        Complex minusX = new Complex(-y, -y);
+        Complex power = Complex.ONE;
+        Complex sum = Complex.ZERO;
+        double factorial = moment ? 2.0 : 1.0;
+        for (int k = 1; k <= TERMS; k++) {
+            power = power.multiply(minusX);
+            int n = moment ? k + 2 : k + 1;
+            factorial *= n;
+            sum = sum.add(power.multiply((moment ? -(n - 1) : -1) / factorial));
+        }
+        return sum;
     }
 }

@@ -2,6 +2,7 @@ package flowshy.torque;
 
 import flowshy.torque.finite.FiniteFactors;
 import flowshy.torque.finite.LengthFactors;
+import java.util.Optional;
 import org.hipparchus.complex.Complex;
 import org.hipparchus.util.FastMath;
 
@@ -39,5 +40,10 @@ record FactoredTorques(TorqueModel strips, LengthFactors factors, boolean confin
     @Override
     public void expect(double lowest, double highest) {
         factors.expect(lowest, highest);
+    }
+
+    @Override
+    public Optional<Complex> streamFactor(double omega) {
+        return Optional.of(factors.at(omega).stream());
     }
 }

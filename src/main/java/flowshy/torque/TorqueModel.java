@@ -7,6 +7,7 @@ import flowshy.stream.StokesLayer;
 import flowshy.stream.cover.Cover;
 import flowshy.stream.cover.Covers;
 import flowshy.torque.finite.LengthFactors;
+import java.util.Optional;
 import org.hipparchus.complex.Complex;
 
 /** Torques on one hair in one medium, at any frequency. */
@@ -36,12 +37,13 @@ public interface TorqueModel {
     default void expect(double lowest, double highest) {}
 
     /**
-     * The same hair by strip theory alone.
+     * Torque of flow over that of strip theory.
      *
-     * @return this, where nothing corrects it
+     * @param omega angular frequency, positive [rad/s]
+     * @return factor for finite length [-], empty where strip theory stands alone
      */
-    default TorqueModel strips() {
-        return this;
+    default Optional<Complex> streamFactor(double omega) {
+        return Optional.empty();
     }
 
     /**
@@ -68,6 +70,9 @@ public interface TorqueModel {
     static TorqueModel of(Hair hair, Medium medium, double pivotDepth, Cover cover) {
         TorqueModel strips = endless(hair, medium, pivotDepth, cover);
         boolean confined = cover.cavityRadius().isPresent();
+        if (confined && cover.closed()) { // no flow reaches the hair, and its own is the cavity's
+            return strips;
+        }
         return LengthFactors.of(hair, medium, pivotDepth)
                 .<TorqueModel>map(factors -> new FactoredTorques(strips, factors, confined))
                 .orElse(strips);

@@ -90,18 +90,19 @@ public record Levers(
         Complex past = torques.flow().subtract(gradient);
         double rejection = response.rejection(frequency);
         List<Lever> levers = new ArrayList<>();
-        Hair hair = device.hair();
+        // differences of shapes: each solved whole would take longer than all the rest, and the estimate's error is in
+        // both
+        Hair hair = device.hair().seenAs(device.hair().lengthModel().overShapes());
+        double base = new Response(device.with(hair)).rejection(frequency);
         boolean room = hair.profile().room() >= CHANGE;
         levers.add(lever(
                 room ? "all diameters +10 %" : "all diameters -10 %",
                 device.with(hair.reshaped(hair.profile().thickened(room ? CHANGE : 2.0 - CHANGE))),
                 frequency,
-                rejection));
+                base));
         levers.add(lever(
-                "all lengths +10 %",
-                device.with(hair.reshaped(hair.profile().lengthened(CHANGE))), frequency, rejection));
-        levers.add(lever(
-                "hair density +10 %", device.with(hair.ofDensity(CHANGE * hair.density())), frequency, rejection));
+                "all lengths +10 %", device.with(hair.reshaped(hair.profile().lengthened(CHANGE))), frequency, base));
+        levers.add(lever("hair density +10 %", device.with(hair.ofDensity(CHANGE * hair.density())), frequency, base));
         return new Levers(
                 frequency,
                 rejection,

@@ -193,7 +193,7 @@ public final class Keys {
                         "finite-length",
                         Words.of("off", "estimate", "auto", "on"),
                         Presence.taken("auto", "the whole hair with its tip on its wall, solved to one per cent"),
-                        "correction for tip and wall: off is strip theory, estimate its repair in closed form (3 to 13 %,"
+                        "correction for tip and wall: off is strip theory, estimate its repair in closed form (within 10 %,"
                                 + " microseconds), auto the whole hair solved to one per cent, on the same on finer meshes"
                                 + " and twice the frequencies"),
                 Key.optional(

@@ -1,5 +1,7 @@
 package flowshy.torque.finite;
 
+import flowshy.cylinder.HydrodynamicFunction;
+import flowshy.hair.Cylinder;
 import flowshy.hair.Profile;
 import flowshy.hair.Strip;
 import flowshy.math.BesselK;
@@ -17,9 +19,9 @@ import org.hipparchus.util.FastMath;
  * half a radius: −½ a_t · iωρπa_t² u, u the velocity of the medium past the tip. Own fit, no source.
  * a_t is the radius that stands as far below the tip as itself: that of a flat or round end, zero at a point.
  *
- * <p>Largest complex error of the torques against {@link FiniteHair} at δ/L from 0.02 to 1: cylinders of L/d ≥ 10 3 % (stream) and
- * 5 % (rocking), 7.5 3 % and 6 %, 3.5 to 5 4 % and 9 %; clubs of L/d 7.5 and 10 6 % and 9 %; tapers 6 % and 5 %. At L/d = 2 13 %:
- * not to be used.
+ * <p>Complex error of the torques against {@link FiniteHair}, tabulated beside its test: in the usual range (L/d from 3.5, δ/L from
+ * 0.02 to 1) cylinders 4 % (stream) and 9 % (rocking), of L/d ≥ 10 3 % and 5 %; tapers 6 % and 5 %; clubs 7 % and 10 %. In the wide
+ * range, down to L/d = 2 and for δ/L from 0.005 to 100, 10 % and 16 %.
  *
  * @param profile shape of the hair
  * @param medium what it stands in; its slip is left out
@@ -27,16 +29,25 @@ import org.hipparchus.util.FastMath;
  */
 public record RepairedStrips(Profile profile, Medium medium, double pivotDepth) implements LengthFactors {
     /** Length over largest diameter for which the errors were found. */
-    public static final Range SLENDERNESS = new Range("L/d", 3.5, 50.0);
+    public static final Range SLENDERNESS = new Range("L/d", 2.0, 200.0);
 
     /** δ/L for which the errors were found. */
-    public static final Range LAYER_SHARE = new Range("δ/L", 0.02, 1.0);
+    public static final Range LAYER_SHARE = new Range("δ/L", 0.005, 100.0);
 
     /** Largest error of the stream's torque in those ranges [-]. */
-    public static final double STREAM_ERROR = 0.06;
+    public static final double STREAM_ERROR = 0.10;
 
     /** Largest error of the torque of rocking in those ranges [-]. */
-    public static final double ROCKING_ERROR = 0.09;
+    public static final double ROCKING_ERROR = 0.16;
+
+    /** The usual part of these ranges. */
+    private static final Range USUAL_SLENDERNESS = new Range("L/d", 3.5, 200.0);
+
+    private static final Range USUAL_LAYER_SHARE = new Range("δ/L", 0.02, 1.0);
+
+    private static final double USUAL_STREAM_ERROR = 0.07;
+
+    private static final double USUAL_ROCKING_ERROR = 0.105;
 
     private static final double POWER = 1.5;
 
@@ -48,54 +59,78 @@ public record RepairedStrips(Profile profile, Medium medium, double pivotDepth) 
 
     private static final int HALVINGS = 50;
 
-    /**
-     * Factors on strip theory.
-     *
-     * @param omega angular frequency, positive [rad/s]
-     * @return factors with the errors stated above; outside the two ranges the errors are not known and infinite
-     */
     @Override
     public FiniteFactors at(double omega) {
-        Complex[] strips = new StripForces(medium, pivotDepth, omega).torques(profile);
-        Complex[] repaired = torques(omega);
-        double slenderness = profile.length() / (2.0 * profile.largestRadius());
-        boolean inside =
-                SLENDERNESS.contains(slenderness) && LAYER_SHARE.contains(medium.stokesLayer(omega) / profile.length());
-        return new FiniteFactors(
-                repaired[0].divide(strips[0]),
-                repaired[1].divide(strips[1]),
-                inside ? STREAM_ERROR : Double.POSITIVE_INFINITY,
-                inside ? ROCKING_ERROR : Double.POSITIVE_INFINITY);
-    }
-
-    /** Torques about the pivot: of the stream [N·m per m/s], of rocking [N·m per rad/s]. */
-    private Complex[] torques(double omega) {
         double delta = medium.stokesLayer(omega);
         Complex k = new Complex(1.0 / delta, 1.0 / delta);
         Complex near =
                 k.pow(POWER).add(FastMath.pow(REACH / profile.length(), POWER)).pow(1.0 / POWER);
-        Complex stream = Complex.ZERO;
-        Complex rocking = Complex.ZERO;
+        Moments strips = new Moments();
+        Moments repaired = new Moments();
+        if (profile instanceof Cylinder cylinder) {
+            add(cylinder, delta, HydrodynamicFunction.of(waveNumber(delta) * cylinder.radius()), strips);
+            add(cylinder, delta, gamma(k.multiply(cylinder.radius()), near.multiply(cylinder.radius())), repaired);
+        } else {
+            add(delta, k, near, strips, repaired);
+        }
+        double arm = profile.length() + pivotDepth;
+        double end = TIP * FastMath.pow(tipRadius(), 3) * arm;
+        Complex stream = repaired.stream.subtract(
+                StokesLayer.share(profile.length() / delta).multiply(end));
+        Complex rocking = repaired.rocking.add(-end * arm);
+        double slenderness = profile.length() / (2.0 * profile.largestRadius());
+        double layer = delta / profile.length();
+        boolean usual = USUAL_SLENDERNESS.contains(slenderness) && USUAL_LAYER_SHARE.contains(layer);
+        boolean known = SLENDERNESS.contains(slenderness) && LAYER_SHARE.contains(layer);
+        return new FiniteFactors(
+                stream.divide(strips.stream),
+                rocking.divide(strips.rocking),
+                usual ? USUAL_STREAM_ERROR : known ? STREAM_ERROR : Double.POSITIVE_INFINITY,
+                usual ? USUAL_ROCKING_ERROR : known ? ROCKING_ERROR : Double.POSITIVE_INFINITY);
+    }
+
+    /** ∫ a² (1 + Γ s) ℓ dz and ∫ a² Γ ℓ² dz. */
+    private static final class Moments {
+        private Complex stream = Complex.ZERO;
+        private Complex rocking = Complex.ZERO;
+
+        void add(Complex gamma, double moment, double arm, Complex share) {
+            stream = stream.add(gamma.multiply(share).add(1.0).multiply(moment));
+            rocking = rocking.add(gamma.multiply(moment * arm));
+        }
+    }
+
+    /** √(ω/ν). */
+    private static double waveNumber(double delta) {
+        return FastMath.sqrt(2.0) / delta;
+    }
+
+    private void add(Cylinder cylinder, double delta, Complex gamma, Moments moments) {
+        double square = cylinder.radius() * cylinder.radius();
+        double length = cylinder.length();
+        double top = length + pivotDepth;
+        moments.stream = gamma.multiply(StokesLayer.lever(length, pivotDepth, delta))
+                .add(length * (0.5 * length + pivotDepth))
+                .multiply(square);
+        moments.rocking = gamma.multiply(square * (top * top * top - pivotDepth * pivotDepth * pivotDepth) / 3.0);
+    }
+
+    private void add(double delta, Complex k, Complex near, Moments strips, Moments repaired) {
         double radius = Double.NaN;
-        Complex gamma = Complex.ZERO;
+        Complex plain = Complex.ZERO;
+        Complex better = Complex.ZERO;
         for (Strip strip : Strip.along(profile, StripForces.segments(profile, delta), POINTS)) {
             if (strip.radius() != radius) { // a straight part needs its law once
                 radius = strip.radius();
-                gamma = gamma(k.multiply(radius), near.multiply(radius));
+                plain = HydrodynamicFunction.of(waveNumber(delta) * radius);
+                better = gamma(k.multiply(radius), near.multiply(radius));
             }
             double arm = strip.height() + pivotDepth;
             double moment = radius * radius * strip.weight() * arm;
             Complex share = StokesLayer.share(strip.height() / delta);
-            stream = stream.add(gamma.multiply(share).add(1.0).multiply(moment));
-            rocking = rocking.subtract(gamma.multiply(moment * arm));
+            strips.add(plain, moment, arm, share);
+            repaired.add(better, moment, arm, share);
         }
-        double tip = tipRadius();
-        double arm = profile.length() + pivotDepth;
-        double end = TIP * tip * tip * tip * arm;
-        stream = stream.subtract(StokesLayer.share(profile.length() / delta).multiply(end));
-        rocking = rocking.add(end * arm);
-        Complex rate = new Complex(0.0, omega * medium.density() * FastMath.PI);
-        return new Complex[] {stream.multiply(rate), rocking.multiply(rate)};
     }
 
     private static Complex gamma(Complex lambda, Complex near) {
