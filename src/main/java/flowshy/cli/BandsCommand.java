@@ -2,16 +2,19 @@ package flowshy.cli;
 
 import flowshy.report.BandsJson;
 import flowshy.report.BandsText;
+import flowshy.report.ForceReport;
 import flowshy.report.JsonPage;
 import flowshy.report.TableCsv;
 import flowshy.report.chart.BandsCharts;
 import flowshy.report.chart.Chart;
+import flowshy.report.chart.ForceChart;
 import flowshy.study.Study;
 import flowshy.verdict.BandsAnswer;
 import flowshy.verdict.BandsQuestion;
 import flowshy.verdict.Decision;
 import flowshy.verdict.Levers;
 import flowshy.verdict.ThirdOctaves;
+import flowshy.verdict.force.ForceAlong;
 import flowshy.verdict.measured.BesideModel;
 import flowshy.verdict.measured.Compared;
 import java.util.ArrayList;
@@ -50,6 +53,14 @@ final class BandsCommand implements Callable<Integer> {
     private Frequencies frequencies;
 
     @Option(
+            names = "--force-at",
+            paramLabel = "LIST",
+            converter = Frequencies.Converter.class,
+            description =
+                    "force along the hair at these frequencies, the whole hair beside strip theory, e.g. \"80 Hz\"")
+    private Frequencies forceAt;
+
+    @Option(
             names = "--why",
             description = "explain edges of bands and failed limits: which torque dominates, what moves it")
     private boolean why;
@@ -69,14 +80,26 @@ final class BandsCommand implements Callable<Integer> {
                     question.answer(frequencies == null ? ThirdOctaves.in(study.band()) : frequencies.values());
             List<Levers> levers = why ? Levers.of(answer) : List.of();
             List<Compared> measured = BesideModel.of(study.device(), study.measurements());
-            texts.add(BandsText.of(study, answer, levers, measured));
-            List<Chart> drawn = charts.asked() ? BandsCharts.of(study, answer) : List.of();
+            List<ForceAlong> forces = forceAt == null
+                    ? List.of()
+                    : forceAt.values().stream()
+                            .map(frequency -> ForceAlong.of(study.device(), frequency))
+                            .toList();
+            texts.add(BandsText.of(study, answer, levers, measured, forces));
+            List<Chart> drawn = new ArrayList<>();
+            if (charts.asked()) {
+                drawn.addAll(BandsCharts.of(study, answer));
+                drawn.addAll(ForceChart.of(study.title(), forces));
+            }
             charts.add(drawn);
-            objects.add(() -> BandsJson.write(json, study, answer, levers, measured, drawn));
+            objects.add(() -> BandsJson.write(json, study, answer, levers, measured, forces, drawn));
             if (output.csv()) {
                 tables.add(table(study, question, answer));
                 if (!measured.isEmpty()) {
                     tables.add(TableCsv.measured(measured));
+                }
+                if (!forces.isEmpty()) {
+                    tables.add(ForceReport.csv(forces));
                 }
             }
             Decision decision = answer.verdict().decision();

@@ -10,6 +10,7 @@ import flowshy.verdict.DeviceFacts;
 import flowshy.verdict.DeviceFacts.Swing;
 import flowshy.verdict.Levers;
 import flowshy.verdict.ReadingBand;
+import flowshy.verdict.force.ForceAlong;
 import flowshy.verdict.measured.Compared;
 import java.util.List;
 import java.util.Optional;
@@ -33,6 +34,7 @@ public final class BandsJson {
      * @param answer what was found
      * @param why explanations, left out if empty
      * @param measured what was measured, beside the model, left out if empty
+     * @param forces along the hair, left out if empty
      * @param charts drawn of it, their numbers are left out if there are none
      */
     public static void write(
@@ -41,6 +43,7 @@ public final class BandsJson {
             BandsAnswer answer,
             List<Levers> why,
             List<Compared> measured,
+            List<ForceAlong> forces,
             List<Chart> charts) {
         BandsJson page = new BandsJson(json);
         json.object(() -> {
@@ -73,6 +76,9 @@ public final class BandsJson {
             answer.error().ifPresent(budget -> ErrorReport.write(json, budget));
             if (!measured.isEmpty()) {
                 MeasuredReport.write(json, "measured", measured);
+            }
+            if (!forces.isEmpty()) {
+                ForceReport.write(json, forces);
             }
             CaveatJson.write(json, answer.caveats());
             json.object("verdict", () -> page.verdict(answer));

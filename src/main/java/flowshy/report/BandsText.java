@@ -15,6 +15,7 @@ import flowshy.verdict.DeviceFacts;
 import flowshy.verdict.Levers;
 import flowshy.verdict.Limit;
 import flowshy.verdict.ReadingBand;
+import flowshy.verdict.force.ForceAlong;
 import flowshy.verdict.measured.Compared;
 import java.util.EnumSet;
 import java.util.List;
@@ -45,9 +46,11 @@ public final class BandsText {
      * @param answer what was found
      * @param why explanations of edges and failed limits; none if the list is empty
      * @param measured what was measured, beside the model; empty if nothing was
+     * @param forces along the hair; none if the list is empty
      * @return text with a line end after every line
      */
-    public static String of(Study study, BandsAnswer answer, List<Levers> why, List<Compared> measured) {
+    public static String of(
+            Study study, BandsAnswer answer, List<Levers> why, List<Compared> measured, List<ForceAlong> forces) {
         BandsText text = new BandsText(study, answer);
         text.decision();
         text.taken();
@@ -58,6 +61,7 @@ public final class BandsText {
         text.points();
         MeasuredReport.print(text.page, "Measured beside the model", measured);
         text.explain(why);
+        ForceReport.print(text.page, forces);
         text.page.line("");
         text.page.paragraph(Cautions.SHORT);
         return text.page.toString();
