@@ -29,7 +29,18 @@ import picocli.CommandLine.Spec;
 public final class Main implements Runnable {
     /** In the order of the help; {@link #command} makes each. */
     private static final List<String> COMMANDS = List.of(
-            "bands", "lid", "fill", "compare", "map", "cylinder", "media", "surroundings", "check", "start", "report");
+            "bands",
+            "lid",
+            "fill",
+            "compare",
+            "map",
+            "tolerance",
+            "cylinder",
+            "media",
+            "surroundings",
+            "check",
+            "start",
+            "report");
 
     @Spec
     private CommandSpec spec;
@@ -73,6 +84,7 @@ public final class Main implements Runnable {
             case "fill" -> new FillCommand();
             case "compare" -> new CompareCommand();
             case "map" -> new MapCommand();
+            case "tolerance" -> new ToleranceCommand();
             case "cylinder" -> new CylinderCommand();
             case "media" -> new MediaCommand();
             case "surroundings" -> new SurroundingsCommand();

@@ -113,7 +113,7 @@ final class TextPage {
                 wrap("  ", "    ", name);
                 name = "";
             }
-            line("  " + name + " ".repeat(left - name.length()) + tableLine(lines.get(r), widths));
+            line(("  " + name + " ".repeat(left - name.length()) + tableLine(lines.get(r), widths)).stripTrailing());
         }
     }
 

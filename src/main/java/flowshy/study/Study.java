@@ -9,6 +9,7 @@ import flowshy.verdict.BandsQuestion;
 import flowshy.verdict.error.Motion;
 import flowshy.verdict.lid.Candidate;
 import flowshy.verdict.measured.MeasuredResponse;
+import flowshy.verdict.tolerance.Tolerances;
 import java.util.ArrayList;
 import java.util.Collections;
 import java.util.LinkedHashMap;
@@ -29,6 +30,7 @@ import java.util.Optional;
  * @param motion what is to be read
  * @param surroundings flows that are there, in the order written; empty if not stated
  * @param measurements measured responses to lay beside the model, in the order written
+ * @param tolerances how surely its numbers are known
  * @param document entries of the document block, in the order of the key table
  * @param takenAs every default that was used
  * @param understood every value that was written, and every one of the surroundings in full, in the order of the key table
@@ -44,6 +46,7 @@ public record Study(
         Motion motion,
         List<Source> surroundings,
         List<MeasuredResponse> measurements,
+        Tolerances tolerances,
         Map<String, String> document,
         List<TakenAs> takenAs,
         List<Understood> understood) {
@@ -75,6 +78,7 @@ public record Study(
                 motion,
                 surroundings,
                 measurements,
+                tolerances,
                 document,
                 takenAs,
                 all);

@@ -16,9 +16,11 @@ import flowshy.study.text.TextFile;
 import flowshy.study.units.Quantity;
 import flowshy.verdict.Acceptance;
 import flowshy.verdict.Band;
+import flowshy.verdict.BandsQuestion;
 import flowshy.verdict.error.Motion;
 import flowshy.verdict.lid.Candidate;
 import flowshy.verdict.measured.MeasuredResponse;
+import flowshy.verdict.tolerance.Tolerances;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.LinkedHashMap;
@@ -26,6 +28,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.function.Function;
 import java.util.stream.Stream;
 
 /** From checked values to the things they describe; says where values do not go together. */
@@ -82,7 +85,7 @@ final class StudyBuilder {
                 outside.orElseThrow(),
                 cover.orElseThrow().cover(),
                 cover.orElseThrow().around());
-        return new Study(
+        Function<Tolerances, Study> known = tolerances -> new Study(
                 form.word("title").orElse(""),
                 new Study.Origin(file.name(), file.text(), file.sha256(), files.read(), settings),
                 device,
@@ -93,9 +96,28 @@ final class StudyBuilder {
                 motion,
                 surroundings,
                 measurements,
+                tolerances,
                 document(),
                 takenAs(fitted),
                 understood());
+        BandsQuestion question = new BandsQuestion(
+                device,
+                band.orElseThrow(),
+                acceptance,
+                motion,
+                surroundings,
+                calibration.map(Calibration::frequency).orElseGet(band.orElseThrow()::middle));
+        Study plain = known.apply(Tolerances.of(question));
+        return form.has("tolerances") ? known.apply(tolerances(plain)) : plain;
+    }
+
+    private Tolerances tolerances(Study base) {
+        Tolerances stated = new ToleranceBuilder(form, problems)
+                .build(
+                        base.question(),
+                        numbers -> VariedStudy.of(form, files.again(), base, StudyReader.hold(form), numbers));
+        problems.throwIfAny();
+        return stated;
     }
 
     private List<Candidate> candidates(

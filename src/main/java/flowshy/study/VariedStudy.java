@@ -92,7 +92,12 @@ public final class VariedStudy implements DesignSpace {
 
     /** The space of a study that is made already. */
     static VariedStudy of(Form form, Path folder, Study base, Hold hold, List<NumberKey> numbers) {
-        return new VariedStudy(form, new FilesRead(folder), base, hold, numbers, true);
+        return of(form, new FilesRead(folder), base, hold, numbers);
+    }
+
+    /** The same, whose files have been read. */
+    static VariedStudy of(Form form, FilesRead files, Study base, Hold hold, List<NumberKey> numbers) {
+        return new VariedStudy(form, files, base, hold, numbers, true);
     }
 
     /**

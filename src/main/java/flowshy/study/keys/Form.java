@@ -154,6 +154,20 @@ public final class Form {
     }
 
     /**
+     * What stands below a path, whatever points are in its names.
+     *
+     * @param path of something about other numbers, e.g. {@code tolerances}
+     * @return the paths below it that have a place, without it, in the order of the text
+     */
+    public List<String> entries(String path) {
+        String above = path + ".";
+        return places.keySet().stream()
+                .filter(place -> place.startsWith(above))
+                .map(place -> place.substring(above.length()))
+                .toList();
+    }
+
+    /**
      * Where a default comes from.
      *
      * @param path of the key

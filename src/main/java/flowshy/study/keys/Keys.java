@@ -179,8 +179,12 @@ public final class Keys {
                         "surroundings", SurroundingsKeys.map(), "streams, tones and sound around, each under a name"),
                 Key.of("accept", AcceptKeys.group(), Presence.IMPLIED, "limits that the device must meet"),
                 Key.optional("calibration", calibration(), "where the sensitivity is stated"),
-                Key.later("tolerances", "spread of any number", "change the number with --set"),
-                Key.later("envelope", "states the device must bear", "change medium.temperature and others with --set"),
+                Key.optional(
+                        "tolerances", new ByKey(ByKey.Entry.SPREAD), "spread of any number; for the command tolerance"),
+                Key.optional(
+                        "envelope",
+                        new ByKey(ByKey.Entry.VALUES),
+                        "states the device must bear; the worst one decides"),
                 Key.optional(
                         "variants",
                         new Overrides(),

@@ -81,7 +81,8 @@ public final class Overlay {
     /** What keys may stand below, for a group or for names with groups. */
     private static Optional<Value> inner(Optional<Value> kind, String name) {
         return kind.flatMap(k -> k.below(name))
-                .filter(v -> v instanceof Group || v instanceof GroupMap || v instanceof Overrides);
+                .filter(v ->
+                        v instanceof Group || v instanceof GroupMap || v instanceof Overrides || v instanceof ByKey);
     }
 
     /** A group that is written as a single word or as a list is opened into its keys first. */

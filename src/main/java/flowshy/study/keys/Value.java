@@ -6,7 +6,7 @@ import java.util.Optional;
 
 /** What may stand behind a key; each kind reads itself and describes itself. */
 public sealed interface Value
-        permits Measure, Words, WordOr, Text, TextList, Points, Group, GroupList, GroupMap, Overrides {
+        permits Measure, Words, WordOr, Text, TextList, Points, Group, GroupList, GroupMap, Overrides, ByKey {
     /**
      * Its kind in a few words, for the list of keys.
      *

@@ -59,6 +59,8 @@ final class Studies {
               bending-stiffness-ratio: 10
               tip-clearance: 100 um
             calibration: {frequency: 60 Hz, cover: open}
+            tolerances: {hair.diameter: {sd: 3 %}, drag-law: off, both: {within: 2 %, keys: [hair.length, hair.density]}}
+            envelope: {medium.temperature: [20 degC, 30 degC], medium: {pressure: 99 kPa..1 bar}}
             finite-length: estimate
             hold: resonance
             document: {project: p, part: "7", revision: 2.10, prepared-by: a, checked-by: b, approved-by: c, remarks: d}
