@@ -2,6 +2,8 @@ package flowshy.cli;
 
 import flowshy.report.FillReport;
 import flowshy.report.JsonPage;
+import flowshy.report.chart.Chart;
+import flowshy.report.chart.FillChart;
 import flowshy.stream.cover.Cover;
 import flowshy.stream.cover.Covers;
 import flowshy.study.Study;
@@ -41,6 +43,9 @@ final class FillCommand implements Callable<Integer> {
     @Mixin
     private OutputOptions output;
 
+    @Mixin
+    private ChartOptions charts;
+
     @Spec
     private CommandSpec spec;
 
@@ -54,12 +59,15 @@ final class FillCommand implements Callable<Integer> {
             FillQuestion question = question(study);
             List<FillRow> rows = question.answer();
             texts.add(FillReport.text(study, question, rows));
-            objects.add(() -> FillReport.write(json, study, question, rows));
+            List<Chart> drawn = charts.asked() ? FillChart.of(study, study.acceptance(), rows) : List.of();
+            charts.add(drawn);
+            objects.add(() -> FillReport.write(json, study, question, rows, drawn));
             if (output.csv()) {
                 tables.add(FillReport.csv(rows));
             }
             return 0;
         });
+        charts.write();
         studies.send(spec.commandLine(), output, json, texts, objects, tables);
         return code;
     }

@@ -2,6 +2,8 @@ package flowshy.cli;
 
 import flowshy.report.JsonPage;
 import flowshy.report.LidReport;
+import flowshy.report.chart.Chart;
+import flowshy.report.chart.CoverCharts;
 import flowshy.verdict.Decision;
 import flowshy.verdict.lid.LidAnswer;
 import flowshy.verdict.lid.LidQuestion;
@@ -26,6 +28,9 @@ final class LidCommand implements Callable<Integer> {
     @Mixin
     private OutputOptions output;
 
+    @Mixin
+    private ChartOptions charts;
+
     @Spec
     private CommandSpec spec;
 
@@ -39,13 +44,16 @@ final class LidCommand implements Callable<Integer> {
             LidQuestion question = new LidQuestion(study.question(), study.reference(), study.candidates());
             LidAnswer answer = question.answer();
             texts.add(LidReport.text(study, question, answer));
-            objects.add(() -> LidReport.write(json, study, question, answer));
+            List<Chart> drawn = charts.asked() ? CoverCharts.of(study, answer) : List.of();
+            charts.add(drawn);
+            objects.add(() -> LidReport.write(json, study, question, answer, drawn));
             if (output.csv()) {
                 tables.add(LidReport.csv(answer));
             }
             Decision decision = answer.verdict().decision();
             return decision == Decision.FAILS || decision == Decision.UNDECIDED ? Failures.LIMIT : 0;
         });
+        charts.write();
         studies.send(spec.commandLine(), output, json, texts, objects, tables);
         return code;
     }

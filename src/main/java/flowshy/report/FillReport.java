@@ -2,6 +2,7 @@ package flowshy.report;
 
 import flowshy.math.Figures;
 import flowshy.medium.Medium;
+import flowshy.report.chart.Chart;
 import flowshy.stream.cover.OpenCover;
 import flowshy.study.Study;
 import flowshy.verdict.fill.FillQuestion;
@@ -144,8 +145,10 @@ public final class FillReport {
      * @param study base study
      * @param question what was asked
      * @param rows the answer
+     * @param charts drawn of it, their numbers are left out if there are none
      */
-    public static void write(JsonPage json, Study study, FillQuestion question, List<FillRow> rows) {
+    public static void write(
+            JsonPage json, Study study, FillQuestion question, List<FillRow> rows, List<Chart> charts) {
         json.object(() -> {
             StudyJson.write(json, study);
             json.number("temperature_k", question.device().outside().temperature());
@@ -161,6 +164,7 @@ public final class FillReport {
                 json.texts("excluded", row.excluded());
                 json.bool("from_memory", row.fromMemory());
             });
+            ChartTables.write(json, charts);
         });
     }
 

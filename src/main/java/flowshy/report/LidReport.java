@@ -1,6 +1,7 @@
 package flowshy.report;
 
 import flowshy.math.Figures;
+import flowshy.report.chart.Chart;
 import flowshy.study.Study;
 import flowshy.verdict.BandsAnswer;
 import flowshy.verdict.DeviceFacts.Swing;
@@ -196,8 +197,9 @@ public final class LidReport {
      * @param study base study
      * @param question what was asked
      * @param answer what was found
+     * @param charts drawn of it, their numbers are left out if there are none
      */
-    public static void write(JsonPage json, Study study, LidQuestion question, LidAnswer answer) {
+    public static void write(JsonPage json, Study study, LidQuestion question, LidAnswer answer, List<Chart> charts) {
         json.object(() -> {
             StudyJson.write(json, study);
             json.number("margin_db", question.acceptance().margin());
@@ -232,6 +234,7 @@ public final class LidReport {
                                 .orElse(""));
                 json.texts("remedies", answer.remedies());
             });
+            ChartTables.write(json, charts);
         });
     }
 

@@ -14,10 +14,10 @@ import java.util.List;
 import java.util.Map;
 
 /** JSON into maps, lists, texts, numbers, for tests; repeated names are refused. */
-final class Json {
+public final class Json {
     private Json() {}
 
-    static Object parse(String text) {
+    public static Object parse(String text) {
         JsonFactory factory = JsonFactory.builder()
                 .enable(StreamReadFeature.STRICT_DUPLICATE_DETECTION)
                 .build();
@@ -34,17 +34,17 @@ final class Json {
     }
 
     @SuppressWarnings("unchecked") // an object of JSON is read into a map of texts to values, see value()
-    static Map<String, Object> object(Object value) {
+    public static Map<String, Object> object(Object value) {
         return (Map<String, Object>) value;
     }
 
     @SuppressWarnings("unchecked") // an array of objects is read into a list of maps, see value()
-    static List<Map<String, Object>> objects(Object value) {
+    public static List<Map<String, Object>> objects(Object value) {
         return (List<Map<String, Object>>) value;
     }
 
     /** Counts the numbers of an answer; every null must have its reason beside it. */
-    static int numbers(Object value, String about) {
+    public static int numbers(Object value, String about) {
         int count = 0;
         if (value instanceof Map<?, ?> map) {
             for (Map.Entry<?, ?> entry : map.entrySet()) {

@@ -3,6 +3,8 @@ package flowshy.report.chart;
 import flowshy.study.Study;
 import flowshy.verdict.BandsAnswer;
 import flowshy.verdict.curve.DeviceCurve;
+import flowshy.verdict.error.FlowOverHair;
+import flowshy.verdict.error.RegimePath;
 import java.util.ArrayList;
 import java.util.List;
 
@@ -39,6 +41,18 @@ public final class BandsCharts {
                 overlays.stream()
                         .filter(overlay -> overlay.of() == Overlay.Of.REJECTION)
                         .toList()));
+        ResponseChart.of(study.title(), answer, curve, overlays).ifPresent(charts::add);
+        charts.add(TorqueChart.of(study.title(), answer, curve));
+        ErrorChart.of(study.title(), answer).ifPresent(charts::add);
+        charts.add(DeviceChart.of(study.title(), answer));
+        List<RegimePath> paths = RegimePath.of(answer.device(), answer.band(), study.surroundings());
+        if (!paths.isEmpty()) {
+            charts.add(RegimeChart.of(
+                    study.title(), answer, paths, !study.surroundings().isEmpty()));
+        }
+        if (!study.surroundings().isEmpty()) {
+            charts.add(FlowChart.of(study.title(), answer, FlowOverHair.of(answer.device(), study.surroundings())));
+        }
         return charts;
     }
 }

@@ -42,8 +42,11 @@ public record ErrorBudget(
      * @param frequency [Hz]
      * @param sources equivalent acceleration density of each source, same order [(m/s²)²/Hz]
      * @param noise thermal and readout noise [(m/s²)²/Hz], zero without a suspension
+     * @param runningRms all sources together from the lower end of the band up to here, lines included [m/s² rms]
+     * @param runningNoise noise likewise [m/s² rms]
      */
-    public record DensityPoint(double frequency, List<Double> sources, double noise) {
+    public record DensityPoint(
+            double frequency, List<Double> sources, double noise, double runningRms, double runningNoise) {
         /** Copies the list. */
         public DensityPoint {
             sources = List.copyOf(sources);

@@ -7,6 +7,7 @@ import flowshy.stream.Source;
 import flowshy.stream.cover.Exposure;
 import flowshy.verdict.Band;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.TreeSet;
 import java.util.function.IntToDoubleFunction;
@@ -146,6 +147,42 @@ final class Spectrum {
      */
     double noiseMeanSquare(double from, double to) {
         return integral(noises::get, from, to);
+    }
+
+    /**
+     * Mean square of all sources from the lower end of the band up to each point of the grid, lines included.
+     *
+     * @return [(m/s²)²], one a point
+     */
+    double[] runningMeanSquares() {
+        double[] running = running(point -> Arrays.stream(densities.get(point)).sum());
+        for (List<Tone> ofSource : tones) {
+            for (Tone tone : ofSource) {
+                for (int i = 0; i < running.length; i++) {
+                    running[i] += tone.frequency() <= grid.get(i) ? tone.meanSquare() : 0.0;
+                }
+            }
+        }
+        return running;
+    }
+
+    /**
+     * Mean square of the noise from the lower end of the band up to each point of the grid.
+     *
+     * @return [(m/s²)²], one a point
+     */
+    double[] runningNoiseMeanSquares() {
+        return running(noises::get);
+    }
+
+    private double[] running(IntToDoubleFunction density) {
+        double[] running = new double[grid.size()];
+        for (int i = 1; i < running.length; i++) {
+            double left = grid.get(i - 1) * density.applyAsDouble(i - 1);
+            double right = grid.get(i) * density.applyAsDouble(i);
+            running[i] = running[i - 1] + 0.5 * (left + right) * FastMath.log(grid.get(i) / grid.get(i - 1));
+        }
+        return running;
     }
 
     /** Trapezoids over ln f of f·S, cut at the ends; 60 points a decade leave under 1e-4. */

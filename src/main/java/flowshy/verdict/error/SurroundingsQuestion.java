@@ -178,12 +178,19 @@ public record SurroundingsQuestion(Device device, Band band, double margin, Moti
 
     private List<ErrorBudget.DensityPoint> points(Spectrum spectrum) {
         List<ErrorBudget.DensityPoint> points = new ArrayList<>();
+        double[] running = spectrum.runningMeanSquares();
+        double[] noise = spectrum.runningNoiseMeanSquares();
         for (int i = 0; i < spectrum.grid().size(); i++) {
             List<Double> each = new ArrayList<>();
             for (double density : spectrum.densities(i)) {
                 each.add(density);
             }
-            points.add(new ErrorBudget.DensityPoint(spectrum.grid().get(i), each, spectrum.noise(i)));
+            points.add(new ErrorBudget.DensityPoint(
+                    spectrum.grid().get(i),
+                    each,
+                    spectrum.noise(i),
+                    FastMath.sqrt(running[i]),
+                    FastMath.sqrt(noise[i])));
         }
         return points;
     }

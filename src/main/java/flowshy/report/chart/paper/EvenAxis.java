@@ -35,12 +35,16 @@ final class EvenAxis extends NumberAxis {
         Panel.dress(this);
     }
 
+    boolean degrees() {
+        return degrees;
+    }
+
     @Override
     public List<ValueTick> refreshTicks(Graphics2D graphics, AxisState state, Rectangle2D area, RectangleEdge edge) {
         boolean horizontal = RectangleEdge.isTopOrBottom(edge);
         double length = horizontal ? area.getWidth() : area.getHeight();
         double room = horizontal
-                ? 5.0 * getTickLabelFont().getSize2D()
+                ? 3.6 * getTickLabelFont().getSize2D()
                 : 2.2 * getTickLabelFont().getSize2D();
         double step = step((getUpperBound() - getLowerBound()) / FastMath.max(1.0, FastMath.floor(length / room)));
         TextAnchor anchor = horizontal ? TextAnchor.TOP_CENTER : TextAnchor.CENTER_RIGHT;

@@ -12,12 +12,14 @@ import java.awt.Stroke;
  * keeps a contrast of 3 : 1 on white.
  */
 public enum Ink {
-    /** response to motion, and the hair's own inertia */
+    /** response to motion, and its whole torque */
     MOTION(0x0072B2, 2.0f, ""),
     /** response to flow, and its whole torque */
     FLOW(0xC84E00, 2.0f, "7 3"),
     /** pressure gradient that drives the flow */
     GRADIENT(0x8A6500, 1.6f, "12 3 2 3"),
+    /** the hair's own inertia */
+    INERTIA(0x4A3F96, 1.6f, "14 4"),
     /** added mass */
     ADDED_MASS(0x00805C, 1.6f, "5 2 1.5 2"),
     /** viscous drag and damping */
@@ -28,16 +30,20 @@ public enum Ink {
     LIMIT(0x111111, 1.4f, "10 4"),
     /** what was measured */
     MEASURED(0x111111, 1.2f, ""),
+    /** what was measured of the response to flow */
+    MEASURED_FLOW(0x7A2E00, 1.2f, ""),
+    /** edge between two ranges of a model */
+    BOUNDARY(0x6A6A6A, 0.9f, ""),
     /** first of several alike */
-    FIRST(0x0072B2, 1.8f, ""),
+    FIRST(0x7A3E9D, 1.8f, ""),
     /** second of several alike */
-    SECOND(0xA34E86, 1.8f, "9 3"),
+    SECOND(0x00805C, 1.8f, "9 3"),
     /** third of several alike */
-    THIRD(0x00805C, 1.8f, "5 2 1.5 2"),
+    THIRD(0x8A6500, 1.8f, "5 2 1.5 2"),
     /** fourth of several alike */
-    FOURTH(0x8A6500, 1.8f, "2.5 2"),
+    FOURTH(0xA8446F, 1.8f, "2.5 2"),
     /** fifth of several alike */
-    FIFTH(0x3B3B8F, 1.8f, "12 3 2 3 2 3"),
+    FIFTH(0x3F5F7F, 1.8f, "12 3 2 3 2 3"),
     /** sixth of several alike */
     SIXTH(0x6B4A3A, 1.8f, "1.2 3");
 
@@ -79,7 +85,7 @@ public enum Ink {
     }
 
     /**
-     * Ink of one of several things of one kind that have no meaning of their own.
+     * Ink of one of several things of one kind, none of them the colour of motion or of flow.
      *
      * @param index from zero; after the sixth they begin anew
      * @return the ink

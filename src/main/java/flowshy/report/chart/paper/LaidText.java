@@ -10,10 +10,11 @@ import java.awt.geom.Rectangle2D;
  * @param top likewise
  * @param right likewise
  * @param bottom likewise
+ * @param whole whether nothing of it is clipped
  */
-public record LaidText(String text, double left, double top, double right, double bottom) {
-    static LaidText of(String text, Rectangle2D bounds) {
-        return new LaidText(text, bounds.getMinX(), bounds.getMinY(), bounds.getMaxX(), bounds.getMaxY());
+public record LaidText(String text, double left, double top, double right, double bottom, boolean whole) {
+    static LaidText of(String text, Rectangle2D bounds, boolean whole) {
+        return new LaidText(text, bounds.getMinX(), bounds.getMinY(), bounds.getMaxX(), bounds.getMaxY(), whole);
     }
 
     /**

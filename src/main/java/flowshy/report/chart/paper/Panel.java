@@ -9,6 +9,7 @@ import java.awt.geom.Path2D;
 import java.awt.geom.Rectangle2D;
 import java.util.ArrayList;
 import java.util.List;
+import org.hipparchus.util.FastMath;
 import org.jfree.chart.axis.ValueAxis;
 import org.jfree.chart.plot.IntervalMarker;
 import org.jfree.chart.plot.ValueMarker;
@@ -16,6 +17,7 @@ import org.jfree.chart.plot.XYPlot;
 import org.jfree.chart.renderer.xy.XYErrorRenderer;
 import org.jfree.chart.renderer.xy.XYLineAndShapeRenderer;
 import org.jfree.chart.ui.Layer;
+import org.jfree.chart.ui.RectangleEdge;
 import org.jfree.chart.ui.RectangleInsets;
 import org.jfree.data.xy.DefaultXYDataset;
 import org.jfree.data.xy.XYDataset;
@@ -35,6 +37,7 @@ public final class Panel {
     private final List<Curve> curves = new ArrayList<>();
     private final List<Level> levels = new ArrayList<>();
     private final List<Area> areas = new ArrayList<>();
+    private final List<Words> words = new ArrayList<>();
 
     /** Lines, dots or measured points of one name. */
     record Curve(String name, Ink ink, Style style, List<double[]> points) {}
@@ -51,6 +54,9 @@ public final class Panel {
 
     /** A horizontal line. */
     record Level(double value, String words, Ink ink) {}
+
+    /** Words at a place between the axes. */
+    record Words(double x, double y, String text) {}
 
     /** A shaded range of the common axis. */
     record Area(double from, double to, Color shade) {}
@@ -149,11 +155,18 @@ public final class Panel {
         }
         List<double[]> points = new ArrayList<>();
         for (int i = 0; i < x.size(); i++) {
+            if (i > 0 && style == Style.LINE && turns(y.get(i - 1), y.get(i))) {
+                points.add(new double[] {x.get(i), Double.NaN}); // an angle that leaves one side comes in at the other
+            }
             boolean shown = Double.isFinite(y.get(i)) && (y.get(i) > 0.0 || !(axis instanceof DecadeAxis));
             points.add(new double[] {x.get(i), shown ? y.get(i) : Double.NaN});
         }
         curves.add(new Curve(name, ink, style, points));
         return this;
+    }
+
+    private boolean turns(double before, double after) {
+        return axis instanceof EvenAxis even && even.degrees() && Math.abs(after - before) > 180.0;
     }
 
     /**
@@ -180,6 +193,23 @@ public final class Panel {
     public Panel shade(double from, double to, Shade shade) {
         areas.add(new Area(from, to, shade.colour()));
         return this;
+    }
+
+    /**
+     * Writes words about a place.
+     *
+     * @param x common axis
+     * @param y this panel's axis
+     * @param text short
+     * @return this
+     */
+    public Panel words(double x, double y, String text) {
+        words.add(new Words(x, y, text));
+        return this;
+    }
+
+    List<Words> words() {
+        return words;
     }
 
     String heading() {
@@ -277,7 +307,7 @@ public final class Panel {
         renderer.setDrawSeriesLineAsPath(curve.style() == Style.LINE);
         renderer.setSeriesPaint(0, curve.ink().colour());
         renderer.setSeriesStroke(0, curve.ink().stroke());
-        renderer.setSeriesShape(0, symbol(curve.style()));
+        renderer.setSeriesShape(0, symbol(curve));
         return renderer;
     }
 
@@ -291,10 +321,13 @@ public final class Panel {
         return renderer;
     }
 
-    /** Symbol of a point: a dot for what was computed, an open diamond for what was measured. */
-    static Shape symbol(Style style) {
-        if (style == Style.DOTS) {
+    /** Symbol of a point: a dot for what was computed; open, a diamond or a square, for what was measured. */
+    static Shape symbol(Curve curve) {
+        if (curve.style() == Style.DOTS) {
             return new Ellipse2D.Double(-1.8, -1.8, 3.6, 3.6);
+        }
+        if (curve.ink() == Ink.MEASURED_FLOW) {
+            return new Rectangle2D.Double(-2.6, -2.6, 5.2, 5.2);
         }
         Path2D diamond = new Path2D.Double();
         diamond.moveTo(0.0, -3.4);
@@ -305,16 +338,30 @@ public final class Panel {
         return diamond;
     }
 
-    /** A point of a curve on the sheet, or none where it has no number. */
+    /** Places that a curve covers on the sheet, close together where it is a line. */
     static List<double[]> pixels(Curve curve, ValueAxis x, ValueAxis y, Rectangle2D area) {
         List<double[]> all = new ArrayList<>();
+        double[] before = null;
         for (double[] point : curve.points()) {
-            if (Double.isFinite(point[1])) {
-                all.add(new double[] {
-                    x.valueToJava2D(point[0], area, org.jfree.chart.ui.RectangleEdge.BOTTOM),
-                    y.valueToJava2D(point[1], area, org.jfree.chart.ui.RectangleEdge.LEFT)
-                });
+            if (!Double.isFinite(point[1])) {
+                before = null;
+                continue;
             }
+            double[] here = {
+                x.valueToJava2D(point[0], area, RectangleEdge.BOTTOM),
+                y.valueToJava2D(point[1], area, RectangleEdge.LEFT)
+            };
+            if (before != null && curve.style() == Style.LINE) {
+                int steps = (int) FastMath.min(200.0, FastMath.hypot(here[0] - before[0], here[1] - before[1]) / 2.0);
+                for (int i = 1; i < steps; i++) {
+                    double share = (double) i / steps;
+                    all.add(new double[] {
+                        before[0] + share * (here[0] - before[0]), before[1] + share * (here[1] - before[1])
+                    });
+                }
+            }
+            all.add(here);
+            before = here;
         }
         return all;
     }

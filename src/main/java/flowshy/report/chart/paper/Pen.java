@@ -45,6 +45,12 @@ final class Pen {
         graphics.drawString(text, (float) x, (float) baseline);
     }
 
+    /** Pales what lies under words to come. */
+    void clear(Rectangle2D box) {
+        graphics.setPaint(new Color(255, 255, 255, 190));
+        graphics.fill(box);
+    }
+
     /** The beginning of a text that fits a width, with dots where it was cut; never half a character. */
     static String fitting(Font font, String text, double width) {
         if (width(font, text) <= width) {

@@ -2,7 +2,6 @@ package flowshy.report.chart.paper;
 
 import java.awt.BasicStroke;
 import java.awt.Color;
-import java.awt.Font;
 import java.awt.Graphics2D;
 import java.awt.geom.Line2D;
 import java.awt.geom.Rectangle2D;
@@ -32,12 +31,13 @@ public final class PlotSheet implements Picture {
     private static final int MARGIN = 10;
 
     /** Space between panels: the heading of the lower one stands there. */
-    private static final int BETWEEN = 22;
+    private static final int BETWEEN = 30;
 
     /** Labels and line of the common axis, and its heading under it. */
-    private static final int COMMON_AXIS = 22;
+    private static final int COMMON_AXIS = 26;
 
     private static final int ROW = 14;
+    private static final int ROOM = 10;
     private static final int SAMPLE = 30;
 
     private final Heading heading;
@@ -63,6 +63,8 @@ public final class PlotSheet implements Picture {
     private PlotSheet(Heading heading, ValueAxis common, String commonHeading, int panelHeight) {
         this.heading = heading;
         this.common = common;
+        // clear of the lowest label of the other axis
+        common.setTickLabelInsets(new RectangleInsets(5.0, 3.0, 1.0, 3.0));
         this.commonHeading = commonHeading;
         this.panelHeight = panelHeight;
     }
@@ -201,7 +203,7 @@ public final class PlotSheet implements Picture {
 
         /** Upper edge of the first panel: under the rows of notes and its own heading. */
         private int panelTop() {
-            return top() + 17 + rows * ROW + 2;
+            return top() + 17 + rows * ROW + (rows == 0 ? 6 : 2);
         }
 
         private int panelBottom() {
@@ -279,9 +281,9 @@ public final class PlotSheet implements Picture {
             pen.write(Typeface.TEXT, Typeface.GREY, study, MARGIN, y);
             drawNotes(graphics, pen, areas);
             for (int i = 0; i < areas.size(); i++) {
-                double baseline = i == 0 ? top() + 12 : areas.get(i).getMinY() - 6;
+                double baseline = i == 0 ? top() + 12 : areas.get(i).getMinY() - 10;
                 pen.write(Typeface.TEXT, Typeface.DARK, panels.get(i).heading(), MARGIN, baseline);
-                drawLevels(pen, panels.get(i), areas.get(i));
+                drawWords(pen, panels.get(i), areas.get(i));
             }
             double middle = 0.5 * (LEFT + WIDTH - RIGHT) - 0.5 * Pen.width(Typeface.TEXT, commonHeading);
             pen.write(Typeface.TEXT, Typeface.DARK, commonHeading, middle, panelBottom() + COMMON_AXIS + 11);
@@ -290,7 +292,8 @@ public final class PlotSheet implements Picture {
 
         private List<Rectangle2D> drawPanels(Graphics2D graphics) {
             CombinedDomainXYPlot all = new CombinedDomainXYPlot(common);
-            all.setInsets(RectangleInsets.ZERO_INSETS);
+            // room for the outer halves of the labels at the ends of the axes, which would be clipped
+            all.setInsets(new RectangleInsets(ROOM, 0.0, 0.0, RIGHT));
             all.setAxisOffset(RectangleInsets.ZERO_INSETS);
             all.setGap(BETWEEN);
             List<Double> places =
@@ -311,7 +314,8 @@ public final class PlotSheet implements Picture {
             ChartRenderingInfo info = new ChartRenderingInfo();
             chart.draw(
                     graphics,
-                    new Rectangle2D.Double(0, panelTop(), WIDTH - RIGHT, panelBottom() - panelTop() + COMMON_AXIS),
+                    new Rectangle2D.Double(
+                            0, panelTop() - ROOM, WIDTH, panelBottom() - panelTop() + COMMON_AXIS + ROOM),
                     null,
                     info);
             PlotRenderingInfo plots = info.getPlotInfo();
@@ -336,42 +340,66 @@ public final class PlotSheet implements Picture {
             }
         }
 
-        /** Words of a level stand where fewest points of curves are hidden and no other word is. */
-        private void drawLevels(Pen pen, Panel panel, Rectangle2D area) {
+        /** Words within a panel stand where fewest points of curves are hidden and no other word is; where none is free they are left out. */
+        private void drawWords(Pen pen, Panel panel, Rectangle2D area) {
             List<double[]> points = new ArrayList<>();
             panel.curves().forEach(curve -> points.addAll(Panel.pixels(curve, common, panel.axis(), area)));
+            for (Note mark : marks) {
+                for (double y = area.getMinY(); y < area.getMaxY(); y += 4.0) {
+                    points.add(new double[] {x(mark.at()), y});
+                }
+            }
             List<Rectangle2D> taken = new ArrayList<>();
-            Font font = Typeface.TEXT;
             for (Panel.Level level : panel.levels()) {
                 double y = panel.axis().valueToJava2D(level.value(), area, RectangleEdge.LEFT);
-                if (!(y >= area.getMinY() && y <= area.getMaxY())) {
-                    continue;
-                }
-                double width = Pen.width(font, level.words());
-                Rectangle2D best = null;
-                int least = Integer.MAX_VALUE;
+                double room = area.getWidth() - 8 - Pen.width(Typeface.TEXT, level.words());
+                List<Rectangle2D> places = new ArrayList<>();
                 for (double share : new double[] {1.0, 0.0, 0.75, 0.25, 0.5}) {
                     for (double baseline : new double[] {y - 4, y + 12}) {
-                        double x = area.getMinX() + 4 + share * (area.getWidth() - 8 - width);
-                        Rectangle2D box = Pen.box(font, level.words(), x, baseline);
-                        if (!area.contains(box) || taken.stream().anyMatch(box::intersects)) {
-                            continue;
-                        }
-                        int hidden = (int) points.stream()
-                                .filter(p -> box.contains(p[0], p[1]))
-                                .count();
-                        if (hidden < least) {
-                            least = hidden;
-                            best = box;
-                        }
+                        places.add(Pen.box(Typeface.TEXT, level.words(), area.getMinX() + 4 + share * room, baseline));
                     }
                 }
-                if (best != null) {
-                    taken.add(best);
-                    double ascent =
-                            font.getLineMetrics(level.words(), Pen.METRICS).getAscent();
-                    pen.write(font, Typeface.DARK, level.words(), best.getMinX(), best.getMinY() + ascent);
+                write(pen, level.words(), places, new Surroundings(area, points, taken));
+            }
+            for (Panel.Words words : panel.words()) {
+                double width = Pen.width(Typeface.TEXT, words.text());
+                double x = common.valueToJava2D(words.x(), area, RectangleEdge.BOTTOM) - 0.5 * width;
+                double y = panel.axis().valueToJava2D(words.y(), area, RectangleEdge.LEFT) + 4;
+                double inside = Math.max(area.getMinX() + 3, Math.min(area.getMaxX() - 3 - width, x));
+                List<Rectangle2D> places = new ArrayList<>();
+                for (double up : new double[] {0, -14, 14, -28, 28}) {
+                    for (double aside : new double[] {0, -20, 20, -50, 50}) {
+                        places.add(Pen.box(Typeface.TEXT, words.text(), inside + aside, y + up));
+                    }
                 }
+                write(pen, words.text(), places, new Surroundings(area, points, taken));
+            }
+        }
+
+        /** What a word must keep clear of: the edge of its panel, points of curves, words already written. */
+        private record Surroundings(Rectangle2D area, List<double[]> points, List<Rectangle2D> taken) {}
+
+        private static void write(Pen pen, String text, List<Rectangle2D> places, Surroundings around) {
+            Rectangle2D best = null;
+            long least = Long.MAX_VALUE;
+            for (Rectangle2D box : places) {
+                if (around.area().contains(box) && around.taken().stream().noneMatch(box::intersects)) {
+                    long hidden = around.points().stream()
+                            .filter(point -> box.contains(point[0], point[1]))
+                            .count();
+                    if (hidden < least) {
+                        least = hidden;
+                        best = box;
+                    }
+                }
+            }
+            if (best != null) {
+                around.taken().add(best);
+                if (least > 0) {
+                    pen.clear(best);
+                }
+                double ascent = Typeface.TEXT.getLineMetrics(text, Pen.METRICS).getAscent();
+                pen.write(Typeface.TEXT, Typeface.DARK, text, best.getMinX(), best.getMinY() + ascent);
             }
         }
 
@@ -388,10 +416,10 @@ public final class PlotSheet implements Picture {
                     graphics.setStroke(new BasicStroke(0.9f));
                     graphics.translate(entry.x() + 0.5 * SAMPLE, middle);
                     if (curve.style() == Panel.Style.DOTS) {
-                        graphics.fill(Panel.symbol(curve.style()));
+                        graphics.fill(Panel.symbol(curve));
                     } else {
                         graphics.draw(new Line2D.Double(0, -6, 0, 6));
-                        graphics.draw(Panel.symbol(curve.style()));
+                        graphics.draw(Panel.symbol(curve));
                     }
                     graphics.translate(-entry.x() - 0.5 * SAMPLE, -middle);
                 }

@@ -114,8 +114,9 @@ public final class SvgPaper {
         @Override
         public void drawString(String text, float x, float y) {
             Rectangle2D box = Pen.box(getFont(), text, x, y);
+            boolean whole = getClip() == null || getClip().contains(box);
             texts.add(
-                    LaidText.of(text, getTransform().createTransformedShape(box).getBounds2D()));
+                    LaidText.of(text, getTransform().createTransformedShape(box).getBounds2D(), whole));
             super.drawString(text, x, y);
         }
     }

@@ -1,0 +1,214 @@
+package flowshy.report.chart;
+
+import flowshy.report.chart.ChartTable.Head;
+import flowshy.report.chart.ChartTable.Row;
+import flowshy.report.chart.paper.Ink;
+import flowshy.report.chart.paper.Panel;
+import flowshy.report.chart.paper.PlotSheet;
+import flowshy.report.chart.paper.PlotSheet.Heading;
+import flowshy.report.chart.paper.RowSheet;
+import flowshy.report.chart.paper.RowSheet.Mark;
+import flowshy.report.chart.paper.TickText;
+import flowshy.study.Study;
+import flowshy.verdict.BandsAnswer;
+import flowshy.verdict.BandsAnswer.Extreme;
+import flowshy.verdict.Reads;
+import flowshy.verdict.curve.CurvePoint;
+import flowshy.verdict.curve.DeviceCurve;
+import flowshy.verdict.error.ErrorBudget;
+import flowshy.verdict.lid.CoverRow;
+import flowshy.verdict.lid.LidAnswer;
+import flowshy.verdict.lid.RequiredAttenuation;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.OptionalDouble;
+
+/** The charts of {@code lid}: covers side by side, their rejection by frequency, and what a cover must give. */
+public final class CoverCharts {
+    private static final String SIDE = "Covers side by side";
+    private static final String CURVES = "Rejection under each cover";
+    private static final String REQUIRED = "Attenuation a cover must give";
+
+    private CoverCharts() {}
+
+    /**
+     * Every chart that the answer has numbers for.
+     *
+     * @param study what was asked
+     * @param answer what was found
+     * @return in the order of a report
+     */
+    public static List<Chart> of(Study study, LidAnswer answer) {
+        List<Chart> charts = new ArrayList<>();
+        charts.add(side(study.title(), answer));
+        charts.add(curves(study.title(), answer));
+        charts.add(required(study.title(), answer));
+        return charts;
+    }
+
+    private static Chart side(String study, LidAnswer answer) {
+        double margin = answer.bare().acceptance().margin();
+        OptionalDouble limit = answer.bare().acceptance().error();
+        boolean errors = answer.bare().error().isPresent();
+        List<Row> rows = new ArrayList<>();
+        List<List<Double>> rejections = new ArrayList<>(List.of(List.of(0.0, margin)));
+        List<List<Double>> rms = new ArrayList<>();
+        limit.ifPresent(value -> rms.add(List.of(value)));
+        for (CoverRow row : answer.covers()) {
+            double least = row.answer().least().map(Extreme::rejection).orElse(Double.NaN);
+            double error = row.answer().error().map(ErrorBudget::rms).orElse(Double.NaN);
+            rows.add(new Row(words(row), errors ? List.of(least, error) : List.of(least)));
+            rejections.add(List.of(least));
+            rms.add(List.of(error));
+        }
+        Bounds decibels = Bounds.even(rejections, 10.0);
+        RowSheet sheet = new RowSheet(new Heading(SIDE, study), errors ? 150 : 190)
+                .even("least rejection, dB", decibels.from(), decibels.to() + 5.0)
+                .limit(margin, "margin " + TickText.of(margin, 4) + " dB");
+        if (errors) {
+            Bounds ends = Bounds.decades(rms, 8.0);
+            sheet.decades("error by flow, m/s² rms", ends.from(), ends.to());
+            limit.ifPresent(value -> sheet.limit(value, "limit " + TickText.of(value, 3) + " m/s²"));
+        }
+        for (CoverRow row : answer.covers()) {
+            List<Mark> marks = new ArrayList<>();
+            marks.add(mark(0, row.answer().least().map(Extreme::rejection).orElse(Double.NaN), none(row)));
+            if (errors) {
+                marks.add(mark(1, row.answer().error().map(ErrorBudget::rms).orElse(Double.NaN), "no flow enters"));
+            }
+            sheet.row(words(row), marks);
+        }
+        answer.chosen()
+                .ifPresentOrElse(
+                        chosen -> sheet.remark("The first that meets every limit: " + words(chosen) + "."),
+                        () -> sheet.remark(answer.verdict().sentence()));
+        List<Head> heads = new ArrayList<>(List.of(new Head("least_rejection_db", "least rejection", "dB")));
+        if (errors) {
+            heads.add(new Head("error_rms_m_s2", "error by flow", "m/s² rms"));
+        }
+        return new DrawnChart("covers", SIDE, description(answer), new ChartTable(heads, rows), sheet);
+    }
+
+    /** A dot with its figure, or why there is none. */
+    private static Mark mark(int scale, double value, String none) {
+        boolean drawn = Double.isFinite(value) && (scale == 0 || value > 0.0);
+        return new Mark(
+                scale,
+                Ink.FIRST,
+                drawn ? OptionalDouble.of(value) : OptionalDouble.empty(),
+                drawn ? TickText.of(value, 3) : none);
+    }
+
+    private static String none(CoverRow row) {
+        return row.answer().bands().get(0).reads() == Reads.NOTHING ? "reads nothing" : "no flow enters: no bound";
+    }
+
+    private static String words(CoverRow row) {
+        return row.candidate().cover().words() + ", in "
+                + row.candidate().around().name();
+    }
+
+    private static String description(LidAnswer answer) {
+        StringBuilder text = new StringBuilder();
+        for (CoverRow row : answer.covers()) {
+            text.append(words(row))
+                    .append(": least rejection ")
+                    .append(row.answer()
+                            .least()
+                            .map(least -> TickText.of(least.rejection(), 3) + " dB")
+                            .orElse(none(row)))
+                    .append(row.answer()
+                            .error()
+                            .map(error -> ", error " + TickText.of(error.rms(), 3) + " m/s² rms")
+                            .orElse(""))
+                    .append(". ");
+        }
+        return text + answer.verdict().sentence();
+    }
+
+    private static Chart curves(String study, LidAnswer answer) {
+        BandsAnswer bare = answer.bare();
+        double margin = bare.acceptance().margin();
+        List<Row> rows = new ArrayList<>();
+        List<List<Double>> frequencies = new ArrayList<>();
+        List<List<Double>> rejections = new ArrayList<>();
+        for (CoverRow row : answer.covers()) {
+            List<Double> frequency = new ArrayList<>();
+            List<Double> rejection = new ArrayList<>();
+            for (CurvePoint point : DeviceCurve.of(row.answer()).points()) {
+                double value = point.response().rejection();
+                frequency.add(point.response().frequency());
+                rejection.add(Double.isFinite(value) ? value : Double.NaN);
+                rows.add(new Row(
+                        words(row),
+                        List.of(point.response().frequency(), Double.isFinite(value) ? value : Double.NaN)));
+            }
+            frequencies.add(frequency);
+            rejections.add(rejection);
+        }
+        List<List<Double>> seen = new ArrayList<>(rejections);
+        seen.add(List.of(0.0, margin));
+        Bounds ends = Bounds.even(seen, 5.0);
+        Bounds axis = Bounds.about(bare.band().from(), bare.band().to());
+        Panel panel = Panel.even("rejection, dB", ends.from(), ends.to(), 1);
+        PlotSheet sheet = PlotSheet.decades(new Heading(CURVES, study), "frequency, Hz", axis.from(), axis.to(), 210);
+        int inks = 0;
+        for (int i = 0; i < answer.covers().size(); i++) {
+            CoverRow row = answer.covers().get(i);
+            if (rejections.get(i).stream().anyMatch(Double::isFinite)) {
+                panel.line(words(row), Ink.alike(inks++), frequencies.get(i), rejections.get(i));
+            } else {
+                sheet.remark("No curve for " + words(row) + ": "
+                        + (row.answer().bands().get(0).reads() == Reads.NOTHING
+                                ? "it reads nothing."
+                                : "no flow enters, the rejection has no bound."));
+            }
+        }
+        panel.level(margin, "margin " + TickText.of(margin, 4) + " dB", Ink.LIMIT);
+        return new DrawnChart(
+                "covers-rejection",
+                CURVES,
+                description(answer),
+                new ChartTable(
+                        List.of(
+                                new Head("frequency_hz", "frequency", "Hz"),
+                                new Head("rejection_db", "rejection", "dB")),
+                        rows),
+                sheet.add(panel));
+    }
+
+    private static Chart required(String study, LidAnswer answer) {
+        BandsAnswer bare = answer.bare();
+        Columns<RequiredAttenuation> columns = new Columns<>(answer.required());
+        List<Double> frequency = columns.add("frequency_hz", "frequency", "Hz", RequiredAttenuation::frequency);
+        List<Double> attenuation = columns.add("attenuation_db", "attenuation", "dB", RequiredAttenuation::attenuation);
+        List<List<Double>> seen = new ArrayList<>(List.of(attenuation, List.of(0.0)));
+        answer.requiredError().ifPresent(value -> seen.add(List.of(value)));
+        Bounds ends = Bounds.even(seen, 5.0);
+        Bounds axis = Bounds.about(bare.band().from(), bare.band().to());
+        String wanted = "for a margin of " + TickText.of(bare.acceptance().margin(), 4) + " dB";
+        Panel panel = Panel.even("attenuation, dB", ends.from(), ends.to(), 1)
+                .line(wanted, Ink.MOTION, frequency, attenuation)
+                .dots("", Ink.MOTION, frequency, attenuation);
+        answer.requiredError()
+                .ifPresent(
+                        value -> panel.level(value, "for the error limit " + TickText.of(value, 4) + " dB", Ink.LIMIT));
+        PlotSheet sheet = PlotSheet.decades(new Heading(REQUIRED, study), "frequency, Hz", axis.from(), axis.to(), 170)
+                .add(panel);
+        double most = attenuation.stream()
+                .filter(Double::isFinite)
+                .mapToDouble(Double::doubleValue)
+                .max()
+                .orElse(Double.NaN);
+        if (attenuation.stream().anyMatch(value -> !Double.isFinite(value))) {
+            sheet.remark("Where there is no point the fluid carried along leaves no motion to read.");
+        }
+        return new DrawnChart(
+                "attenuation",
+                REQUIRED,
+                "Attenuation of the flow that keeps the margin of a bare device, by third-octaves"
+                        + (Double.isFinite(most) ? "; at most " + TickText.of(most, 3) + " dB." : "."),
+                columns.table(),
+                sheet);
+    }
+}

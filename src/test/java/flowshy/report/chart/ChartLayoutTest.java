@@ -1,0 +1,124 @@
+package flowshy.report.chart;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import flowshy.report.chart.paper.LaidText;
+import flowshy.study.Study;
+import flowshy.study.StudyReader;
+import flowshy.verdict.fill.Fill;
+import flowshy.verdict.fill.FillQuestion;
+import flowshy.verdict.lid.LidQuestion;
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Set;
+import java.util.stream.Stream;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.Arguments;
+import org.junit.jupiter.params.provider.MethodSource;
+
+/** Every text of every chart lies on the sheet, is not clipped, and covers no other. */
+class ChartLayoutTest {
+    @TempDir
+    static Path folder;
+
+    static List<Arguments> studies() throws IOException {
+        List<Arguments> all = new ArrayList<>();
+        try (Stream<Path> examples = Files.list(Path.of("examples"))) {
+            examples.map(example -> example.resolve("study.yaml"))
+                    .sorted()
+                    .forEach(study -> all.add(Arguments.of(study, List.of())));
+        }
+        assertThat(all).hasSizeGreaterThan(10);
+        Path bench = Path.of("examples/workbench-air/study.yaml");
+        Path tray = Path.of("examples/fan-tray/study.yaml");
+        String title =
+                "title=A very long title that a careful person gave to a study of many words, and more of them, and then \u05E9\u05DC\u05D5\u05DD";
+        all.add(Arguments.of(bench, List.of("band.to=30 kHz", "band.from=0.1 Hz", title)));
+        all.add(Arguments.of(bench, List.of("band.from=300 Hz", "band.to=320 Hz")));
+        all.add(Arguments.of(bench, List.of("band.to=5 kHz", "accept.rejection=33.3 dB")));
+        all.add(Arguments.of(bench, List.of("medium=water", "band.to=10 kHz", "accept.rejection=3 dB")));
+        all.add(Arguments.of(bench, List.of("cover=sealed", "suspension.quality.value=150", "band.to=2 kHz")));
+        all.add(Arguments.of(tray, List.of("cover={kind: roofed, gap: 0.5 mm, length: 6 mm}")));
+        all.add(Arguments.of(
+                tray,
+                List.of("cover={kind: vented, holes: 4, hole-diameter: 0.2 mm, hole-depth: 0.2 mm, sides: through,"
+                        + " cavity-volume: 30 mm3, cavity-section: 12 mm2}")));
+        all.add(Arguments.of(
+                tray,
+                List.of("surroundings={a draught with a long name for a picture: {kind: stream,"
+                        + " mean-speed: 0.3 m/s}, b: {kind: tone, frequency: 150 Hz, speed: 1 mm/s},"
+                        + " c: {kind: sound, level: 80 dB, from: 50 Hz, to: 400 Hz}, d: {kind: stream, mean-speed: 0.1 m/s},"
+                        + " e: {kind: stream, mean-speed: 0.2 m/s}, f: {kind: stream, mean-speed: 5 cm/s},"
+                        + " g: {kind: tone, frequency: 60 Hz, speed: 2 mm/s}}")));
+        return all;
+    }
+
+    @ParameterizedTest
+    @MethodSource("studies")
+    void textsOfBandsFit(Path file, List<String> settings) {
+        Study study = StudyReader.read(file, settings);
+        fit(BandsCharts.of(study, study.question().answer()));
+    }
+
+    @ParameterizedTest
+    @MethodSource("studies")
+    void textsOfLidFit(Path file, List<String> settings) {
+        Study study = StudyReader.read(file, settings);
+        fit(CoverCharts.of(study, new LidQuestion(study.question(), study.reference(), study.candidates()).answer()));
+    }
+
+    @Test
+    void textsOfFillFit() {
+        Study study = StudyReader.read(Path.of("examples/wrong-fill/study.yaml"), List.of());
+        FillQuestion question = new FillQuestion(
+                study.device(),
+                study.band(),
+                study.acceptance(),
+                study.reference(),
+                Fill.known(
+                        study.device().outside().temperature(),
+                        study.device().outside().pressure()));
+        fit(FillChart.of(study, study.acceptance(), question.answer()));
+    }
+
+    private static void fit(List<Chart> charts) {
+        assertThat(charts).isNotEmpty();
+        Set<String> names = new HashSet<>();
+        for (Chart chart : charts) {
+            assertThat(names.add(chart.name())).isTrue();
+            assertThat(chart.name()).matches("[a-z]+(-[a-z]+)*");
+            assertThat(chart.description()).hasSizeGreaterThan(20).doesNotContain("NaN", "Infinity");
+            List<LaidText> texts = chart.texts();
+            assertThat(texts).hasSizeGreaterThan(5);
+            String svg = chart.svg("");
+            double width = number(svg, "0 0 (\\d+) \\d+");
+            double height = number(svg, "0 0 \\d+ (\\d+)");
+            List<String> faults = new ArrayList<>();
+            for (int i = 0; i < texts.size(); i++) {
+                LaidText text = texts.get(i);
+                if (!text.whole()) {
+                    faults.add("clipped: " + text);
+                }
+                if (!(text.left() >= 0.0 && text.top() >= 0.0 && text.right() <= width && text.bottom() <= height)) {
+                    faults.add("off the sheet: " + text);
+                }
+                for (int j = i + 1; j < texts.size(); j++) {
+                    if (text.overlaps(texts.get(j))) {
+                        faults.add("overlap: " + text + " and " + texts.get(j));
+                    }
+                }
+            }
+            assertThat(faults).as("%s on %s by %s", chart.name(), width, height).isEmpty();
+        }
+    }
+
+    private static double number(String svg, String pattern) {
+        return Double.parseDouble(svg.replaceFirst("(?s).*?viewBox=\"" + pattern + "\".*", "$1"));
+    }
+}

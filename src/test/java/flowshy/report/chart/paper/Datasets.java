@@ -1,0 +1,49 @@
+package flowshy.report.chart.paper;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.jfree.chart.plot.XYPlot;
+import org.jfree.data.xy.XYDataset;
+
+/** What the charting library was given to draw. */
+public final class Datasets {
+    private Datasets() {}
+
+    /**
+     * One series of a panel.
+     *
+     * @param name in the key, empty if it is not named there
+     * @param x abscissae of the points that have a number
+     * @param y ordinates, same order
+     */
+    public record Series(String name, List<Double> x, List<Double> y) {}
+
+    /** Series of every panel of a picture, in order; none for a picture that is no plot. */
+    public static List<Series> of(Picture picture) {
+        List<Series> all = new ArrayList<>();
+        if (picture instanceof PlotSheet sheet) {
+            for (Panel panel : sheet.panels()) {
+                XYPlot plot = panel.plot(List.of());
+                for (int i = 0; i < plot.getDatasetCount(); i++) {
+                    all.add(series(plot.getDataset(i)));
+                }
+            }
+        }
+        return all;
+    }
+
+    private static Series series(XYDataset dataset) {
+        if (dataset.getSeriesCount() != 1) {
+            throw new AssertionError(dataset.getSeriesCount() + " series in one dataset");
+        }
+        List<Double> x = new ArrayList<>();
+        List<Double> y = new ArrayList<>();
+        for (int i = 0; i < dataset.getItemCount(0); i++) {
+            if (Double.isFinite(dataset.getYValue(0, i))) {
+                x.add(dataset.getXValue(0, i));
+                y.add(dataset.getYValue(0, i));
+            }
+        }
+        return new Series(dataset.getSeriesKey(0).toString(), x, y);
+    }
+}
