@@ -32,7 +32,7 @@ class ChartDataTest {
         BandsAnswer answer = study.question().answer();
         List<Chart> charts = BandsCharts.of(study, answer);
         JsonPage page = new JsonPage();
-        BandsJson.write(page, study, answer, List.of(), List.of(), charts);
+        BandsJson.write(page, study, answer, List.of(), List.of(), List.of(), charts);
         Map<String, Object> json = Json.object(Json.parse(page.finish()));
         List<Map<String, Object>> points = Json.objects(json.get("points"));
         assertThat(points).isNotEmpty();
