@@ -5,20 +5,25 @@ import flowshy.report.BandsText;
 import flowshy.report.ForceReport;
 import flowshy.report.JsonPage;
 import flowshy.report.TableCsv;
+import flowshy.report.Why;
 import flowshy.report.chart.BandsCharts;
 import flowshy.report.chart.Chart;
 import flowshy.report.chart.ForceChart;
 import flowshy.study.Study;
+import flowshy.study.StudyReader;
 import flowshy.verdict.BandsAnswer;
 import flowshy.verdict.BandsQuestion;
 import flowshy.verdict.Decision;
 import flowshy.verdict.Levers;
 import flowshy.verdict.ThirdOctaves;
+import flowshy.verdict.design.Sensitivity;
+import flowshy.verdict.design.SensitivityQuestion;
 import flowshy.verdict.force.ForceAlong;
 import flowshy.verdict.measured.BesideModel;
 import flowshy.verdict.measured.Compared;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.TreeSet;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -74,25 +79,27 @@ final class BandsCommand implements Callable<Integer> {
         List<Runnable> objects = new ArrayList<>();
         List<String> tables = new ArrayList<>();
         JsonPage json = new JsonPage();
-        int code = studies.each(spec.commandLine(), output.json(), study -> {
+        int code = studies.each(spec.commandLine(), output.json(), Asked::by, asked -> {
+            Study study = asked.study();
             BandsQuestion question = study.question();
             BandsAnswer answer =
                     question.answer(frequencies == null ? ThirdOctaves.in(study.band()) : frequencies.values());
             List<Levers> levers = why ? Levers.of(answer) : List.of();
             List<Compared> measured = BesideModel.of(study.device(), study.measurements());
+            List<Sensitivity> slopes = why || output.json() ? asked.slopes(answer) : List.of();
             List<ForceAlong> forces = forceAt == null
                     ? List.of()
                     : forceAt.values().stream()
                             .map(frequency -> ForceAlong.of(study.device(), frequency))
                             .toList();
-            texts.add(BandsText.of(study, answer, levers, measured, forces));
+            texts.add(BandsText.of(study, answer, new Why(levers, why ? slopes : List.of()), measured, forces));
             List<Chart> drawn = new ArrayList<>();
             if (charts.asked()) {
                 drawn.addAll(BandsCharts.of(study, answer));
                 drawn.addAll(ForceChart.of(study.title(), forces));
             }
             charts.add(drawn);
-            objects.add(() -> BandsJson.write(json, study, answer, levers, measured, forces, drawn));
+            objects.add(() -> BandsJson.write(json, study, answer, new Why(levers, slopes), measured, forces, drawn));
             if (output.csv()) {
                 tables.add(table(study, question, answer));
                 if (!measured.isEmpty()) {
@@ -113,5 +120,19 @@ final class BandsCommand implements Callable<Integer> {
     private String table(Study study, BandsQuestion question, BandsAnswer answer) {
         return TableCsv.points(
                 frequencies == null ? question.answer(study.band().even(FINE)) : answer);
+    }
+
+    /** A study and its reader, which knows its numbers. */
+    private record Asked(StudyReader reader, Study study) {
+        static Asked by(StudyReader reader) {
+            return new Asked(reader, reader.study());
+        }
+
+        /** At the frequency of comparison and where the rejection is least. */
+        List<Sensitivity> slopes(BandsAnswer answer) {
+            TreeSet<Double> frequencies = new TreeSet<>(List.of(study.reference()));
+            answer.least().ifPresent(least -> frequencies.add(least.frequency()));
+            return new SensitivityQuestion(reader.knobs(study), List.copyOf(frequencies)).answer();
+        }
     }
 }

@@ -51,7 +51,7 @@ final class StudyOptions {
     }
 
     /** The same where more than the study itself is to be read and checked. */
-    int each(CommandLine line, boolean json, Function<StudyReader, Study> reading, ToIntFunction<Study> work) {
+    <T> int each(CommandLine line, boolean json, Function<StudyReader, T> reading, ToIntFunction<T> work) {
         return eachOpened(line, json, reader -> work.applyAsInt(reading.apply(reader)));
     }
 

@@ -32,7 +32,7 @@ public final class BandsJson {
      * @param json where to write
      * @param study what was asked
      * @param answer what was found
-     * @param why explanations, left out if empty
+     * @param why explanations of edges and failed limits, left out if empty, and what each number does to the rejection
      * @param measured what was measured, beside the model, left out if empty
      * @param forces along the hair, left out if empty
      * @param charts drawn of it, their numbers are left out if there are none
@@ -41,7 +41,7 @@ public final class BandsJson {
             JsonPage json,
             Study study,
             BandsAnswer answer,
-            List<Levers> why,
+            Why why,
             List<Compared> measured,
             List<ForceAlong> forces,
             List<Chart> charts) {
@@ -70,8 +70,9 @@ public final class BandsJson {
                     answer.points(),
                     point -> columns.forEach(
                             column -> json.cell(column.name(), column.cell().apply(point))));
-            if (!why.isEmpty()) {
-                json.array("why", why, page::levers);
+            SensitivityReport.write(json, why.slopes());
+            if (!why.levers().isEmpty()) {
+                json.array("why", why.levers(), page::levers);
             }
             answer.error().ifPresent(budget -> ErrorReport.write(json, budget));
             if (!measured.isEmpty()) {

@@ -44,13 +44,13 @@ public final class BandsText {
      *
      * @param study what was asked
      * @param answer what was found
-     * @param why explanations of edges and failed limits; none if the list is empty
+     * @param why explanations of edges and failed limits, and what to tighten first
      * @param measured what was measured, beside the model; empty if nothing was
      * @param forces along the hair; none if the list is empty
      * @return text with a line end after every line
      */
     public static String of(
-            Study study, BandsAnswer answer, List<Levers> why, List<Compared> measured, List<ForceAlong> forces) {
+            Study study, BandsAnswer answer, Why why, List<Compared> measured, List<ForceAlong> forces) {
         BandsText text = new BandsText(study, answer);
         text.decision();
         text.taken();
@@ -60,7 +60,8 @@ public final class BandsText {
         answer.error().ifPresent(budget -> ErrorReport.print(text.page, budget, text.spectral()));
         text.points();
         MeasuredReport.print(text.page, "Measured beside the model", measured);
-        text.explain(why);
+        text.explain(why.levers());
+        SensitivityReport.print(text.page, why.slopes());
         ForceReport.print(text.page, forces);
         text.page.line("");
         text.page.paragraph(Cautions.SHORT);

@@ -1,5 +1,7 @@
 package flowshy.study;
 
+import flowshy.hair.Hair;
+import flowshy.hair.LengthModel;
 import flowshy.math.Figures;
 import flowshy.study.units.Dimension;
 import flowshy.study.units.Quantity;
@@ -60,6 +62,12 @@ record KeyScaling(VariedStudy space, NumberKey number) implements Scaling {
 
     @Override
     public BandsQuestion at(double value) {
-        return space.at(value);
+        BandsQuestion question = space.at(value);
+        Hair hair = question.device().hair();
+        LengthModel model =
+                space.base().device().hair().lengthModel(); // as every other device of the comparison is seen
+        return hair.lengthModel() == model
+                ? question
+                : question.about(question.device().with(hair.seenAs(model)));
     }
 }

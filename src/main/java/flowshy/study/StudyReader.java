@@ -9,6 +9,7 @@ import flowshy.study.text.Problems;
 import flowshy.study.text.Setting;
 import flowshy.study.text.StudyException;
 import flowshy.study.text.StudyText;
+import flowshy.verdict.design.Knob;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
@@ -79,6 +80,16 @@ public final class StudyReader {
                 Variant.of(base.origin().file(), List.of(), hold, form, folder, base),
                 hold,
                 family(overlaid(new Problems())).variants(base, hold, chosen.isPresent()));
+    }
+
+    /**
+     * Every dimension and property on which the rejection may depend.
+     *
+     * @param study read by this reader
+     * @return one a positive number of the study's hair, cover and medium, and some of them together
+     */
+    public List<Knob> knobs(Study study) {
+        return Knobs.of(this, study);
     }
 
     private FamilyReader family(Node.Mapping root) {

@@ -205,4 +205,41 @@ class CompareCommandTest {
         assertThat((double) resonance.get("required")).isEqualTo(470.0);
         assertThat(resonance.get("decision")).isEqualTo("meets");
     }
+
+    /** Each slope against the rejection of the study with that number half a per cent up and down. */
+    @ParameterizedTest
+    @CsvSource({
+        "hair.diameter, 88, um",
+        "hair.length, 780, um",
+        "hair.density, 1.37, g/cm3",
+        "medium.pressure, 99.2, kPa"
+    })
+    void whatToTightenFirstIsWhatHappens(String key, double value, String unit) {
+        Map<String, Object> answer = answer("bands", LIFT, "--json");
+        Map<String, Object> found = Json.objects(answer.get("sensitivities")).stream()
+                .filter(one -> one.get("number").equals(key))
+                .findFirst()
+                .orElseThrow();
+        Map<String, Object> slope = Json.objects(found.get("slopes")).get(1);
+        assertThat((double) slope.get("frequency_hz")).isEqualTo(90.0);
+        double up = rejection(key + "=" + 1.005 * value + " " + unit);
+        double down = rejection(key + "=" + value / 1.005 + " " + unit);
+        double wanted = (up - down) * Math.log(1.01) / (2.0 * Math.log(1.005));
+        assertThat((double) slope.get("rejection_db_per_percent"))
+                .isCloseTo(wanted, within(2e-5 * Math.abs(wanted) + 5e-7));
+    }
+
+    private static double rejection(String setting) {
+        Map<String, Object> answer = answer("bands", LIFT, "--json", "--frequencies", "90 Hz", "--set", setting);
+        return (double) Json.objects(answer.get("points")).get(0).get("rejection_db");
+    }
+
+    @Test
+    void slopesStandUnderWhyAndAlwaysInTheJson() {
+        assertThat(Run.of("bands", LIFT).out()).doesNotContain("What to tighten first");
+        assertThat(Run.of("bands", LIFT, "--why").out()).contains("What to tighten first", "hair.diameter  ");
+        assertThat(Json.objects(
+                        answer("bands", LIFT, "--json", "--set", "cover=sealed").get("sensitivities")))
+                .isEmpty();
+    }
 }

@@ -2,6 +2,7 @@ package flowshy.verdict.compare;
 
 import static flowshy.math.Figures.say;
 
+import flowshy.hair.LengthModel;
 import flowshy.verdict.BandsQuestion;
 import flowshy.verdict.design.NoDesignException;
 import flowshy.verdict.figure.Evaluated;
@@ -25,6 +26,9 @@ final class Equalizer {
 
     /** How well the scaled device must meet the value when it is worked out anew. */
     private static final double MET = 1e-9;
+
+    /** The same where the whole hair is solved: its meshes change with the shape, and what rests on them jumps a little. */
+    private static final double MET_ON_MESHES = 1e-4;
 
     private final Figure figure;
     private final double target;
@@ -82,7 +86,9 @@ final class Equalizer {
         double value = FastMath.abs(now.value() / target - 1.0) < MET ? scaling.start() : root(now.value());
         BandsQuestion question = scaling.at(value);
         double after = figure.of(new Evaluated(question)).value();
-        if (!(FastMath.abs(after / target - 1.0) <= MET)) {
+        LengthModel model = question.device().hair().lengthModel();
+        double met = model == LengthModel.AUTO || model == LengthModel.FINITE ? MET_ON_MESHES : MET;
+        if (!(FastMath.abs(after / target - 1.0) <= met)) {
             throw new NoSolutionException(
                     say("at %s its %s jumps past the value wanted", scaling.written(value), figure.word()));
         }
