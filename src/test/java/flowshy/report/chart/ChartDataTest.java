@@ -6,6 +6,7 @@ import flowshy.cli.Json;
 import flowshy.report.BandsJson;
 import flowshy.report.JsonPage;
 import flowshy.report.LidReport;
+import flowshy.report.Why;
 import flowshy.report.chart.paper.Datasets;
 import flowshy.study.Study;
 import flowshy.study.StudyReader;
@@ -32,7 +33,7 @@ class ChartDataTest {
         BandsAnswer answer = study.question().answer();
         List<Chart> charts = BandsCharts.of(study, answer);
         JsonPage page = new JsonPage();
-        BandsJson.write(page, study, answer, List.of(), List.of(), List.of(), charts);
+        BandsJson.write(page, study, answer, new Why(List.of(), List.of()), List.of(), List.of(), charts);
         Map<String, Object> json = Json.object(Json.parse(page.finish()));
         List<Map<String, Object>> points = Json.objects(json.get("points"));
         assertThat(points).isNotEmpty();
