@@ -9,6 +9,7 @@ import flowshy.report.Why;
 import flowshy.report.chart.BandsCharts;
 import flowshy.report.chart.Chart;
 import flowshy.report.chart.ForceChart;
+import flowshy.report.chart.MeasuredOverlays;
 import flowshy.study.Study;
 import flowshy.study.StudyReader;
 import flowshy.verdict.BandsAnswer;
@@ -95,7 +96,7 @@ final class BandsCommand implements Callable<Integer> {
             texts.add(BandsText.of(study, answer, new Why(levers, why ? slopes : List.of()), measured, forces));
             List<Chart> drawn = new ArrayList<>();
             if (charts.asked()) {
-                drawn.addAll(BandsCharts.of(study, answer));
+                drawn.addAll(BandsCharts.of(study, answer, MeasuredOverlays.of(measured)));
                 drawn.addAll(ForceChart.of(study.title(), forces));
             }
             charts.add(drawn);

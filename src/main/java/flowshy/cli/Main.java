@@ -35,6 +35,7 @@ public final class Main implements Runnable {
             "compare",
             "map",
             "tolerance",
+            "fit",
             "cylinder",
             "media",
             "surroundings",
@@ -91,6 +92,7 @@ public final class Main implements Runnable {
             case "check" -> new CheckCommand();
             case "start" -> new StartCommand();
             case "report" -> new ReportCommand();
+            case "fit" -> new FitCommand();
             default -> throw new IllegalArgumentException("no command " + name);
         };
     }

@@ -97,13 +97,26 @@ final class MeasuredReport {
      * @param responses as compared; nothing is printed if there are none
      */
     static void print(TextPage page, String heading, List<Compared> responses) {
+        print(page, heading, responses, List.of());
+    }
+
+    /**
+     * The same beside a fitted device.
+     *
+     * @param page to print on
+     * @param heading of the part
+     * @param responses as compared; nothing is printed if there are none
+     * @param fitted names of those whose gain was fitted
+     */
+    static void print(TextPage page, String heading, List<Compared> responses, List<String> fitted) {
         if (responses.isEmpty()) {
             return;
         }
         page.heading(heading);
         for (Compared response : responses) {
             page.row(response.measured().name(), what(response));
-            page.row("  gain", gain(response));
+            page.row(
+                    "  gain", gain(response, fitted.contains(response.measured().name())));
             if (!response.points().isEmpty()) {
                 page.row("  off by", deviation(response));
             }
@@ -129,7 +142,7 @@ final class MeasuredReport {
                 points.get(points.size() - 1).frequency());
     }
 
-    private static String gain(Compared response) {
+    private static String gain(Compared response, boolean fitted) {
         if (response.measured().of() == Measurand.REJECTION) {
             return "none: it cancels in the ratio";
         }
@@ -138,7 +151,7 @@ final class MeasuredReport {
         String sense = response.gain() < 0.0 ? ", sense turned round" : "";
         return response.freed()
                 ? value + sense + ": one common factor taken out, nothing else is fitted"
-                : value + sense + ", as given";
+                : value + sense + (fitted ? ", as fitted" : ", as given");
     }
 
     private static String deviation(Compared response) {

@@ -145,6 +145,26 @@ public final class StudyReader {
         return build(form, new Problems());
     }
 
+    /** A reader of a text that is not in a file yet; the files it names are looked for in a folder. */
+    static StudyReader of(StudyText text, Path folder) {
+        return new StudyReader(text, folder, List.of());
+    }
+
+    /** The file as named, made absolute. */
+    Path file() {
+        return Path.of(text.file().name()).toAbsolutePath().normalize();
+    }
+
+    /** The text of the file. */
+    String text() {
+        return text.file().text();
+    }
+
+    /** Settings laid over it, in order. */
+    List<String> settings() {
+        return settings;
+    }
+
     /** Folder in which the files that the study names are looked for. */
     Path folder() {
         return folder;

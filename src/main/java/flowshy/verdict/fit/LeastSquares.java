@@ -73,6 +73,20 @@ final class LeastSquares {
         return plain(polished(marquardt(scaled)));
     }
 
+    /**
+     * The minimum near a point, by Gauss–Newton steps alone: for a problem that has changed a little.
+     *
+     * @param point one value a parameter
+     * @return the parameters there, or the point itself where no step leads down
+     */
+    double[] nearby(double[] point) {
+        double[] scaled = new double[point.length];
+        for (int i = 0; i < point.length; i++) {
+            scaled[i] = point[i] / scale[i];
+        }
+        return plain(polished(scaled));
+    }
+
     /** The best end of a bold and a careful search: a first step too long may land where nothing changes any more. */
     private double[] marquardt(double[] start) {
         double[] best = null;
@@ -213,9 +227,11 @@ final class LeastSquares {
         double[][] slopes = new double[at(point).length][point.length];
         for (int i = 0; i < point.length; i++) {
             double step = STEP * FastMath.max(FastMath.abs(point[i]), 1e-3);
+            // at a bound the slope is taken just inside of it
+            double inward = FastMath.max(0.0, least[i] / scale[i] + WEIGHTS.length * step - point[i]);
             for (int k = 0; k < WEIGHTS.length; k++) {
-                double[] above = at(shifted(point, i, (k + 1) * step));
-                double[] below = at(shifted(point, i, -(k + 1) * step));
+                double[] above = at(shifted(point, i, inward + (k + 1) * step));
+                double[] below = at(shifted(point, i, inward - (k + 1) * step));
                 for (int r = 0; r < slopes.length; r++) {
                     slopes[r][i] += WEIGHTS[k] * (above[r] - below[r]) / step;
                 }

@@ -1,6 +1,7 @@
 package flowshy.verdict.measured;
 
 import flowshy.response.Device;
+import flowshy.response.Oscillator;
 import flowshy.response.Response;
 import flowshy.response.ResponsePoint;
 import java.util.Optional;
@@ -18,6 +19,15 @@ public final class Prediction {
      */
     public Prediction(Device device) {
         this.response = new Response(device);
+    }
+
+    /**
+     * Whether there is a suspension that holds the hair, or none is asked for.
+     *
+     * @return false if the hair falls over
+     */
+    public boolean holds() {
+        return response.oscillator().map(Oscillator::stands).orElse(true);
     }
 
     /**
