@@ -3,18 +3,18 @@ package flowshy.cli;
 import flowshy.report.chart.Chart;
 import flowshy.report.chart.ChartFolder;
 import java.io.IOException;
+import java.nio.file.AccessDeniedException;
 import java.nio.file.FileAlreadyExistsException;
+import java.nio.file.FileSystemException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import picocli.CommandLine.Option;
 
 /** Where charts go. Nothing that draws is loaded unless they are asked for. */
 final class ChartOptions {
-    /** Stands for the files in a folder where a message must name something in it. */
-    private static final String CHARTS = "*.svg";
-
     @Option(
             names = "--chart",
             paramLabel = "DIR",
@@ -53,14 +53,22 @@ final class ChartOptions {
             Path target = charts.size() == 1 ? folder : folder.resolve("study-" + (i + 1));
             try {
                 ChartFolder.write(target, charts.get(i));
-            } catch (FileAlreadyExistsException e) {
-                Path taken = Path.of(e.getFile());
-                throw new UserException("cannot write " + taken + ": "
-                        + (Files.isDirectory(taken) ? "it is a folder" : "it is a file, charts need a folder")
-                        + "; nothing was left behind");
             } catch (IOException e) {
-                throw new UserException(Failures.notWritten(target.resolve(CHARTS), e));
+                throw new UserException(
+                        "cannot write charts into " + target + ": " + why(e) + "; nothing was left behind");
             }
         }
+    }
+
+    private static String why(IOException failure) {
+        if (failure instanceof AccessDeniedException) {
+            return "writing there is not allowed";
+        }
+        if (failure instanceof FileAlreadyExistsException taken) {
+            return taken.getFile() + " is a " + (Files.isDirectory(Path.of(taken.getFile())) ? "folder" : "file");
+        }
+        return failure instanceof FileSystemException system && system.getReason() != null
+                ? system.getReason().toLowerCase(Locale.ROOT)
+                : String.valueOf(failure.getMessage());
     }
 }

@@ -19,6 +19,8 @@ import java.util.stream.Stream;
 import javax.imageio.ImageIO;
 import javax.xml.parsers.DocumentBuilderFactory;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.condition.EnabledOnOs;
+import org.junit.jupiter.api.condition.OS;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
@@ -173,7 +175,7 @@ class ChartsTest {
         assertThat(run.code()).isEqualTo(2);
         assertThat(run.out()).isEmpty();
         assertThat(run.err().lines()).hasSize(1);
-        assertThat(run.err()).contains("cannot write", file.toString());
+        assertThat(run.err()).contains("cannot write charts into " + file, "is a file");
         assertThat(file).hasContent("mine");
     }
 
@@ -189,6 +191,17 @@ class ChartsTest {
         try (Stream<Path> left = Files.list(out)) {
             assertThat(left).hasSize(2);
         }
+    }
+
+    /** A folder that nobody may write to: the processes of the system cannot be given children. */
+    @Test
+    @EnabledOnOs(OS.LINUX)
+    void aFolderThatCannotBeMadeGivesOneMessage() {
+        Run run = Run.of("bands", "examples/workbench-air/study.yaml", "--chart", "/proc/flowshy-charts");
+        assertThat(run.code()).isEqualTo(2);
+        assertThat(run.out()).isEmpty();
+        assertThat(run.err().lines()).hasSize(1);
+        assertThat(run.err()).startsWith("flowshy: cannot write charts into /proc/flowshy-charts: ");
     }
 
     @Test
