@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 import static org.assertj.core.api.Assertions.within;
 
+import flowshy.hair.Club;
 import flowshy.hair.Cylinder;
 import flowshy.hair.MeasuredProfile;
 import flowshy.hair.Profile;
@@ -111,6 +112,23 @@ class FiniteHairTest {
                         .subtract(1.0)
                         .norm())
                 .isLessThan(5e-4);
+    }
+
+    /** Nothing ends at twenty lengths: the solution runs on to the slow limit, the rest falling as L/δ. */
+    @ParameterizedTest
+    @CsvSource({"20, 0.06", "200, 0.006", "2000, 0.0012", "20000, 0.0006"})
+    void thickLayersRunOnToTheSlowLimit(double lengths, double tolerance) {
+        for (Profile profile : List.of(HAIR, new Club(900e-6, 20e-6, 400e-6, 100e-6, 60e-6, Club.End.ROUND))) {
+            FiniteHair hair = new FiniteHair(profile, AIR, 1e-6);
+            double delta = lengths * profile.length();
+            double omega = 2.0 * AIR.kinematicViscosity() / (delta * delta);
+            Complex slow = hair.at(omega).stream()
+                    .torque()
+                    .divide(new Complex(1.0, 1.0))
+                    .multiply(delta);
+            double creeping = hair.creepingTorque(z -> z);
+            assertThat(slow.subtract(creeping).norm() / creeping).isCloseTo(0.0, within(tolerance));
+        }
     }
 
     /** Slow limit of the oscillating stream: its layer is then the shear ikz, and inertia is gone. */

@@ -134,4 +134,21 @@ class KnownBodiesValidationTest {
         assertThat(Bodies.turningTorque(layer, FAR).getReal() / -(length * length * length))
                 .isCloseTo(torque, within(torqueTolerance * torque));
     }
+
+    /**
+     * Slender-body theory for a slow blunt rod, F = 4πμLU/(ln 2p + ln 2 − ½) (Cox 1970, Batchelor 1970, from memory), left with terms
+     * of the order 1/ln³ p; and the end over end torque π μL³ω/(3 (ln 2p + ln 2 − 11/6)) (Batchelor 1970, from memory).
+     */
+    @ParameterizedTest
+    @CsvSource({"50, 0.03", "100, 0.02", "200, 0.015"})
+    void slowRodTendsToSlenderBodies(double p, double tolerance) {
+        double length = 2.0 * p;
+        RingLayer layer = Bodies.layer(Bodies.rod(length, FAR - p), 0.0);
+        double logarithm = FastMath.log(2.0 * p) + FastMath.log(2.0);
+        double force = 4.0 * FastMath.PI / (logarithm - 0.5);
+        double torque = FastMath.PI / (3.0 * (logarithm - 11.0 / 6.0));
+        assertThat(Bodies.slidingForce(layer).getReal() / -length).isCloseTo(force, within(tolerance * force));
+        assertThat(Bodies.turningTorque(layer, FAR).getReal() / -(length * length * length))
+                .isCloseTo(torque, within(2.0 * tolerance * torque));
+    }
 }
