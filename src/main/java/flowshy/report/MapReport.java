@@ -46,7 +46,7 @@ public final class MapReport {
         if (map.study().device().suspension().isPresent()) {
             page.row("suspension", "its " + map.hold().word() + " is held");
         }
-        page.row("finite-length", model(map));
+        page.row("finite-length", model(map) + " (" + map.lengthModel().words() + ")");
         page.line("");
         MapPicture.lines(map).forEach(page::line);
         page.heading("What stands out");
@@ -146,9 +146,9 @@ public final class MapReport {
                 + axis.count() + " values" + (axis.logarithmic() ? ", logarithmic" : "");
     }
 
-    /** The word of the study, and what it means. */
+    /** The word of the model that was used. */
     static String model(StudyMap map) {
-        return map.study().device().hair().lengthModel().word();
+        return map.lengthModel().word();
     }
 
     /**

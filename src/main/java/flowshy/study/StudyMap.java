@@ -1,5 +1,6 @@
 package flowshy.study;
 
+import flowshy.hair.LengthModel;
 import flowshy.response.Hold;
 import flowshy.study.text.Nearest;
 import flowshy.study.text.Position;
@@ -106,6 +107,17 @@ public record StudyMap(
         MapQuestion question = new MapQuestion(space, figure, frequency);
         Grid grid = question.answer(axis(across, words, 0), axis(down, words, 1), run);
         return new StudyMap(study, across, down, figure, frequency, varied.hold(), grid, own(question, across, down));
+    }
+
+    /**
+     * The model of finite length that the places of the map were worked out by.
+     *
+     * @return the study's, or the estimate where the shape varies
+     */
+    public LengthModel lengthModel() {
+        return VariedStudy.over(
+                study.device().hair().lengthModel(),
+                List.of(across.key().path(), down.key().path()));
     }
 
     private static Figure figure(MapWords words, boolean frequencySide) {

@@ -1,6 +1,7 @@
 package flowshy.study;
 
 import flowshy.hair.Hair;
+import flowshy.hair.LengthModel;
 import flowshy.medium.Medium;
 import flowshy.response.Device;
 import flowshy.response.Hold;
@@ -127,6 +128,21 @@ public final class VariedStudy implements DesignSpace {
         return numbers;
     }
 
+    /**
+     * The model of finite length over numbers that vary: each shape, and each depth of the pivot, would be solved anew.
+     *
+     * @param model of the study
+     * @param paths of the numbers
+     * @return the estimate in place of auto where they change the shape, else the same
+     */
+    static LengthModel over(LengthModel model, List<String> paths) {
+        return shape(paths) || paths.contains("suspension.pivot-depth") ? model.overShapes() : model;
+    }
+
+    private static boolean shape(List<String> paths) {
+        return paths.stream().anyMatch(path -> path.startsWith("hair.") && !MATERIAL.contains(path));
+    }
+
     @Override
     public List<String> keys() {
         return paths;
@@ -243,9 +259,7 @@ public final class VariedStudy implements DesignSpace {
         }
 
         private Optional<Hair> hair() {
-            Optional<Hair> hair = made();
-            boolean solvedAnew = varies("suspension.pivot-depth") || shape();
-            return solvedAnew ? hair.map(h -> h.seenAs(h.lengthModel().overShapes())) : hair;
+            return made().map(hair -> hair.seenAs(over(hair.lengthModel(), paths)));
         }
 
         private Optional<Hair> made() {
@@ -253,13 +267,9 @@ public final class VariedStudy implements DesignSpace {
                 return Optional.of(base.device().hair());
             }
             HairBuilder builder = new HairBuilder(now, problems, read);
-            return shape()
+            return shape(paths)
                     ? builder.build()
                     : Optional.of(builder.of(base.device().hair()));
-        }
-
-        private boolean shape() {
-            return paths.stream().anyMatch(path -> path.startsWith("hair.") && !MATERIAL.contains(path));
         }
 
         private Optional<CoverBuilder.Fitted> cover(Hair hair, Medium outside, Band band) {

@@ -80,8 +80,8 @@ class FactoredTorquesTest {
                 new Taper(7e-4, 4e-5, 0.0),
                 new Club(9e-4, 2e-5, 4e-4, 1e-4, 6e-5, Club.End.ROUND),
                 new Cylinder(3e-4, 1e-4));
-        List<Cover> covers = List.of(
-                Covers.OPEN, new RoofedCover(1.2e-3, 5e-3), new VentedCover(3, 1.5e-4, 3e-4, true, 6e-9, 3e-6));
+        List<Cover> covers =
+                List.of(Covers.OPEN, new RoofedCover(1.2e-3, 5e-3), new VentedCover(3, 1.5e-4, 3e-4, true, 6e-9, 3e-6));
         int checked = 0;
         for (Profile profile : profiles) {
             for (Cover cover : covers) {

@@ -89,7 +89,7 @@ public final class MapChart {
     }
 
     private String model() {
-        return map.study().device().hair().lengthModel().word();
+        return map.lengthModel().word();
     }
 
     private String description() {
