@@ -93,6 +93,7 @@ final class DeviceChart {
             sheet.note(room.height() + thick, "roof, gap " + ScaleSheet.length(room.height()));
             return;
         }
+        sheet.walls(half);
         sheet.block(-half - thick, -half, 0.0, room.height() + thick);
         sheet.block(half, half + thick, 0.0, room.height() + thick);
         if (cover instanceof VentedCover vented) {

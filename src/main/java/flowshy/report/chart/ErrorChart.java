@@ -70,6 +70,15 @@ final class ErrorChart {
         PlotSheet sheet = PlotSheet.decades(new Heading(TITLE, study), "frequency, Hz", axis.from(), axis.to(), HEIGHT)
                 .add(above)
                 .add(below);
+        List<String> without = new ArrayList<>();
+        for (int i = 0; i < sources.size(); i++) {
+            if (sources.get(i).stream().noneMatch(density -> density > 0.0)) {
+                without.add(budget.sources().get(i).name());
+            }
+        }
+        if (!without.isEmpty()) {
+            sheet.remark("No density in this band: " + String.join(", ", without) + ".");
+        }
         sheet.remark("A tone has no density: it shows as a step of the rms."
                 + (budget.offset() == 0.0
                         ? ""

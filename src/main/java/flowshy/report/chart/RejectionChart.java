@@ -30,10 +30,10 @@ final class RejectionChart {
                 "frequency_hz", "frequency", "Hz", point -> point.response().frequency());
         List<Double> rejection = columns.add(
                 "rejection_db", "rejection", "dB", point -> point.response().rejection());
-        List<List<Double>> seen = new ArrayList<>(List.of(rejection, List.of(margin, 0.0)));
+        List<List<Double>> seen = new ArrayList<>(List.of(rejection, List.of(1.1 * margin, 0.0)));
         overlays.forEach(overlay -> overlay.points().forEach(point -> seen.add(List.of(point.low(), point.high()))));
         if (rejection.stream().anyMatch(value -> value < 0.0)) {
-            seen.add(List.of(-margin));
+            seen.add(List.of(-1.1 * margin));
         }
         Bounds ends = Bounds.even(seen, 5.0);
         Panel panel = Panel.even("rejection, dB", ends.from(), ends.to(), 1);

@@ -21,7 +21,7 @@ import org.hipparchus.util.FastMath;
 final class ResponseChart {
     private static final String TITLE = "Response to motion and to flow";
     private static final int HEIGHT = 330;
-    private static final double MOST_DECADES = 6.0;
+    private static final double MOST_DECADES = 9.0;
 
     private ResponseChart() {}
 

@@ -186,7 +186,8 @@ public final class PlotSheet implements Picture {
             rows = place(marks, wordRows);
             for (Panel panel : panels) {
                 for (Panel.Curve curve : panel.curves()) {
-                    if (!curve.name().isEmpty()) {
+                    if (!curve.name().isEmpty()
+                            && curve.points().stream().anyMatch(point -> Double.isFinite(point[1]))) {
                         named.putIfAbsent(curve.name(), curve);
                     }
                 }

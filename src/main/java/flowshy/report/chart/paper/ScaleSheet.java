@@ -23,7 +23,8 @@ public final class ScaleSheet implements Picture {
     private static final int WIDTH = 460;
     private static final int MARGIN = 10;
     private static final int NOTES = 150;
-    private static final int TALL = 250;
+    private static final int TALLEST = 250;
+    private static final int LOWEST = 120;
     private static final int BELOW = 26;
     private static final Color SOLID = new Color(0x3A3A3A);
     private static final Color COVER = new Color(0x8C8C8C);
@@ -39,6 +40,8 @@ public final class ScaleSheet implements Picture {
     private final List<Block> blocks = new ArrayList<>();
     private final List<Note> notes = new ArrayList<>();
     private final List<String> remarks = new ArrayList<>();
+
+    private double inside;
 
     private record Layer(double thickness, String words) {}
 
@@ -58,6 +61,7 @@ public final class ScaleSheet implements Picture {
         this.heading = heading;
         this.height = height;
         this.least = width;
+        this.inside = 10.0 * FastMath.max(height, width);
         this.body = new Path2D.Double();
         body.moveTo(0.0, outline.get(0));
         for (int i = 0; i < outline.size(); i += 2) {
@@ -78,6 +82,17 @@ public final class ScaleSheet implements Picture {
      */
     public ScaleSheet layer(double thickness, String words) {
         layers.add(new Layer(thickness, words));
+        return this;
+    }
+
+    /**
+     * Says that what lies about the body ends at side walls.
+     *
+     * @param half distance of each from the axis [m]
+     * @return this
+     */
+    public ScaleSheet walls(double half) {
+        inside = half;
         return this;
     }
 
@@ -128,6 +143,12 @@ public final class ScaleSheet implements Picture {
         return lines;
     }
 
+    /** Of the frame: what the drawing fills at the scale that its width allows. */
+    private int tall() {
+        double scale = FastMath.min(TALLEST / height, (WIDTH - 2.0 * MARGIN - NOTES) / least);
+        return (int) FastMath.max(LOWEST, FastMath.ceil(scale * height));
+    }
+
     private int top() {
         return MARGIN + 17 * title().size() + (PlainText.of(heading.study()).isEmpty() ? 0 : 14) + 8;
     }
@@ -139,7 +160,7 @@ public final class ScaleSheet implements Picture {
 
     @Override
     public int height() {
-        return top() + TALL + BELOW + 6 + 13 * remarkLines().size() + MARGIN;
+        return top() + tall() + BELOW + 6 + 13 * remarkLines().size() + MARGIN;
     }
 
     @Override
@@ -158,14 +179,14 @@ public final class ScaleSheet implements Picture {
                 Pen.fitting(Typeface.TEXT, PlainText.of(heading.study()), WIDTH - 2.0 * MARGIN),
                 MARGIN,
                 y);
-        Rectangle2D frame = new Rectangle2D.Double(MARGIN, top(), WIDTH - 2.0 * MARGIN - NOTES, TALL);
+        Rectangle2D frame = new Rectangle2D.Double(MARGIN, top(), WIDTH - 2.0 * MARGIN - NOTES, tall());
         double scale = FastMath.min(frame.getHeight() / height, frame.getWidth() / least);
         AffineTransform place = new AffineTransform(scale, 0, 0, -scale, frame.getCenterX(), frame.getMaxY());
         drawLayers(graphics, frame, place, scale);
         drawSolids(graphics, frame, place);
         drawBar(graphics, pen, frame, scale);
         drawNotes(graphics, pen, frame, place);
-        y = top() + TALL + BELOW + 6 + 9.0;
+        y = top() + tall() + BELOW + 6 + 9.0;
         for (String line : remarkLines()) {
             pen.write(Typeface.SMALL, Typeface.GREY, line, MARGIN, y);
             y += 13;
@@ -180,13 +201,15 @@ public final class ScaleSheet implements Picture {
             Area area = new Area(placed);
             // one stroke round the body is the layer about it
             area.add(new Area(new BasicStroke(
-                            (float) (2.0 * FastMath.min(thickness, 4.0 * TALL)),
+                            (float) (2.0 * FastMath.min(thickness, 4.0 * TALLEST)),
                             BasicStroke.CAP_ROUND,
                             BasicStroke.JOIN_ROUND)
                     .createStrokedShape(placed)));
             double wall = FastMath.min(thickness, frame.getHeight());
             area.add(new Area(new Rectangle2D.Double(frame.getMinX(), frame.getMaxY() - wall, frame.getWidth(), wall)));
             area.intersect(new Area(frame));
+            area.intersect(new Area(
+                    place.createTransformedShape(new Rectangle2D.Double(-inside, 0.0, 2.0 * inside, 2.0 * height))));
             graphics.setPaint(new Color(LAYERS[FastMath.min(i, LAYERS.length - 1)]));
             graphics.fill(area);
             graphics.setPaint(Ink.BOUNDARY.colour());
