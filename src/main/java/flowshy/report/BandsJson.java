@@ -82,6 +82,7 @@ public final class BandsJson {
                 ForceReport.write(json, forces);
             }
             CaveatJson.write(json, answer.caveats());
+            answer.envelope().ifPresent(states -> EnvelopeReport.write(json, states));
             json.object("verdict", () -> page.verdict(answer));
             ChartTables.write(json, charts);
         });

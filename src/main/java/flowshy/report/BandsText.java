@@ -57,6 +57,7 @@ public final class BandsText {
         text.medium();
         text.device();
         text.bands();
+        answer.envelope().ifPresent(states -> EnvelopeReport.print(text.page, states));
         answer.error().ifPresent(budget -> ErrorReport.print(text.page, budget, text.spectral()));
         text.points();
         MeasuredReport.print(text.page, "Measured beside the model", measured);

@@ -6,6 +6,7 @@ import flowshy.stream.Source;
 import flowshy.verdict.Acceptance;
 import flowshy.verdict.Band;
 import flowshy.verdict.BandsQuestion;
+import flowshy.verdict.envelope.Envelope;
 import flowshy.verdict.error.Motion;
 import flowshy.verdict.lid.Candidate;
 import flowshy.verdict.measured.MeasuredResponse;
@@ -30,6 +31,7 @@ import java.util.Optional;
  * @param motion what is to be read
  * @param surroundings flows that are there, in the order written; empty if not stated
  * @param measurements measured responses to lay beside the model, in the order written
+ * @param envelope states that the device must bear, empty if not stated
  * @param tolerances how surely its numbers are known
  * @param document entries of the document block, in the order of the key table
  * @param takenAs every default that was used
@@ -46,6 +48,7 @@ public record Study(
         Motion motion,
         List<Source> surroundings,
         List<MeasuredResponse> measurements,
+        Optional<Envelope> envelope,
         Tolerances tolerances,
         Map<String, String> document,
         List<TakenAs> takenAs,
@@ -78,6 +81,7 @@ public record Study(
                 motion,
                 surroundings,
                 measurements,
+                envelope,
                 tolerances,
                 document,
                 takenAs,
@@ -90,7 +94,7 @@ public record Study(
      * @return about its device, with its limits, motion and surroundings
      */
     public BandsQuestion question() {
-        return new BandsQuestion(device, band, acceptance, motion, surroundings, reference());
+        return new BandsQuestion(device, band, acceptance, motion, surroundings, reference(), envelope);
     }
 
     /**

@@ -17,6 +17,7 @@ import flowshy.study.units.Quantity;
 import flowshy.verdict.Acceptance;
 import flowshy.verdict.Band;
 import flowshy.verdict.BandsQuestion;
+import flowshy.verdict.envelope.Envelope;
 import flowshy.verdict.error.Motion;
 import flowshy.verdict.lid.Candidate;
 import flowshy.verdict.measured.MeasuredResponse;
@@ -28,7 +29,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
-import java.util.function.Function;
+import java.util.function.BiFunction;
 import java.util.stream.Stream;
 
 /** From checked values to the things they describe; says where values do not go together. */
@@ -85,7 +86,7 @@ final class StudyBuilder {
                 outside.orElseThrow(),
                 cover.orElseThrow().cover(),
                 cover.orElseThrow().around());
-        Function<Tolerances, Study> known = tolerances -> new Study(
+        BiFunction<Optional<Envelope>, Tolerances, Study> known = (envelope, tolerances) -> new Study(
                 form.word("title").orElse(""),
                 new Study.Origin(file.name(), file.text(), file.sha256(), files.read(), settings),
                 device,
@@ -96,6 +97,7 @@ final class StudyBuilder {
                 motion,
                 surroundings,
                 measurements,
+                envelope,
                 tolerances,
                 document(),
                 takenAs(fitted),
@@ -107,11 +109,24 @@ final class StudyBuilder {
                 motion,
                 surroundings,
                 calibration.map(Calibration::frequency).orElseGet(band.orElseThrow()::middle));
-        Study plain = known.apply(Tolerances.of(question));
-        return form.has("tolerances") ? known.apply(tolerances(plain)) : plain;
+        Study plain = known.apply(Optional.empty(), Tolerances.of(question));
+        return form.has("tolerances") || form.has("envelope") ? known.apply(envelope(plain), tolerances(plain)) : plain;
+    }
+
+    private Optional<Envelope> envelope(Study base) {
+        return form.has("envelope")
+                ? new EnvelopeBuilder(form, problems)
+                        .build(
+                                !base.surroundings().isEmpty(),
+                                numbers -> VariedStudy.of(form, files.again(), base, StudyReader.hold(form), numbers))
+                : Optional.empty();
     }
 
     private Tolerances tolerances(Study base) {
+        if (!form.has("tolerances")) {
+            problems.throwIfAny();
+            return base.tolerances();
+        }
         Tolerances stated = new ToleranceBuilder(form, problems)
                 .build(
                         base.question(),

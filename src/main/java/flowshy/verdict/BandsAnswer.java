@@ -3,6 +3,7 @@ package flowshy.verdict;
 import flowshy.math.Caveat;
 import flowshy.response.Device;
 import flowshy.response.ResponsePoint;
+import flowshy.verdict.envelope.EnvelopeAnswer;
 import flowshy.verdict.error.ErrorBudget;
 import java.util.List;
 import java.util.Optional;
@@ -20,7 +21,8 @@ import java.util.Optional;
  * @param points the response at the frequencies asked, same order
  * @param error what the surroundings do, empty if none are given
  * @param caveats what must stand beside the numbers
- * @param verdict limit by limit
+ * @param envelope the verdict over the states that the device must bear, empty if none are stated
+ * @param verdict limit by limit, with an envelope each at its worst
  */
 public record BandsAnswer(
         Device device,
@@ -33,6 +35,7 @@ public record BandsAnswer(
         List<ResponsePoint> points,
         Optional<ErrorBudget> error,
         List<Caveat> caveats,
+        Optional<EnvelopeAnswer> envelope,
         Verdict verdict) {
     /**
      * An extreme of the rejection.

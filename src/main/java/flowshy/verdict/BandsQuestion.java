@@ -6,6 +6,8 @@ import flowshy.response.Device;
 import flowshy.response.Response;
 import flowshy.response.ResponsePoint;
 import flowshy.stream.Source;
+import flowshy.verdict.envelope.Envelope;
+import flowshy.verdict.envelope.EnvelopeAnswer;
 import flowshy.verdict.error.ErrorBudget;
 import flowshy.verdict.error.Motion;
 import flowshy.verdict.error.SurroundingsQuestion;
@@ -13,6 +15,7 @@ import flowshy.verdict.figure.Evaluated;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.UnaryOperator;
 
 /**
  * The main question about a device.
@@ -23,12 +26,34 @@ import java.util.Optional;
  * @param motion what is to be read
  * @param sources flows that are there; empty: the verdict holds at equal accelerations only
  * @param reference frequency at which what depends on it is compared and limited [Hz]
+ * @param envelope states that the device must bear, which the verdict of an answer counts; empty if none are stated
  */
 public record BandsQuestion(
-        Device device, Band band, Acceptance acceptance, Motion motion, List<Source> sources, double reference) {
+        Device device,
+        Band band,
+        Acceptance acceptance,
+        Motion motion,
+        List<Source> sources,
+        double reference,
+        Optional<Envelope> envelope) {
     /** Copies the list. */
     public BandsQuestion {
         sources = List.copyOf(sources);
+    }
+
+    /**
+     * The question at one state.
+     *
+     * @param device hair, suspension, medium, cover
+     * @param band band of use
+     * @param acceptance limits asked
+     * @param motion what is to be read
+     * @param sources flows that are there
+     * @param reference frequency of comparison [Hz]
+     */
+    public BandsQuestion(
+            Device device, Band band, Acceptance acceptance, Motion motion, List<Source> sources, double reference) {
+        this(device, band, acceptance, motion, sources, reference, Optional.empty());
     }
 
     /**
@@ -59,7 +84,7 @@ public record BandsQuestion(
      * The same question about another device.
      *
      * @param other the device
-     * @return band, limits, motion and sources kept
+     * @return band, limits, motion and sources kept, at this one state
      */
     public BandsQuestion about(Device other) {
         return new BandsQuestion(other, band, acceptance, motion, sources, reference);
@@ -92,7 +117,9 @@ public record BandsQuestion(
         error.ifPresent(budget -> caveats.addAll(budget.caveats()));
         List<ReadingBand> bands = reading.bands();
         Evaluated known = new Evaluated(this, response, reading, error);
-        Verdict verdict = new Judgement(known, caveats).of(bands, reading.least());
+        Verdict own = new Judgement(known, caveats).of(bands, reading.least());
+        Optional<EnvelopeAnswer> states = envelope.map(all -> all.answer(UnaryOperator.identity()));
+        Verdict verdict = states.map(found -> Envelope.together(own, found)).orElse(own);
         return new BandsAnswer(
                 device,
                 band,
@@ -104,6 +131,7 @@ public record BandsQuestion(
                 points,
                 error,
                 caveats,
+                states,
                 verdict);
     }
 

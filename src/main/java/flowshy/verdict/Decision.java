@@ -25,4 +25,28 @@ public enum Decision {
     public String word() {
         return word;
     }
+
+    /**
+     * How bad it is.
+     *
+     * @return 0 not asked, 1 meets, 2 undecided, 3 fails
+     */
+    public int severity() {
+        return switch (this) {
+            case NOT_ASKED -> 0;
+            case MEETS -> 1;
+            case UNDECIDED -> 2;
+            case FAILS -> 3;
+        };
+    }
+
+    /**
+     * The worse of two.
+     *
+     * @param other another
+     * @return this or the other
+     */
+    public Decision worse(Decision other) {
+        return other.severity() > severity() ? other : this;
+    }
 }
