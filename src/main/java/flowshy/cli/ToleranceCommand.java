@@ -2,6 +2,7 @@ package flowshy.cli;
 
 import flowshy.report.JsonPage;
 import flowshy.report.ToleranceReport;
+import flowshy.report.chart.ToleranceCharts;
 import flowshy.study.units.Dimension;
 import flowshy.study.units.Quantity;
 import flowshy.study.units.QuantityException;
@@ -40,6 +41,9 @@ final class ToleranceCommand implements Callable<Integer> {
 
     @Mixin
     private OutputOptions output;
+
+    @Mixin
+    private ChartOptions charts;
 
     @Mixin
     private RunOptions run;
@@ -88,12 +92,14 @@ final class ToleranceCommand implements Callable<Integer> {
         int code = studies.each(spec.commandLine(), output.json(), study -> {
             ToleranceAnswer answer = answer(new ToleranceQuestion(study.tolerances(), figures), effort);
             texts.add(ToleranceReport.text(study, answer));
+            charts.add(charts.asked() ? ToleranceCharts.of(study, answer) : List.of());
             objects.add(() -> ToleranceReport.write(json, study, answer));
             if (output.csv()) {
                 tables.add(ToleranceReport.csv(answer));
             }
             return answer.decision() == Decision.FAILS || answer.decision() == Decision.UNDECIDED ? Failures.LIMIT : 0;
         });
+        charts.write();
         studies.send(spec.commandLine(), output, json, texts, objects, tables);
         return code;
     }

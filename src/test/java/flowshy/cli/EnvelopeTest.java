@@ -72,38 +72,6 @@ class EnvelopeTest {
                 .isZero();
     }
 
-    /** A range holds values inside. Hair and fluid become equally dense inside the range, where a sealed device reads nothing. */
-    @Test
-    void theWorstMayLieInsideARange() throws IOException {
-        String study = Files.writeString(Files.createTempFile(folder, "inside", ".yaml"), """
-                        hair: {length: 700 um, diameter: 140 um, density: 0.9 g/cm3}
-                        suspension: {stiffness: 4 nN.m/rad, damping: 1e-12 N.m.s/rad}
-                        medium: {density: 1.2 g/cm3, viscosity: 10 mPa.s}
-                        band: {from: 20 Hz, to: 200 Hz}
-                        calibration: {frequency: 60 Hz}
-                        accept: {sensitivity: 1 nrad/(m/s2)}
-                        finite-length: off
-                        envelope: {medium.density: 0.5 g/cm3..1.3 g/cm3}
-                        """)
-                .toString();
-        Map<?, ?> worst = (Map<?, ?>) ((List<?>) ((Map<?, ?>) json(study).get("envelope")).get("worst")).get(0);
-        double ends = Math.min(
-                found(json(
-                        study, "--set", "envelope={medium.density: [0.5 g/cm3]}", "--set", "medium.density=0.5 g/cm3")),
-                found(json(
-                        study,
-                        "--set",
-                        "envelope={medium.density: [1.3 g/cm3]}",
-                        "--set",
-                        "medium.density=1.3 g/cm3")));
-        Map<?, ?> limit = (Map<?, ?>) worst.get("limit");
-        if (Boolean.TRUE.equals(worst.get("corner"))) {
-            assertThat(((Number) limit.get("found")).doubleValue()).isCloseTo(ends, within(1e-12));
-        } else {
-            assertThat(((Number) limit.get("found")).doubleValue()).isLessThan(ends);
-        }
-    }
-
     @Test
     void aStateThatCannotBeWorkedOutLeavesItUndecided() throws IOException {
         String study = Files.writeString(
@@ -129,7 +97,7 @@ class EnvelopeTest {
                 "medium.name: [water] | not a number",
                 "medium.temperature: {from: 3 degC} | a list of values is wanted here, or a range",
                 "medium.temperature: 3 kg..4 kg | 3 kg is a mass; a temperature is wanted here",
-                "surroundings.fan.mean-speed: [1 m/s] | unknown key",
+                "surroundings.fan.mean-speed: [1 m/s] | the study does not state it",
             })
     void saysWhatIsWrong(String entry, String told) throws IOException {
         Run run = Run.of("bands", study("envelope: {" + entry + "}\n"));

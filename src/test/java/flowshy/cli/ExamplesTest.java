@@ -72,6 +72,30 @@ class ExamplesTest {
         assertThat(printed.lines()).allSatisfy(line -> assertThat(line.length()).isLessThanOrEqualTo(80));
     }
 
+    static List<Path> toleranceExamples() {
+        return examples().stream()
+                .filter(example -> Files.exists(example.resolve("expected-tolerance.txt")))
+                .toList();
+    }
+
+    @Test
+    void thereAreToleranceExamples() {
+        assertThat(toleranceExamples()).isNotEmpty();
+    }
+
+    @ParameterizedTest
+    @MethodSource("toleranceExamples")
+    void spreadsAsExpected(Path example) throws IOException {
+        Run run = Run.of("tolerance", study(example), "--samples", "2048");
+        String printed = run.out() + "exit code " + run.code() + "\n";
+        Path expected = example.resolve("expected-tolerance.txt");
+        if (REWRITE) {
+            Files.writeString(expected, printed);
+        }
+        assertThat(printed).isEqualTo(Files.readString(expected));
+        assertThat(printed.lines()).allSatisfy(line -> assertThat(line.length()).isLessThanOrEqualTo(80));
+    }
+
     static List<Path> compareExamples() {
         return examples().stream()
                 .filter(example -> Files.exists(example.resolve("expected-compare.txt")))

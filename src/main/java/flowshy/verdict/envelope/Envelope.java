@@ -183,6 +183,8 @@ public record Envelope(DesignSpace space, List<Side> sides) {
                     .orElse(limit));
         }
         return new Verdict(
-                nominal.decision().worse(found.decision()), limits, nominal.sentence() + " " + found.sentence());
+                nominal.decision().worse(found.decision()),
+                limits,
+                found.sentence() + " At the study's own state: " + nominal.sentence());
     }
 }
