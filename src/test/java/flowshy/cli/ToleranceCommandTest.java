@@ -203,7 +203,7 @@ class ToleranceCommandTest {
                 "--threads 0 | --threads takes a whole number from 1",
             })
     void optionsAreChecked(String words, String told) throws IOException {
-        String[] two = words.split(" ");
+        String[] two = words.split(" ", -1);
         Run run = Run.of("tolerance", study(SPREAD), two[0], two[1]);
         assertThat(run.code()).isEqualTo(2);
         assertThat(run.err()).contains(told);
