@@ -4,6 +4,8 @@ import flowshy.report.FitReport;
 import flowshy.report.JsonPage;
 import flowshy.report.chart.Chart;
 import flowshy.report.chart.FitCharts;
+import flowshy.report.html.section.ReportPage;
+import flowshy.report.html.section.StudyReport;
 import flowshy.study.FittedStudy;
 import flowshy.study.FreeKeys;
 import flowshy.study.MeasuredFiles;
@@ -94,6 +96,9 @@ final class FitCommand implements Callable<Integer> {
     private Path target;
 
     @Mixin
+    private ReportFiles pages;
+
+    @Mixin
     private ChartOptions charts;
 
     @Mixin
@@ -104,6 +109,9 @@ final class FitCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
+        if (pages.asked()) {
+            pages.check(spec.commandLine(), List.of(file));
+        }
         StudyReader reader = StudyReader.open(file, settings);
         Study study = reader.study();
         FreeKeys keys = FreeKeys.of(reader, free);
@@ -118,6 +126,9 @@ final class FitCommand implements Callable<Integer> {
         List<Chart> drawn = charts.asked() ? FitCharts.of(study, bands, answer) : List.of();
         charts.add(drawn);
         charts.write();
+        if (pages.asked()) {
+            pages.write(study.origin().file(), ReportPage.of(StudyReport.fitted(study, answer, bands)));
+        }
         JsonPage json = new JsonPage();
         FitReport.write(json, study, files.read(), answer, verdict, written, drawn);
         output.send(

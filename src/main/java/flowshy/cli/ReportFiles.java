@@ -32,6 +32,15 @@ final class ReportFiles {
     private Map<String, String> names = Map.of();
 
     /**
+     * Whether a page is asked for.
+     *
+     * @return true if so
+     */
+    boolean asked() {
+        return page != null || sheet != null;
+    }
+
+    /**
      * Whether the words go together, before anything is computed.
      *
      * @param line the command

@@ -26,7 +26,12 @@ public final class FitReport {
 
     private FitReport() {}
 
-    private static List<Column<Estimate>> estimates() {
+    /**
+     * What is told of each fitted number.
+     *
+     * @return columns in the order printed
+     */
+    public static List<Column<Estimate>> estimates() {
         return List.of(
                 new Column<>("start", "was", "", 5, e -> Cell.of(e.freed().start(), "")),
                 new Column<>("value", "fitted", "", 5, e -> Cell.of(e.value(), "")),

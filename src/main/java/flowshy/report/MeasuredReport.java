@@ -15,7 +15,7 @@ import java.util.OptionalDouble;
 import org.hipparchus.util.FastMath;
 
 /** Measured responses beside the model as a part of an answer: text by third-octaves, JSON and CSV point by point. */
-final class MeasuredReport {
+public final class MeasuredReport {
     private static final String NO_PHASE = "no phase was measured";
     private static final String NO_UNCERTAINTY = "no uncertainty is stated";
 
@@ -37,8 +37,13 @@ final class MeasuredReport {
                                 degrees(band.allowedPhase()), band.phase().isEmpty() ? NO_PHASE : NO_UNCERTAINTY)));
     }
 
-    /** The columns that fit a page and have something to say. */
-    private static List<Column<BandDeviation>> printed(Compared response) {
+    /**
+     * The columns that fit a page and have something to say.
+     *
+     * @param response as compared
+     * @return columns of its third-octaves, in the order printed
+     */
+    public static List<Column<BandDeviation>> printed(Compared response) {
         boolean phased = response.rmsPhase().isPresent();
         return bands().stream()
                 .filter(column -> !column.name().equals("points"))

@@ -18,10 +18,13 @@ import org.junit.jupiter.params.provider.CsvSource;
 class FitCommandTest {
     private static final String EXAMPLE = "examples/measured-pickup/";
     private static final String STUDY = EXAMPLE + "study.yaml";
-    private static final String SMALL = "hair: {length: 720 um, diameter: 92 um, density: 1.18 g/cm3}\n"
-            + "suspension: {resonance: {frequency: 430 Hz, in: vacuum}, quality: {value: 6, in: vacuum}}\n"
-            + "medium: {name: air, temperature: 21 degC, pressure: 99.2 kPa, humidity: 35 %}\n"
-            + "band: {from: 25 Hz, to: 630 Hz}\nfinite-length: off\n";
+    private static final String SMALL = """
+            hair: {length: 720 um, diameter: 92 um, density: 1.18 g/cm3}
+            suspension: {resonance: {frequency: 430 Hz, in: vacuum}, quality: {value: 6, in: vacuum}}
+            medium: {name: air, temperature: 21 degC, pressure: 99.2 kPa, humidity: 35 %}
+            band: {from: 25 Hz, to: 630 Hz}
+            finite-length: off
+            """;
 
     @TempDir
     private Path folder;
@@ -94,11 +97,19 @@ class FitCommandTest {
 
     @Test
     void writesTheFittedStudyAndLeavesTheRestAsItStood() throws IOException {
-        String text =
-                "# my device\ntitle: \"\u2696 serial 4\" # a scale\nhair: {length: 720 um, diameter: 92 um, density: 1.18 g/cm3}\n"
-                        + "suspension: {resonance: {frequency: 430 Hz, in: vacuum}, quality: {value: 6, in: vacuum}, attitude: upright}  # batch 3\n"
-                        + "medium:\n  name: air\n  temperature: 21 degC   # room\n  pressure: 99.2 kPa\n  humidity: 35 %\n"
-                        + "band: {from: 25 Hz, to: 630 Hz}\nfinite-length: off\n";
+        String text = """
+                # my device
+                title: "\u2696 serial 4" # a scale
+                hair: {length: 720 um, diameter: 92 um, density: 1.18 g/cm3}
+                suspension: {resonance: {frequency: 430 Hz, in: vacuum}, quality: {value: 6, in: vacuum}, attitude: upright}  # batch 3
+                medium:
+                  name: air
+                  temperature: 21 degC   # room
+                  pressure: 99.2 kPa
+                  humidity: 35 %
+                band: {from: 25 Hz, to: 630 Hz}
+                finite-length: off
+                """;
         String study = file("s.yaml", text);
         Path target = folder.resolve("fitted.yaml");
         Run run =
@@ -240,5 +251,27 @@ class FitCommandTest {
         assertThat(table).hasSize(1 + 2 * (31 + 28));
         assertThat(charts.resolve("fit-residuals.svg")).isNotEmptyFile();
         assertThat(charts.resolve("rejection.png")).isNotEmptyFile();
+    }
+
+    @Test
+    void thePageTellsOfTheFittedDevice() throws Exception {
+        Path page = folder.resolve("fit.html");
+        Run run = Run.of("fit", STUDY, "--out", page.toString());
+        assertThat(run.err()).isEmpty();
+        assertThat(run.code()).isZero();
+        String html = Files.readString(page);
+        assertThat(html)
+                .contains(
+                        "Fitted device",
+                        "Measured beside the model",
+                        "suspension.stiffness [N.m/rad]",
+                        "What the fit leaves")
+                .contains("The figures of this page are those of the fitted device");
+        Run plain =
+                Run.of("report", STUDY, "--out", folder.resolve("plain.html").toString());
+        assertThat(plain.err()).isEmpty();
+        assertThat(Files.readString(folder.resolve("plain.html")))
+                .contains("Measured beside the model", "Nothing is fitted but one common factor")
+                .doesNotContain("Fitted device");
     }
 }

@@ -15,6 +15,8 @@ public final class ReportPage {
             new MediumSection(),
             new BandsSection(),
             new ResponseSection(),
+            new FitSection(),
+            new MeasuredSection(),
             new WhySection(),
             new ErrorSection(),
             new LidSection(),

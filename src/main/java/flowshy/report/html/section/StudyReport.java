@@ -5,6 +5,8 @@ import flowshy.math.Caveat.Subject;
 import flowshy.math.Caveat.Weight;
 import flowshy.report.chart.BandsCharts;
 import flowshy.report.chart.Chart;
+import flowshy.report.chart.FitCharts;
+import flowshy.report.chart.MeasuredOverlays;
 import flowshy.report.html.Typography;
 import flowshy.stream.Source;
 import flowshy.stream.cover.Covers;
@@ -13,9 +15,12 @@ import flowshy.verdict.BandsAnswer;
 import flowshy.verdict.Decision;
 import flowshy.verdict.Levers;
 import flowshy.verdict.Limit;
+import flowshy.verdict.fit.FitAnswer;
 import flowshy.verdict.lid.Candidate;
 import flowshy.verdict.lid.LidAnswer;
 import flowshy.verdict.lid.LidQuestion;
+import flowshy.verdict.measured.BesideModel;
+import flowshy.verdict.measured.Compared;
 import java.util.ArrayList;
 import java.util.EnumSet;
 import java.util.List;
@@ -29,10 +34,18 @@ import java.util.Set;
  * @param answer bands, points, error and verdict of its device
  * @param lid covers side by side, where the study names candidates or a cover
  * @param why what would move edges of bands and failed limits, empty where there is none
+ * @param measured what was measured, beside the model of the device told of; empty if nothing was
+ * @param fit how that device was fitted, empty if it is the study's own
  * @param charts a picture of every result, in the order of the report
  */
 public record StudyReport(
-        Study study, BandsAnswer answer, Optional<LidAnswer> lid, List<Levers> why, List<Chart> charts) {
+        Study study,
+        BandsAnswer answer,
+        Optional<LidAnswer> lid,
+        List<Levers> why,
+        List<Compared> measured,
+        Optional<FitAnswer> fit,
+        List<Chart> charts) {
     /** A weakness here weakens the rejection, and so the bands. */
     private static final Set<Subject> ALWAYS =
             EnumSet.of(Subject.MEDIUM, Subject.HAIR, Subject.REJECTION, Subject.COVER);
@@ -40,6 +53,7 @@ public record StudyReport(
     /** Copies the lists. */
     public StudyReport {
         why = List.copyOf(why);
+        measured = List.copyOf(measured);
         charts = List.copyOf(charts);
     }
 
@@ -51,7 +65,34 @@ public record StudyReport(
      */
     public static StudyReport of(Study study) {
         BandsAnswer answer = study.question().answer();
-        return new StudyReport(study, answer, lid(study), Levers.of(answer), BandsCharts.of(study, answer));
+        List<Compared> measured = BesideModel.of(study.device(), study.measurements());
+        return new StudyReport(
+                study,
+                answer,
+                lid(study),
+                Levers.of(answer),
+                measured,
+                Optional.empty(),
+                BandsCharts.of(study, answer, MeasuredOverlays.of(measured)));
+    }
+
+    /**
+     * Tells of the device that was fitted to measurements, in place of the study's own.
+     *
+     * @param study what is asked
+     * @param fit the fitted device
+     * @param answer its bands
+     * @return what the report tells
+     */
+    public static StudyReport fitted(Study study, FitAnswer fit, BandsAnswer answer) {
+        return new StudyReport(
+                study,
+                answer,
+                Optional.empty(),
+                Levers.of(answer),
+                fit.after(),
+                Optional.of(fit),
+                FitCharts.of(study, answer, fit));
     }
 
     private static Optional<LidAnswer> lid(Study study) {
@@ -90,6 +131,7 @@ public record StudyReport(
     public Typography typography() {
         List<String> words = new ArrayList<>();
         study.surroundings().stream().map(Source::name).forEach(words::add);
+        measured.stream().map(one -> one.measured().name()).forEach(words::add);
         study.origin().filesRead().stream().map(Study.FileRead::file).forEach(words::add);
         return new Typography(words);
     }
