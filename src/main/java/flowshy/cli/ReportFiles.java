@@ -126,14 +126,18 @@ final class ReportFiles {
     private static void writeAll(Map<Path, byte[]> bytes) {
         Path first = bytes.keySet().iterator().next();
         for (Path target : bytes.keySet()) {
-            if (!Files.isDirectory(target.toAbsolutePath().getParent())) {
+            if (!Files.isDirectory(folder(target))) {
                 throw new UserException(Failures.notWritten(target, new NoSuchFileException(target.toString())));
             }
         }
         try {
-            WholeFile.writeAll(first.toAbsolutePath().getParent(), bytes);
+            WholeFile.writeAll(folder(first), bytes);
         } catch (IOException e) {
             throw new UserException(Failures.notWritten(first, e));
         }
+    }
+
+    private static Path folder(Path file) {
+        return file.toAbsolutePath().resolveSibling("");
     }
 }

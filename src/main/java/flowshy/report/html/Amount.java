@@ -120,7 +120,7 @@ public record Amount(double value, String unit, int digits) {
                     .sorted()
                     .toList();
             // one kind of frequency on a page: in hertz
-            if (sizes.isEmpty() || unit.equals("Hz") || !SCALED.contains(unit)) {
+            if (sizes.isEmpty() || unit.equals("Hz") || !SCALED.contains(Typography.ascii(unit))) {
                 return NONE;
             }
             int exponent = (int) FastMath.floor(FastMath.log10(sizes.get(sizes.size() / 2)));

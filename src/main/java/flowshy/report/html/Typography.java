@@ -122,6 +122,16 @@ public final class Typography {
         return text;
     }
 
+    /**
+     * A unit as the columns write it.
+     *
+     * @param unit in either writing
+     * @return e.g. {@code m/s2}
+     */
+    static String ascii(String unit) {
+        return unit.replace('·', '.').replace("²", "2").replace("³", "3").replace("√", "rt");
+    }
+
     private static Map<Pattern, String> units() {
         Map<String, String> units = new LinkedHashMap<>();
         units.put("m/s2/(m/s)", "(m/s²)/(m/s)");

@@ -52,6 +52,7 @@ class AmountTest {
     void scalesAColumnByItsMiddle() {
         Scale scale = Scale.of("rad/(m/s2)", List.of(1.7e-4, 2.0e-4, 3e-9));
         assertThat(scale.prefix()).isEqualTo("µ");
+        assertThat(Scale.of("rad/(m/s²)", List.of(1.7e-4))).isEqualTo(scale);
         assertThat(scale.text(1.7364e-4, 4)).isEqualTo("173.6");
         assertThat(scale.text(3e-9, 2)).isEqualTo("0.0030");
     }
