@@ -175,7 +175,7 @@ class ReportTest {
         Map<String, Object> json = made(study).json();
         List<Map<String, Object>> points = Json.objects(json.get("points"));
         List<Element> rows = elements(
-                elements(elements(section(page, "response"), "table").get(0), "tbody")
+                elements(table(section(page, "response"), "Response at third-octave frequencies"), "tbody")
                         .get(0),
                 "tr");
         assertThat(rows).hasSameSizeAs(points).isNotEmpty();
@@ -199,6 +199,13 @@ class ReportTest {
             assertThat(elements(page, "section"))
                     .noneMatch(section -> section.getAttribute("id").equals("error"));
         }
+    }
+
+    private static Element table(Element inside, String caption) {
+        return elements(inside, "table").stream()
+                .filter(table -> words(elements(table, "caption").get(0)).equals(caption))
+                .findFirst()
+                .orElseThrow(() -> new AssertionError("no table " + caption));
     }
 
     private static List<Double> values(Element inside) {

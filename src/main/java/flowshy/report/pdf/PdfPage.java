@@ -2,6 +2,7 @@ package flowshy.report.pdf;
 
 import com.openhtmltopdf.bidi.support.ICUBidiReorderer;
 import com.openhtmltopdf.bidi.support.ICUBidiSplitter;
+import com.openhtmltopdf.outputdevice.helper.BaseRendererBuilder.FSFontUseCase;
 import com.openhtmltopdf.outputdevice.helper.BaseRendererBuilder.FontStyle;
 import com.openhtmltopdf.outputdevice.helper.BaseRendererBuilder.TextDirection;
 import com.openhtmltopdf.outputdevice.helper.ExternalResourceControlPriority;
@@ -9,18 +10,18 @@ import com.openhtmltopdf.pdfboxout.PdfBoxRenderer;
 import com.openhtmltopdf.pdfboxout.PdfRendererBuilder;
 import com.openhtmltopdf.svgsupport.BatikSVGDrawer;
 import com.openhtmltopdf.util.XRLog;
+import flowshy.report.OwnTypeface;
 import flowshy.report.Version;
 import flowshy.report.html.Page;
 import java.awt.Font;
-import java.awt.FontFormatException;
 import java.awt.color.ColorSpace;
 import java.awt.color.ICC_Profile;
 import java.io.ByteArrayOutputStream;
 import java.io.IOException;
-import java.io.InputStream;
 import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
 import java.util.Calendar;
+import java.util.EnumSet;
 import java.util.GregorianCalendar;
 import java.util.Locale;
 import java.util.TimeZone;
@@ -33,8 +34,6 @@ import org.apache.pdfbox.pdmodel.common.PDMetadata;
 
 /** A page of ours as PDF/A on A4: fixed dates and a fixed identity, so that the same page gives the same bytes. */
 public final class PdfPage {
-    private static final String TYPEFACES = "/net/sf/jasperreports/fonts/dejavu/";
-
     /** Says on standard error which typefaces the machine has; ours are in the file. */
     private static final Logger TALKATIVE = Logger.getLogger("org.apache");
 
@@ -90,7 +89,7 @@ public final class PdfPage {
 
     /** Characters that the typeface has not got, such as Chinese ones, stand as their numbers: none is lost. */
     private static String numbered(String html) {
-        Font font = ours();
+        Font font = OwnTypeface.plain(1.0f);
         StringBuilder shown = new StringBuilder(html.length());
         html.codePoints().forEach(c -> {
             if (c < ' ' || font.canDisplay(c) || !Character.isDefined(c) || Character.getType(c) == Character.FORMAT) {
@@ -102,20 +101,14 @@ public final class PdfPage {
         return shown.toString();
     }
 
-    private static Font ours() {
-        try (InputStream file = open("DejaVuSans.ttf")) {
-            return Font.createFont(Font.TRUETYPE_FONT, file);
-        } catch (IOException | FontFormatException e) { // it lies in the program itself
-            throw new IllegalStateException(e);
-        }
-    }
-
     private static void typeface(PdfRendererBuilder builder, String file, String family, int weight, FontStyle style) {
-        builder.useFont(() -> open(file), family, weight, style, true);
-    }
-
-    private static InputStream open(String file) {
-        return PdfPage.class.getResourceAsStream(TYPEFACES + file);
+        builder.useFont(
+                () -> OwnTypeface.open(file),
+                family,
+                weight,
+                style,
+                true,
+                EnumSet.of(FSFontUseCase.DOCUMENT, FSFontUseCase.SVG));
     }
 
     /** The page maker writes the hour of its work twice; here it is the beginning of the epoch, the same in both places. */

@@ -1,5 +1,6 @@
 package flowshy.report.chart.paper;
 
+import flowshy.report.OwnTypeface;
 import java.awt.Color;
 import java.awt.Font;
 
@@ -8,9 +9,9 @@ final class Typeface {
     /** What a browser is asked for: the widths of these are alike. */
     static final String FAMILIES = "DejaVu Sans, Verdana, Geneva, sans-serif";
 
-    static final Font TITLE = new Font(Font.SANS_SERIF, Font.BOLD, 13);
-    static final Font TEXT = new Font(Font.SANS_SERIF, Font.PLAIN, 11);
-    static final Font SMALL = new Font(Font.SANS_SERIF, Font.PLAIN, 10);
+    static final Font TITLE = OwnTypeface.bold(13.0f);
+    static final Font TEXT = OwnTypeface.plain(11.0f);
+    static final Font SMALL = OwnTypeface.plain(10.0f);
 
     /** Text: 15 : 1 on white. */
     static final Color DARK = new Color(0x222222);
