@@ -57,6 +57,19 @@ record Bounds(double from, double to) {
         return new Bounds(from / aside, to * aside);
     }
 
+    /** The same, wide enough for what was measured beyond the band. */
+    static Bounds about(double from, double to, List<Overlay> overlays) {
+        double low = from;
+        double high = to;
+        for (Overlay overlay : overlays) {
+            for (Overlay.Point point : overlay.points()) {
+                low = FastMath.min(low, point.frequency());
+                high = FastMath.max(high, point.frequency());
+            }
+        }
+        return about(low, high);
+    }
+
     private static double round(double value, boolean up) {
         double decade = FastMath.pow(10.0, FastMath.floor(FastMath.log10(value)));
         double[] steps = up ? new double[] {1.0, 2.0, 5.0, 10.0} : new double[] {5.0, 2.0, 1.0};

@@ -56,11 +56,11 @@ final class RejectionChart {
                 "Rejection against frequency",
                 description(answer),
                 columns.table(),
-                sheet(study, answer).add(panel));
+                sheet(study, answer, overlays).add(panel));
     }
 
-    private static PlotSheet sheet(String study, BandsAnswer answer) {
-        Bounds axis = Bounds.about(answer.band().from(), answer.band().to());
+    private static PlotSheet sheet(String study, BandsAnswer answer, List<Overlay> overlays) {
+        Bounds axis = Bounds.about(answer.band().from(), answer.band().to(), overlays);
         PlotSheet sheet = PlotSheet.decades(
                 new Heading("Rejection against frequency", study),
                 "frequency, Hz; band of use " + TickText.hertz(answer.band().from(), 4) + " to "

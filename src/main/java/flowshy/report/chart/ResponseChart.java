@@ -82,11 +82,11 @@ final class ResponseChart {
                 TITLE,
                 description(answer),
                 columns.table(),
-                sheet(study, answer).add(above).add(below)));
+                sheet(study, answer, overlays).add(above).add(below)));
     }
 
-    private static PlotSheet sheet(String study, BandsAnswer answer) {
-        Bounds axis = Bounds.about(answer.band().from(), answer.band().to());
+    private static PlotSheet sheet(String study, BandsAnswer answer, List<Overlay> overlays) {
+        Bounds axis = Bounds.about(answer.band().from(), answer.band().to(), overlays);
         PlotSheet sheet = PlotSheet.decades(new Heading(TITLE, study), "frequency, Hz", axis.from(), axis.to(), HEIGHT);
         answer.facts().medium().ifPresent(swing -> {
             String words = words(swing);
