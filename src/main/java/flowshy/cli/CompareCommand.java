@@ -3,12 +3,14 @@ package flowshy.cli;
 import flowshy.report.CompareJson;
 import flowshy.report.CompareText;
 import flowshy.report.JsonPage;
+import flowshy.report.chart.Chart;
+import flowshy.report.chart.CompareCharts;
 import flowshy.response.Hold;
 import flowshy.study.Family;
 import flowshy.study.Variant;
 import flowshy.verdict.Decision;
 import flowshy.verdict.compare.CompareQuestion;
-import flowshy.verdict.compare.Compared;
+import flowshy.verdict.compare.ComparedDevice;
 import flowshy.verdict.compare.Contender;
 import flowshy.verdict.figure.Figure;
 import java.util.List;
@@ -65,6 +67,9 @@ final class CompareCommand implements Callable<Integer> {
     @Mixin
     private OutputOptions output;
 
+    @Mixin
+    private ChartOptions charts;
+
     @Spec
     private CommandSpec spec;
 
@@ -83,14 +88,18 @@ final class CompareCommand implements Callable<Integer> {
                 .map(this::contender)
                 .toList();
         CompareQuestion question = new CompareQuestion(contenders, Optional.ofNullable(equal));
-        List<Compared> devices = question.answer();
+        List<ComparedDevice> devices = question.answer();
+        List<Chart> drawn =
+                charts.asked() ? CompareCharts.of(read.get().get(0).study().title(), devices) : List.of();
+        charts.add(drawn);
+        charts.write();
         JsonPage json = new JsonPage();
         studies.send(
                 spec.commandLine(),
                 output,
                 json,
                 CompareText.of(read.get(), question, devices),
-                () -> CompareJson.write(json, read.get(), question, devices),
+                () -> CompareJson.write(json, read.get(), question, devices, drawn),
                 CompareJson.csv(devices));
         return devices.stream().anyMatch(CompareCommand::missed) ? Failures.LIMIT : 0;
     }
@@ -99,7 +108,7 @@ final class CompareCommand implements Callable<Integer> {
         return by == null ? variant.contender() : variant.contender("--by", by);
     }
 
-    private static boolean missed(Compared device) {
+    private static boolean missed(ComparedDevice device) {
         return device.answer()
                 .map(answer -> answer.verdict().decision())
                 .filter(decision -> decision == Decision.FAILS || decision == Decision.UNDECIDED)

@@ -1,11 +1,12 @@
 package flowshy.report;
 
 import flowshy.math.Figures;
+import flowshy.report.chart.Chart;
 import flowshy.study.Family;
 import flowshy.study.Study;
 import flowshy.study.Variant;
 import flowshy.verdict.compare.CompareQuestion;
-import flowshy.verdict.compare.Compared;
+import flowshy.verdict.compare.ComparedDevice;
 import flowshy.verdict.compare.Scaled;
 import flowshy.verdict.figure.Figure;
 import flowshy.verdict.figure.Found;
@@ -24,8 +25,14 @@ public final class CompareJson {
      * @param families the studies with their variants
      * @param question what was asked
      * @param devices what was found, one a study or variant, same order
+     * @param charts drawn of it, their numbers are left out if there are none
      */
-    public static void write(JsonPage json, List<Family> families, CompareQuestion question, List<Compared> devices) {
+    public static void write(
+            JsonPage json,
+            List<Family> families,
+            CompareQuestion question,
+            List<ComparedDevice> devices,
+            List<Chart> charts) {
         List<Variant> variants =
                 families.stream().flatMap(family -> family.all().stream()).toList();
         json.object(() -> {
@@ -38,10 +45,11 @@ public final class CompareJson {
             });
             question.equal().ifPresent(figure -> json.text("equal", figure.word()));
             json.array("devices", numbers(devices), index -> device(json, variants.get(index), devices.get(index)));
+            ChartTables.write(json, charts);
         });
     }
 
-    private static List<Integer> numbers(List<Compared> devices) {
+    private static List<Integer> numbers(List<ComparedDevice> devices) {
         List<Integer> numbers = new ArrayList<>();
         for (int i = 0; i < devices.size(); i++) {
             numbers.add(i);
@@ -49,7 +57,7 @@ public final class CompareJson {
         return numbers;
     }
 
-    private static void device(JsonPage json, Variant variant, Compared device) {
+    private static void device(JsonPage json, Variant variant, ComparedDevice device) {
         json.text("name", variant.name());
         json.texts("stated", variant.changes());
         json.text("hold", variant.hold().word());
@@ -121,13 +129,13 @@ public final class CompareJson {
      * @param devices what was found
      * @return text
      */
-    public static String csv(List<Compared> devices) {
+    public static String csv(List<ComparedDevice> devices) {
         List<String> head = new ArrayList<>(List.of("device", "stated", "changed", "ratio", "decision", "no_solution"));
         for (Figure figure : Figure.values()) {
             head.add(figure.column());
         }
         List<List<String>> lines = new ArrayList<>();
-        for (Compared device : devices) {
+        for (ComparedDevice device : devices) {
             List<String> line = new ArrayList<>(List.of(
                     device.contender().name(),
                     String.join("; ", device.contender().changes()),

@@ -4,6 +4,7 @@ import static flowshy.math.Figures.say;
 
 import flowshy.hair.Profile;
 import flowshy.math.Caveat;
+import flowshy.report.CompareTable.Row;
 import flowshy.response.Device;
 import flowshy.study.Family;
 import flowshy.study.Study;
@@ -12,7 +13,7 @@ import flowshy.verdict.BandsAnswer;
 import flowshy.verdict.Decision;
 import flowshy.verdict.Limit;
 import flowshy.verdict.compare.CompareQuestion;
-import flowshy.verdict.compare.Compared;
+import flowshy.verdict.compare.ComparedDevice;
 import flowshy.verdict.compare.Scaled;
 import flowshy.verdict.figure.Figure;
 import flowshy.verdict.figure.Found;
@@ -21,8 +22,6 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.OptionalDouble;
-import java.util.function.Function;
 import java.util.regex.Pattern;
 import org.hipparchus.util.FastMath;
 
@@ -33,35 +32,12 @@ public final class CompareText {
 
     private static final Pattern FIGURE = Pattern.compile("[0-9][0-9.e+-]*");
 
-    private static final List<Figure> SHOWN = List.of(
-            Figure.MASS,
-            Figure.INERTIA,
-            Figure.INERTIAL_TORQUE,
-            Figure.FOOTPRINT,
-            Figure.LENGTH,
-            Figure.RESONANCE,
-            Figure.QUALITY,
-            Figure.SENSITIVITY,
-            Figure.NOISE,
-            Figure.REJECTION_FROM,
-            Figure.REJECTION_TO,
-            Figure.LEAST_REJECTION,
-            Figure.MOTION_WIDTH,
-            Figure.MOTION_OCTAVES,
-            Figure.EQUIVALENT,
-            Figure.ERROR,
-            Figure.OFFSET,
-            Figure.STATIC_TILT,
-            Figure.BENDING_FREQUENCY,
-            Figure.BENDING_RATIO,
-            Figure.TIP_CLEARANCE);
-
     private final TextPage page = new TextPage();
     private final List<Family> families;
     private final CompareQuestion question;
-    private final List<Compared> devices;
+    private final List<ComparedDevice> devices;
 
-    private CompareText(List<Family> families, CompareQuestion question, List<Compared> devices) {
+    private CompareText(List<Family> families, CompareQuestion question, List<ComparedDevice> devices) {
         this.families = families;
         this.question = question;
         this.devices = devices;
@@ -75,7 +51,7 @@ public final class CompareText {
      * @param devices what was found, one a study or variant, same order
      * @return text with a line end after every line
      */
-    public static String of(List<Family> families, CompareQuestion question, List<Compared> devices) {
+    public static String of(List<Family> families, CompareQuestion question, List<ComparedDevice> devices) {
         CompareText text = new CompareText(families, question, devices);
         text.head();
         text.decisions();
@@ -86,11 +62,6 @@ public final class CompareText {
         text.page.line("");
         text.page.paragraph(Cautions.SHORT);
         return text.page.toString();
-    }
-
-    /** Letters as column heads: names are as long as users like. */
-    static String letter(int index) {
-        return index < 26 ? String.valueOf((char) ('A' + index)) : letter(index / 26 - 1) + letter(index % 26);
     }
 
     private void head() {
@@ -114,7 +85,7 @@ public final class CompareText {
     private void device(int index, Family family, Variant variant) {
         boolean base = variant.changes().isEmpty();
         String name = base ? (families.size() == 1 ? "the study as it stands" : variant.name()) : variant.name();
-        Compared compared = devices.get(index);
+        ComparedDevice compared = devices.get(index);
         List<String> sentences = new ArrayList<>();
         compared.question().ifPresent(asked -> sentences.add(described(asked.device())));
         if (!base) {
@@ -126,7 +97,7 @@ public final class CompareText {
         if (!compared.reason().isEmpty()) {
             sentences.add("No solution: " + compared.reason());
         }
-        page.note(letter(index), name + " - " + String.join(". ", sentences) + ".");
+        page.note(CompareTable.letter(index), name + " - " + String.join(". ", sentences) + ".");
     }
 
     private static String described(Device device) {
@@ -178,11 +149,11 @@ public final class CompareText {
     private void decisions() {
         page.heading("Decisions");
         for (int i = 0; i < devices.size(); i++) {
-            Compared device = devices.get(i);
+            ComparedDevice device = devices.get(i);
             String decision = device.answer()
                     .map(answer -> answer.verdict().decision().word() + misses(answer))
                     .orElse("not compared");
-            page.row(letter(i) + "  " + cut(shortName(i)), decision);
+            page.row(CompareTable.letter(i) + "  " + cut(shortName(i)), decision);
         }
     }
 
@@ -217,14 +188,8 @@ public final class CompareText {
         return misses.isEmpty() ? "" : ": " + String.join("; ", misses).strip();
     }
 
-    /** One line of the table. */
-    private record Row(String name, Function<Compared, OptionalDouble> value) {}
-
     private void sideBySide() {
-        List<Row> rows = rows().stream()
-                .filter(row -> devices.stream()
-                        .anyMatch(device -> row.value().apply(device).isPresent()))
-                .toList();
+        List<Row> rows = CompareTable.rows(devices);
         page.heading("Side by side");
         List<Integer> others = new ArrayList<>();
         for (int i = 1; i < devices.size(); i++) {
@@ -237,76 +202,21 @@ public final class CompareText {
             if (from > 0) {
                 page.line("");
             }
-            page.namedTable("", rows.stream().map(Row::name).toList(), columns(shown), rows);
+            page.namedTable("", rows.stream().map(Row::name).toList(), CompareTable.columns(devices, shown), rows);
             from += ABREAST - 1;
         } while (from < others.size());
-    }
-
-    private List<Column<Row>> columns(List<Integer> shown) {
-        List<Column<Row>> columns = new ArrayList<>();
-        for (int index : shown) {
-            columns.add(new Column<>(
-                    "", letter(index), "", 4, row -> Cell.of(row.value().apply(devices.get(index)), "")));
-        }
-        return columns;
-    }
-
-    private List<Row> rows() {
-        List<Row> rows = new ArrayList<>();
-        for (Figure figure : SHOWN) {
-            String unit = figure.unit().shown();
-            rows.add(new Row(figure.word() + (unit.isEmpty() ? "" : ", " + unit), device -> shown(figure, device)));
-            if (figure == Figure.LEAST_REJECTION) {
-                rows.add(new Row(
-                        "  found at, Hz",
-                        device -> found(figure, device).map(Found::at).orElse(OptionalDouble.empty())));
-            }
-        }
-        rows.add(new Row("least-rejection less A's, dB", device -> difference(Figure.LEAST_REJECTION, device)));
-        rows.add(new Row("sensitivity over A's, dB", device -> level(Figure.SENSITIVITY, device)));
-        rows.add(new Row("noise over A's, dB", device -> level(Figure.NOISE, device)));
-        return rows;
-    }
-
-    private static Optional<Found> found(Figure figure, Compared device) {
-        return Optional.ofNullable(device.figures().get(figure));
-    }
-
-    private static OptionalDouble number(Figure figure, Compared device) {
-        return found(figure, device).map(Found::number).orElse(OptionalDouble.empty());
-    }
-
-    private static OptionalDouble shown(Figure figure, Compared device) {
-        OptionalDouble number = number(figure, device);
-        return number.isPresent() ? OptionalDouble.of(figure.unit().show(number.getAsDouble())) : number;
-    }
-
-    private OptionalDouble difference(Figure figure, Compared device) {
-        OptionalDouble own = number(figure, device);
-        OptionalDouble first = number(figure, devices.get(0));
-        return own.isPresent() && first.isPresent()
-                ? OptionalDouble.of(own.getAsDouble() - first.getAsDouble())
-                : OptionalDouble.empty();
-    }
-
-    private OptionalDouble level(Figure figure, Compared device) {
-        OptionalDouble own = number(figure, device);
-        OptionalDouble first = number(figure, devices.get(0));
-        return own.isPresent() && first.isPresent()
-                ? OptionalDouble.of(20.0 * FastMath.log10(own.getAsDouble() / first.getAsDouble()))
-                : OptionalDouble.empty();
     }
 
     /** Why a dash stands where a number was looked for. */
     private void missing() {
         Map<String, Map<String, List<String>>> reasons = new LinkedHashMap<>();
         for (int i = 0; i < devices.size(); i++) {
-            for (Figure figure : SHOWN) {
-                Optional<Found> found = found(figure, devices.get(i));
+            for (Figure figure : CompareTable.SHOWN) {
+                Optional<Found> found = CompareTable.found(figure, devices.get(i));
                 if (found.isPresent() && found.get().number().isEmpty()) {
                     reasons.computeIfAbsent(found.get().reason(), reason -> new LinkedHashMap<>())
                             .computeIfAbsent(figure.word(), word -> new ArrayList<>())
-                            .add(letter(i));
+                            .add(CompareTable.letter(i));
                 }
             }
         }
@@ -327,7 +237,7 @@ public final class CompareText {
         int index = 0;
         for (Family family : families) {
             for (Variant variant : family.all()) {
-                String letter = letter(index++);
+                String letter = CompareTable.letter(index++);
                 variant.study()
                         .ifPresent(study -> study.takenAs()
                                 .forEach(taken -> all.computeIfAbsent(
@@ -359,7 +269,7 @@ public final class CompareText {
                     String sort = caveat.weight().words()
                             + FIGURE.matcher(caveat.text()).replaceAll("#");
                     first.putIfAbsent(sort, caveat);
-                    letters.computeIfAbsent(sort, key -> new ArrayList<>()).add(letter(i));
+                    letters.computeIfAbsent(sort, key -> new ArrayList<>()).add(CompareTable.letter(i));
                 }
             }
         }

@@ -34,7 +34,7 @@ public record CompareQuestion(List<Contender> contenders, Optional<Figure> equal
      *
      * @return in the order of the contenders
      */
-    public List<Compared> answer() {
+    public List<ComparedDevice> answer() {
         Contender first = contenders.get(0);
         Optional<Found> target =
                 equal.flatMap(figure -> first.question().map(asked -> figure.of(new Evaluated(asked))));
@@ -47,7 +47,7 @@ public record CompareQuestion(List<Contender> contenders, Optional<Figure> equal
                 .toList();
     }
 
-    private Compared scaled(Contender contender, Found target) {
+    private ComparedDevice scaled(Contender contender, Found target) {
         if (target.number().isEmpty()) {
             return none(contender, "the first has no such quantity: " + target.reason());
         }
@@ -66,11 +66,11 @@ public record CompareQuestion(List<Contender> contenders, Optional<Figure> equal
         }
     }
 
-    private static Compared none(Contender contender, String reason) {
-        return new Compared(contender, Optional.empty(), Optional.empty(), Map.of(), Optional.empty(), reason);
+    private static ComparedDevice none(Contender contender, String reason) {
+        return new ComparedDevice(contender, Optional.empty(), Optional.empty(), Map.of(), Optional.empty(), reason);
     }
 
-    private static Compared compared(Contender contender, Optional<BandsQuestion> question, Optional<Scaled> scaled) {
+    private static ComparedDevice compared(Contender contender, Optional<BandsQuestion> question, Optional<Scaled> scaled) {
         if (question.isEmpty()) {
             return none(contender, contender.reason());
         }
@@ -83,7 +83,7 @@ public record CompareQuestion(List<Contender> contenders, Optional<Figure> equal
             for (Figure figure : Figure.values()) {
                 figures.put(figure, figure.of(device));
             }
-            return new Compared(contender, question, Optional.of(answer), figures, scaled, "");
+            return new ComparedDevice(contender, question, Optional.of(answer), figures, scaled, "");
         } catch (StreamTooFastException e) {
             return none(contender, e.getMessage());
         }

@@ -63,7 +63,7 @@ class CompareQuestionTest {
         }
     }
 
-    private static Compared second(Figure figure, Scaling scaling) {
+    private static ComparedDevice second(Figure figure, Scaling scaling) {
         Contender first = new Contender("rod", List.of(), Optional.of(about(ROD, 1300.0)), Optional.empty(), "");
         Contender other = new Contender(
                 "other", List.of("x"), Optional.of(scaling.at(scaling.start())), Optional.of(scaling), "");
@@ -116,7 +116,7 @@ class CompareQuestionTest {
     @Test
     void whatCannotBeMadeEqualSaysHowNearItComes() {
         Scaling little = new By(1.0, 0.9, 1.1, f -> about(ROD.thickened(f), 200.0));
-        Compared none = second(Figure.MASS, little);
+        ComparedDevice none = second(Figure.MASS, little);
         assertThat(none.answer()).isEmpty();
         assertThat(none.reason())
                 .isEqualTo("from 0.900 to 1.10 its mass goes from 6.964e-10 to 1.040e-09 kg; 5.588e-09 is wanted");
@@ -134,7 +134,7 @@ class CompareQuestionTest {
         Contender first = new Contender("rod", List.of(), Optional.of(about(ROD, 1300.0)), Optional.empty(), "");
         Contender club = new Contender("club", List.of("s"), Optional.of(about(CLUB, 1300.0)), Optional.empty(), "");
         Contender none = new Contender("none", List.of("s"), Optional.empty(), Optional.empty(), "it falls over");
-        List<Compared> devices = new CompareQuestion(List.of(first, club, none), Optional.empty()).answer();
+        List<ComparedDevice> devices = new CompareQuestion(List.of(first, club, none), Optional.empty()).answer();
         assertThat(devices).extracting(device -> device.contender().name()).containsExactly("rod", "club", "none");
         assertThat(devices.get(0).figures()).hasSize(Figure.values().length);
         assertThat(devices.get(2).reason()).isEqualTo("it falls over");

@@ -18,7 +18,8 @@ final class FurtherChartsSection implements ReportSection {
             Map.entry("flow-profile", "error"),
             Map.entry("regime", "device"),
             Map.entry("fit-residuals", "fit"),
-            Map.entry("covers", "covers"));
+            Map.entry("covers", "covers"),
+            Map.entry("compare-rejection", "variants"));
 
     @Override
     public String id() {

@@ -38,7 +38,10 @@ final class LimitsSection implements ReportSection {
     private static void row(Html html, Words words, Limit limit) {
         html.tag("tr").holds(() -> {
             html.tag("th").with("scope", "row").with("class", "name").holds(limit.name());
-            html.tag("td").holds(() -> words.amount(limit.required(), limit.unit(), 4));
+            html.tag("td").holds(() -> {
+                html.text(limit.sense().words() + " ");
+                words.amount(limit.required(), limit.unit(), 4);
+            });
             html.tag("td")
                     .holds(() -> limit.found()
                             .ifPresentOrElse(

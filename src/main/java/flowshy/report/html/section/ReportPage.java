@@ -20,6 +20,7 @@ public final class ReportPage {
             new WhySection(),
             new ErrorSection(),
             new LidSection(),
+            new VariantsSection(),
             new FurtherChartsSection(),
             new DefaultsSection(),
             new MemorySection(),

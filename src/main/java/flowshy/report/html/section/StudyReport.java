@@ -7,15 +7,21 @@ import flowshy.report.chart.BandsCharts;
 import flowshy.report.chart.Chart;
 import flowshy.report.chart.FitCharts;
 import flowshy.report.chart.MeasuredOverlays;
+import flowshy.report.chart.CompareCharts;
 import flowshy.report.html.Typography;
 import flowshy.stream.Source;
 import flowshy.stream.cover.Covers;
+import flowshy.study.Family;
 import flowshy.study.Study;
+import flowshy.study.Variant;
 import flowshy.verdict.BandsAnswer;
 import flowshy.verdict.Decision;
 import flowshy.verdict.Levers;
 import flowshy.verdict.Limit;
 import flowshy.verdict.fit.FitAnswer;
+import flowshy.verdict.compare.CompareQuestion;
+import flowshy.verdict.compare.ComparedDevice;
+import flowshy.verdict.compare.Contender;
 import flowshy.verdict.lid.Candidate;
 import flowshy.verdict.lid.LidAnswer;
 import flowshy.verdict.lid.LidQuestion;
@@ -36,6 +42,7 @@ import java.util.Set;
  * @param why what would move edges of bands and failed limits, empty where there is none
  * @param measured what was measured, beside the model of the device told of; empty if nothing was
  * @param fit how that device was fitted, empty if it is the study's own
+ * @param variants the study and its variants side by side, empty where it names none
  * @param charts a picture of every result, in the order of the report
  */
 public record StudyReport(
@@ -45,6 +52,7 @@ public record StudyReport(
         List<Levers> why,
         List<Compared> measured,
         Optional<FitAnswer> fit,
+        List<ComparedDevice> variants,
         List<Chart> charts) {
     /** A weakness here weakens the rejection, and so the bands. */
     private static final Set<Subject> ALWAYS =
@@ -54,6 +62,7 @@ public record StudyReport(
     public StudyReport {
         why = List.copyOf(why);
         measured = List.copyOf(measured);
+        variants = List.copyOf(variants);
         charts = List.copyOf(charts);
     }
 
@@ -64,8 +73,28 @@ public record StudyReport(
      * @return what the report tells
      */
     public static StudyReport of(Study study) {
+        return of(study, List.of());
+    }
+
+    /**
+     * Answers every question of a study that has variants.
+     *
+     * @param family the study and its variants
+     * @return what the report tells
+     */
+    public static StudyReport of(Family family) {
+        List<Contender> contenders =
+                family.all().stream().map(Variant::contender).toList();
+        return of(
+                family.study(),
+                contenders.size() == 1 ? List.of() : new CompareQuestion(contenders, Optional.empty()).answer());
+    }
+
+    private static StudyReport of(Study study, List<ComparedDevice> variants) {
         BandsAnswer answer = study.question().answer();
         List<Compared> measured = BesideModel.of(study.device(), study.measurements());
+        List<Chart> charts = new ArrayList<>(BandsCharts.of(study, answer, MeasuredOverlays.of(measured)));
+        charts.addAll(CompareCharts.of(study.title(), variants));
         return new StudyReport(
                 study,
                 answer,
@@ -73,7 +102,8 @@ public record StudyReport(
                 Levers.of(answer),
                 measured,
                 Optional.empty(),
-                BandsCharts.of(study, answer, MeasuredOverlays.of(measured)));
+                variants,
+                charts);
     }
 
     /**
@@ -92,6 +122,7 @@ public record StudyReport(
                 Levers.of(answer),
                 fit.after(),
                 Optional.of(fit),
+                List.of(),
                 FitCharts.of(study, answer, fit));
     }
 

@@ -19,7 +19,7 @@ import java.util.Optional;
  * @param scaled what was done to make it equal, empty if nothing was asked or nothing could be done
  * @param reason why it has no solution, empty if it has
  */
-public record Compared(
+public record ComparedDevice(
         Contender contender,
         Optional<BandsQuestion> question,
         Optional<BandsAnswer> answer,
@@ -27,7 +27,7 @@ public record Compared(
         Optional<Scaled> scaled,
         String reason) {
     /** Copies the map. */
-    public Compared {
+    public ComparedDevice {
         Map<Figure, Found> copy = new EnumMap<>(Figure.class);
         copy.putAll(figures);
         figures = Collections.unmodifiableMap(copy);
