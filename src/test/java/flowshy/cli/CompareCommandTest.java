@@ -3,9 +3,13 @@ package flowshy.cli;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
 import java.util.List;
 import java.util.Map;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
@@ -241,5 +245,40 @@ class CompareCommandTest {
         assertThat(Json.objects(
                         answer("bands", LIFT, "--json", "--set", "cover=sealed").get("sensitivities")))
                 .isEmpty();
+    }
+
+    /** What is drawn is what is told: least rejections of the curves are not below those of the figures. */
+    @Test
+    void theChartDrawsEveryDeviceThatHasACurve(@TempDir Path folder) throws IOException {
+        Map<String, Object> answer = answer("compare", LIFT, "--json", "--chart", folder.toString());
+        assertThat(Files.exists(folder.resolve("compare-rejection.svg"))).isTrue();
+        assertThat(Files.size(folder.resolve("compare-rejection.png"))).isGreaterThan(10_000);
+        List<String> table = Files.readAllLines(folder.resolve("compare-rejection.csv"));
+        assertThat(table.get(0)).contains("frequency_hz,rejection_db");
+        for (Map<String, Object> device : Json.objects(answer.get("devices"))) {
+            String name = device.get("name").equals(LIFT) ? "as it stands" : (String) device.get("name");
+            Object least = figures(device).get("least_rejection_db");
+            List<Double> drawn = table.stream()
+                    .filter(line -> line.startsWith(name + ","))
+                    .map(line -> line.substring(line.lastIndexOf(',') + 1))
+                    .filter(text -> !text.isEmpty())
+                    .map(Double::valueOf)
+                    .toList();
+            if (least == null) {
+                assertThat(drawn).isEmpty();
+            } else {
+                assertThat(drawn).hasSizeGreaterThan(20);
+                assertThat(drawn.stream().mapToDouble(Double::doubleValue).min().orElseThrow())
+                        .isCloseTo((double) least, within(1e-6));
+            }
+        }
+    }
+
+    @Test
+    void theReportHasASectionOfVariants(@TempDir Path folder) throws IOException {
+        Path page = folder.resolve("lift.html");
+        assertThat(Run.of("report", LIFT, "--out", page.toString()).code()).isEqualTo(3);
+        String text = Files.readString(page);
+        assertThat(text).contains("id=\"variants\"", "silicon post", "helium can", "chart-compare-rejection");
     }
 }

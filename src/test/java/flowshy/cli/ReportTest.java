@@ -18,6 +18,7 @@ import java.util.HashMap;
 import java.util.HexFormat;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.stream.Stream;
 import javax.xml.parsers.DocumentBuilderFactory;
 import org.junit.jupiter.api.Test;
@@ -279,8 +280,9 @@ class ReportTest {
     @MethodSource("examples")
     void hasEveryChartOnceWithTheNumbersBehindIt(String study) {
         Document page = parse(made(study).page());
-        List<Chart> charts =
-                StudyReport.of(StudyReader.read(Path.of(study), List.of())).charts();
+        List<Chart> charts = StudyReport.of(
+                        StudyReader.open(Path.of(study), List.of()).family(Optional.empty()))
+                .charts();
         List<Element> figures = elements(page, "figure");
         assertThat(figures.stream().map(figure -> figure.getAttribute("id")).toList())
                 .containsExactlyInAnyOrderElementsOf(
