@@ -70,7 +70,8 @@ public record CompareQuestion(List<Contender> contenders, Optional<Figure> equal
         return new ComparedDevice(contender, Optional.empty(), Optional.empty(), Map.of(), Optional.empty(), reason);
     }
 
-    private static ComparedDevice compared(Contender contender, Optional<BandsQuestion> question, Optional<Scaled> scaled) {
+    private static ComparedDevice compared(
+            Contender contender, Optional<BandsQuestion> question, Optional<Scaled> scaled) {
         if (question.isEmpty()) {
             return none(contender, contender.reason());
         }

@@ -5,9 +5,9 @@ import flowshy.math.Caveat.Subject;
 import flowshy.math.Caveat.Weight;
 import flowshy.report.chart.BandsCharts;
 import flowshy.report.chart.Chart;
+import flowshy.report.chart.CompareCharts;
 import flowshy.report.chart.FitCharts;
 import flowshy.report.chart.MeasuredOverlays;
-import flowshy.report.chart.CompareCharts;
 import flowshy.report.html.Typography;
 import flowshy.stream.Source;
 import flowshy.stream.cover.Covers;
@@ -18,10 +18,10 @@ import flowshy.verdict.BandsAnswer;
 import flowshy.verdict.Decision;
 import flowshy.verdict.Levers;
 import flowshy.verdict.Limit;
-import flowshy.verdict.fit.FitAnswer;
 import flowshy.verdict.compare.CompareQuestion;
 import flowshy.verdict.compare.ComparedDevice;
 import flowshy.verdict.compare.Contender;
+import flowshy.verdict.fit.FitAnswer;
 import flowshy.verdict.lid.Candidate;
 import flowshy.verdict.lid.LidAnswer;
 import flowshy.verdict.lid.LidQuestion;
@@ -96,14 +96,7 @@ public record StudyReport(
         List<Chart> charts = new ArrayList<>(BandsCharts.of(study, answer, MeasuredOverlays.of(measured)));
         charts.addAll(CompareCharts.of(study.title(), variants));
         return new StudyReport(
-                study,
-                answer,
-                lid(study),
-                Levers.of(answer),
-                measured,
-                Optional.empty(),
-                variants,
-                charts);
+                study, answer, lid(study), Levers.of(answer), measured, Optional.empty(), variants, charts);
     }
 
     /**
