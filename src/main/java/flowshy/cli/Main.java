@@ -34,6 +34,7 @@ public final class Main implements Runnable {
             "fill",
             "compare",
             "map",
+            "size",
             "tolerance",
             "fit",
             "cylinder",
@@ -85,6 +86,7 @@ public final class Main implements Runnable {
             case "fill" -> new FillCommand();
             case "compare" -> new CompareCommand();
             case "map" -> new MapCommand();
+            case "size" -> new SizeCommand();
             case "tolerance" -> new ToleranceCommand();
             case "cylinder" -> new CylinderCommand();
             case "media" -> new MediaCommand();

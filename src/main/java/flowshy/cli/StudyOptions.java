@@ -39,6 +39,15 @@ final class StudyOptions {
     }
 
     /**
+     * Whether keys are overlaid.
+     *
+     * @return true if so
+     */
+    boolean set() {
+        return !settings.isEmpty();
+    }
+
+    /**
      * Reads every study and works on it; the problems of one do not stop the others.
      *
      * @param line the command, for its error writer

@@ -103,7 +103,7 @@ public record StudyMap(
             }
         }
         VariedStudy varied = VariedStudy.of(reader, keys);
-        DesignSpace space = SURROUNDED.contains(figure) ? varied : varied.still();
+        DesignSpace space = surrounded(figure) ? varied : varied.still();
         MapQuestion question = new MapQuestion(space, figure, frequency);
         Grid grid = question.answer(axis(across, words, 0), axis(down, words, 1), run);
         return new StudyMap(study, across, down, figure, frequency, varied.hold(), grid, own(question, across, down));
@@ -136,6 +136,11 @@ public record StudyMap(
                         Printable.of(name) + " is no figure",
                         "one of " + String.join(", ", Figure.names()),
                         Nearest.among(name, Figure.names()))));
+    }
+
+    /** Whether the surroundings have a part in a figure. */
+    static boolean surrounded(Figure figure) {
+        return SURROUNDED.contains(figure);
     }
 
     private static Axis axis(Side side, MapWords words, int index) {

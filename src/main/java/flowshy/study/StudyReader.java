@@ -1,6 +1,7 @@
 package flowshy.study;
 
 import flowshy.response.Hold;
+import flowshy.study.keys.Field;
 import flowshy.study.keys.Form;
 import flowshy.study.keys.Keys;
 import flowshy.study.keys.Overlay;
@@ -11,7 +12,9 @@ import flowshy.study.text.StudyException;
 import flowshy.study.text.StudyText;
 import flowshy.verdict.design.Knob;
 import java.nio.file.Path;
+import java.util.Comparator;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 
 /** From a file and the settings of the command line to a study; every problem is told at once. */
@@ -163,6 +166,24 @@ public final class StudyReader {
     /** Settings laid over it, in order. */
     List<String> settings() {
         return settings;
+    }
+
+    /**
+     * The text of the study file with numbers replaced where they stand; all else stays as it was.
+     *
+     * @param numbers values as a study writes them, by the path of their key
+     * @return the text
+     * @throws StudyException if a number does not stand in the file itself
+     */
+    public String rewritten(Map<String, String> numbers) {
+        Form form = form();
+        Rewriting rewriting = new Rewriting(text.file().text());
+        numbers.entrySet().stream()
+                .map(number -> Map.entry(form.field(number.getKey()).orElseThrow(), number.getValue()))
+                .sorted(Map.Entry.<Field, String>comparingByKey(Comparator.comparing(Field::position))
+                        .reversed()) // from the end: what stands before keeps its place
+                .forEach(number -> rewriting.replace(number.getKey(), number.getValue()));
+        return rewriting.text();
     }
 
     /** Folder in which the files that the study names are looked for. */

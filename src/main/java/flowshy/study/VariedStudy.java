@@ -143,6 +143,15 @@ public final class VariedStudy implements DesignSpace {
         return paths.stream().anyMatch(path -> path.startsWith("hair.") && !MATERIAL.contains(path));
     }
 
+    /**
+     * How the length of the hair is seen at every point: over many shapes the estimate stands for a solution that is taken by default.
+     *
+     * @return off, the estimate, auto or on
+     */
+    public LengthModel model() {
+        return over(base.device().hair().lengthModel(), paths);
+    }
+
     @Override
     public List<String> keys() {
         return paths;

@@ -145,6 +145,33 @@ class ExamplesTest {
         }
     }
 
+    /** One example is mapped and sized as its heading says. */
+    @Test
+    void mapsAndSizesAsExpected() throws IOException {
+        Path example = Path.of("examples", "hoist-chain");
+        expect(
+                example.resolve("expected-map.txt"),
+                Run.of(
+                        "map",
+                        study(example),
+                        "--across",
+                        "hair.diameter=30 um..150 um",
+                        "--down",
+                        "hair.length=300 um..1200 um"));
+        expect(
+                example.resolve("expected-size.txt"),
+                Run.of("size", study(example), "--vary", "hair.diameter", "--to", "minimize", "mass"));
+    }
+
+    private static void expect(Path expected, Run run) throws IOException {
+        String printed = run.out() + "exit code " + run.code() + "\n";
+        if (REWRITE) {
+            Files.writeString(expected, printed);
+        }
+        assertThat(printed).isEqualTo(Files.readString(expected));
+        assertThat(printed.lines()).allSatisfy(line -> assertThat(line.length()).isLessThanOrEqualTo(80));
+    }
+
     @ParameterizedTest
     @MethodSource("examples")
     void fitsEightyColumns(Path example) {

@@ -22,6 +22,8 @@ import org.hipparchus.util.FastMath;
  */
 final class OneVariable {
     private static final int SAMPLES = 129;
+    private static final int FEW_SAMPLES = 13;
+    private static final double NEAR = 0.03;
     private static final double ACCURACY = 1e-13;
     private static final int HALVINGS = 45;
 
@@ -33,10 +35,26 @@ final class OneVariable {
 
     private record Sample(double share, Candidate candidate) {}
 
+    /** The best of the whole range. */
     Candidate best() {
-        List<Sample> samples = new ArrayList<>(IntStream.range(0, SAMPLES)
+        return best(0.0, 1.0, SAMPLES);
+    }
+
+    /** The same for a problem hardly different from one whose optimum is known: it is looked for near that one first. */
+    Candidate bestNear(Candidate known) {
+        double share = problem.shares(known.values())[0];
+        double low = FastMath.max(share - NEAR, 0.0);
+        double high = FastMath.min(share + NEAR, 1.0);
+        Candidate best = best(low, high, FEW_SAMPLES);
+        double found = problem.shares(best.values())[0];
+        boolean cut = (found == low && low > 0.0) || (found == high && high < 1.0);
+        return best.keepsAll() && !cut ? best : best();
+    }
+
+    private Candidate best(double from, double to, int count) {
+        List<Sample> samples = new ArrayList<>(IntStream.range(0, count)
                 .parallel()
-                .mapToObj(i -> sample((double) i / (SAMPLES - 1)))
+                .mapToObj(i -> sample(from + (to - from) * i / (count - 1)))
                 .toList());
         samples.addAll(edges(samples));
         sort(samples);

@@ -43,24 +43,6 @@ public record Sizer(long seed) {
         return answer(counted, problem, best, trials);
     }
 
-    /**
-     * The same question about given values: what binds there, and what would move it.
-     *
-     * @param problem what is asked
-     * @param values one a variable, inside the ranges
-     * @param before trials that led to them
-     * @return the answer at these values
-     */
-    public Sized at(SizingProblem problem, List<Double> values, int before) {
-        AtomicInteger trials = new AtomicInteger(before);
-        SizingProblem counted =
-                new SizingProblem(problem.variables(), problem.maximize(), problem.constraints(), tried -> {
-                    trials.incrementAndGet();
-                    return problem.trials().at(tried);
-                });
-        return answer(counted, problem, counted.at(values), trials);
-    }
-
     private Candidate best(SizingProblem problem, List<List<Double>> known) {
         List<Candidate> starts = known.stream().map(problem::at).toList();
         Candidate best = problem.variables().size() == 1
@@ -124,7 +106,7 @@ public record Sizer(long seed) {
             return start.trial().objective();
         }
         Candidate found = moved.variables().size() == 1
-                ? new OneVariable(moved).best()
+                ? new OneVariable(moved).bestNear(start)
                 : new AugmentedLagrangian(moved, size(best), 1e3).from(start, NEAR, AugmentedLagrangian.MANY);
         return found.keepsAll() ? found.trial().objective() : Double.NaN;
     }

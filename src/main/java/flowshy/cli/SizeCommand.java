@@ -1,0 +1,128 @@
+package flowshy.cli;
+
+import flowshy.report.JsonPage;
+import flowshy.report.SizeReport;
+import flowshy.study.SizeWords;
+import flowshy.study.StudyReader;
+import flowshy.study.StudySizing;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.OptionalDouble;
+import java.util.concurrent.Callable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Option;
+import picocli.CommandLine.ParameterException;
+import picocli.CommandLine.Spec;
+
+/** Some numbers of a study chosen for it. */
+@Command(
+        name = "size",
+        mixinStandardHelpOptions = true,
+        description =
+                "Chooses numbers of the study so that a figure is least or largest and every limit under accept is kept.",
+        footer = {
+            "",
+            "Example: flowshy size study.yaml --vary hair.diameter --within 'hair.diameter=20 um..200 um' --to minimize mass"
+        })
+final class SizeCommand implements Callable<Integer> {
+    private static final String MINIMIZE = "minimize";
+    private static final String MAXIMIZE = "maximize";
+
+    @Mixin
+    private StudyOptions studies;
+
+    @Option(
+            names = "--vary",
+            required = true,
+            split = ",",
+            paramLabel = "KEY",
+            description = "numbers that may be chosen, separated by commas, e.g. hair.diameter,hair.length")
+    private List<String> vary;
+
+    @Option(
+            names = "--within",
+            paramLabel = "KEY=A..B",
+            description =
+                    "range of one of them, e.g. 'hair.diameter=20 um..200 um'; may be repeated; a fifth to five times"
+                            + " the study's number if not given")
+    private List<String> within = new ArrayList<>();
+
+    @Option(
+            names = "--to",
+            required = true,
+            arity = "2",
+            paramLabel = "WORD",
+            description =
+                    "minimize or maximize, and a figure: mass, resonance, motion-octaves, …; a wrong name lists all")
+    private List<String> to;
+
+    @Option(
+            names = "--at",
+            paramLabel = "FREQUENCY",
+            converter = QuantityConverters.Frequency.class,
+            description = "frequency of figures that belong to one; the study's own if not given")
+    private Double at;
+
+    @Option(names = "--seed", paramLabel = "N", description = "of the search; one seed, one answer", defaultValue = "1")
+    private long seed;
+
+    @Option(names = "--write", paramLabel = "FILE.yaml", description = "write the sized study here")
+    private Path write;
+
+    @Mixin
+    private OutputOptions output;
+
+    @Spec
+    private CommandSpec spec;
+
+    @Override
+    public Integer call() {
+        if (to.size() != 2 || !List.of(MINIMIZE, MAXIMIZE).contains(to.get(0))) {
+            throw new ParameterException(
+                    spec.commandLine(), "--to takes minimize or maximize and a figure, e.g. --to minimize mass");
+        }
+        if (write != null && (studies.files().size() > 1 || studies.set())) {
+            throw new ParameterException(
+                    spec.commandLine(),
+                    "--write goes with one study and without --set: it changes the file's own numbers");
+        }
+        SizeWords words = new SizeWords(
+                vary,
+                within,
+                to.get(0).equals(MAXIMIZE),
+                to.get(1),
+                at == null ? OptionalDouble.empty() : OptionalDouble.of(at),
+                seed);
+        JsonPage json = new JsonPage();
+        List<String> texts = new ArrayList<>();
+        List<Runnable> objects = new ArrayList<>();
+        List<String> tables = new ArrayList<>();
+        int code = studies.eachOpened(spec.commandLine(), output.json(), reader -> {
+            StudySizing sizing = StudySizing.of(reader, words);
+            texts.add(SizeReport.text(sizing));
+            objects.add(() -> SizeReport.write(json, sizing));
+            if (output.csv()) {
+                tables.add(SizeReport.csv(sizing));
+            }
+            if (write != null && sizing.sized().fits()) {
+                OutputOptions.write(write, rewritten(reader, sizing));
+            }
+            return sizing.sized().fits() ? 0 : Failures.LIMIT;
+        });
+        studies.send(spec.commandLine(), output, json, texts, objects, tables);
+        return code;
+    }
+
+    private static String rewritten(StudyReader reader, StudySizing sizing) {
+        Map<String, String> numbers = new LinkedHashMap<>();
+        for (int i = 0; i < sizing.numbers().size(); i++) {
+            numbers.put(sizing.numbers().get(i).path(), sizing.written(i));
+        }
+        return reader.rewritten(numbers);
+    }
+}
