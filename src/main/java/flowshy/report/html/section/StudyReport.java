@@ -7,6 +7,7 @@ import flowshy.report.chart.BandsCharts;
 import flowshy.report.chart.Chart;
 import flowshy.report.chart.FitCharts;
 import flowshy.report.chart.MeasuredOverlays;
+import flowshy.report.chart.ToleranceCharts;
 import flowshy.report.html.Typography;
 import flowshy.stream.Source;
 import flowshy.stream.cover.Covers;
@@ -21,6 +22,11 @@ import flowshy.verdict.lid.LidAnswer;
 import flowshy.verdict.lid.LidQuestion;
 import flowshy.verdict.measured.BesideModel;
 import flowshy.verdict.measured.Compared;
+import flowshy.verdict.tolerance.Effort;
+import flowshy.verdict.tolerance.Precision;
+import flowshy.verdict.tolerance.ToleranceAnswer;
+import flowshy.verdict.tolerance.ToleranceQuestion;
+import flowshy.verdict.tolerance.sampling.Progress;
 import java.util.ArrayList;
 import java.util.EnumSet;
 import java.util.List;
@@ -33,6 +39,7 @@ import java.util.Set;
  * @param study what was asked
  * @param answer bands, points, error and verdict of its device
  * @param lid covers side by side, where the study names candidates or a cover
+ * @param spread how sure the verdict is, where the study states tolerances
  * @param why what would move edges of bands and failed limits, empty where there is none
  * @param measured what was measured, beside the model of the device told of; empty if nothing was
  * @param fit how that device was fitted, empty if it is the study's own
@@ -42,10 +49,14 @@ public record StudyReport(
         Study study,
         BandsAnswer answer,
         Optional<LidAnswer> lid,
+        Optional<ToleranceAnswer> spread,
         List<Levers> why,
         List<Compared> measured,
         Optional<FitAnswer> fit,
         List<Chart> charts) {
+    /** Devices of a tolerance run in a report; the command tolerance tries more. */
+    private static final int DEVICES = 4096;
+
     /** A weakness here weakens the rejection, and so the bands. */
     private static final Set<Subject> ALWAYS =
             EnumSet.of(Subject.MEDIUM, Subject.HAIR, Subject.REJECTION, Subject.COVER);
@@ -66,14 +77,18 @@ public record StudyReport(
     public static StudyReport of(Study study) {
         BandsAnswer answer = study.question().answer();
         List<Compared> measured = BesideModel.of(study.device(), study.measurements());
+        Optional<ToleranceAnswer> spread = spread(study);
+        List<Chart> charts = new ArrayList<>(BandsCharts.of(study, answer, MeasuredOverlays.of(measured)));
+        spread.ifPresent(found -> charts.addAll(ToleranceCharts.of(study, found)));
         return new StudyReport(
-                study,
-                answer,
-                lid(study),
-                Levers.of(answer),
-                measured,
-                Optional.empty(),
-                BandsCharts.of(study, answer, MeasuredOverlays.of(measured)));
+                study, answer, lid(study), spread, Levers.of(answer), measured, Optional.empty(), charts);
+    }
+
+    private static Optional<ToleranceAnswer> spread(Study study) {
+        return study.tolerances().stated().isEmpty()
+                ? Optional.empty()
+                : Optional.of(new ToleranceQuestion(study.tolerances(), List.of())
+                        .answer(new Effort(DEVICES, Precision.ANY, 1), Progress.NONE));
     }
 
     /**
@@ -88,6 +103,7 @@ public record StudyReport(
         return new StudyReport(
                 study,
                 answer,
+                Optional.empty(),
                 Optional.empty(),
                 Levers.of(answer),
                 fit.after(),
