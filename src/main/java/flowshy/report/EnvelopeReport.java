@@ -9,21 +9,31 @@ import flowshy.verdict.envelope.Side;
 import java.util.List;
 
 /** The verdict over all states of an envelope, for every form of an answer. */
-final class EnvelopeReport {
+public final class EnvelopeReport {
     private static final String NO_FLOW = "no flow enters in any state";
 
     private EnvelopeReport() {}
 
-    /** What moves, in words. */
-    static String moves(Side side) {
+    /**
+     * What moves, in words.
+     *
+     * @param side one number of the envelope
+     * @return its values
+     */
+    public static String moves(Side side) {
         List<String> words = side.words();
         return side.range()
                 ? words.get(0) + " to " + words.get(words.size() - 1) + ", " + words.size() + " values evenly between"
                 : String.join(", ", words);
     }
 
-    /** How it was judged. */
-    static String how(EnvelopeAnswer answer) {
+    /**
+     * How it was judged.
+     *
+     * @param answer what was found
+     * @return sentences
+     */
+    public static String how(EnvelopeAnswer answer) {
         return say(
                 "%s states, %s of them corners: every combination of these values. The worst need not be a corner; between the values"
                         + " nothing is judged. The suspension is held as measured on the study's own state.",
@@ -46,7 +56,13 @@ final class EnvelopeReport {
         answer.impossible().forEach(one -> page.note("[cannot be worked out]", one.state() + ": " + one.reason()));
     }
 
-    private static String words(Worst worst) {
+    /**
+     * A limit at its worst, in words.
+     *
+     * @param worst what was found
+     * @return decision, figure and state
+     */
+    public static String words(Worst worst) {
         String found = worst.limit().found().isPresent()
                 ? (Figures.of(worst.limit().found().getAsDouble(), 4) + " "
                                 + worst.limit().unit())

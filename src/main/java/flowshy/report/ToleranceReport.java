@@ -89,7 +89,7 @@ public final class ToleranceReport {
                                         : "")));
         page.heading("What is uncertain");
         for (Uncertain input : answer.inputs()) {
-            page.row(input.name(), input.shape().word() + " " + input.size() + " (" + input.source() + ")");
+            page.row(input.name(), size(input));
         }
         answer.left().forEach(sentence -> page.note("-", sentence));
         for (Spread spread : answer.figures()) {
@@ -106,7 +106,13 @@ public final class ToleranceReport {
         return page.toString();
     }
 
-    private static String how(ToleranceAnswer answer) {
+    /**
+     * How it was found.
+     *
+     * @param answer what was found
+     * @return sentences
+     */
+    public static String how(ToleranceAnswer answer) {
         StringBuilder text = new StringBuilder(say(
                 "%s devices by randomised quasi-Monte Carlo (scrambled Sobol sequence, seed %s). Intervals are of 95 %% confidence."
                         + " Torques: %s.",
@@ -139,10 +145,36 @@ public final class ToleranceReport {
         return rows;
     }
 
-    private static String chance(Chance chance) {
+    /**
+     * The chance of a limit, in words.
+     *
+     * @param chance what was found
+     * @return share with its interval, limit, number of devices
+     */
+    public static String chance(Chance chance) {
         String limit = chance.sense() + " " + value(chance.required(), chance.unit());
         return share(chance.met()) + " " + (chance.asked() ? "meet" : "would meet") + " " + limit
                 + (chance.asked() ? "" : " (taken as the margin, no limit)") + ", of " + chance.devices() + " devices";
+    }
+
+    /**
+     * How wide an input is spread, in words.
+     *
+     * @param input uncertain input
+     * @return shape, size and source
+     */
+    public static String size(Uncertain input) {
+        return input.shape().word() + " " + input.size() + " (" + input.source() + ")";
+    }
+
+    /**
+     * What an input does, in words.
+     *
+     * @param one input with its indices
+     * @return total and first-order share with their intervals
+     */
+    public static String effect(InputEffect one) {
+        return share(one.effect().total()) + " in all, " + share(one.effect().first()) + " alone";
     }
 
     private static String share(Interval share) {

@@ -264,4 +264,20 @@ class ToleranceCommandTest {
         assertThat(((Number) figures.get("p50_m_s2")).doubleValue())
                 .isCloseTo(((Number) figures.get("nominal_m_s2")).doubleValue(), within(5e-4));
     }
+
+    /** The report of a study with tolerances and an envelope has a section for each, and the chart in its place. */
+    @Test
+    void theReportTellsBoth() throws IOException {
+        Path page = folder.resolve("page.html");
+        Run run = Run.of("report", "examples/potting-oil/study.yaml", "--out", page.toString());
+        assertThat(run.code()).isEqualTo(3);
+        String text = Files.readString(page);
+        assertThat(text)
+                .contains("id=\"envelope\"")
+                .contains("id=\"tolerance\"")
+                .contains("Spread of the rejection over all devices")
+                .contains("cut and plate");
+        assertThat(text.indexOf("Spread of the rejection over all devices"))
+                .isGreaterThan(text.indexOf("id=\"tolerance\""));
+    }
 }

@@ -18,6 +18,7 @@ final class FurtherChartsSection implements ReportSection {
             Map.entry("flow-profile", "error"),
             Map.entry("regime", "device"),
             Map.entry("fit-residuals", "fit"),
+            Map.entry("rejection-spread", "tolerance"),
             Map.entry("covers", "covers"),
             Map.entry("compare-rejection", "variants"));
 

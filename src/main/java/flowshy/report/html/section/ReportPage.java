@@ -14,6 +14,8 @@ public final class ReportPage {
             new DeviceSection(),
             new MediumSection(),
             new BandsSection(),
+            new EnvelopeSection(),
+            new ToleranceSection(),
             new ResponseSection(),
             new FitSection(),
             new MeasuredSection(),

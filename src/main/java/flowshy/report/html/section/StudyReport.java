@@ -8,6 +8,7 @@ import flowshy.report.chart.Chart;
 import flowshy.report.chart.CompareCharts;
 import flowshy.report.chart.FitCharts;
 import flowshy.report.chart.MeasuredOverlays;
+import flowshy.report.chart.ToleranceCharts;
 import flowshy.report.html.Typography;
 import flowshy.stream.Source;
 import flowshy.stream.cover.Covers;
@@ -27,6 +28,11 @@ import flowshy.verdict.lid.LidAnswer;
 import flowshy.verdict.lid.LidQuestion;
 import flowshy.verdict.measured.BesideModel;
 import flowshy.verdict.measured.Compared;
+import flowshy.verdict.tolerance.Effort;
+import flowshy.verdict.tolerance.Precision;
+import flowshy.verdict.tolerance.ToleranceAnswer;
+import flowshy.verdict.tolerance.ToleranceQuestion;
+import flowshy.verdict.tolerance.sampling.Progress;
 import java.util.ArrayList;
 import java.util.EnumSet;
 import java.util.List;
@@ -39,6 +45,7 @@ import java.util.Set;
  * @param study what was asked
  * @param answer bands, points, error and verdict of its device
  * @param lid covers side by side, where the study names candidates or a cover
+ * @param spread how sure the verdict is, where the study states tolerances
  * @param why what would move edges of bands and failed limits, empty where there is none
  * @param measured what was measured, beside the model of the device told of; empty if nothing was
  * @param fit how that device was fitted, empty if it is the study's own
@@ -49,11 +56,15 @@ public record StudyReport(
         Study study,
         BandsAnswer answer,
         Optional<LidAnswer> lid,
+        Optional<ToleranceAnswer> spread,
         List<Levers> why,
         List<Compared> measured,
         Optional<FitAnswer> fit,
         List<ComparedDevice> variants,
         List<Chart> charts) {
+    /** Devices of a tolerance run in a report; the command tolerance tries more. */
+    private static final int DEVICES = 4096;
+
     /** A weakness here weakens the rejection, and so the bands. */
     private static final Set<Subject> ALWAYS =
             EnumSet.of(Subject.MEDIUM, Subject.HAIR, Subject.REJECTION, Subject.COVER);
@@ -93,10 +104,19 @@ public record StudyReport(
     private static StudyReport of(Study study, List<ComparedDevice> variants) {
         BandsAnswer answer = study.question().answer();
         List<Compared> measured = BesideModel.of(study.device(), study.measurements());
+        Optional<ToleranceAnswer> spread = spread(study);
         List<Chart> charts = new ArrayList<>(BandsCharts.of(study, answer, MeasuredOverlays.of(measured)));
+        spread.ifPresent(found -> charts.addAll(ToleranceCharts.of(study, found)));
         charts.addAll(CompareCharts.of(study.title(), variants));
         return new StudyReport(
-                study, answer, lid(study), Levers.of(answer), measured, Optional.empty(), variants, charts);
+                study, answer, lid(study), spread, Levers.of(answer), measured, Optional.empty(), variants, charts);
+    }
+
+    private static Optional<ToleranceAnswer> spread(Study study) {
+        return study.tolerances().stated().isEmpty()
+                ? Optional.empty()
+                : Optional.of(new ToleranceQuestion(study.tolerances(), List.of())
+                        .answer(new Effort(DEVICES, Precision.ANY, 1), Progress.NONE));
     }
 
     /**
@@ -111,6 +131,7 @@ public record StudyReport(
         return new StudyReport(
                 study,
                 answer,
+                Optional.empty(),
                 Optional.empty(),
                 Levers.of(answer),
                 fit.after(),
