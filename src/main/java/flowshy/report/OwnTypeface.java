@@ -53,7 +53,7 @@ public final class OwnTypeface {
      * @return the font
      */
     public static Font bold(float size) {
-        return Loaded.BOLD.deriveFont(size);
+        return Loaded.BOLD.deriveFont(Font.BOLD, size); // its file alone does not tell an SVG that it is bold
     }
 
     /**
