@@ -20,6 +20,8 @@ final class FurtherChartsSection implements ReportSection {
             Map.entry("fit-residuals", "fit"),
             Map.entry("rejection-spread", "tolerance"),
             Map.entry("covers", "covers"),
+            Map.entry("covers-rejection", "covers"),
+            Map.entry("attenuation", "covers"),
             Map.entry("compare-rejection", "variants"));
 
     @Override

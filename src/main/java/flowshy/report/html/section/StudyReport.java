@@ -6,6 +6,7 @@ import flowshy.math.Caveat.Weight;
 import flowshy.report.chart.BandsCharts;
 import flowshy.report.chart.Chart;
 import flowshy.report.chart.CompareCharts;
+import flowshy.report.chart.CoverCharts;
 import flowshy.report.chart.FitCharts;
 import flowshy.report.chart.MeasuredOverlays;
 import flowshy.report.chart.ToleranceCharts;
@@ -106,10 +107,12 @@ public record StudyReport(
         List<Compared> measured = BesideModel.of(study.device(), study.measurements());
         Optional<ToleranceAnswer> spread = spread(study);
         List<Chart> charts = new ArrayList<>(BandsCharts.of(study, answer, MeasuredOverlays.of(measured)));
+        Optional<LidAnswer> lid = lid(study);
+        lid.ifPresent(covers -> charts.addAll(CoverCharts.of(study, covers)));
         spread.ifPresent(found -> charts.addAll(ToleranceCharts.of(study, found)));
         charts.addAll(CompareCharts.of(study.title(), variants));
         return new StudyReport(
-                study, answer, lid(study), spread, Levers.of(answer), measured, Optional.empty(), variants, charts);
+                study, answer, lid, spread, Levers.of(answer), measured, Optional.empty(), variants, charts);
     }
 
     private static Optional<ToleranceAnswer> spread(Study study) {
