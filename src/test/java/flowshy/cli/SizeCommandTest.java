@@ -88,6 +88,8 @@ class SizeCommandTest {
                 "hair.diameter,hair.density",
                 "--within",
                 "hair.density=1 g/cm3..8 g/cm3",
+                "--within",
+                "hair.diameter=10 um..200 um",
                 "--to",
                 "minimize",
                 "mass",
@@ -100,7 +102,7 @@ class SizeCommandTest {
             double thin = diameter(20.0, set);
             best = Math.min(best, figure(Figure.MASS, set, "hair.diameter=" + thin + " m"));
         }
-        assertThat(mass).isLessThanOrEqualTo(best * (1.0 + 3e-4));
+        assertThat(mass).isLessThanOrEqualTo(best * (1.0 + 1e-5));
         Map<String, Object> density = Json.objects(answer.get("numbers")).get(1);
         double thin = diameter(20.0, "hair.density=" + density.get("hair_density_kg_m3") + " kg/m3");
         assertThat((double) Json.objects(answer.get("numbers")).get(0).get("hair_diameter_m"))
