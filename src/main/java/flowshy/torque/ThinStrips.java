@@ -23,7 +23,9 @@ public final class ThinStrips {
      * @return ∫ |Γ| a² z dz over the thin parts by that over the hair [-]; zero if no mean free path is known
      */
     public static double share(Profile profile, Medium medium, double omega, double knudsen) {
-        if (new OscillatingCylinder(profile.smallestRadius(), medium).knudsen() <= knudsen) {
+        double path = medium.meanFreePath().orElse(0.0);
+        double tip = profile.radius(profile.length()); // the smallest radius passes over a point or a round end
+        if (path <= knudsen * FastMath.min(profile.smallestRadius(), tip)) {
             return 0.0; // no part is thin: a map asks this of every place
         }
         double thin = 0.0;
