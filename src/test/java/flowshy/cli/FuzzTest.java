@@ -13,6 +13,7 @@ import java.util.Random;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import java.util.stream.Stream;
+import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 
@@ -20,6 +21,7 @@ import org.junit.jupiter.api.io.TempDir;
  * Example studies, spoiled at random with a fixed seed. Whatever comes in, the command answers with one of its exit codes, never
  * with a stack trace, and every number of an accepted study is finite or null with its reason.
  */
+@Tag("long")
 class FuzzTest {
     private static final long SEED = 20260917L;
     private static final int MUTANTS = 3000;

@@ -9,9 +9,11 @@ import java.util.List;
 import java.util.concurrent.atomic.AtomicIntegerArray;
 import java.util.stream.IntStream;
 import java.util.stream.LongStream;
+import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 
 /** Intervals of 95 % hold the truth in 93 to 97 % of 500 seeded repeats, whichever way the fit is made. */
+@Tag("long")
 class FitCoverageValidationTest {
     private static final int REPEATS = 500;
     private static final double[] TRUTH = {Bench.STIFFNESS, Bench.DAMPING, Bench.GAIN};

@@ -10,6 +10,7 @@ import java.util.function.ToDoubleFunction;
 import org.hipparchus.analysis.UnivariateFunction;
 import org.hipparchus.analysis.solvers.BisectionSolver;
 import org.hipparchus.util.FastMath;
+import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
@@ -23,6 +24,7 @@ import org.junit.jupiter.params.provider.ValueSource;
  * recalled from memory; those of HS 24, 35, 36, 43 and g06 were confirmed by hand (the optimum satisfies the conditions of Karush, Kuhn and
  * Tucker), HS 100 and g08 to the digits given only by the agreement itself.
  */
+@Tag("long")
 class SizerValidationTest {
     private static final Sizer SIZER = new Sizer(1);
 

@@ -5,9 +5,11 @@ import static org.assertj.core.api.Assertions.assertThat;
 import java.util.Arrays;
 import java.util.List;
 import org.hipparchus.distribution.continuous.NormalDistribution;
+import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 
 /** An interval of 95 % must hold the true value in 93 to 97 of 100 repeats; 600 seeds, each repeat a whole run of its own. */
+@Tag("long")
 class CoverageValidationTest {
     private static final int REPEATS = 600;
     private static final NormalDistribution NORMAL = new NormalDistribution();
