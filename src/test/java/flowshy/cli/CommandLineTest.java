@@ -254,7 +254,8 @@ class CommandLineTest {
         assertThat(run.code()).isZero();
         assertThat(run.out()).contains("105 um").contains("0.000105 m");
         assertThat(Run.of("check", "--keys").out())
-                .contains("hair.diameter", "suspension.quality", "cover", "not built yet");
+                .contains("hair.diameter", "suspension.quality", "cover", "tolerances", "envelope", "variants")
+                .doesNotContain("not built yet");
         assertThat(Json.object(Json.parse(Run.of("check", "--schema").out()))).containsKey("properties");
         assertThat(Run.of("check").code()).isEqualTo(2);
     }
