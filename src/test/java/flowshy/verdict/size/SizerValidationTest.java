@@ -19,7 +19,7 @@ import org.junit.jupiter.params.provider.ValueSource;
 /**
  * The sizing engine against published problems with known optima, and along one number against bisection.
  *
- * <p>HS: Hock &amp; Schittkowski 1981, Test Examples for Nonlinear Programming Codes (Lecture Notes in Economics and Mathematical Systems 187),
+ * <p>HS: Hock &amp; Schittkowski 1981, Test Examples for Nonlinear Programming Codes, Springer,
  * by their numbers there; g06, g08: Koziel &amp; Michalewicz 1999, Evolutionary Computation 7:19, table of test cases. Statements and optima are
  * recalled from memory; those of HS 24, 35, 36, 43 and g06 were confirmed by hand (the optimum satisfies the conditions of Karush, Kuhn and
  * Tucker), HS 100 and g08 to the digits given only by the agreement itself.

@@ -8,7 +8,7 @@ import org.hipparchus.random.Well19937c;
  * Points of a Sobol sequence, randomised anew in every replicate so that the spread between replicates tells the error.
  *
  * <p>Nested uniform scrambling: each binary digit of a coordinate is kept or turned over, at random for every set of digits before it. Owen
- * 1995, in Monte Carlo and Quasi-Monte Carlo Methods in Scientific Computing, Lecture Notes in Statistics 106:299. Every point is then uniform
+ * 1995, in Monte Carlo and Quasi-Monte Carlo Methods in Scientific Computing, Springer, p. 299. Every point is then uniform
  * in the unit cube, a run of 2^m points keeps its even spread, and means over it tend to a normal law (Loh 2003, Ann. Stat. 31:1282). A random
  * linear matrix and shift in its place (Matoušek 1998) was tried: quicker, but the spread between replicates had long tails, and intervals of
  * Sobol indices held in 96 to 98 of 100 repeats. The first point of the plain sequence, all zeros, is moved to a random place. 32 digits are
