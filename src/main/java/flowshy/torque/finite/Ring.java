@@ -10,10 +10,8 @@ import org.hipparchus.util.FastMath;
  * @param pieces from the lower end to the upper
  */
 record Ring(List<RingPiece> pieces) {
-    /** Cut-off times length; an upright ring costs one piece however high it is. */
-    private static final double STRAIGHT_CUTOFF = 10.0;
-
-    private static final double SLANTED_CUTOFF = 10.0;
+    /** Cut-off times length. */
+    private static final double CUTOFF = 10.0;
 
     /** Largest step of the stairs over their radius: a ring near a point is no cylinder. */
     private static final double STEP = 0.15;
@@ -29,7 +27,7 @@ record Ring(List<RingPiece> pieces) {
     static int piecesFor(MeridianPoint from, MeridianPoint to, double cutoff) {
         RingPiece chord = RingPiece.between(from, to);
         double minor = FastMath.min(FastMath.abs(chord.width()), chord.thickness());
-        double highest = FastMath.max(SLANTED_CUTOFF / chord.length(), cutoff);
+        double highest = FastMath.max(CUTOFF / chord.length(), cutoff);
         double steps = FastMath.max(highest * minor / STAIR, minor / (STEP * chord.radius()));
         return (int) FastMath.max(1.0, FastMath.ceil(steps));
     }
@@ -76,6 +74,6 @@ record Ring(List<RingPiece> pieces) {
 
     /** Wavenumber above which only the ring's force on itself is left, and that in closed form, as far as its length asks. */
     double cutoff() {
-        return (pieces.size() == 1 ? STRAIGHT_CUTOFF : SLANTED_CUTOFF) / length();
+        return CUTOFF / length();
     }
 }

@@ -42,7 +42,7 @@ public record Axis(String key, double from, double to, int count, boolean logari
      */
     public double at(double place) {
         double share = place / (count - 1);
-        if (share == 1.0) {
+        if (Double.compare(share, 1.0) == 0) {
             return to;
         }
         return logarithmic ? from * FastMath.exp(share * FastMath.log(to / from)) : from + (to - from) * share;

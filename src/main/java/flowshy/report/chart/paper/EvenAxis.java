@@ -40,6 +40,16 @@ final class EvenAxis extends NumberAxis {
     }
 
     @Override
+    public boolean equals(Object other) {
+        return other instanceof EvenAxis axis && axis.degrees == degrees && super.equals(other);
+    }
+
+    @Override
+    public int hashCode() {
+        return super.hashCode();
+    }
+
+    @Override
     public List<ValueTick> refreshTicks(Graphics2D graphics, AxisState state, Rectangle2D area, RectangleEdge edge) {
         boolean horizontal = RectangleEdge.isTopOrBottom(edge);
         double length = horizontal ? area.getWidth() : area.getHeight();
