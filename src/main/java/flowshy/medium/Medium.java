@@ -40,6 +40,27 @@ public record Medium(
     }
 
     /**
+     * The same medium with other density and viscosity; name, state, sources and caveats are kept.
+     *
+     * @param densityFactor on the density, positive [-]
+     * @param viscosityFactor on the viscosity, positive [-]
+     * @return the changed medium
+     */
+    public Medium scaled(double densityFactor, double viscosityFactor) {
+        return new Medium(
+                name,
+                phase,
+                temperature,
+                pressure,
+                density * densityFactor,
+                viscosity * viscosityFactor,
+                soundSpeed,
+                meanFreePath,
+                sources,
+                caveats);
+    }
+
+    /**
      * A medium known by two numbers only, at 20 °C and one atmosphere for the noise.
      *
      * @param name its name

@@ -64,22 +64,8 @@ final class ModelUncertainty {
     }
 
     private static Device in(Device device, double density, double viscosity) {
-        Medium around = times(device.around(), density, viscosity);
+        Medium around = device.around().scaled(density, viscosity);
         Medium outside = device.outside().equals(device.around()) ? around : device.outside();
         return new Device(device.hair(), device.suspension(), outside, device.cover(), around);
-    }
-
-    private static Medium times(Medium medium, double density, double viscosity) {
-        return new Medium(
-                medium.name(),
-                medium.phase(),
-                medium.temperature(),
-                medium.pressure(),
-                medium.density() * density,
-                medium.viscosity() * viscosity,
-                medium.soundSpeed(),
-                medium.meanFreePath(),
-                medium.sources(),
-                medium.caveats());
     }
 }

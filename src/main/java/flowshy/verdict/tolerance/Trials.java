@@ -145,17 +145,7 @@ final class Trials {
         if (!(point.density > 0.0 && point.viscosity > 0.0)) {
             throw new NoDesignException("the medium's density or viscosity comes out below zero");
         }
-        return new Medium(
-                medium.name(),
-                medium.phase(),
-                medium.temperature(),
-                medium.pressure(),
-                medium.density() * point.density,
-                medium.viscosity() * point.viscosity,
-                medium.soundSpeed(),
-                medium.meanFreePath(),
-                medium.sources(),
-                medium.caveats());
+        return medium.scaled(point.density, point.viscosity);
     }
 
     /** T_motion = T_carried − φ T_flow, whatever the model of the flow's torque. */
