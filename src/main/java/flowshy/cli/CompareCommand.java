@@ -35,7 +35,8 @@ import picocli.CommandLine.TypeConversionException;
         footer = {
             "",
             "Example: flowshy compare study.yaml --equal inertia",
-            "         flowshy compare study.yaml other.yaml --equal resonance --by suspension.stiffness"
+            "         flowshy compare study.yaml other.yaml --equal resonance --by suspension.stiffness",
+            "Exit code 3 where limits are stated and no device meets them all."
         })
 final class CompareCommand implements Callable<Integer> {
     @Mixin
@@ -101,18 +102,12 @@ final class CompareCommand implements Callable<Integer> {
                 CompareText.of(read.get(), question, devices),
                 () -> CompareJson.write(json, read.get(), question, devices, drawn),
                 CompareJson.csv(devices));
-        return devices.stream().anyMatch(CompareCommand::missed) ? Failures.LIMIT : 0;
+        Decision decision = CompareQuestion.decision(devices);
+        return decision == Decision.FAILS || decision == Decision.UNDECIDED ? Failures.LIMIT : 0;
     }
 
     private Contender contender(Variant variant) {
         return by == null ? variant.contender() : variant.contender("--by", by);
-    }
-
-    private static boolean missed(ComparedDevice device) {
-        return device.answer()
-                .map(answer -> answer.verdict().decision())
-                .filter(decision -> decision == Decision.FAILS || decision == Decision.UNDECIDED)
-                .isPresent();
     }
 
     /** A named quantity; torque is short for the inertial torque. */

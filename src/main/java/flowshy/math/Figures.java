@@ -14,6 +14,8 @@ public final class Figures {
 
     private static final Pattern MARK = Pattern.compile("%(?:\\.(\\d)g|s|%)");
 
+    private static final Pattern FIGURE = Pattern.compile("-?[0-9][0-9.e+-]*");
+
     private Figures() {}
 
     /**
@@ -88,6 +90,16 @@ public final class Figures {
             throw new IllegalArgumentException("too many values for: " + text);
         }
         return mark.appendTail(sentence).toString();
+    }
+
+    /**
+     * A sentence without its figures, so that those that differ in nothing else can be told as one.
+     *
+     * @param sentence any
+     * @return with a mark in place of each number
+     */
+    public static String blanked(String sentence) {
+        return FIGURE.matcher(sentence).replaceAll("#");
     }
 
     private static String exponential(BigDecimal value, int digits) {

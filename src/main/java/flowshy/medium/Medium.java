@@ -94,6 +94,20 @@ public record Medium(
     }
 
     /**
+     * How well a property is known, by its sources.
+     *
+     * @param property name as the sources have it, e.g. {@code density}
+     * @return the largest relative uncertainty that a source states for it [-], absent if none does
+     */
+    public OptionalDouble uncertainty(String property) {
+        return sources.stream()
+                .filter(source -> source.property().equals(property))
+                .map(PropertySource::uncertainty)
+                .flatMapToDouble(OptionalDouble::stream)
+                .max();
+    }
+
+    /**
      * Kinematic viscosity ν = μ/ρ.
      *
      * @return ν [m²/s]

@@ -44,6 +44,8 @@ public final class CompareJson {
                 json.text("sha256", study.origin().sha256());
             });
             question.equal().ifPresent(figure -> json.text("equal", figure.word()));
+            json.number("compared_at_hz", question.reference());
+            json.text("decision", CompareQuestion.decision(devices).word());
             json.array("devices", numbers(devices), index -> device(json, variants.get(index), devices.get(index)));
             ChartTables.write(json, charts);
         });
@@ -71,6 +73,10 @@ public final class CompareJson {
             json.text("shape", asked.device().hair().profile().shape());
             json.text("cover", asked.device().cover().words());
             json.text("medium", asked.device().around().name());
+            json.object("band", () -> {
+                json.number("from_hz", asked.band().from());
+                json.number("to_hz", asked.band().to());
+            });
             json.number("reference_hz", asked.reference());
             json.cell(
                     "stiffness_n_m_per_rad",

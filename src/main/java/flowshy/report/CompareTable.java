@@ -1,10 +1,15 @@
 package flowshy.report;
 
+import static flowshy.math.Figures.say;
+
+import flowshy.verdict.BandsQuestion;
 import flowshy.verdict.compare.ComparedDevice;
 import flowshy.verdict.figure.Figure;
 import flowshy.verdict.figure.Found;
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.Function;
@@ -86,6 +91,56 @@ public final class CompareTable {
                     row -> Cell.of(row.value().apply(devices.get(index)), "it has no such number, or it is infinite")));
         }
         return columns;
+    }
+
+    /**
+     * At which frequency, and over which bands, the quantities are those of the devices.
+     *
+     * @param devices the first is the one the others are set against, and has a question
+     * @return sentences
+     */
+    public static String frame(List<ComparedDevice> devices) {
+        Map<String, List<String>> bands = new LinkedHashMap<>();
+        List<String> elsewhere = new ArrayList<>();
+        double reference = reference(devices.get(0)).orElseThrow();
+        for (int i = 0; i < devices.size(); i++) {
+            String letter = letter(i);
+            Optional<BandsQuestion> asked = devices.get(i).contender().question();
+            asked.ifPresent(question -> bands.computeIfAbsent(
+                            say(
+                                    "%.4g to %.4g Hz",
+                                    question.band().from(), question.band().to()),
+                            band -> new ArrayList<>())
+                    .add(letter));
+            if (asked.isPresent() && asked.get().reference() != reference) {
+                elsewhere.add(letter);
+            }
+        }
+        StringBuilder text = new StringBuilder(say("Sensitivity, noise and equivalent at %.4g Hz", reference));
+        if (!elsewhere.isEmpty()) {
+            text.append(", that of A; the limits of ")
+                    .append(String.join(", ", elsewhere))
+                    .append(" are judged at ")
+                    .append(elsewhere.size() == 1 ? "its own" : "their own");
+        }
+        text.append(".");
+        if (bands.size() > 1) {
+            text.append(" Bands of use differ:");
+            bands.forEach((band, letters) -> text.append(" ")
+                    .append(String.join(", ", letters))
+                    .append(" ")
+                    .append(band)
+                    .append(";"));
+            text.append(" what belongs to a band belongs to each one's own.");
+        }
+        return text.toString();
+    }
+
+    private static OptionalDouble reference(ComparedDevice device) {
+        return device.contender()
+                .question()
+                .map(question -> OptionalDouble.of(question.reference()))
+                .orElseGet(OptionalDouble::empty);
     }
 
     private static List<Row> all(List<ComparedDevice> devices) {

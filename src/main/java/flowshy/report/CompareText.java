@@ -4,6 +4,7 @@ import static flowshy.math.Figures.say;
 
 import flowshy.hair.Profile;
 import flowshy.math.Caveat;
+import flowshy.math.Figures;
 import flowshy.report.CompareTable.Row;
 import flowshy.response.Device;
 import flowshy.study.Family;
@@ -22,15 +23,12 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.regex.Pattern;
 import org.hipparchus.util.FastMath;
 
 /** Devices side by side for a terminal: who they are, what they meet, then one line a quantity and one column a device. */
 public final class CompareText {
     /** Columns that fit a page beside the names of the quantities. */
     private static final int ABREAST = 4;
-
-    private static final Pattern FIGURE = Pattern.compile("[0-9][0-9.e+-]*");
 
     private final TextPage page = new TextPage();
     private final List<Family> families;
@@ -136,14 +134,14 @@ public final class CompareText {
                 }
             }
         }
-        if (words.isEmpty()) {
-            return;
+        String held = words.isEmpty()
+                ? ""
+                : "Held of the suspension, as measured on its study's own hair: " + String.join(", or ", words)
+                        + ", and the structural damping. ";
+        page.paragraph(held + CompareTable.frame(devices));
+        if (devices.size() == 1) {
+            page.paragraph("Nothing stands beside it: the study has no variants, and no other study is named.");
         }
-        page.paragraph("Held of the suspension, as measured on its study's own hair: " + String.join(", or ", words)
-                + ", and the structural damping."
-                + say(
-                        " Sensitivity, noise and equivalent at %.4g Hz.",
-                        question.contenders().get(0).question().orElseThrow().reference()));
     }
 
     private void decisions() {
@@ -266,8 +264,7 @@ public final class CompareText {
             for (Caveat caveat : caveats) {
                 if (caveat.weight() != Caveat.Weight.NOTE) {
                     // the same sentence with other figures is told once
-                    String sort = caveat.weight().words()
-                            + FIGURE.matcher(caveat.text()).replaceAll("#");
+                    String sort = caveat.weight().words() + Figures.blanked(caveat.text());
                     first.putIfAbsent(sort, caveat);
                     letters.computeIfAbsent(sort, key -> new ArrayList<>()).add(CompareTable.letter(i));
                 }

@@ -13,7 +13,6 @@ import flowshy.verdict.map.Levels;
 import flowshy.verdict.map.Spot;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Map;
 
 /** A map as text, JSON and CSV. */
 public final class MapReport {
@@ -70,7 +69,10 @@ public final class MapReport {
             boolean asked =
                     !map.rejection() || level == map.study().acceptance().margin();
             if (asked || (above > 0 && above < there)) {
-                page.row("at least " + shown(map, level, 4), share(above, there) + " of the places with a number");
+                boolean most = map.atMost(level);
+                page.row(
+                        (most ? "at most " : "at least ") + shown(map, level, 4),
+                        share(most ? within(grid, level) : above, there) + " of the places with a number");
             }
         }
         if (there < all) {
@@ -78,17 +80,23 @@ public final class MapReport {
         }
         int told = 0;
         int rest = 0;
-        for (Map.Entry<String, Integer> reason : grid.reasons().entrySet()) {
+        for (Grid.Reason reason : grid.reasons()) {
             if (told < REASONS) {
-                page.note("[" + share(reason.getValue(), all) + "]", reason.getKey());
+                page.note("[" + share(reason.places(), all) + "]", (reason.alike() ? "" : "such as ") + reason.first());
                 told++;
             } else {
-                rest += reason.getValue();
+                rest += reason.places();
             }
         }
         if (rest > 0) {
             page.note("[" + share(rest, all) + "]", "other reasons; --csv names that of each place");
         }
+    }
+
+    private static long within(Grid grid, double level) {
+        return grid.spots().stream()
+                .filter(spot -> spot.there() && spot.value() <= level)
+                .count();
     }
 
     private static String own(StudyMap map) {

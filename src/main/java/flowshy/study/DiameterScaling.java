@@ -4,7 +4,6 @@ import static flowshy.math.Figures.say;
 
 import flowshy.hair.Hair;
 import flowshy.response.Device;
-import flowshy.response.Hold;
 import flowshy.response.Suspension;
 import flowshy.response.SuspensionException;
 import flowshy.response.SuspensionStatement;
@@ -13,7 +12,6 @@ import flowshy.study.text.Problems;
 import flowshy.verdict.BandsQuestion;
 import flowshy.verdict.compare.Scaling;
 import flowshy.verdict.design.NoDesignException;
-import java.nio.file.Path;
 import java.util.Optional;
 
 /** All diameters of a hair multiplied by one factor; length and density stay, the suspension is held. */
@@ -21,17 +19,19 @@ final class DiameterScaling implements Scaling {
     /** No hair is made a thousand times thinner. */
     private static final double THINNEST = 1e-3;
 
+    private final ScaledStates states;
     private final BandsQuestion question;
     private final double room;
-    private final Hold hold;
     private final Optional<SuspensionStatement> statement;
 
-    DiameterScaling(Study study, Hold hold, Form form, Path folder) {
+    DiameterScaling(ScaledStates states) {
+        Study study = states.study();
+        Form form = states.form();
+        this.states = states;
         this.question = study.question();
         this.room = study.device().room();
-        this.hold = hold;
         Problems problems = new Problems();
-        FilesRead files = new FilesRead(folder);
+        FilesRead files = new FilesRead(states.folder());
         MediumBuilder media = new MediumBuilder(form, problems, files);
         CoverBuilder covers = new CoverBuilder(form, problems, files, media);
         this.statement = new SuspensionBuilder(
@@ -79,7 +79,9 @@ final class DiameterScaling implements Scaling {
         Device device = question.device();
         Hair hair = device.hair().reshaped(device.hair().profile().thickened(factor));
         Optional<Suspension> suspension = device.suspension().map(solved -> carried(hair, solved));
-        return question.about(new Device(hair, suspension, device.outside(), device.cover(), device.around()));
+        BandsQuestion scaled =
+                question.about(new Device(hair, suspension, device.outside(), device.cover(), device.around()));
+        return states.bear(scaled, states.form());
     }
 
     private Suspension carried(Hair hair, Suspension solved) {
@@ -87,7 +89,7 @@ final class DiameterScaling implements Scaling {
             return solved;
         }
         try {
-            return hold.on(hair, question.device().hair(), solved, statement.get());
+            return states.hold().on(hair, question.device().hair(), solved, statement.get());
         } catch (SuspensionException e) {
             throw new NoDesignException("suspension." + e.key() + ": " + e.getMessage());
         }

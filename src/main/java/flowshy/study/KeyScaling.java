@@ -3,8 +3,6 @@ package flowshy.study;
 import flowshy.hair.Hair;
 import flowshy.hair.LengthModel;
 import flowshy.math.Figures;
-import flowshy.study.units.Dimension;
-import flowshy.study.units.Quantity;
 import flowshy.verdict.BandsQuestion;
 import flowshy.verdict.compare.Scaling;
 
@@ -13,8 +11,9 @@ import flowshy.verdict.compare.Scaling;
  *
  * @param space the study as a function of the number
  * @param number the number
+ * @param states that the device must bear
  */
-record KeyScaling(VariedStudy space, NumberKey number) implements Scaling {
+record KeyScaling(VariedStudy space, NumberKey number, ScaledStates states) implements Scaling {
     @Override
     public String words() {
         return number.path();
@@ -37,27 +36,12 @@ record KeyScaling(VariedStudy space, NumberKey number) implements Scaling {
 
     @Override
     public String written(double value) {
-        return (Figures.of(value / unit(), 5) + " " + unitName()).strip();
+        return (Figures.of(number.unit().show(value), 5) + " " + number.unit().symbol()).strip();
     }
 
     @Override
     public String change(double value) {
         return words() + " from " + written(start()) + " to " + written(value);
-    }
-
-    /** The likeliest unit of its dimension, as a study would write it. */
-    private String unitName() {
-        boolean plain = number.dimension().siUnit().equals("1") || number.dimension() == Dimension.TEMPERATURE;
-        return plain
-                ? number.dimension().siUnit().replace("1", "")
-                : number.dimension().units().get(0);
-    }
-
-    private double unit() {
-        boolean plain = number.dimension().siUnit().equals("1") || number.dimension() == Dimension.TEMPERATURE;
-        return plain
-                ? 1.0
-                : Quantity.read("1 " + unitName(), number.dimension()).value();
     }
 
     @Override
@@ -66,8 +50,10 @@ record KeyScaling(VariedStudy space, NumberKey number) implements Scaling {
         Hair hair = question.device().hair();
         LengthModel model =
                 space.base().device().hair().lengthModel(); // as every other device of the comparison is seen
-        return hair.lengthModel() == model
-                ? question
-                : question.about(question.device().with(hair.seenAs(model)));
+        return states.bear(
+                hair.lengthModel() == model
+                        ? question
+                        : question.about(question.device().with(hair.seenAs(model))),
+                states.form().with(number.path(), value));
     }
 }

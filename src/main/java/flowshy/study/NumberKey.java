@@ -4,7 +4,7 @@ import flowshy.study.keys.Measure;
 import flowshy.study.units.Dimension;
 import flowshy.study.units.Quantity;
 import flowshy.study.units.QuantityException;
-import flowshy.study.units.Swing;
+import flowshy.study.units.WrittenUnit;
 
 /**
  * A number of a study that can be varied.
@@ -15,16 +15,19 @@ import flowshy.study.units.Swing;
  * @param least smallest admissible value, SI
  * @param most largest admissible value, SI
  * @param orZero whether zero is admissible beside
+ * @param unit in which the study states it, be it as a default
  */
-public record NumberKey(String path, Measure measure, double base, double least, double most, boolean orZero) {
-    static NumberKey of(String path, Measure measure, double base) {
+public record NumberKey(
+        String path, Measure measure, double base, double least, double most, boolean orZero, WrittenUnit unit) {
+    static NumberKey of(String path, Measure measure, double base, WrittenUnit unit) {
         return new NumberKey(
                 path,
                 measure,
                 base,
                 Quantity.read(measure.least(), measure.dimension()).value(),
                 Quantity.read(measure.most(), measure.dimension()).value(),
-                measure.zero());
+                measure.zero(),
+                unit);
     }
 
     /**
@@ -61,9 +64,9 @@ public record NumberKey(String path, Measure measure, double base, double least,
      * A value as a study would write it.
      *
      * @param value in SI
-     * @return number and SI unit
+     * @return number and unit, six significant digits
      */
     public String written(double value) {
-        return new Quantity(value, dimension(), "", Swing.NONE).si();
+        return unit.written(value);
     }
 }

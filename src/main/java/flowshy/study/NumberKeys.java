@@ -44,7 +44,7 @@ public final class NumberKeys {
         return form.fields().stream()
                 .filter(field -> field.quantity().isPresent())
                 .flatMap(field -> Keys.measure(field.path()).stream())
-                .map(found -> NumberKey.of(found.getKey(), found.getValue(), form.si(found.getKey())))
+                .map(found -> number(found.getKey(), found.getValue()))
                 .toList();
     }
 
@@ -61,7 +61,7 @@ public final class NumberKeys {
         Optional<Map.Entry<String, Measure>> found = Keys.measure(path);
         if (found.isPresent() && form.siIfAny(found.get().getKey()).isPresent()) {
             String whole = found.get().getKey();
-            return NumberKey.of(whole, found.get().getValue(), form.si(whole));
+            return number(whole, found.get().getValue());
         }
         if (found.isPresent()) {
             throw new StudyException(Problem.of(
@@ -80,6 +80,11 @@ public final class NumberKeys {
                                 .or(() -> Nearest.among(
                                         path,
                                         Keys.rows().stream().map(KeyRow::path).toList()))));
+    }
+
+    private NumberKey number(String path, Measure measure) {
+        WrittenUnit unit = WrittenUnit.of(form.word(path).orElseThrow(), measure.dimension());
+        return NumberKey.of(path, measure, form.si(path), unit);
     }
 
     /**
@@ -102,13 +107,15 @@ public final class NumberKeys {
                     "for example hair.diameter=40 um..120 um"));
         }
         NumberKey key = key(option, path);
-        double from = end(option, key, text.substring(equals + 1, between));
-        double to = end(option, key, text.substring(between + TO.length()));
+        String low = text.substring(equals + 1, between).strip();
+        String high = text.substring(between + TO.length()).strip();
+        double from = end(option, key, low);
+        double to = end(option, key, high);
         if (!(from < to)) {
             throw new StudyException(Problem.of(
                     Position.label(option + " " + path),
                     path,
-                    "a range from " + key.written(from) + " to " + key.written(to) + " is upside down",
+                    order(low, high, from, to),
                     "the lower end stands first, the upper end above it"));
         }
         return new KeyRange(key, from, to);
@@ -121,7 +128,13 @@ public final class NumberKeys {
      * @return as written, or as its default is written
      */
     public WrittenUnit unit(NumberKey key) {
-        return WrittenUnit.of(form.word(key.path()).orElseThrow(), key.dimension());
+        return key.unit();
+    }
+
+    /** What is wrong with two ends, as they were written. */
+    static String order(String low, String high, double from, double to) {
+        return "a range from " + Printable.of(low) + " to " + Printable.of(high)
+                + (from == to ? " is empty" : " is upside down");
     }
 
     private static double end(String option, NumberKey key, String text) {

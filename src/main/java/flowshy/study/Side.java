@@ -2,6 +2,7 @@ package flowshy.study;
 
 import flowshy.study.NumberKeys.KeyRange;
 import flowshy.study.keys.Keys;
+import flowshy.study.keys.Measure;
 import flowshy.study.text.Position;
 import flowshy.study.text.Printable;
 import flowshy.study.text.Problem;
@@ -45,19 +46,22 @@ public record Side(NumberKey key, double from, double to, WrittenUnit unit) {
         if (between < 0) {
             throw fault(option, Printable.of(text.strip()) + " is no KEY=A..B", "for example frequency=20 Hz..2 kHz");
         }
-        double from = end(option, key, text.substring(equals + 1, between));
-        double to = end(option, key, text.substring(between + 2));
+        String low = text.substring(equals + 1, between).strip();
+        String high = text.substring(between + 2).strip();
+        double from = end(option, key, low);
+        double to = end(option, key, high);
         if (!(from < to)) {
             throw fault(
                     option,
-                    "a range from " + key.written(from) + " to " + key.written(to) + " is upside down",
+                    NumberKeys.order(low, high, from, to),
                     "the lower end stands first, the upper end above it");
         }
         return new Side(key, from, to, unit(key, text));
     }
 
     private static NumberKey frequency(double reference) {
-        return NumberKey.of(FREQUENCY, Keys.measure(LIKE_A_BAND).orElseThrow().getValue(), reference);
+        Measure measure = Keys.measure(LIKE_A_BAND).orElseThrow().getValue();
+        return NumberKey.of(FREQUENCY, measure, reference, WrittenUnit.of("1 Hz", measure.dimension()));
     }
 
     private static double end(String option, NumberKey key, String text) {

@@ -1,5 +1,6 @@
 package flowshy.study;
 
+import flowshy.hair.Hair;
 import flowshy.response.Calibration;
 import flowshy.response.Device;
 import flowshy.stream.Source;
@@ -24,6 +25,7 @@ import java.util.Optional;
  * @param title as written, empty if there is none
  * @param origin file, digest and settings it came from
  * @param device hair, suspension, medium and cover
+ * @param measuredOn hair that carried the suspension when it was measured: the device's own, or in a variant that of its base
  * @param band band of use
  * @param acceptance limits asked
  * @param calibration where the sensitivity is stated, if asked
@@ -41,6 +43,7 @@ public record Study(
         String title,
         Origin origin,
         Device device,
+        Hair measuredOn,
         Band band,
         Acceptance acceptance,
         Optional<Calibration> calibration,
@@ -74,6 +77,7 @@ public record Study(
                 title,
                 origin,
                 device,
+                measuredOn,
                 band,
                 acceptance,
                 calibration,
@@ -86,6 +90,27 @@ public record Study(
                 document,
                 takenAs,
                 all);
+    }
+
+    /** The same study about another device, with what else may go with that; nothing is said of the states it must bear. */
+    Study about(BandsQuestion other) {
+        return new Study(
+                title,
+                origin,
+                other.device(),
+                measuredOn,
+                other.band(),
+                other.acceptance(),
+                calibration,
+                candidates,
+                other.motion(),
+                other.sources(),
+                measurements,
+                Optional.empty(),
+                tolerances,
+                document,
+                takenAs,
+                understood);
     }
 
     /**

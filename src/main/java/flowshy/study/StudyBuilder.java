@@ -90,6 +90,7 @@ final class StudyBuilder {
                 form.word("title").orElse(""),
                 new Study.Origin(file.name(), file.text(), file.sha256(), files.read(), settings),
                 device,
+                measuredOn.orElseThrow(),
                 band.orElseThrow(),
                 acceptance,
                 calibration,

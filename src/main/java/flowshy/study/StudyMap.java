@@ -10,6 +10,7 @@ import flowshy.study.text.StudyException;
 import flowshy.verdict.FigureLimit;
 import flowshy.verdict.design.DesignSpace;
 import flowshy.verdict.figure.Figure;
+import flowshy.verdict.figure.Sense;
 import flowshy.verdict.map.Axis;
 import flowshy.verdict.map.Grid;
 import flowshy.verdict.map.GridRun;
@@ -199,6 +200,21 @@ public record StudyMap(
             }
         }
         return decisive.stream().distinct().sorted().toList();
+    }
+
+    /**
+     * Whether a value that decides is a largest one.
+     *
+     * @param level one of {@link #decisive}
+     * @return true where every limit of the study at that value is one; false for a least one, and for a rejection
+     */
+    public boolean atMost(double level) {
+        List<FigureLimit> there = study.acceptance().others().stream()
+                .filter(limit -> limit.figure() == figure && limit.value() == level)
+                .toList();
+        return there.isEmpty()
+                ? figure == Figure.ERROR
+                : there.stream().allMatch(limit -> limit.sense() == Sense.AT_MOST);
     }
 
     /**

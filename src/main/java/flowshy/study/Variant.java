@@ -88,7 +88,7 @@ public final class Variant {
      * @return the contender
      */
     public Contender contender() {
-        return contender(study.map(own -> new DiameterScaling(own, hold, form, folder)));
+        return contender(study.map(own -> new DiameterScaling(states(own))));
     }
 
     /**
@@ -102,8 +102,8 @@ public final class Variant {
     public Contender contender(String option, String key) {
         try {
             NumberKey number = new NumberKeys(form).key(option, key);
-            return contender(
-                    study.map(own -> new KeyScaling(VariedStudy.of(form, folder, own, hold, List.of(number)), number)));
+            return contender(study.map(own ->
+                    new KeyScaling(VariedStudy.of(form, folder, own, hold, List.of(number)), number, states(own))));
         } catch (StudyException e) {
             if (Keys.measure(key).isEmpty()) { // no device ever has it
                 throw e;
@@ -116,6 +116,10 @@ public final class Variant {
                     Optional.empty(),
                     reason.isEmpty() ? problem.path() + ": " + problem.found() : reason);
         }
+    }
+
+    private ScaledStates states(Study own) {
+        return new ScaledStates(own, hold, form, folder);
     }
 
     private Contender contender(Optional<Scaling> scaling) {

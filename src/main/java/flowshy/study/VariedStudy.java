@@ -171,8 +171,8 @@ public final class VariedStudy implements DesignSpace {
             NumberKey key = numbers.get(i);
             if (!key.admits(values[i])) {
                 String found = Double.isFinite(values[i]) ? key.written(values[i]) : "no finite number";
-                throw new NoDesignException(key.path() + ": " + found + " lies outside " + key.written(key.least())
-                        + " to " + key.written(key.most()));
+                throw new NoDesignException(key.path() + ": " + found + " lies outside "
+                        + key.measure().least() + " to " + key.measure().most());
             }
         }
         Problems problems = new Problems();
@@ -299,12 +299,12 @@ public final class VariedStudy implements DesignSpace {
             if (!varies("suspension.") && hold == Hold.STIFFNESS) {
                 return there;
             }
-            Hair measured = base.device().hair();
+            boolean anew = varies(MEASURED.toArray(String[]::new));
+            Hair measured = anew ? base.measuredOn() : base.device().hair();
             SuspensionBuilder builder =
                     new SuspensionBuilder(now, problems, media, covers, read, Optional.of(measured));
             Optional<SuspensionStatement> statement = builder.statement();
-            Optional<Suspension> solved =
-                    varies(MEASURED.toArray(String[]::new)) ? builder.solved(statement, measured) : there;
+            Optional<Suspension> solved = anew ? builder.solved(statement, measured) : there;
             return statement.isEmpty() || solved.isEmpty()
                     ? Optional.empty()
                     : Optional.of(hold.on(hair, measured, solved.get(), statement.get()));

@@ -1,6 +1,5 @@
 package flowshy.verdict;
 
-import flowshy.medium.PropertySource;
 import flowshy.response.Device;
 import flowshy.response.Response;
 import flowshy.verdict.BandsAnswer.Extreme;
@@ -8,7 +7,6 @@ import flowshy.verdict.RejectionCurve.Sample;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import java.util.OptionalDouble;
 import java.util.TreeSet;
 import java.util.function.BooleanSupplier;
 import org.hipparchus.util.FastMath;
@@ -71,12 +69,9 @@ public final class BandReading {
             return false;
         }
         double fluid = device.around().density();
-        OptionalDouble stated = device.around().sources().stream()
-                .filter(source -> source.property().equals("density"))
-                .map(PropertySource::uncertainty)
-                .flatMapToDouble(OptionalDouble::stream)
-                .max();
-        double tolerance = fluid * FastMath.max(EQUAL_DENSITY, stated.orElse(0.0));
+        double tolerance = fluid
+                * FastMath.max(
+                        EQUAL_DENSITY, device.around().uncertainty("density").orElse(0.0));
         return FastMath.abs(device.hair().density() - fluid) <= tolerance;
     }
 

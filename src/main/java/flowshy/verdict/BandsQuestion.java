@@ -81,6 +81,16 @@ public record BandsQuestion(
     }
 
     /**
+     * The same question of a device that must bear other states.
+     *
+     * @param states that the verdict of an answer counts
+     * @return the rest kept
+     */
+    public BandsQuestion within(Envelope states) {
+        return new BandsQuestion(device, band, acceptance, motion, sources, reference, Optional.of(states));
+    }
+
+    /**
      * The same question about another device.
      *
      * @param other the device

@@ -18,6 +18,9 @@ import org.junit.jupiter.params.provider.ValueSource;
 class CompareCommandTest {
     private static final String LIFT = "examples/lift-machinery/study.yaml";
 
+    @TempDir
+    Path folder;
+
     private static List<Map<String, Object>> devices(String... words) {
         return Json.objects(answer(words).get("devices"));
     }
@@ -172,11 +175,115 @@ class CompareCommandTest {
         assertThat(lines.get(5)).startsWith("helium can,");
     }
 
+    private String study(String... lines) throws IOException {
+        Path file = folder.resolve("own.yaml");
+        Files.writeString(file, """
+                hair: {shape: cylinder, length: 710 um, diameter: 92 um, density: 1.21 g/cm3}
+                suspension: {resonance: {frequency: 380 Hz, in: vacuum}, quality: {value: 6, in: vacuum}}
+                medium: air
+                finite-length: off
+                band: {from: 20 Hz, to: 300 Hz}
+                """ + String.join("\n", lines) + "\n");
+        return file.toString();
+    }
+
+    private static String decision(Map<String, Object> device) {
+        return (String) Json.object(device.get("verdict")).get("decision");
+    }
+
+    /** A comparison is asked to find a device that does it: 22.4 dB as it stands, 27.9 dB at 140 um, 18.9 dB at 70 um. */
+    @ParameterizedTest
+    @CsvSource({"rejection: 19 dB, 0", "rejection: 25 dB, 0", "rejection: 30 dB, 3", ", 0"})
+    void leavesWithThreeWhereNoDeviceMeetsEveryLimit(String limit, int code) throws IOException {
+        String study = study(
+                limit == null ? "" : "accept: {" + limit + "}",
+                "variants: {thick: {hair: {diameter: 140 um}}, thin: {hair: {diameter: 70 um}}}");
+        assertThat(Run.of("compare", study).code()).isEqualTo(code);
+        assertThat(answer("compare", study, "--json").get("decision"))
+                .isEqualTo(code == 3 ? "fails" : limit == null ? "not-asked" : "meets");
+    }
+
+    /** Scaled until it is the first one, a device is judged at every state that the first one is judged at. */
+    @ParameterizedTest
+    @ValueSource(strings = {"--equal mass", "--equal mass --by hair.diameter", "--equal torque --by hair.density"})
+    void whatIsMadeEqualBearsTheSameStates(String words) throws IOException {
+        String study = study(
+                "accept: {rejection: 22.4 dB}",
+                "envelope: {medium.temperature: [-20 degC, 80 degC]}",
+                "variants: {alike: {hair: {foot-gap: 1 um}}, thick: {hair: {diameter: 140 um}}}");
+        String bare = Files.readString(Path.of(study)).replaceAll("envelope: .*", "");
+        List<Map<String, Object>> scaled = devices(("compare " + study + " --json " + words).split(" "));
+        assertThat(scaled).hasSize(3);
+        Map<String, Object> first = Json.object(scaled.get(0).get("verdict"));
+        for (Map<String, Object> device : scaled.subList(0, 2)) {
+            assertThat(Json.object(device.get("verdict")).get("sentence")).isEqualTo(first.get("sentence"));
+            assertThat(decision(device)).isEqualTo("fails");
+        }
+        if (!words.contains("density")) {
+            assertThat(Json.object(scaled.get(2).get("verdict")).get("sentence"))
+                    .isEqualTo(first.get("sentence"));
+        }
+        Files.writeString(Path.of(study), bare);
+        assertThat(decision(devices("compare", study, "--json").get(0))).isEqualTo("meets");
+    }
+
+    /** What is measured in a variant is measured on the base's hair, before and after it is scaled. */
     @Test
-    void leavesWithThreeWhereADeviceMissesALimit() {
-        assertThat(Run.of("compare", LIFT).code()).isEqualTo(3);
-        assertThat(Run.of("compare", LIFT, "--set", "accept={rejection: 5 dB}").code())
-                .isZero();
+    void aMeasuredNumberThatIsScaledStandsInTheVariantAsTheAnswerSays() throws IOException {
+        String variants = "variants: {club: {hair: {shape: club, stalk-diameter: 50 um, stalk-length: 500 um,"
+                + " head-diameter: 130 um}, suspension: {resonance: {frequency: F Hz, in: vacuum}}}}";
+        String study = study(variants.replace("F", "380"));
+        Map<String, Object> before = devices("compare", study, "--json").get(1);
+        List<Map<String, Object>> equal =
+                devices("compare", study, "--json", "--equal", "resonance", "--by", "suspension.resonance.frequency");
+        Map<String, Object> scaled = Json.object(equal.get(1).get("scaled"));
+        assertThat((double) scaled.get("before_resonance_hz"))
+                .isCloseTo((double) figures(before).get("resonance_hz"), within(1e-9));
+        double wanted = (double) figures(equal.get(0)).get("resonance_hz");
+        assertThat(Math.abs((double) scaled.get("before_resonance_hz") - wanted))
+                .isGreaterThan(20.0);
+        study(variants.replace("F", String.valueOf(380.0 * (double) scaled.get("ratio"))));
+        assertThat((double) figures(devices("compare", study, "--json").get(1)).get("resonance_hz"))
+                .isCloseTo(wanted, within(1e-6));
+    }
+
+    /** The same flow at the same frequency, whatever band or calibration each study has. */
+    @Test
+    void figuresAtAFrequencyAreThoseAtTheFrequencyOfTheFirst() throws IOException {
+        String study = study("variants: {wide: {band: {from: 5 Hz, to: 3 kHz}}}");
+        List<Map<String, Object>> devices = devices("compare", study, "--json");
+        for (String figure : List.of("rejection_db", "sensitivity_rad_per_m_s2", "equivalent_m_s2_per_m_s")) {
+            assertThat(figures(devices.get(1)).get(figure))
+                    .isEqualTo(figures(devices.get(0)).get(figure));
+        }
+        assertThat(figures(devices.get(1)).get("rejection_db_at_hz")).isEqualTo(77.4596669241);
+        String text = Run.of("compare", study).out().replaceAll("\\s+", " ");
+        assertThat(text)
+                .contains("equivalent at 77.46 Hz, that of A; the limits of B are judged at its own.")
+                .contains("Bands of use differ: A 20.00 to 300.0 Hz; B 5.000 to 3000 Hz;");
+    }
+
+    @Test
+    void aNumberWithoutEffectIsNamed() throws IOException {
+        String study = study("variants: {thick: {hair: {diameter: 140 um}}}");
+        Run run = Run.of("compare", study, "--equal", "mass", "--by", "medium.temperature");
+        assertThat(run.out().replaceAll("\\s+", " "))
+                .contains("No solution: medium.temperature does not change its mass, which is 1.322e-08 kg;");
+    }
+
+    @Test
+    void aStudyWithoutVariantsIsToldToStandAlone() throws IOException {
+        assertThat(Run.of("compare", study()).out().replaceAll("\\s+", " "))
+                .contains("equivalent at 77.46 Hz. Nothing stands beside it:");
+        assertThat(Run.of("compare", LIFT).out()).doesNotContain("Nothing stands beside it");
+    }
+
+    /** Told where it stands, once, and not again for each variant. */
+    @Test
+    void aMistypedSettingIsToldOnce() {
+        Run run = Run.of("compare", LIFT, "--set", "hair.diametre=90 um");
+        assertThat(run.code()).isEqualTo(2);
+        assertThat(run.err()).startsWith("--set hair.diametre: unknown key").endsWith("1 problem\n");
     }
 
     @Test

@@ -1,6 +1,7 @@
 package flowshy.cli;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
 
 import java.io.ByteArrayInputStream;
 import java.io.IOException;
@@ -10,6 +11,8 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Map;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
 import javax.imageio.ImageIO;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -194,6 +197,55 @@ class MapCommandTest {
         assertThat(values.get(0)).isNotNull();
     }
 
+    /** Thicker than long at many places, each with figures of its own: one reason, in the units of the study. */
+    @Test
+    void oneReasonInManyFiguresIsToldOnce() throws IOException {
+        Path charts = folder.resolve("charts");
+        Run run = map(
+                CYLINDER,
+                "hair.diameter=100 um..900 um",
+                LENGTH,
+                "--steps",
+                "17,11",
+                "--of",
+                "mass",
+                "--chart",
+                charts.toString());
+        String told = run.out().replaceAll("\\s+", " ");
+        assertThat(told)
+                .contains("such as hair.diameter: 250 um wide and 200 um long; a hair is at least as long as wide")
+                .containsOnlyOnce("um wide and")
+                .doesNotContain("other reasons");
+        assertThat(Files.readString(charts.resolve("map.svg")))
+                .contains("no number: such as hair.diameter: 250 um wide")
+                .doesNotContain("300 um wide");
+    }
+
+    /** A limit from above is told as one, and both sides of it make all places. */
+    @Test
+    void aLargestValueIsToldAsAtMost() {
+        Matcher below = limited("at-most", "at most");
+        Matcher above = limited("at-least", "at least");
+        assertThat(below.find()).isTrue();
+        assertThat(above.find()).isTrue();
+        assertThat(Double.parseDouble(below.group(1)) + Double.parseDouble(above.group(1)))
+                .isCloseTo(100.0, within(0.1));
+    }
+
+    private static Matcher limited(String sense, String words) {
+        Run run = map(
+                CYLINDER,
+                DIAMETER,
+                LENGTH,
+                "--steps",
+                "9,5",
+                "--of",
+                "resonance",
+                "--set",
+                "accept.resonance={" + sense + ": 600 Hz}");
+        return Pattern.compile(words + " 600.0 Hz\\s+([0-9.]+) %").matcher(run.out());
+    }
+
     /** In a vacuum chamber's thin gas the slip law ends for the thinner hairs: their numbers stand, marked. */
     @Test
     void aNumberBeyondTheEndOfAModelIsMarked() {
@@ -218,8 +270,9 @@ class MapCommandTest {
             delimiter = '|',
             value = {
                 "hair.diametr=40 um..160 um | hair.length=1 mm..2 mm | | did you mean hair.diameter?",
-                "hair.diameter=160 um..40 um | hair.length=1 mm..2 mm | | upside down",
-                "frequency=2 kHz..20 Hz | hair.length=1 mm..2 mm | | upside down",
+                "hair.diameter=160 um..40 um | hair.length=1 mm..2 mm | | a range from 160 um to 40 um is upside down",
+                "hair.diameter=0.1 mm..100 um | hair.length=1 mm..2 mm | | a range from 0.1 mm to 100 um is empty",
+                "frequency=2 kHz..20 Hz | hair.length=1 mm..2 mm | | a range from 2 kHz to 20 Hz is upside down",
                 "hair.diameter=40 Hz..160 Hz | hair.length=1 mm..2 mm | | a length is wanted here",
                 "frequency=20 um..2 kHz | hair.length=1 mm..2 mm | | a frequency is wanted here",
                 "hair.diameter=40..160 um | hair.length=1 mm..2 mm | | has no unit",

@@ -156,7 +156,7 @@ class VariedStudyTest {
         VariedStudy space = varied(reader(STUDY), "hair.head-diameter", "hair.stalk-length");
         assertThatThrownBy(() -> space.at(30e-6, 390e-6))
                 .isInstanceOf(NoDesignException.class)
-                .hasMessageContaining("hair.head-diameter: a head of 3e-5 m on a stalk of 44 um");
+                .hasMessageContaining("hair.head-diameter: a head of 30 um on a stalk of 44 um");
         assertThatThrownBy(() -> space.at(118e-6, 760e-6))
                 .isInstanceOf(NoDesignException.class)
                 .hasMessageContaining("longer than the hair's 830 um");
@@ -196,8 +196,8 @@ class VariedStudyTest {
                 "hair.diameterr=1 um..2 um | --across hair.diameterr: unknown key; a number of this study is wanted:",
                 "hair.shape=1..2 | --across hair.shape: not a number;",
                 "suspension.readout-noise=1 nrad/rtHz..2 nrad/rtHz | --across suspension.readout-noise: the study does not state it;",
-                "hair.length=2 mm..1 mm | --across hair.length: a range from 0.002 m to 0.001 m is upside down;",
-                "hair.length=2 mm..2 mm | is upside down;",
+                "hair.length=2 mm..1 mm | --across hair.length: a range from 2 mm to 1 mm is upside down;",
+                "hair.length=2 mm..2 mm | a range from 2 mm to 2 mm is empty;",
                 "hair.length=2 s..3 s | --across hair.length: 2 s is a time",
                 "hair.length=40..120 um | --across hair.length: 40 has no unit;",
                 "hair.length=1 mm..2 km | --across hair.length: 2 km",

@@ -16,7 +16,6 @@ import flowshy.verdict.map.Levels;
 import flowshy.verdict.map.Spot;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Map;
 import java.util.TreeSet;
 import org.hipparchus.util.FastMath;
 
@@ -266,14 +265,15 @@ public final class MapChart {
         }
         List<String> none = new ArrayList<>();
         boolean weak = false;
-        for (Map.Entry<String, Integer> reason : grid.reasons().entrySet()) {
+        for (Grid.Reason reason : grid.reasons()) {
+            String words = (reason.alike() ? "" : "such as ") + reason.first();
             boolean missing = grid.spots().stream()
-                    .anyMatch(spot -> !spot.there() && spot.reason().equals(reason.getKey()));
+                    .anyMatch(spot -> !spot.there() && spot.reason().equals(reason.first()));
             if (missing) {
-                none.add(reason.getKey());
+                none.add(words);
             } else {
                 weak = true;
-                sheet.keyWeak(reason.getKey());
+                sheet.keyWeak(words);
             }
         }
         if (!none.isEmpty()) {

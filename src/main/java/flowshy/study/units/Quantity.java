@@ -186,11 +186,10 @@ public record Quantity(double value, Dimension dimension, String written, Swing 
      * The same quantity with another value.
      *
      * @param other in SI
-     * @return written in SI, rms if it swings
+     * @return written in the same unit
      */
     public Quantity at(double other) {
-        Swing stated = swing == Swing.NONE ? Swing.NONE : Swing.RMS;
-        return new Quantity(other, dimension, new Quantity(other, dimension, "", stated).si(), stated);
+        return new Quantity(other, dimension, WrittenUnit.of(written, dimension).written(other), swing);
     }
 
     /**

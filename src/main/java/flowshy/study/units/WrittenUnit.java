@@ -43,4 +43,14 @@ public record WrittenUnit(String symbol, double zero, double one) {
     public double show(double value) {
         return (value - zero) / (one - zero);
     }
+
+    /**
+     * A value as it would be written in this unit.
+     *
+     * @param value in SI
+     * @return six significant digits and the symbol
+     */
+    public String written(double value) {
+        return (Digits.six(show(value)) + " " + symbol).strip();
+    }
 }

@@ -3,6 +3,7 @@ package flowshy.verdict.compare;
 import flowshy.response.Response;
 import flowshy.verdict.BandsAnswer;
 import flowshy.verdict.BandsQuestion;
+import flowshy.verdict.Decision;
 import flowshy.verdict.design.NoDesignException;
 import flowshy.verdict.error.StreamTooFastException;
 import flowshy.verdict.figure.Evaluated;
@@ -13,6 +14,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.stream.IntStream;
+import java.util.stream.Stream;
 
 /**
  * Which of these devices does better, and by how much?
@@ -47,6 +49,33 @@ public record CompareQuestion(List<Contender> contenders, Optional<Figure> equal
                 .toList();
     }
 
+    /**
+     * The frequency at which devices are compared: that of the first, whichever the others are limited at.
+     *
+     * @return [Hz]
+     * @throws java.util.NoSuchElementException if the first has no question
+     */
+    public double reference() {
+        return contenders.get(0).question().orElseThrow().reference();
+    }
+
+    /**
+     * Whether there is a device among them that does what is asked.
+     *
+     * @param devices an answer
+     * @return meets if one meets every limit; else undecided or fails, as the nearest of them; not-asked where none has a limit
+     */
+    public static Decision decision(List<ComparedDevice> devices) {
+        List<Decision> decisions = devices.stream()
+                .flatMap(device -> device.answer().stream())
+                .map(answer -> answer.verdict().decision())
+                .toList();
+        return Stream.of(Decision.MEETS, Decision.UNDECIDED, Decision.FAILS)
+                .filter(decisions::contains)
+                .findFirst()
+                .orElse(Decision.NOT_ASKED);
+    }
+
     private ComparedDevice scaled(Contender contender, Found target) {
         if (target.number().isEmpty()) {
             return none(contender, "the first has no such quantity: " + target.reason());
@@ -58,7 +87,8 @@ public record CompareQuestion(List<Contender> contenders, Optional<Figure> equal
             Scaled scaled = new Equalizer(
                             equal.orElseThrow(),
                             target.value(),
-                            contender.scaling().get())
+                            contender.scaling().get(),
+                            reference())
                     .solve();
             return compared(contender, Optional.of(scaled.question()), Optional.of(scaled));
         } catch (NoSolutionException | NoDesignException e) {
@@ -70,8 +100,7 @@ public record CompareQuestion(List<Contender> contenders, Optional<Figure> equal
         return new ComparedDevice(contender, Optional.empty(), Optional.empty(), Map.of(), Optional.empty(), reason);
     }
 
-    private static ComparedDevice compared(
-            Contender contender, Optional<BandsQuestion> question, Optional<Scaled> scaled) {
+    private ComparedDevice compared(Contender contender, Optional<BandsQuestion> question, Optional<Scaled> scaled) {
         if (question.isEmpty()) {
             return none(contender, contender.reason());
         }
@@ -79,7 +108,7 @@ public record CompareQuestion(List<Contender> contenders, Optional<Figure> equal
             BandsQuestion asked = question.get();
             BandsAnswer answer = asked.answer();
             Response response = new Response(asked.device());
-            Evaluated device = new Evaluated(asked, response, asked.reading(response), answer.error());
+            Evaluated device = new Evaluated(asked, reference(), response, asked.reading(response), answer.error());
             Map<Figure, Found> figures = new EnumMap<>(Figure.class);
             for (Figure figure : Figure.values()) {
                 figures.put(figure, figure.of(device));

@@ -24,6 +24,9 @@ final class Equalizer {
 
     private static final double ACCURACY = 1e-14;
 
+    /** Rounding alone: a quantity that changes by less does not depend on the number. */
+    private static final double UNTOUCHED = 1e-12;
+
     /** How well the scaled device must meet the value when it is worked out anew. */
     private static final double MET = 1e-9;
 
@@ -33,16 +36,19 @@ final class Equalizer {
     private final Figure figure;
     private final double target;
     private final Scaling scaling;
+    private final double frequency;
 
     /** Smallest and largest value met, for the message. */
     private double least = Double.POSITIVE_INFINITY;
 
     private double most = Double.NEGATIVE_INFINITY;
 
-    Equalizer(Figure figure, double target, Scaling scaling) {
+    /** Of a quantity that depends on the frequency: at which [Hz]. */
+    Equalizer(Figure figure, double target, Scaling scaling, double frequency) {
         this.figure = figure;
         this.target = target;
         this.scaling = scaling;
+        this.frequency = frequency;
     }
 
     /** One side of the search. */
@@ -75,7 +81,7 @@ final class Equalizer {
     }
 
     Scaled solve() {
-        Found now = figure.of(new Evaluated(scaling.at(scaling.start())));
+        Found now = found(scaling.at(scaling.start()));
         if (now.number().isEmpty()) {
             throw new NoSolutionException("its " + figure.word() + " is not known: " + now.reason());
         }
@@ -85,7 +91,7 @@ final class Equalizer {
         }
         double value = FastMath.abs(now.value() / target - 1.0) < MET ? scaling.start() : root(now.value());
         BandsQuestion question = scaling.at(value);
-        double after = figure.of(new Evaluated(question)).value();
+        double after = found(question).value();
         LengthModel model = question.device().hair().lengthModel();
         double met = model == LengthModel.AUTO || model == LengthModel.FINITE ? MET_ON_MESHES : MET;
         if (!(FastMath.abs(after / target - 1.0) <= met)) {
@@ -94,6 +100,10 @@ final class Equalizer {
         }
         return new Scaled(
                 figure, scaling.words(), scaling.change(value), value / scaling.start(), now.value(), after, question);
+    }
+
+    private Found found(BandsQuestion question) {
+        return figure.of(new Evaluated(question, frequency));
     }
 
     private double root(double now) {
@@ -105,6 +115,15 @@ final class Equalizer {
             if ((up.open && up.steps(bracket)) || (down.open && down.steps(bracket))) {
                 return between(bracket[0], bracket[1]);
             }
+        }
+        if (up.value > down.value && most - least <= UNTOUCHED * most) {
+            throw new NoSolutionException(say(
+                    "%s does not change its %s, which is %.4g %s; %.4g is wanted",
+                    scaling.words(),
+                    figure.word(),
+                    figure.unit().show(now),
+                    figure.unit().shown(),
+                    figure.unit().show(target)));
         }
         throw new NoSolutionException(say(
                 "from %s to %s its %s goes from %.4g to %.4g %s; %.4g is wanted",
@@ -132,7 +151,7 @@ final class Equalizer {
     /** ln of the quantity over the value wanted; absent where there is no device or no such quantity. */
     private OptionalDouble mismatch(double value) {
         try {
-            OptionalDouble found = figure.of(new Evaluated(scaling.at(value))).number();
+            OptionalDouble found = found(scaling.at(value)).number();
             return found.isPresent() && found.getAsDouble() > 0.0
                     ? OptionalDouble.of(noted(found.getAsDouble()))
                     : OptionalDouble.empty();

@@ -74,8 +74,26 @@ public final class Evaluated {
      * @param error what the surroundings do
      */
     public Evaluated(BandsQuestion question, Response response, BandReading reading, Optional<ErrorBudget> error) {
+        this(question, question.reference(), response, reading, error);
+    }
+
+    /**
+     * The same at another frequency.
+     *
+     * @param question device, band, limits, surroundings
+     * @param frequency at which what depends on it is evaluated [Hz], also outside the band
+     * @param response of the device
+     * @param reading what it reads over its band
+     * @param error what the surroundings do
+     */
+    public Evaluated(
+            BandsQuestion question,
+            double frequency,
+            Response response,
+            BandReading reading,
+            Optional<ErrorBudget> error) {
         this.question = question;
-        this.frequency = question.reference();
+        this.frequency = frequency;
         Evaluated fresh = new Evaluated(question);
         this.response = () -> response;
         this.point = new Once<>(() -> response.at(frequency));

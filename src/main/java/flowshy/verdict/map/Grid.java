@@ -1,7 +1,8 @@
 package flowshy.verdict.map;
 
+import flowshy.math.Figures;
 import java.util.ArrayList;
-import java.util.Collections;
+import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -83,17 +84,33 @@ public record Grid(Axis across, Axis down, List<Spot> spots) {
     }
 
     /**
-     * Why places have no number, or one that counts little, and how many each reason has.
+     * Why places have no number, or one that counts little. What differs in its figures alone is one reason.
      *
-     * @return in the order met, line after line
+     * @param first as said at the first place that has it
+     * @param places how many have it
+     * @param alike whether it is said in the same figures at all of them
      */
-    public Map<String, Integer> reasons() {
-        Map<String, Integer> reasons = new LinkedHashMap<>();
+    public record Reason(String first, int places, boolean alike) {}
+
+    /**
+     * Why places have no number, or one that counts little.
+     *
+     * @return the most frequent first, of equals that met first, line after line
+     */
+    public List<Reason> reasons() {
+        Map<String, Integer> said = new LinkedHashMap<>();
         for (Spot spot : spots) {
             if (!spot.reason().isEmpty()) {
-                reasons.merge(spot.reason(), 1, Integer::sum);
+                said.merge(spot.reason(), 1, Integer::sum);
             }
         }
-        return Collections.unmodifiableMap(reasons);
+        Map<String, Reason> sorts = new LinkedHashMap<>();
+        said.forEach((reason, places) -> sorts.merge(
+                Figures.blanked(reason),
+                new Reason(reason, places, true),
+                (one, other) -> new Reason(one.first(), one.places() + other.places(), false)));
+        return sorts.values().stream()
+                .sorted(Comparator.comparingInt((Reason reason) -> -reason.places()))
+                .toList();
     }
 }

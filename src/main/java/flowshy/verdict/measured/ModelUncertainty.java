@@ -1,12 +1,10 @@
 package flowshy.verdict.measured;
 
 import flowshy.medium.Medium;
-import flowshy.medium.PropertySource;
 import flowshy.response.Device;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import java.util.OptionalDouble;
 import org.hipparchus.complex.Complex;
 import org.hipparchus.util.FastMath;
 
@@ -20,8 +18,8 @@ final class ModelUncertainty {
 
     ModelUncertainty(Device device, Prediction base) {
         this.base = base;
-        double density = stated(device.around(), "density");
-        double viscosity = stated(device.around(), "viscosity");
+        double density = device.around().uncertainty("density").orElse(0.0);
+        double viscosity = device.around().uncertainty("viscosity").orElse(0.0);
         if (density > 0.0) {
             moved.add(new Prediction(in(device, 1.0 + density, 1.0)));
         }
@@ -52,15 +50,6 @@ final class ModelUncertainty {
             }
         }
         return new Spread(level, phase);
-    }
-
-    private static double stated(Medium medium, String property) {
-        return medium.sources().stream()
-                .filter(source -> source.property().equals(property))
-                .map(PropertySource::uncertainty)
-                .flatMapToDouble(OptionalDouble::stream)
-                .max()
-                .orElse(0.0);
     }
 
     private static Device in(Device device, double density, double viscosity) {

@@ -325,7 +325,7 @@ class KeysTest {
         Form form = read(Studies.SMALLEST);
         Form thicker = form.with("hair.diameter", 99e-6);
         assertThat(thicker.si("hair.diameter")).isEqualTo(99e-6);
-        assertThat(thicker.word("hair.diameter")).contains("9.9e-5 m");
+        assertThat(thicker.word("hair.diameter")).contains("99 um");
         assertThat(form.si("hair.diameter")).isEqualTo(77e-6);
         Form warm = form.with("medium.temperature", 300.0);
         assertThat(warm.given("medium.temperature")).isTrue();

@@ -344,4 +344,18 @@ class QuantityTest {
     void printsSixDigits(double value, String text) {
         assertThat(Digits.six(value)).isEqualTo(text);
     }
+
+    /** Another value is written as the first was. */
+    @Test
+    void anotherValueKeepsTheUnit() {
+        assertThat(Quantity.read("80 um", Dimension.LENGTH).at(2.106667e-4).written())
+                .isEqualTo("210.667 um");
+        assertThat(Quantity.read("-20 degC", Dimension.TEMPERATURE).at(313.15).written())
+                .isEqualTo("40 degC");
+        assertThat(Quantity.read("3.5", Dimension.NUMBER).at(0.25).written()).isEqualTo("0.25");
+        Quantity peak = Quantity.readAmplitude("2 mm/s peak", Dimension.SPEED).at(0.003 / Math.sqrt(2.0));
+        assertThat(peak.written()).isEqualTo("3 mm/s peak");
+        assertThat(Quantity.readAmplitude(peak.written(), Dimension.SPEED).value())
+                .isCloseTo(peak.value(), within(1e-12));
+    }
 }

@@ -6,7 +6,6 @@ import static org.assertj.core.api.Assertions.within;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Map;
 import java.util.concurrent.CancellationException;
 import java.util.concurrent.CountDownLatch;
 import java.util.concurrent.atomic.AtomicBoolean;
@@ -58,7 +57,16 @@ class GridRunTest {
             }
         }
         assertThat(thick).isPositive();
-        assertThat(grid.reasons()).isEqualTo(Map.of("too thick", thick));
+        assertThat(grid.reasons()).containsExactly(new Grid.Reason("too thick", thick, true));
+        Spot cold = Spot.none("from -60 to 150, -70.5 was asked for");
+        Spot hot = Spot.none("from -60 to 150, 160 was asked for");
+        Spot dry = Spot.none("no suspension");
+        Grid four = new Grid(
+                new Axis("x", 1.0, 2.0, 2, false),
+                new Axis("y", 1.0, 2.0, 2, false),
+                List.of(dry, cold, hot, Spot.of(1.0)));
+        assertThat(four.reasons())
+                .containsExactly(new Grid.Reason(cold.reason(), 2, false), new Grid.Reason(dry.reason(), 1, true));
         assertThatThrownBy(() -> new Spot(Double.POSITIVE_INFINITY, "")).hasMessageContaining("reason");
     }
 

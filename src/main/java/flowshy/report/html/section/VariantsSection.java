@@ -30,7 +30,7 @@ final class VariantsSection implements ReportSection {
         List<ComparedDevice> devices = report.variants();
         words.paragraph(
                 "The suspension of each variant is held as it was measured on the study's own hair, unless the variant says"
-                        + " otherwise.");
+                        + " otherwise. " + CompareTable.frame(devices));
         html.tag("dl")
                 .holds(() -> IntStream.range(0, devices.size()).forEach(i -> device(html, words, i, devices.get(i))));
         words.charts(id());
