@@ -134,6 +134,9 @@ class CompareCommandTest {
         assertThat(Json.object(devices.get(1).get("scaled")).get("change"))
                 .isEqualTo("hair.head-diameter from 118.00 um to 102.97 um");
         assertThat(devices.get(2).get("no_solution")).isEqualTo("hair.head-diameter: the study does not state it");
+        // a roof changes no torque: there is nothing to be scaled, so no number is needed
+        assertThat(devices.get(3)).doesNotContainKey("no_solution").containsKey("verdict");
+        assertThat(Json.object(devices.get(3).get("scaled")).get("ratio")).isEqualTo(1.0);
     }
 
     @Test

@@ -263,23 +263,22 @@ public final class MapChart {
         if (levels.size() > heavy.size()) {
             sheet.keyPlain("lines of equal value");
         }
-        List<String> none = new ArrayList<>();
+        int missing = 0;
         boolean weak = false;
         for (Grid.Reason reason : grid.reasons()) {
             String words = (reason.alike() ? "" : "such as ") + reason.first();
-            boolean missing = grid.spots().stream()
-                    .anyMatch(spot -> !spot.there() && spot.reason().equals(reason.first()));
-            if (missing) {
-                none.add(words);
+            if (!reason.numbered()) {
+                missing++;
+                if (missing <= REASONS) {
+                    sheet.keyMissing("no number: " + words);
+                }
             } else {
                 weak = true;
                 sheet.keyWeak(words);
             }
         }
-        if (!none.isEmpty()) {
-            String more = none.size() > REASONS ? "; and " + (none.size() - REASONS) + " other reasons" : "";
-            sheet.keyMissing("no number: " + String.join("; ", none.subList(0, FastMath.min(none.size(), REASONS)))
-                    + more);
+        if (missing > REASONS) {
+            sheet.remark("No number for " + (missing - REASONS) + " other reasons too.");
         }
         sheet.remark((weak ? "Dotted: no more than a trend. " : "") + where() + "Finite length: " + model() + "."
                 + (map.study().device().suspension().isPresent()

@@ -1,5 +1,7 @@
 package flowshy.study.units;
 
+import java.util.Map;
+import java.util.concurrent.ConcurrentHashMap;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 
@@ -13,6 +15,13 @@ import java.util.regex.Pattern;
 public record WrittenUnit(String symbol, double zero, double one) {
     private static final Pattern NUMBER = Pattern.compile("\\s*[-+\u2212]?[0-9.]+(?:[eE][-+]?[0-9]+)?\\s*");
 
+    /** Units read already: a map names the numbers of every place that makes no device. */
+    private static final Map<Sort, WrittenUnit> KNOWN = new ConcurrentHashMap<>();
+
+    private static final int MOST = 1000;
+
+    private record Sort(String symbol, Dimension dimension) {}
+
     /**
      * The unit of a text.
      *
@@ -24,7 +33,16 @@ public record WrittenUnit(String symbol, double zero, double one) {
     public static WrittenUnit of(String written, Dimension dimension) {
         Matcher number = NUMBER.matcher(written);
         String symbol = number.lookingAt() ? written.substring(number.end()).strip() : "";
-        return new WrittenUnit(symbol, read("0 ", symbol, dimension), read("1 ", symbol, dimension));
+        Sort sort = new Sort(symbol, dimension);
+        WrittenUnit known = KNOWN.get(sort);
+        if (known != null) {
+            return known;
+        }
+        WrittenUnit unit = new WrittenUnit(symbol, read("0 ", symbol, dimension), read("1 ", symbol, dimension));
+        if (KNOWN.size() < MOST) {
+            KNOWN.put(sort, unit);
+        }
+        return unit;
     }
 
     private static double read(String number, String symbol, Dimension dimension) {

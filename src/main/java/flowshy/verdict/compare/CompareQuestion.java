@@ -80,16 +80,28 @@ public record CompareQuestion(List<Contender> contenders, Optional<Figure> equal
         if (target.number().isEmpty()) {
             return none(contender, "the first has no such quantity: " + target.reason());
         }
-        if (contender.question().isEmpty() || contender.scaling().isEmpty()) {
+        if (contender.question().isEmpty()) {
+            return none(contender, contender.reason());
+        }
+        Figure figure = equal.orElseThrow();
+        Found now = figure.of(new Evaluated(contender.question().get(), reference()));
+        if (contender.scaling().isEmpty() && now.number().isPresent() && Equalizer.met(now.value(), target.value())) {
+            Scaled still = new Scaled(
+                    figure,
+                    "",
+                    "",
+                    1.0,
+                    now.value(),
+                    now.value(),
+                    contender.question().get());
+            return compared(contender, contender.question(), Optional.of(still));
+        }
+        if (contender.scaling().isEmpty()) {
             return none(contender, contender.reason());
         }
         try {
-            Scaled scaled = new Equalizer(
-                            equal.orElseThrow(),
-                            target.value(),
-                            contender.scaling().get(),
-                            reference())
-                    .solve();
+            Scaled scaled =
+                    new Equalizer(figure, target.value(), contender.scaling().get(), reference()).solve();
             return compared(contender, Optional.of(scaled.question()), Optional.of(scaled));
         } catch (NoSolutionException | NoDesignException e) {
             return none(contender, e.getMessage());

@@ -80,6 +80,11 @@ final class Equalizer {
         }
     }
 
+    /** Whether a quantity is the one wanted as it stands. */
+    static boolean met(double now, double target) {
+        return FastMath.abs(now / target - 1.0) < MET;
+    }
+
     Scaled solve() {
         Found now = found(scaling.at(scaling.start()));
         if (now.number().isEmpty()) {
@@ -89,7 +94,7 @@ final class Equalizer {
             throw new NoSolutionException(
                     scaling.words() + " and " + figure.word() + " must be above zero to be scaled");
         }
-        double value = FastMath.abs(now.value() / target - 1.0) < MET ? scaling.start() : root(now.value());
+        double value = met(now.value(), target) ? scaling.start() : root(now.value());
         BandsQuestion question = scaling.at(value);
         double after = found(question).value();
         LengthModel model = question.device().hair().lengthModel();

@@ -89,8 +89,11 @@ public record Grid(Axis across, Axis down, List<Spot> spots) {
      * @param first as said at the first place that has it
      * @param places how many have it
      * @param alike whether it is said in the same figures at all of them
+     * @param numbered whether they have a number all the same, one that counts little
      */
-    public record Reason(String first, int places, boolean alike) {}
+    public record Reason(String first, int places, boolean alike, boolean numbered) {}
+
+    private record Spoken(String words, boolean numbered) {}
 
     /**
      * Why places have no number, or one that counts little.
@@ -98,17 +101,17 @@ public record Grid(Axis across, Axis down, List<Spot> spots) {
      * @return the most frequent first, of equals that met first, line after line
      */
     public List<Reason> reasons() {
-        Map<String, Integer> said = new LinkedHashMap<>();
+        Map<Spoken, Integer> said = new LinkedHashMap<>();
         for (Spot spot : spots) {
             if (!spot.reason().isEmpty()) {
-                said.merge(spot.reason(), 1, Integer::sum);
+                said.merge(new Spoken(spot.reason(), spot.there()), 1, Integer::sum);
             }
         }
-        Map<String, Reason> sorts = new LinkedHashMap<>();
-        said.forEach((reason, places) -> sorts.merge(
-                Figures.blanked(reason),
-                new Reason(reason, places, true),
-                (one, other) -> new Reason(one.first(), one.places() + other.places(), false)));
+        Map<Spoken, Reason> sorts = new LinkedHashMap<>();
+        said.forEach((spoken, places) -> sorts.merge(
+                new Spoken(Figures.blanked(spoken.words()), spoken.numbered()),
+                new Reason(spoken.words(), places, true, spoken.numbered()),
+                (one, other) -> new Reason(one.first(), one.places() + other.places(), false, one.numbered())));
         return sorts.values().stream()
                 .sorted(Comparator.comparingInt((Reason reason) -> -reason.places()))
                 .toList();

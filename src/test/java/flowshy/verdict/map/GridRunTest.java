@@ -57,7 +57,7 @@ class GridRunTest {
             }
         }
         assertThat(thick).isPositive();
-        assertThat(grid.reasons()).containsExactly(new Grid.Reason("too thick", thick, true));
+        assertThat(grid.reasons()).containsExactly(new Grid.Reason("too thick", thick, true, false));
         Spot cold = Spot.none("from -60 to 150, -70.5 was asked for");
         Spot hot = Spot.none("from -60 to 150, 160 was asked for");
         Spot dry = Spot.none("no suspension");
@@ -66,7 +66,8 @@ class GridRunTest {
                 new Axis("y", 1.0, 2.0, 2, false),
                 List.of(dry, cold, hot, Spot.of(1.0)));
         assertThat(four.reasons())
-                .containsExactly(new Grid.Reason(cold.reason(), 2, false), new Grid.Reason(dry.reason(), 1, true));
+                .containsExactly(
+                        new Grid.Reason(cold.reason(), 2, false, false), new Grid.Reason(dry.reason(), 1, true, false));
         assertThatThrownBy(() -> new Spot(Double.POSITIVE_INFINITY, "")).hasMessageContaining("reason");
     }
 
