@@ -7,9 +7,10 @@ import flowshy.report.chart.FillChart;
 import flowshy.stream.cover.Cover;
 import flowshy.stream.cover.Covers;
 import flowshy.study.Study;
+import flowshy.verdict.Decision;
 import flowshy.verdict.fill.Fill;
+import flowshy.verdict.fill.FillAnswer;
 import flowshy.verdict.fill.FillQuestion;
-import flowshy.verdict.fill.FillRow;
 import flowshy.verdict.lid.Candidate;
 import java.util.ArrayList;
 import java.util.List;
@@ -26,8 +27,8 @@ import picocli.CommandLine.Spec;
         name = "fill",
         mixinStandardHelpOptions = true,
         description =
-                "The study's device in every fill at the same state, bare and sealed: rejection, resonance, Q, noise, and what"
-                        + " speaks against a fluid.",
+                "The study's device in every fill at the same state, bare and sealed: rejection, resonance, Q, noise, which limits"
+                        + " each misses, amid the surroundings and over the envelope, and what speaks against a fluid.",
         footer = {"", "Example: flowshy fill study.yaml --only \"helium, silicone oil\""})
 final class FillCommand implements Callable<Integer> {
     @Mixin
@@ -57,15 +58,16 @@ final class FillCommand implements Callable<Integer> {
         List<String> tables = new ArrayList<>();
         int code = studies.each(spec.commandLine(), output.json(), study -> {
             FillQuestion question = question(study);
-            List<FillRow> rows = question.answer();
-            texts.add(FillReport.text(study, question, rows));
-            List<Chart> drawn = charts.asked() ? FillChart.of(study, study.acceptance(), rows) : List.of();
+            FillAnswer answer = question.answer();
+            texts.add(FillReport.text(study, question, answer));
+            List<Chart> drawn = charts.asked() ? FillChart.of(study, study.acceptance(), answer.rows()) : List.of();
             charts.add(drawn);
-            objects.add(() -> FillReport.write(json, study, question, rows, drawn));
+            objects.add(() -> FillReport.write(json, study, question, answer, drawn));
             if (output.csv()) {
-                tables.add(FillReport.csv(rows));
+                tables.add(FillReport.csv(answer.rows()));
             }
-            return 0;
+            Decision decision = answer.decision();
+            return decision == Decision.FAILS || decision == Decision.UNDECIDED ? Failures.LIMIT : 0;
         });
         charts.write();
         studies.send(spec.commandLine(), output, json, texts, objects, tables);
@@ -81,12 +83,7 @@ final class FillCommand implements Callable<Integer> {
         List<Cover> covers =
                 study.candidates().stream().map(Candidate::cover).distinct().toList();
         return new FillQuestion(
-                study.device(),
-                study.band(),
-                study.acceptance(),
-                study.reference(),
-                fills,
-                covers.isEmpty() ? List.of(Covers.OPEN, Covers.SEALED) : covers);
+                study.question(), fills, covers.isEmpty() ? List.of(Covers.OPEN, Covers.SEALED) : covers);
     }
 
     private List<Fill> chosen(List<Fill> known) {

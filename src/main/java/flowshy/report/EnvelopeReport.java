@@ -42,8 +42,7 @@ public final class EnvelopeReport {
 
     static void print(TextPage page, EnvelopeAnswer answer) {
         page.heading("Envelope: " + answer.decision().word());
-        answer.sides().forEach(side -> page.row(side.key(), moves(side)));
-        page.paragraph(how(answer));
+        sides(page, answer);
         for (Worst worst : answer.limits()) {
             page.row("worst " + worst.limit().name(), words(worst));
         }
@@ -54,6 +53,17 @@ public final class EnvelopeReport {
                             + Figures.of(answer.most().orElseThrow(), 4) + " dB over the states");
         }
         answer.impossible().forEach(one -> page.note("[cannot be worked out]", one.state() + ": " + one.reason()));
+    }
+
+    /** The states alone, where the answers of several devices follow. */
+    static void states(TextPage page, EnvelopeAnswer answer) {
+        page.heading("Envelope");
+        sides(page, answer);
+    }
+
+    private static void sides(TextPage page, EnvelopeAnswer answer) {
+        answer.sides().forEach(side -> page.row(side.key(), moves(side)));
+        page.paragraph(how(answer));
     }
 
     /**
@@ -88,7 +98,12 @@ public final class EnvelopeReport {
                 json.object("limit", () -> LimitJson.write(json, worst.limit()));
             });
             json.cell("least_rejection_db", Cell.of(answer.least(), NO_FLOW));
+            answer.lowest().ifPresent(least -> json.text("least_rejection_state", least.state()));
             json.cell("largest_least_rejection_db", Cell.of(answer.most(), NO_FLOW));
+            answer.error().ifPresent(most -> {
+                json.number("largest_error_rms_m_s2", most.value());
+                json.text("largest_error_state", most.state());
+            });
             json.array("impossible", answer.impossible(), one -> {
                 json.text("state", one.state());
                 json.text("reason", one.reason());

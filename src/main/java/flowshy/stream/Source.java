@@ -2,6 +2,7 @@ package flowshy.stream;
 
 import flowshy.math.Caveat;
 import flowshy.math.Range;
+import flowshy.medium.Medium;
 import java.util.List;
 
 /**
@@ -126,6 +127,16 @@ public interface Source {
      * @throws IllegalArgumentException if no assumed number has this key
      */
     Source varied(String key, double factor);
+
+    /**
+     * The same source where another medium takes the place of its own: speeds as they are, of sound the pressure; what was computed for
+     * want of a statement is computed anew.
+     *
+     * @param other what flows or carries the sound
+     * @return a new source
+     * @throws UnfitMediumException if no law covers it there
+     */
+    Source in(Medium other);
 
     /**
      * What must stand beside figures of this source.

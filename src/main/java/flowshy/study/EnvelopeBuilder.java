@@ -8,9 +8,9 @@ import flowshy.study.text.Problem;
 import flowshy.study.text.Problems;
 import flowshy.study.text.StudyException;
 import flowshy.study.units.QuantityException;
-import flowshy.verdict.design.DesignSpace;
 import flowshy.verdict.envelope.Envelope;
 import flowshy.verdict.envelope.Side;
+import flowshy.verdict.envelope.StatesOfUse;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -45,7 +45,7 @@ final class EnvelopeBuilder {
     /** A number with the values written; of a range its two ends. */
     private record Written(NumberKey key, List<Double> values, List<String> words, boolean range) {}
 
-    Optional<Envelope> build(boolean surrounded, Function<List<NumberKey>, DesignSpace> space) {
+    Optional<Envelope> build(boolean surrounded, Function<List<NumberKey>, StatesOfUse> space) {
         List<Written> all = new ArrayList<>();
         for (String name : form.entries(GROUP)) {
             side(name, GROUP + "." + name).ifPresent(all::add);

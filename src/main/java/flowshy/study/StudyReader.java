@@ -10,9 +10,7 @@ import flowshy.study.text.Problems;
 import flowshy.study.text.Setting;
 import flowshy.study.text.StudyException;
 import flowshy.study.text.StudyText;
-import flowshy.verdict.BandsAnswer;
-import flowshy.verdict.design.Sensitivities;
-import flowshy.verdict.design.SensitivityQuestion;
+import flowshy.verdict.design.Knob;
 import java.nio.file.Path;
 import java.util.Comparator;
 import java.util.List;
@@ -88,14 +86,13 @@ public final class StudyReader {
     }
 
     /**
-     * What every dimension and property does to the rejection: at the frequency of comparison and where the rejection is least.
+     * Every dimension and property on which the rejection may depend.
      *
      * @param study read by this reader
-     * @param answer to its question
-     * @return by each positive number of the study's hair, cover and medium, and some of them together
+     * @return one a positive number of the study's hair, cover and medium, and some of them together
      */
-    public Sensitivities sensitivities(Study study, BandsAnswer answer) {
-        return new SensitivityQuestion(study.device(), Knobs.of(this, study), Knobs.places(study, answer)).answer();
+    public List<Knob> knobs(Study study) {
+        return Knobs.of(this, study);
     }
 
     private FamilyReader family(Node.Mapping root) {

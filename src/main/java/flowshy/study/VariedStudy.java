@@ -3,12 +3,16 @@ package flowshy.study;
 import flowshy.hair.Hair;
 import flowshy.hair.LengthModel;
 import flowshy.medium.Medium;
+import flowshy.medium.MediumException;
+import flowshy.medium.MediumQuery;
 import flowshy.response.Device;
 import flowshy.response.Hold;
 import flowshy.response.Suspension;
 import flowshy.response.SuspensionException;
 import flowshy.response.SuspensionStatement;
 import flowshy.stream.Source;
+import flowshy.stream.UnfitMediumException;
+import flowshy.stream.cover.Cover;
 import flowshy.study.keys.Form;
 import flowshy.study.text.Problem;
 import flowshy.study.text.Problems;
@@ -16,9 +20,10 @@ import flowshy.study.text.StudyException;
 import flowshy.verdict.Acceptance;
 import flowshy.verdict.Band;
 import flowshy.verdict.BandsQuestion;
-import flowshy.verdict.design.DesignSpace;
 import flowshy.verdict.design.NoDesignException;
+import flowshy.verdict.envelope.StatesOfUse;
 import flowshy.verdict.error.Motion;
+import flowshy.verdict.lid.Candidate;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Map;
@@ -31,7 +36,7 @@ import java.util.concurrent.ConcurrentHashMap;
  * solved anew on the base's hair. A default that the base took from another key stays as it was taken: a can filled at the base's temperature
  * is then used at another.
  */
-public final class VariedStudy implements DesignSpace {
+public final class VariedStudy implements StatesOfUse {
     /** Keys of the suspension that were measured; the others say how it is built. */
     private static final List<String> MEASURED = List.of(
             "suspension.stiffness",
@@ -52,10 +57,17 @@ public final class VariedStudy implements DesignSpace {
     private final List<NumberKey> numbers;
     private final List<String> paths;
     private final boolean surrounded;
+    private final DevicePlace place;
     private final Map<List<Double>, Medium> known = new ConcurrentHashMap<>();
 
     private VariedStudy(
-            Form form, FilesRead files, Study base, Hold hold, List<NumberKey> numbers, boolean surrounded) {
+            Form form,
+            FilesRead files,
+            Study base,
+            Hold hold,
+            List<NumberKey> numbers,
+            boolean surrounded,
+            DevicePlace place) {
         this.form = form;
         this.files = files;
         this.base = base;
@@ -63,6 +75,7 @@ public final class VariedStudy implements DesignSpace {
         this.numbers = List.copyOf(numbers);
         this.paths = numbers.stream().map(NumberKey::path).toList();
         this.surrounded = surrounded;
+        this.place = place;
     }
 
     /**
@@ -88,7 +101,9 @@ public final class VariedStudy implements DesignSpace {
      */
     public static VariedStudy of(StudyReader reader, List<NumberKey> numbers, Hold hold) {
         Form form = reader.form();
-        return new VariedStudy(form, new FilesRead(reader.folder()), reader.study(form), hold, numbers, true);
+        Study base = reader.study(form);
+        return new VariedStudy(
+                form, new FilesRead(reader.folder()), base, hold, numbers, true, DevicePlace.own(base.device()));
     }
 
     /** The space of a study that is made already. */
@@ -98,7 +113,7 @@ public final class VariedStudy implements DesignSpace {
 
     /** The same, whose files have been read. */
     static VariedStudy of(Form form, FilesRead files, Study base, Hold hold, List<NumberKey> numbers) {
-        return new VariedStudy(form, files, base, hold, numbers, true);
+        return new VariedStudy(form, files, base, hold, numbers, true, DevicePlace.own(base.device()));
     }
 
     /**
@@ -158,8 +173,22 @@ public final class VariedStudy implements DesignSpace {
     }
 
     @Override
-    public DesignSpace still() {
-        return new VariedStudy(form, files, base, hold, numbers, false);
+    public StatesOfUse still() {
+        return new VariedStudy(form, files, base, hold, numbers, false, place);
+    }
+
+    @Override
+    public StatesOfUse under(Candidate candidate) {
+        return at(DevicePlace.under(base, candidate));
+    }
+
+    @Override
+    public StatesOfUse filled(MediumQuery fluid, Cover cover) {
+        return at(DevicePlace.filled(fluid, cover));
+    }
+
+    private VariedStudy at(DevicePlace there) {
+        return new VariedStudy(form, files, base, hold, numbers, surrounded, there);
     }
 
     @Override
@@ -185,6 +214,8 @@ public final class VariedStudy implements DesignSpace {
             e.problems().forEach(problems::add);
         } catch (SuspensionException e) {
             throw new NoDesignException("suspension." + e.key() + ": " + e.getMessage());
+        } catch (MediumException | UnfitMediumException e) {
+            throw new NoDesignException(e.getMessage()); // of a fluid in place of the study's
         }
         throw new NoDesignException(problems.first().map(VariedStudy::said).orElse("the values make no device"));
     }
@@ -222,8 +253,7 @@ public final class VariedStudy implements DesignSpace {
 
         Optional<BandsQuestion> question() {
             Optional<Hair> hair = hair();
-            Optional<Medium> outside =
-                    varies("medium.") ? medium() : Optional.of(base.device().outside());
+            Optional<Medium> outside = outside();
             StudyBuilder builder = new StudyBuilder(now, problems, read);
             Optional<Band> band = varies("band.") ? builder.band() : Optional.of(base.band());
             if (hair.isEmpty() || outside.isEmpty() || band.isEmpty()) {
@@ -244,6 +274,16 @@ public final class VariedStudy implements DesignSpace {
             List<Source> sources = surrounded ? sources(hair.get(), outside.get()) : List.of();
             return Optional.of(
                     new BandsQuestion(device, band.get(), acceptance, motion, sources, reference(band.get())));
+        }
+
+        private Optional<Medium> outside() {
+            if (place.fluid().isPresent()) {
+                return Optional.of(place.fluidAt(
+                        now.si("medium.temperature"),
+                        now.siIfAny("medium.pressure")
+                                .orElse(base.device().outside().pressure())));
+            }
+            return varies("medium.") ? medium() : Optional.of(base.device().outside());
         }
 
         private double reference(Band band) {
@@ -282,12 +322,14 @@ public final class VariedStudy implements DesignSpace {
         }
 
         private Optional<CoverBuilder.Fitted> cover(Hair hair, Medium outside, Band band) {
-            if (varies("cover.", "medium.", "band.")) {
-                return covers.build("cover", Optional.of(hair), Optional.of(outside), Optional.of(band));
+            String path = place.path();
+            if (!path.isEmpty() && varies(path + ".", "medium.", "band.")) {
+                return covers.build(path, Optional.of(hair), Optional.of(outside), Optional.of(band));
             }
-            Device there = base.device();
-            return covers.alsoFits("cover", there.cover(), hair)
-                    ? Optional.of(new CoverBuilder.Fitted(there.cover(), there.around()))
+            return covers.alsoFits(path.isEmpty() ? "cover" : path, place.cover(), hair)
+                    ? Optional.of(new CoverBuilder.Fitted(
+                            place.cover(),
+                            path.isEmpty() ? outside : place.around().orElse(outside)))
                     : Optional.empty();
         }
 
@@ -311,7 +353,19 @@ public final class VariedStudy implements DesignSpace {
         }
 
         private List<Source> sources(Hair hair, Medium outside) {
-            return base.surroundings().isEmpty() || !varies("surroundings.", "medium.", "hair.")
+            if (place.fluid().isPresent()) {
+                // what the study has outside need not bear the state: its sources are taken over from its own
+                List<Source> stated = sources(
+                        varies("surroundings.", "hair."), hair, base.device().outside());
+                return place.cover().closed()
+                        ? stated
+                        : stated.stream().map(source -> source.in(outside)).toList();
+            }
+            return sources(varies("surroundings.", "medium.", "hair."), hair, outside);
+        }
+
+        private List<Source> sources(boolean anew, Hair hair, Medium outside) {
+            return base.surroundings().isEmpty() || !anew
                     ? base.surroundings()
                     : new SurroundingsBuilder(now, problems, read, outside, hair).build();
         }

@@ -15,7 +15,6 @@ import flowshy.verdict.figure.Evaluated;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import java.util.function.UnaryOperator;
 
 /**
  * The main question about a device.
@@ -101,6 +100,16 @@ public record BandsQuestion(
     }
 
     /**
+     * The same question amid other flows.
+     *
+     * @param flows that are there; empty: the verdict holds at equal accelerations only
+     * @return device, band, limits and motion kept, at this one state
+     */
+    public BandsQuestion amid(List<Source> flows) {
+        return new BandsQuestion(device, band, acceptance, motion, flows, reference);
+    }
+
+    /**
      * Answers at third-octave frequencies.
      *
      * @return bands, points and verdict
@@ -116,6 +125,19 @@ public record BandsQuestion(
      * @return bands, points and verdict
      */
     public BandsAnswer answer(List<Double> frequencies) {
+        return answer(frequencies, error());
+    }
+
+    /**
+     * What a verdict needs and no more: at the frequency of comparison alone, assumed numbers of sources as they are taken.
+     *
+     * @return the same verdict
+     */
+    public BandsAnswer judged() {
+        return answer(List.of(reference), budget().map(SurroundingsQuestion::asTaken));
+    }
+
+    private BandsAnswer answer(List<Double> frequencies, Optional<ErrorBudget> error) {
         Response response = new Response(device);
         response.expect(band.from(), band.to());
         DeviceFacts facts = DeviceFacts.of(device, band);
@@ -123,12 +145,11 @@ public record BandsQuestion(
         List<ResponsePoint> points = frequencies.stream().map(response::at).toList();
         boolean ended = Assumptions.ended(caveats, Subject.REJECTION);
         BandReading reading = new BandReading(response, band, acceptance.margin(), () -> ended);
-        Optional<ErrorBudget> error = error();
         error.ifPresent(budget -> caveats.addAll(budget.caveats()));
         List<ReadingBand> bands = reading.bands();
         Evaluated known = new Evaluated(this, response, reading, error);
         Verdict own = new Judgement(known, caveats).of(bands, reading.least());
-        Optional<EnvelopeAnswer> states = envelope.map(all -> all.answer(UnaryOperator.identity()));
+        Optional<EnvelopeAnswer> states = envelope.map(Envelope::answer);
         Verdict verdict = states.map(found -> Envelope.together(own, found)).orElse(own);
         return new BandsAnswer(
                 device,
@@ -170,8 +191,12 @@ public record BandsQuestion(
      * @return their error over the band, empty where none are given
      */
     public Optional<ErrorBudget> error() {
+        return budget().map(SurroundingsQuestion::answer);
+    }
+
+    private Optional<SurroundingsQuestion> budget() {
         return sources.isEmpty()
                 ? Optional.empty()
-                : Optional.of(new SurroundingsQuestion(device, band, acceptance.margin(), motion, sources).answer());
+                : Optional.of(new SurroundingsQuestion(device, band, acceptance.margin(), motion, sources));
     }
 }

@@ -1,5 +1,7 @@
 package flowshy.report.chart;
 
+import flowshy.report.LidReport;
+import flowshy.report.LidReport.Demand;
 import flowshy.report.chart.ChartTable.Head;
 import flowshy.report.chart.ChartTable.Row;
 import flowshy.report.chart.paper.Ink;
@@ -15,10 +17,10 @@ import flowshy.verdict.BandsAnswer.Extreme;
 import flowshy.verdict.Reads;
 import flowshy.verdict.curve.CurvePoint;
 import flowshy.verdict.curve.DeviceCurve;
+import flowshy.verdict.envelope.EnvelopeAnswer.AtState;
 import flowshy.verdict.error.ErrorBudget;
 import flowshy.verdict.lid.CoverRow;
 import flowshy.verdict.lid.LidAnswer;
-import flowshy.verdict.lid.RequiredAttenuation;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
@@ -50,6 +52,7 @@ public final class CoverCharts {
         double margin = answer.bare().acceptance().margin();
         OptionalDouble limit = answer.bare().acceptance().error();
         boolean errors = answer.bare().error().isPresent();
+        boolean states = answer.worst().isPresent();
         List<Row> rows = new ArrayList<>();
         List<List<Double>> rejections = new ArrayList<>(List.of(List.of(0.0, margin)));
         List<List<Double>> rms = new ArrayList<>();
@@ -57,9 +60,13 @@ public final class CoverCharts {
         for (CoverRow row : answer.covers()) {
             double least = row.answer().least().map(Extreme::rejection).orElse(Double.NaN);
             double error = row.answer().error().map(ErrorBudget::rms).orElse(Double.NaN);
-            rows.add(new Row(words(row), errors ? List.of(least, error) : List.of(least)));
-            rejections.add(List.of(least));
-            rms.add(List.of(error));
+            List<Double> figures = new ArrayList<>(errors ? List.of(least, error) : List.of(least));
+            rejections.add(List.of(least, lowest(row)));
+            rms.add(List.of(error, largest(row)));
+            if (states) {
+                figures.addAll(errors ? List.of(lowest(row), largest(row)) : List.of(lowest(row)));
+            }
+            rows.add(new Row(words(row), figures));
         }
         Bounds decibels = Bounds.even(rejections, 10.0);
         RowSheet sheet = new RowSheet(new Heading(SIDE, study), errors ? 150 : 190)
@@ -72,11 +79,17 @@ public final class CoverCharts {
         }
         for (CoverRow row : answer.covers()) {
             List<Mark> marks = new ArrayList<>();
-            marks.add(mark(0, row.answer().least().map(Extreme::rejection).orElse(Double.NaN), none(row)));
+            marks.add(mark(0, row.answer().least().map(Extreme::rejection).orElse(Double.NaN), none(row), !states));
             if (errors) {
-                marks.add(mark(1, row.answer().error().map(ErrorBudget::rms).orElse(Double.NaN), "no flow enters"));
+                marks.add(mark(
+                        1, row.answer().error().map(ErrorBudget::rms).orElse(Double.NaN), "no flow enters", !states));
             }
+            worst(marks, 0, lowest(row));
+            worst(marks, 1, largest(row));
             sheet.row(words(row), marks);
+        }
+        if (states) {
+            sheet.name(Ink.FIRST, "own state").name(Ink.SECOND, "worst state");
         }
         answer.chosen()
                 .ifPresentOrElse(
@@ -86,17 +99,38 @@ public final class CoverCharts {
         if (errors) {
             heads.add(new Head("error_rms_m_s2", "error by flow", "m/s² rms"));
         }
+        if (states) {
+            heads.add(new Head("worst_least_rejection_db", "least rejection, worst state", "dB"));
+        }
+        if (states && errors) {
+            heads.add(new Head("worst_error_rms_m_s2", "error by flow, worst state", "m/s² rms"));
+        }
         return new DrawnChart("covers", SIDE, description(answer), new ChartTable(heads, rows), sheet);
     }
 
-    /** A dot with its figure, or why there is none. */
-    private static Mark mark(int scale, double value, String none) {
+    private static double lowest(CoverRow row) {
+        return row.lowest().map(AtState::value).orElse(Double.NaN);
+    }
+
+    private static double largest(CoverRow row) {
+        return row.largestError().map(AtState::value).orElse(Double.NaN);
+    }
+
+    /** A dot of the worst state, where it has one. */
+    private static void worst(List<Mark> marks, int scale, double value) {
+        if (Double.isFinite(value) && (scale == 0 || value > 0.0)) {
+            marks.add(new Mark(scale, Ink.SECOND, OptionalDouble.of(value), ""));
+        }
+    }
+
+    /** A dot with its figure, where there is room for it, or why there is none. */
+    private static Mark mark(int scale, double value, String none, boolean figure) {
         boolean drawn = Double.isFinite(value) && (scale == 0 || value > 0.0);
         return new Mark(
                 scale,
                 Ink.FIRST,
                 drawn ? OptionalDouble.of(value) : OptionalDouble.empty(),
-                drawn ? TickText.of(value, 3) : none);
+                drawn ? (figure ? TickText.of(value, 3) : "") : none);
     }
 
     private static String none(CoverRow row) {
@@ -121,6 +155,10 @@ public final class CoverCharts {
                             .error()
                             .map(error -> ", error " + TickText.of(error.rms(), 3) + " m/s² rms")
                             .orElse(""))
+                    .append(
+                            Double.isFinite(lowest(row))
+                                    ? ", at worst " + TickText.of(lowest(row), 3) + " dB in the envelope"
+                                    : "")
                     .append(". ");
         }
         return text + answer.verdict().sentence();
@@ -164,6 +202,9 @@ public final class CoverCharts {
                                 : "no flow enters, the rejection has no bound."));
             }
         }
+        if (answer.worst().isPresent()) {
+            sheet.remark("At the study's own state.");
+        }
         panel.level(margin, "margin " + TickText.of(margin, 4) + " dB", Ink.LIMIT);
         return new DrawnChart(
                 "covers-rejection",
@@ -179,10 +220,19 @@ public final class CoverCharts {
 
     private static Chart required(String study, LidAnswer answer) {
         BandsAnswer bare = answer.bare();
-        Columns<RequiredAttenuation> columns = new Columns<>(answer.required());
-        List<Double> frequency = columns.add("frequency_hz", "frequency", "Hz", RequiredAttenuation::frequency);
-        List<Double> attenuation = columns.add("attenuation_db", "attenuation", "dB", RequiredAttenuation::attenuation);
-        List<List<Double>> seen = new ArrayList<>(List.of(attenuation, List.of(0.0)));
+        Columns<Demand> columns = new Columns<>(LidReport.points(answer));
+        List<Double> frequency = columns.add(
+                "frequency_hz", "frequency", "Hz", point -> point.own().frequency());
+        List<Double> attenuation = columns.add(
+                "attenuation_db", "attenuation", "dB", point -> point.own().attenuation());
+        List<Double> worst = answer.worst().isEmpty()
+                ? List.of()
+                : columns.add(
+                        "worst_attenuation_db",
+                        "attenuation, worst state",
+                        "dB",
+                        point -> point.worst().orElseThrow().value());
+        List<List<Double>> seen = new ArrayList<>(List.of(attenuation, worst, List.of(0.0)));
         answer.requiredError().ifPresent(value -> seen.add(List.of(value)));
         Bounds ends = Bounds.even(seen, 5.0);
         Bounds axis = Bounds.about(bare.band().from(), bare.band().to());
@@ -190,6 +240,9 @@ public final class CoverCharts {
         Panel panel = Panel.even("attenuation, dB", ends.from(), ends.to(), 1)
                 .line(wanted, Ink.MOTION, frequency, attenuation)
                 .dots("", Ink.MOTION, frequency, attenuation);
+        if (!worst.isEmpty()) {
+            panel.line("the same, worst of the envelope", Ink.SECOND, frequency, worst);
+        }
         answer.requiredError()
                 .ifPresent(
                         value -> panel.level(value, "for the error limit " + TickText.of(value, 4) + " dB", Ink.LIMIT));

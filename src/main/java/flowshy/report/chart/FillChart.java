@@ -9,6 +9,7 @@ import flowshy.report.chart.paper.RowSheet.Mark;
 import flowshy.report.chart.paper.TickText;
 import flowshy.study.Study;
 import flowshy.verdict.Acceptance;
+import flowshy.verdict.envelope.EnvelopeAnswer.AtState;
 import flowshy.verdict.fill.FillRow;
 import java.util.ArrayList;
 import java.util.List;
@@ -35,6 +36,8 @@ public final class FillChart {
         List<FillRow> all = fit.isEmpty() ? rows : fit;
         List<FillRow> shown = all.subList(0, Math.min(MOST, all.size()));
         boolean noisy = shown.stream().anyMatch(row -> row.thermalNoise().isPresent());
+        boolean states = shown.stream()
+                .anyMatch(row -> row.judged().flatMap(FillRow.Judged::envelope).isPresent());
         double margin = acceptance.margin();
         List<List<Double>> rejections = new ArrayList<>(List.of(List.of(0.0, margin)));
         List<List<Double>> noises = new ArrayList<>();
@@ -44,7 +47,12 @@ public final class FillChart {
             double noise = row.thermalNoise().orElse(Double.NaN);
             noises.add(List.of(noise));
             double rejection = Double.isFinite(row.rejection()) ? row.rejection() : Double.NaN;
-            table.add(new Row(name(row), noisy ? List.of(rejection, noise) : List.of(rejection)));
+            rejections.add(List.of(worst(row)));
+            List<Double> figures = new ArrayList<>(noisy ? List.of(rejection, noise) : List.of(rejection));
+            if (states) {
+                figures.add(worst(row));
+            }
+            table.add(new Row(name(row), figures));
         }
         Bounds decibels = Bounds.even(rejections, 10.0);
         RowSheet sheet = new RowSheet(new Heading(TITLE, study.title()), 150)
@@ -64,10 +72,16 @@ public final class FillChart {
                                     Ink.FIRST,
                                     OptionalDouble.empty(),
                                     Double.isNaN(row.rejection()) ? "reads nothing" : "no flow enters"));
+            if (Double.isFinite(worst(row))) {
+                marks.add(new Mark(0, Ink.SECOND, OptionalDouble.of(worst(row)), ""));
+            }
             if (row.thermalNoise().isPresent()) {
                 marks.add(new Mark(1, Ink.FIRST, row.thermalNoise(), ""));
             }
             sheet.row(name(row), marks);
+        }
+        if (states) {
+            sheet.name(Ink.FIRST, "own state").name(Ink.SECOND, "worst state");
         }
         int left = rows.size() - shown.size();
         if (left > 0) {
@@ -78,7 +92,14 @@ public final class FillChart {
         if (noisy) {
             heads.add(new Head("thermal_noise_m_s2_per_rthz", "thermal noise", "m/s²/√Hz"));
         }
+        if (states) {
+            heads.add(new Head("worst_rejection_db", "least rejection, worst state", "dB"));
+        }
         return List.of(new DrawnChart("fills", TITLE, description(shown), new ChartTable(heads, table), sheet));
+    }
+
+    private static double worst(FillRow row) {
+        return row.lowest().map(AtState::value).orElse(Double.NaN);
     }
 
     private static String name(FillRow row) {

@@ -158,6 +158,11 @@ public abstract class CarriedFlow implements Source {
         return carried.map(Turbulence::breaks).orElse(List.of());
     }
 
+    /** Turbulence, length scale and what else was stated or assumed, in its order. */
+    List<Stated> numbers() {
+        return numbers;
+    }
+
     @Override
     public List<Stated> assumed() {
         return numbers.stream().filter(Stated::assumed).toList();

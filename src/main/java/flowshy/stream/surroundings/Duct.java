@@ -1,10 +1,16 @@
 package flowshy.stream.surroundings;
 
+import static flowshy.math.Figures.say;
+
+import flowshy.medium.Medium;
+import flowshy.stream.Source;
 import flowshy.stream.SourceKind;
 import flowshy.stream.Stated;
+import flowshy.stream.UnfitMediumException;
 import flowshy.stream.turbulence.DuctTurbulence;
 import flowshy.stream.turbulence.TurbulenceSpectrum;
 import flowshy.stream.wall.DuctFlow;
+import flowshy.stream.wall.PipeFriction;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -72,6 +78,23 @@ public final class Duct extends CarriedFlow {
     @Override
     public SourceKind kind() {
         return SourceKind.DUCT;
+    }
+
+    @Override
+    public Source in(Medium other) {
+        DuctFlow there = new DuctFlow(flow.section(), flow.meanSpeed(), other.kinematicViscosity());
+        if (!(there.reynolds() < PipeFriction.PRANDTL.range().high())) {
+            throw new UnfitMediumException(say(
+                    "%s: a Reynolds number of %.3g in the duct, where the law of its friction ends",
+                    name, there.reynolds()));
+        }
+        return of(name, direction, there, given(TURBULENCE), given(LENGTH_SCALE));
+    }
+
+    private Optional<Stated> given(String key) {
+        return numbers().stream()
+                .filter(number -> number.key().equals(key) && !number.assumed())
+                .findFirst();
     }
 
     @Override

@@ -5,6 +5,7 @@ import flowshy.math.Density;
 import flowshy.math.Range;
 import flowshy.medium.Medium;
 import flowshy.stream.Line;
+import flowshy.stream.Source;
 import flowshy.stream.SourceKind;
 import flowshy.stream.record.MeasuredSpectrum;
 import flowshy.stream.record.Signal;
@@ -82,6 +83,18 @@ final class MeasuredFlow extends DrivenFlow {
     @Override
     public List<Double> breaks() {
         return density.map(Density::edges).orElse(List.of());
+    }
+
+    @Override
+    public Source in(Medium other) {
+        return new MeasuredFlow(
+                name(),
+                kind,
+                direction(),
+                spectrum,
+                density,
+                wave.map(known -> Sound.wave(name(), known, other)),
+                other);
     }
 
     @Override

@@ -4,6 +4,7 @@ import flowshy.math.Caveat;
 import flowshy.math.Caveat.Subject;
 import flowshy.math.Caveat.Weight;
 import flowshy.medium.Medium;
+import flowshy.stream.Source;
 import flowshy.stream.SourceKind;
 import flowshy.stream.Stated;
 import flowshy.stream.wall.PlateFlow;
@@ -49,6 +50,13 @@ final class MeasuredStream extends CarriedFlow {
     @Override
     public SourceKind kind() {
         return kind;
+    }
+
+    @Override
+    public Source in(Medium other) {
+        Stated fetch = numbers().get(0);
+        Stream.reaches(name, speed, fetch, other);
+        return new MeasuredStream(name, kind, direction, speed, turbulence, fetch, other);
     }
 
     @Override

@@ -9,7 +9,9 @@ import flowshy.math.Range;
 import flowshy.math.StepDensity;
 import flowshy.medium.Medium;
 import flowshy.stream.Line;
+import flowshy.stream.Source;
 import flowshy.stream.SourceKind;
+import flowshy.stream.UnfitMediumException;
 import flowshy.stream.sound.SoundLevel;
 import flowshy.stream.sound.SoundWave;
 import java.util.ArrayList;
@@ -90,6 +92,19 @@ public final class Sound extends DrivenFlow {
     @Override
     public List<Double> breaks() {
         return pressure.edges();
+    }
+
+    @Override
+    public Source in(Medium other) {
+        return new Sound(name(), direction(), pressure, wave(name(), wave, other), other);
+    }
+
+    /** The wave of the same source in another medium. */
+    static SoundWave wave(String name, SoundWave wave, Medium other) {
+        if (other.soundSpeed().isEmpty()) {
+            throw new UnfitMediumException(name + ": the sound speed of " + other.name() + " is not known");
+        }
+        return new SoundWave(other.density(), other.soundSpeed().getAsDouble(), wave.distance());
     }
 
     /** Of the plane wave, or as large as the near source makes the lowest frequency. */

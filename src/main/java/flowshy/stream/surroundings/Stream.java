@@ -1,11 +1,16 @@
 package flowshy.stream.surroundings;
 
+import static flowshy.math.Figures.say;
+
 import flowshy.math.Positive;
 import flowshy.medium.Medium;
+import flowshy.stream.Source;
 import flowshy.stream.SourceKind;
 import flowshy.stream.Stated;
+import flowshy.stream.UnfitMediumException;
 import flowshy.stream.turbulence.TurbulenceSpectrum;
 import flowshy.stream.wall.PlateFlow;
+import flowshy.stream.wall.PlateFriction;
 import java.util.List;
 import java.util.Optional;
 
@@ -66,6 +71,21 @@ public final class Stream extends CarriedFlow {
     @Override
     public SourceKind kind() {
         return SourceKind.STREAM;
+    }
+
+    @Override
+    public Source in(Medium other) {
+        reaches(name, speed, numbers().get(2), other);
+        return new Stream(name, direction, speed, numbers(), other);
+    }
+
+    /** The wall law must reach as far as the fetch. */
+    static void reaches(String name, double speed, Stated fetch, Medium other) {
+        double reynolds = speed * fetch.value() / other.kinematicViscosity();
+        if (!(reynolds < PlateFriction.LOGARITHMIC.range().high())) {
+            throw new UnfitMediumException(
+                    say("%s: a Reynolds number of %.3g on the fetch, where the wall law ends", name, reynolds));
+        }
     }
 
     @Override

@@ -3,6 +3,7 @@ package flowshy.stream.surroundings;
 import flowshy.math.Range;
 import flowshy.medium.Medium;
 import flowshy.stream.Line;
+import flowshy.stream.Source;
 import flowshy.stream.SourceKind;
 import java.util.List;
 
@@ -48,6 +49,11 @@ public final class Tone extends DrivenFlow {
     @Override
     public List<Double> breaks() {
         return List.of();
+    }
+
+    @Override
+    public Source in(Medium other) {
+        return new Tone(name(), direction(), line.frequency(), line.deviation(), other);
     }
 
     @Override

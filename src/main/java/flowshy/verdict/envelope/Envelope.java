@@ -2,22 +2,28 @@ package flowshy.verdict.envelope;
 
 import static flowshy.math.Figures.say;
 
+import flowshy.medium.MediumQuery;
+import flowshy.stream.cover.Cover;
 import flowshy.verdict.BandsAnswer;
 import flowshy.verdict.BandsQuestion;
 import flowshy.verdict.Decision;
 import flowshy.verdict.Limit;
 import flowshy.verdict.Verdict;
-import flowshy.verdict.design.DesignSpace;
 import flowshy.verdict.design.NoDesignException;
+import flowshy.verdict.envelope.EnvelopeAnswer.Against;
+import flowshy.verdict.envelope.EnvelopeAnswer.AtState;
 import flowshy.verdict.envelope.EnvelopeAnswer.Impossible;
 import flowshy.verdict.envelope.EnvelopeAnswer.Worst;
+import flowshy.verdict.error.StreamTooFastException;
+import flowshy.verdict.lid.Candidate;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.OptionalDouble;
-import java.util.function.UnaryOperator;
+import java.util.function.Function;
 import java.util.stream.IntStream;
 
 /**
@@ -27,10 +33,40 @@ import java.util.stream.IntStream;
  * @param space the study as a function of the numbers that move
  * @param sides one a number, same order as the space's
  */
-public record Envelope(DesignSpace space, List<Side> sides) {
+public record Envelope(StatesOfUse space, List<Side> sides) {
     /** Copies the list. */
     public Envelope {
         sides = List.copyOf(sides);
+    }
+
+    /**
+     * The same states under another cover.
+     *
+     * @param candidate as {@link StatesOfUse#under} takes it
+     * @return envelope of the device under it
+     */
+    public Envelope under(Candidate candidate) {
+        return new Envelope(space.under(candidate), sides);
+    }
+
+    /**
+     * The same states in another fluid.
+     *
+     * @param fluid at the study's own state
+     * @param cover stands over the hair
+     * @return as {@link StatesOfUse#filled} makes it
+     */
+    public Envelope filled(MediumQuery fluid, Cover cover) {
+        return new Envelope(space.filled(fluid, cover), sides);
+    }
+
+    /**
+     * The same states without what flows around the device.
+     *
+     * @return envelope without sources
+     */
+    public Envelope still() {
+        return new Envelope(space.still(), sides);
     }
 
     /**
@@ -42,18 +78,68 @@ public record Envelope(DesignSpace space, List<Side> sides) {
         return sides.stream().mapToInt(side -> side.values().size()).reduce(1, Math::multiplyExact);
     }
 
+    /**
+     * One state and what is asked there.
+     *
+     * @param words its numbers
+     * @param corner whether it is a corner
+     * @param question about the device at this state
+     */
+    public record Asked(String words, boolean corner, BandsQuestion question) {}
+
+    /**
+     * The question at every state that makes a device.
+     *
+     * @return in the order of the sides, the last one moving first
+     */
+    public List<Asked> asked() {
+        return IntStream.range(0, count())
+                .mapToObj(this::asked)
+                .flatMap(Optional::stream)
+                .toList();
+    }
+
+    private Optional<Asked> asked(int index) {
+        Place place = place(index);
+        try {
+            return Optional.of(new Asked(place.words(), place.corner(), space.at(place.numbers())));
+        } catch (NoDesignException e) {
+            return Optional.empty(); // the answer names it
+        }
+    }
+
+    /** A state by its numbers. */
+    private record Place(List<Double> values, String words, boolean corner) {
+        double[] numbers() {
+            return values.stream().mapToDouble(Double::doubleValue).toArray();
+        }
+    }
+
     /** One state and what was found there. */
-    private record State(String words, boolean corner, BandsAnswer answer, String impossible) {}
+    private record State(String words, boolean corner, BandsAnswer answer, String impossible) {
+        AtState worth(double value, OptionalDouble at) {
+            return new AtState(value, at, words, corner);
+        }
+    }
 
     /**
      * Judges every state.
      *
-     * @param device what is done to the question of a state before it is answered, e.g. another cover put on
      * @return the worst of each limit and of all
      */
-    public EnvelopeAnswer answer(UnaryOperator<BandsQuestion> device) {
+    public EnvelopeAnswer answer() {
+        return answer(answer -> List.of());
+    }
+
+    /**
+     * Judges every state, and asks what else speaks against the device there.
+     *
+     * @param against what speaks against it in words, which do not differ from state to state
+     * @return the worst of each limit and of all
+     */
+    public EnvelopeAnswer answer(Function<BandsAnswer, List<String>> against) {
         State[] states = new State[count()];
-        IntStream.range(0, states.length).parallel().forEach(i -> states[i] = state(i, device));
+        IntStream.range(0, states.length).parallel().forEach(i -> states[i] = state(i));
         List<Impossible> impossible = new ArrayList<>();
         List<State> possible = new ArrayList<>();
         for (State state : states) {
@@ -73,15 +159,17 @@ public record Envelope(DesignSpace space, List<Side> sides) {
                 states.length,
                 (int) java.util.Arrays.stream(states).filter(State::corner).count(),
                 worst,
-                least(possible, false),
-                least(possible, true),
+                least(possible),
+                most(possible),
+                error(possible),
+                against(possible, against),
                 impossible,
                 decision,
                 sentence(possible, worst, impossible, states.length, decision));
     }
 
-    private State state(int index, UnaryOperator<BandsQuestion> device) {
-        double[] values = new double[sides.size()];
+    private Place place(int index) {
+        List<Double> values = new ArrayList<>();
         List<String> words = new ArrayList<>();
         boolean corner = true;
         int rest = index;
@@ -89,16 +177,20 @@ public record Envelope(DesignSpace space, List<Side> sides) {
             Side side = sides.get(s);
             int at = rest % side.values().size();
             rest /= side.values().size();
-            values[s] = side.values().get(at);
+            values.add(0, side.values().get(at));
             words.add(0, side.key() + " " + side.words().get(at));
             corner &= side.corner(at);
         }
-        String state = String.join(", ", words);
+        return new Place(values, String.join(", ", words), corner);
+    }
+
+    private State state(int index) {
+        Place place = place(index);
         try {
-            BandsQuestion question = device.apply(space.at(values));
-            return new State(state, corner, question.answer(List.of(question.reference())), "");
-        } catch (NoDesignException e) {
-            return new State(state, corner, null, e.getMessage());
+            return new State(
+                    place.words(), place.corner(), space.at(place.numbers()).judged(), "");
+        } catch (NoDesignException | StreamTooFastException e) {
+            return new State(place.words(), place.corner(), null, e.getMessage());
         }
     }
 
@@ -119,18 +211,48 @@ public record Envelope(DesignSpace space, List<Side> sides) {
                 .toList();
     }
 
-    private static OptionalDouble least(List<State> states, boolean largest) {
-        var values = states.stream()
+    private static Optional<AtState> least(List<State> states) {
+        return states.stream()
+                .flatMap(state -> state.answer().least().stream()
+                        .map(least -> state.worth(least.rejection(), OptionalDouble.of(least.frequency()))))
+                .min(Comparator.comparingDouble(AtState::value));
+    }
+
+    private static OptionalDouble most(List<State> states) {
+        return states.stream()
                 .flatMap(state -> state.answer().least().stream())
-                .mapToDouble(BandsAnswer.Extreme::rejection);
-        return largest ? values.max() : values.min();
+                .mapToDouble(BandsAnswer.Extreme::rejection)
+                .max();
+    }
+
+    private static Optional<AtState> error(List<State> states) {
+        return states.stream()
+                .flatMap(state ->
+                        state.answer().error().stream().map(error -> state.worth(error.rms(), OptionalDouble.empty())))
+                .filter(found -> Double.isFinite(found.value()))
+                .max(Comparator.comparingDouble(AtState::value));
+    }
+
+    private static List<Against> against(List<State> states, Function<BandsAnswer, List<String>> judge) {
+        Map<String, Against> found = new LinkedHashMap<>();
+        for (State state : states) {
+            for (String reason : judge.apply(state.answer())) {
+                found.merge(
+                        reason,
+                        new Against(reason, state.words(), 1),
+                        (first, next) -> new Against(reason, first.state(), first.states() + 1));
+            }
+        }
+        return List.copyOf(found.values());
     }
 
     private static String sentence(
             List<State> possible, List<Worst> worst, List<Impossible> impossible, int count, Decision decision) {
         StringBuilder text = new StringBuilder(say("Over the envelope of %s states: %s.", count, decision.word()));
         for (Worst one : worst) {
-            if (one.limit().decision() != Decision.NOT_ASKED) {
+            boolean boundless = one.limit().decision() == Decision.MEETS
+                    && one.limit().found().orElse(0.0) == 0.0; // no flow enters
+            if (one.limit().decision() != Decision.NOT_ASKED && !boundless) {
                 text.append(say(
                         " Worst for %s%s: at %s%s.",
                         one.limit().name(),
@@ -145,13 +267,9 @@ public record Envelope(DesignSpace space, List<Side> sides) {
             }
         }
         if (worst.isEmpty() || worst.stream().allMatch(one -> one.limit().decision() == Decision.NOT_ASKED)) {
-            possible.stream()
-                    .filter(state -> state.answer().least().isPresent())
-                    .min(Comparator.comparingDouble(
-                            state -> state.answer().least().orElseThrow().rejection()))
-                    .ifPresent(state -> text.append(say(
-                            " Least rejection %.4g dB at %s.",
-                            state.answer().least().orElseThrow().rejection(), state.words())));
+            least(possible)
+                    .ifPresent(
+                            least -> text.append(say(" Least rejection %.4g dB at %s.", least.value(), least.state())));
         }
         if (!impossible.isEmpty()) {
             text.append(say(

@@ -54,6 +54,19 @@ public record SurroundingsQuestion(Device device, Band band, double margin, Moti
      * @return sources, sums, bands on the spectra
      */
     public ErrorBudget answer() {
+        return answer(true);
+    }
+
+    /**
+     * The error budget without half and twice of every assumed number, which take most of the time and no part in a verdict.
+     *
+     * @return sources without assumed numbers, sums, bands on the spectra
+     */
+    public ErrorBudget asTaken() {
+        return answer(false);
+    }
+
+    private ErrorBudget answer(boolean varied) {
         FlowLoad load = new FlowLoad(device, sources);
         Response response = new Response(device);
         Spectrum spectrum = new Spectrum(response, load, band);
@@ -69,7 +82,7 @@ public record SurroundingsQuestion(Device device, Band band, double margin, Moti
         double offset = torque / FastMath.abs(moment);
         List<SourceError> errors = new ArrayList<>();
         for (int i = 0; i < squares.length; i++) {
-            errors.add(source(i, load, spectrum, squares[i], all, offset));
+            errors.add(source(i, load, spectrum, squares[i], all, offset, varied));
         }
         double rms = FastMath.sqrt(all);
         Optional<Oscillator> swing = response.oscillator().filter(Oscillator::stands);
@@ -109,7 +122,8 @@ public record SurroundingsQuestion(Device device, Band band, double margin, Moti
         return FastMath.sqrt(spectrum.noiseMeanSquare(band.from(), band.to()));
     }
 
-    private SourceError source(int index, FlowLoad load, Spectrum spectrum, double square, double all, double offset) {
+    private SourceError source(
+            int index, FlowLoad load, Spectrum spectrum, double square, double all, double offset, boolean varied) {
         Source source = sources.get(index);
         Exposure exposure = load.exposures().get(index);
         OptionalDouble worst = worst(index, spectrum);
@@ -126,7 +140,11 @@ public record SurroundingsQuestion(Device device, Band band, double margin, Moti
                 source instanceof CarriedFlow carried && carried.cutOff().isPresent()
                         ? OptionalDouble.of(carried.cutOff().get())
                         : OptionalDouble.empty(),
-                source.assumed().stream().map(number -> assumed(index, number)).toList());
+                varied
+                        ? source.assumed().stream()
+                                .map(number -> assumed(index, number))
+                                .toList()
+                        : List.of());
     }
 
     /** Share of the mean stream along the sensitive axis, by which the common offset is split. */

@@ -21,11 +21,16 @@ import flowshy.verdict.Decision;
 import flowshy.verdict.Limit;
 import flowshy.verdict.ThirdOctaves;
 import flowshy.verdict.Verdict;
+import flowshy.verdict.envelope.Envelope;
+import flowshy.verdict.envelope.EnvelopeAnswer;
+import flowshy.verdict.envelope.EnvelopeAnswer.AtState;
+import flowshy.verdict.envelope.Shortfalls;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.stream.Collectors;
 import org.hipparchus.util.FastMath;
 
 /**
@@ -98,62 +103,127 @@ public record LidQuestion(BandsQuestion base, double reference, List<Candidate> 
      */
     public LidAnswer answer() {
         Device bareDevice = base.device().bare();
+        Candidate none = new Candidate(Covers.OPEN, base.device().outside());
         BandsAnswer bare = base.about(bareDevice).answer();
-        List<RequiredAttenuation> required = ThirdOctaves.in(base.band()).stream()
-                .map(frequency ->
-                        RequiredAttenuation.at(base.device(), acceptance().margin(), frequency))
+        Optional<EnvelopeAnswer> bareStates = states(none).map(Envelope::answer);
+        List<RequiredAttenuation> required = required(base);
+        List<CoverRow> rows = candidates.stream()
+                .map(candidate -> candidate.equals(none)
+                        ? row(candidate, bareDevice, bare, bareStates)
+                        : row(
+                                candidate,
+                                bareDevice,
+                                base.about(candidate.over(base.device())).answer(),
+                                states(candidate).map(Envelope::answer)))
                 .toList();
-        List<CoverRow> rows =
-                candidates.stream().map(candidate -> row(candidate, bareDevice)).toList();
         Optional<CoverRow> chosen = asked(bare)
                 ? rows.stream().filter(row -> row.misses().isEmpty()).findFirst()
                 : Optional.empty();
-        boolean none = asked(bare) && chosen.isEmpty();
-        List<String> remedies =
-                none ? new Remedies(base.about(nearest(rows).candidate().over(base.device()))).list() : List.of();
+        boolean remedy = asked(bare) && chosen.isEmpty();
         return new LidAnswer(
-                bare, required, errorAttenuation(bare), reference, rows, chosen, remedies, verdict(bare, rows, chosen));
+                bare,
+                required,
+                errorAttenuation(bare),
+                bareStates.map(found -> overStates(bare, required, found, none)),
+                reference,
+                rows,
+                chosen,
+                remedy ? remedies(nearest(rows)) : List.of(),
+                verdict(bare, rows, chosen));
+    }
+
+    private Optional<Envelope> states(Candidate candidate) {
+        return base.envelope().map(all -> all.under(candidate));
+    }
+
+    private List<RequiredAttenuation> required(BandsQuestion question) {
+        return ThirdOctaves.in(base.band()).stream()
+                .map(frequency ->
+                        RequiredAttenuation.at(question.device(), acceptance().margin(), frequency))
+                .toList();
+    }
+
+    /** The largest attenuation asked by any state, frequency by frequency; the study's own state counts too. */
+    private LidAnswer.OverStates overStates(
+            BandsAnswer bare, List<RequiredAttenuation> own, EnvelopeAnswer bareStates, Candidate none) {
+        List<AtState> worst = own.stream()
+                .map(point -> new AtState(
+                        point.attenuation(), OptionalDouble.of(point.frequency()), EnvelopeAnswer.OWN, true))
+                .collect(Collectors.toCollection(ArrayList::new));
+        for (Envelope.Asked state : states(none).orElseThrow().asked()) {
+            List<RequiredAttenuation> there = required(state.question());
+            for (int i = 0; i < worst.size(); i++) {
+                if (there.get(i).attenuation() > worst.get(i).value()) {
+                    worst.set(
+                            i,
+                            new AtState(
+                                    there.get(i).attenuation(),
+                                    OptionalDouble.of(there.get(i).frequency()),
+                                    state.words(),
+                                    state.corner()));
+                }
+            }
+        }
+        Optional<AtState> error = errorLimit(bare)
+                .flatMap(limit -> bareStates
+                        .error(bare)
+                        .map(most -> new AtState(
+                                attenuation(most.value(), limit),
+                                OptionalDouble.empty(),
+                                most.state(),
+                                most.corner())));
+        return new LidAnswer.OverStates(bareStates, worst, error);
     }
 
     /** 20 lg of the bare error over its limit; the flow's torque is taken as proportional to the flow, as at the bare operating point. */
     private static OptionalDouble errorAttenuation(BandsAnswer bare) {
-        for (Limit limit : bare.verdict().limits()) {
-            if (limit.name().equals("error")
-                    && limit.found().isPresent()
-                    && bare.error().isPresent()) {
-                double ratio = limit.found().getAsDouble() / limit.required();
-                return OptionalDouble.of(FastMath.max(0.0, 20.0 * FastMath.log10(ratio)));
-            }
-        }
-        return OptionalDouble.empty();
+        Optional<Double> level = errorLimit(bare)
+                .map(limit -> attenuation(bare.error().orElseThrow().rms(), limit));
+        return level.isPresent() ? OptionalDouble.of(level.get()) : OptionalDouble.empty();
+    }
+
+    private static Optional<Double> errorLimit(BandsAnswer bare) {
+        return bare.verdict().limits().stream()
+                .filter(limit -> limit.name().equals("error")
+                        && limit.found().isPresent()
+                        && bare.error().isPresent())
+                .map(Limit::required)
+                .findFirst();
+    }
+
+    private static double attenuation(double error, double limit) {
+        return FastMath.max(0.0, 20.0 * FastMath.log10(error / limit));
     }
 
     private static boolean asked(BandsAnswer bare) {
         return bare.verdict().limits().stream().anyMatch(limit -> limit.decision() != Decision.NOT_ASKED);
     }
 
-    private CoverRow row(Candidate candidate, Device bareDevice) {
-        Device covered = candidate.over(base.device());
-        BandsAnswer answer = base.about(covered).answer();
-        Calibration.Figures change = new Calibration(reference, Covers.OPEN).figures(covered, bareDevice);
-        List<String> misses = new ArrayList<>();
-        for (Limit limit : answer.verdict().limits()) {
-            if (limit.decision() == Decision.FAILS && limit.found().isPresent()) {
-                double by = FastMath.abs(limit.required() - limit.found().getAsDouble());
-                misses.add(say("%s misses by %.3g %s", limit.name(), by, limit.unit())
-                        .strip());
-            } else if (limit.decision() == Decision.FAILS) {
-                misses.add(limit.name() + ": " + limit.reason());
-            } else if (limit.decision() == Decision.UNDECIDED) {
-                misses.add(limit.name() + " is undecided: " + limit.reason());
-            }
+    private List<String> remedies(CoverRow nearest) {
+        int lost = nearest.envelope().map(found -> found.impossible().size()).orElse(0);
+        if (lost > 0) {
+            return List.of("a cover or fill that bears every state, or an envelope without the " + lost
+                    + " that cannot be worked out");
         }
+        List<BandsQuestion> states =
+                new ArrayList<>(List.of(base.about(nearest.candidate().over(base.device()))));
+        states(nearest.candidate()).ifPresent(all -> all.asked().forEach(state -> states.add(state.question())));
+        return new Remedies(states).list();
+    }
+
+    private CoverRow row(
+            Candidate candidate, Device bareDevice, BandsAnswer answer, Optional<EnvelopeAnswer> envelope) {
+        Device covered = answer.device();
+        Calibration.Figures change = new Calibration(reference, Covers.OPEN).figures(covered, bareDevice);
+        Shortfalls shortfalls = Shortfalls.of(answer, envelope);
         return new CoverRow(
                 candidate,
                 answer,
+                envelope,
+                shortfalls.verdict(),
                 new Response(covered).at(reference),
                 change,
-                misses,
+                shortfalls.misses(),
                 warnings(candidate, answer, change));
     }
 
@@ -190,7 +260,7 @@ public record LidQuestion(BandsQuestion base, double reference, List<Candidate> 
         if (candidate.cover().closed()) {
             warnings.add("sound transmitted through the lid is not modelled");
         }
-        if (candidate.cover().closed() && candidate.around().phase() == Phase.LIQUID) {
+        if (candidate.cover().closed() && candidate.around().phase() == Phase.LIQUID && !warmed()) {
             warnings.add("a liquid fill: check its freezing and boiling points over the whole range of temperature");
         }
         for (Caveat caveat : answer.caveats()) {
@@ -212,15 +282,24 @@ public record LidQuestion(BandsQuestion base, double reference, List<Candidate> 
         return OptionalDouble.empty();
     }
 
+    /** Whether the envelope moves the temperature: then a liquid that freezes or boils is told at its state. */
+    private boolean warmed() {
+        return base.envelope().stream()
+                .flatMap(all -> all.sides().stream())
+                .anyMatch(side -> side.key().equals("medium.temperature"));
+    }
+
     /** The candidate that misses fewest limits, and of those the one whose least rejection is highest. */
     private static CoverRow nearest(List<CoverRow> rows) {
         return rows.stream()
                 .min(Comparator.comparingInt((CoverRow row) -> row.misses().size())
-                        .thenComparingDouble(row -> -row.answer()
-                                .least()
-                                .map(BandsAnswer.Extreme::rejection)
-                                .orElse(Double.NEGATIVE_INFINITY)))
+                        .thenComparingDouble(row -> -least(row)))
                 .orElseThrow();
+    }
+
+    private static double least(CoverRow row) {
+        Optional<Double> here = row.answer().least().map(BandsAnswer.Extreme::rejection);
+        return row.lowest().map(AtState::value).or(() -> here).orElse(Double.NEGATIVE_INFINITY);
     }
 
     private Verdict verdict(BandsAnswer bare, List<CoverRow> rows, Optional<CoverRow> chosen) {
@@ -236,14 +315,34 @@ public record LidQuestion(BandsQuestion base, double reference, List<Candidate> 
             String sentence = cover.equals(Covers.OPEN)
                     ? "No lid is needed: the bare device meets every limit."
                     : "The first candidate that meets every limit is: " + cover.words() + ".";
-            return new Verdict(Decision.MEETS, chosen.get().answer().verdict().limits(), sentence);
+            return new Verdict(
+                    Decision.MEETS,
+                    chosen.get().verdict().limits(),
+                    sentence
+                            + chosen.get()
+                                    .envelope()
+                                    .map(found -> " " + found.sentence())
+                                    .orElse("")
+                            + own(rows, chosen));
         }
         CoverRow nearest = nearest(rows);
-        boolean undecided = rows.stream().anyMatch(row -> row.answer().verdict().decision() == Decision.UNDECIDED);
+        boolean undecided = rows.stream().anyMatch(row -> row.verdict().decision() == Decision.UNDECIDED);
         return new Verdict(
                 undecided ? Decision.UNDECIDED : Decision.FAILS,
-                nearest.answer().verdict().limits(),
-                "No candidate meets every limit. The nearest is "
-                        + nearest.candidate().cover().words() + ": " + String.join("; ", nearest.misses()) + ".");
+                nearest.verdict().limits(),
+                "No candidate meets every limit" + (base.envelope().isPresent() ? " in every state" : "")
+                        + ". The nearest is " + nearest.candidate().cover().words() + ": "
+                        + String.join("; ", nearest.misses()) + "." + own(rows, chosen));
+    }
+
+    /** What would be chosen at the study's own state, where the envelope makes it another. */
+    private static String own(List<CoverRow> rows, Optional<CoverRow> chosen) {
+        Optional<CoverRow> here = rows.stream()
+                .filter(row -> row.answer().verdict().decision() == Decision.MEETS)
+                .findFirst();
+        return here.isEmpty() || here.equals(chosen)
+                ? ""
+                : " At the study's own state alone it would be: "
+                        + here.get().candidate().cover().words() + ".";
     }
 }

@@ -5,7 +5,6 @@ import static org.assertj.core.api.Assertions.assertThat;
 import flowshy.report.chart.paper.LaidText;
 import flowshy.study.Study;
 import flowshy.study.StudyReader;
-import flowshy.verdict.BandsAnswer;
 import flowshy.verdict.fill.Fill;
 import flowshy.verdict.fill.FillQuestion;
 import flowshy.verdict.lid.LidQuestion;
@@ -63,12 +62,8 @@ class ChartLayoutTest {
     @ParameterizedTest
     @MethodSource("studies")
     void textsOfBandsFit(Path file, List<String> settings) {
-        StudyReader reader = StudyReader.open(file, settings);
-        Study study = reader.study();
-        BandsAnswer answer = study.question().answer();
-        List<Chart> charts = new ArrayList<>(BandsCharts.of(study, answer));
-        charts.addAll(SensitivityChart.of(study.title(), reader.sensitivities(study, answer)));
-        fit(charts);
+        Study study = StudyReader.read(file, settings);
+        fit(BandsCharts.of(study, study.question().answer()));
     }
 
     @ParameterizedTest
@@ -89,7 +84,7 @@ class ChartLayoutTest {
                 Fill.known(
                         study.device().outside().temperature(),
                         study.device().outside().pressure()));
-        fit(FillChart.of(study, study.acceptance(), question.answer()));
+        fit(FillChart.of(study, study.acceptance(), question.answer().rows()));
     }
 
     private static void fit(List<Chart> charts) {

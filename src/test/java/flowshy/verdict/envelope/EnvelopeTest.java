@@ -5,26 +5,27 @@ import static org.assertj.core.api.Assertions.assertThat;
 import flowshy.hair.Cylinder;
 import flowshy.hair.Hair;
 import flowshy.medium.Medium;
+import flowshy.medium.MediumQuery;
 import flowshy.response.Device;
+import flowshy.stream.cover.Cover;
 import flowshy.stream.cover.Covers;
 import flowshy.verdict.Acceptance;
 import flowshy.verdict.Band;
 import flowshy.verdict.BandsQuestion;
 import flowshy.verdict.Decision;
-import flowshy.verdict.design.DesignSpace;
 import flowshy.verdict.design.NoDesignException;
+import flowshy.verdict.lid.Candidate;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
-import java.util.function.UnaryOperator;
 import org.junit.jupiter.api.Test;
 
 class EnvelopeTest {
     private static final Medium AIR = Medium.of("air", 1.2, 1.82e-5);
 
     /** The hair is lightest, and the rejection least, where the first number is 5; the second moves the length a little. */
-    private static final class Valley implements DesignSpace {
+    private static final class Valley implements StatesOfUse {
         @Override
         public List<String> keys() {
             return List.of("x", "y");
@@ -44,7 +45,17 @@ class EnvelopeTest {
         }
 
         @Override
-        public DesignSpace still() {
+        public StatesOfUse still() {
+            return this;
+        }
+
+        @Override
+        public StatesOfUse under(Candidate candidate) {
+            return this;
+        }
+
+        @Override
+        public StatesOfUse filled(MediumQuery fluid, Cover cover) {
             return this;
         }
     }
@@ -61,8 +72,7 @@ class EnvelopeTest {
 
     @Test
     void theWorstMayLieInsideAndIsNamed() {
-        EnvelopeAnswer answer =
-                new Envelope(new Valley(), List.of(range("x", 10), range("y", 2))).answer(UnaryOperator.identity());
+        EnvelopeAnswer answer = new Envelope(new Valley(), List.of(range("x", 10), range("y", 2))).answer();
         assertThat(answer.states()).isEqualTo(33);
         assertThat(answer.corners()).isEqualTo(4);
         assertThat(answer.limits()).singleElement().satisfies(worst -> {
@@ -80,9 +90,8 @@ class EnvelopeTest {
     void cornersAloneJudgeOtherwise() {
         Side ends = new Side("x", List.of(0.0, 10.0), List.of("0", "10"), false);
         Side one = new Side("y", List.of(1.0), List.of("1"), false);
-        EnvelopeAnswer corners = new Envelope(new Valley(), List.of(ends, one)).answer(UnaryOperator.identity());
-        EnvelopeAnswer whole =
-                new Envelope(new Valley(), List.of(range("x", 10), one)).answer(UnaryOperator.identity());
+        EnvelopeAnswer corners = new Envelope(new Valley(), List.of(ends, one)).answer();
+        EnvelopeAnswer whole = new Envelope(new Valley(), List.of(range("x", 10), one)).answer();
         assertThat(corners.least().getAsDouble()).isGreaterThan(whole.least().getAsDouble() + 3.0);
     }
 
@@ -90,7 +99,7 @@ class EnvelopeTest {
     void aStateWithoutAnAnswerLeavesItUndecidedAtBest() {
         Side y = new Side("y", List.of(1.0, 3.0), List.of("1", "3"), false);
         Side x = new Side("x", List.of(0.0), List.of("0"), false);
-        EnvelopeAnswer answer = new Envelope(new Valley(), List.of(x, y)).answer(UnaryOperator.identity());
+        EnvelopeAnswer answer = new Envelope(new Valley(), List.of(x, y)).answer();
         assertThat(answer.impossible()).containsExactly(new EnvelopeAnswer.Impossible("x 0, y 3", "y is too much"));
         assertThat(answer.decision()).isEqualTo(Decision.UNDECIDED);
     }

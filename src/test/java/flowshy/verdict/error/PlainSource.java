@@ -2,6 +2,7 @@ package flowshy.verdict.error;
 
 import flowshy.math.Caveat;
 import flowshy.math.Range;
+import flowshy.medium.Medium;
 import flowshy.stream.HeightShare;
 import flowshy.stream.Line;
 import flowshy.stream.Source;
@@ -33,6 +34,11 @@ record PlainSource(String name, double direction, double meanSpeed, double densi
     @Override
     public SourceKind kind() {
         return driven ? SourceKind.TONE : SourceKind.STREAM;
+    }
+
+    @Override
+    public Source in(Medium other) {
+        return this;
     }
 
     @Override

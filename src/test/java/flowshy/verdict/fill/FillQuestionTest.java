@@ -34,7 +34,9 @@ class FillQuestionTest {
     }
 
     private static List<FillRow> rows(Device device, double temperature) {
-        return new FillQuestion(device, BAND, Acceptance.NONE, 80.0, Fill.known(temperature, 101325.0)).answer();
+        return new FillQuestion(device, BAND, Acceptance.NONE, 80.0, Fill.known(temperature, 101325.0))
+                .answer()
+                .rows();
     }
 
     private static FillRow row(List<FillRow> rows, String fill, boolean sealed) {
@@ -92,8 +94,9 @@ class FillQuestionTest {
         List<FillRow> cold = rows(device(1200.0), 263.15);
         assertThat(row(cold, "water", false).excluded())
                 .anySatisfy(why -> assertThat(why).contains("freezes"));
-        List<FillRow> thin =
-                new FillQuestion(device(1200.0), BAND, Acceptance.NONE, 80.0, Fill.known(353.15, 20000.0)).answer();
+        List<FillRow> thin = new FillQuestion(device(1200.0), BAND, Acceptance.NONE, 80.0, Fill.known(353.15, 20000.0))
+                .answer()
+                .rows();
         assertThat(row(thin, "water", false).excluded())
                 .anySatisfy(why -> assertThat(why).contains("boils"));
     }

@@ -45,12 +45,15 @@ final class LidSection implements ReportSection {
         }
         html.tag("p").holds(() -> {
             html.text("Bare, without a cover: ");
-            words.sentence(answer.bare().verdict().sentence());
+            words.sentence(LidReport.bare(answer));
         });
         html.tag("p").holds(() -> {
             html.text("Sensitivity is set against the bare device and noise is thermal, both at ");
             words.amount(answer.reference(), "Hz", 4);
             html.text(". Error and offset are those of the surroundings.");
+            if (answer.worst().isPresent()) {
+                html.text(" Worst: of all states of the envelope; the other figures hold at the study's own state.");
+            }
         });
         words.charts(id());
         Tables.of(html, "Covers side by side", columns(answer), answer.covers())
@@ -61,7 +64,7 @@ final class LidSection implements ReportSection {
     }
 
     private static List<Column<CoverRow>> columns(LidAnswer answer) {
-        return LidReport.columns().stream()
+        return LidReport.columns(answer).stream()
                 .filter(column -> answer.covers().stream()
                         .anyMatch(row -> column.cell().apply(row).value().isPresent()))
                 .toList();
@@ -75,7 +78,7 @@ final class LidSection implements ReportSection {
 
     private static void remarks(Html html, Words words, CoverRow row) {
         html.tag("dt").holds(() -> {
-            words.badge(row.answer().verdict().decision());
+            words.badge(row.verdict().decision());
             html.text(" ");
             name(html, row);
         });
@@ -85,6 +88,11 @@ final class LidSection implements ReportSection {
                         html.tag("li", "Meets every limit that can be judged.");
                     }
                     row.misses().forEach(miss -> html.tag("li").holds(() -> words.sentence(miss)));
+                    if (row.envelope().isPresent()) {
+                        html.tag("li")
+                                .holds(() ->
+                                        words.sentence(LidReport.overStates(row).strip()));
+                    }
                     row.warnings()
                             .forEach(warning -> html.tag("li").holds(() -> {
                                 html.tag("strong", "warning");
@@ -101,8 +109,15 @@ final class LidSection implements ReportSection {
                     html.text("For the error limit: ");
                     words.amount(level, "dB", 4);
                     html.text(" over the band, at the operating point of the bare hair.");
+                    answer.worst().flatMap(LidAnswer.OverStates::error).ifPresent(most -> {
+                        html.text(" At its worst ");
+                        words.amount(most.value(), "dB", 4);
+                        html.text(", at ");
+                        words.sentence(most.words() + ".");
+                    });
                 }));
-        Tables.of(html, "For the margin of rejection", LidReport.required(), answer.required())
+        Tables.of(html, "For the margin of rejection", LidReport.required(answer), LidReport.points(answer))
                 .write();
+        answer.worst().ifPresent(over -> words.paragraph(LidReport.worstAt(over)));
     }
 }

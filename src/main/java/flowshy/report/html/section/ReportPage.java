@@ -20,7 +20,6 @@ public final class ReportPage {
             new FitSection(),
             new MeasuredSection(),
             new WhySection(),
-            new SensitivitySection(),
             new ErrorSection(),
             new LidSection(),
             new VariantsSection(),
