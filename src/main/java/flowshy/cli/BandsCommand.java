@@ -10,6 +10,7 @@ import flowshy.report.chart.BandsCharts;
 import flowshy.report.chart.Chart;
 import flowshy.report.chart.ForceChart;
 import flowshy.report.chart.MeasuredOverlays;
+import flowshy.report.chart.SensitivityChart;
 import flowshy.study.Study;
 import flowshy.study.StudyReader;
 import flowshy.verdict.BandsAnswer;
@@ -17,14 +18,12 @@ import flowshy.verdict.BandsQuestion;
 import flowshy.verdict.Decision;
 import flowshy.verdict.Levers;
 import flowshy.verdict.ThirdOctaves;
-import flowshy.verdict.design.Sensitivity;
-import flowshy.verdict.design.SensitivityQuestion;
+import flowshy.verdict.design.Sensitivities;
 import flowshy.verdict.force.ForceAlong;
 import flowshy.verdict.measured.BesideModel;
 import flowshy.verdict.measured.Compared;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.TreeSet;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -87,16 +86,18 @@ final class BandsCommand implements Callable<Integer> {
                     question.answer(frequencies == null ? ThirdOctaves.in(study.band()) : frequencies.values());
             List<Levers> levers = why ? Levers.of(answer) : List.of();
             List<Compared> measured = BesideModel.of(study.device(), study.measurements());
-            List<Sensitivity> slopes = why || output.json() ? asked.slopes(answer) : List.of();
+            Sensitivities slopes = why || output.json() || charts.asked() ? asked.slopes(answer) : Sensitivities.NONE;
             List<ForceAlong> forces = forceAt == null
                     ? List.of()
                     : forceAt.values().stream()
                             .map(frequency -> ForceAlong.of(study.device(), frequency))
                             .toList();
-            texts.add(BandsText.of(study, answer, new Why(levers, why ? slopes : List.of()), measured, forces));
+            texts.add(
+                    BandsText.of(study, answer, new Why(levers, why ? slopes : Sensitivities.NONE), measured, forces));
             List<Chart> drawn = new ArrayList<>();
             if (charts.asked()) {
                 drawn.addAll(BandsCharts.of(study, answer, MeasuredOverlays.of(measured)));
+                drawn.addAll(SensitivityChart.of(study.title(), slopes));
                 drawn.addAll(ForceChart.of(study.title(), forces));
             }
             charts.add(drawn);
@@ -129,11 +130,8 @@ final class BandsCommand implements Callable<Integer> {
             return new Asked(reader, reader.study());
         }
 
-        /** At the frequency of comparison and where the rejection is least. */
-        List<Sensitivity> slopes(BandsAnswer answer) {
-            TreeSet<Double> frequencies = new TreeSet<>(List.of(study.reference()));
-            answer.least().ifPresent(least -> frequencies.add(least.frequency()));
-            return new SensitivityQuestion(reader.knobs(study), List.copyOf(frequencies)).answer();
+        Sensitivities slopes(BandsAnswer answer) {
+            return reader.sensitivities(study, answer);
         }
     }
 }

@@ -8,7 +8,6 @@ import flowshy.study.Study;
 import flowshy.verdict.Decision;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Optional;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -41,19 +40,16 @@ final class ReportCommand implements Callable<Integer> {
         List<String> texts = new ArrayList<>();
         List<Runnable> objects = new ArrayList<>();
         List<String> tables = new ArrayList<>();
-        int code =
-                studies.each(spec.commandLine(), output.json(), reader -> reader.family(Optional.empty()), family -> {
-                    Study study = family.study();
-                    StudyReport report = StudyReport.of(family);
-                    List<FileReport.Written> written =
-                            files.write(study.origin().file(), ReportPage.of(report));
-                    texts.add(FileReport.text(study, report.answer().verdict(), written));
-                    objects.add(
-                            () -> FileReport.write(json, study, report.answer().verdict(), written));
-                    tables.add(FileReport.csv(written));
-                    Decision decision = report.decision();
-                    return decision == Decision.FAILS || decision == Decision.UNDECIDED ? Failures.LIMIT : 0;
-                });
+        int code = studies.eachOpened(spec.commandLine(), output.json(), reader -> {
+            StudyReport report = StudyReport.of(reader);
+            Study study = report.study();
+            List<FileReport.Written> written = files.write(study.origin().file(), ReportPage.of(report));
+            texts.add(FileReport.text(study, report.answer().verdict(), written));
+            objects.add(() -> FileReport.write(json, study, report.answer().verdict(), written));
+            tables.add(FileReport.csv(written));
+            Decision decision = report.decision();
+            return decision == Decision.FAILS || decision == Decision.UNDECIDED ? Failures.LIMIT : 0;
+        });
         studies.send(spec.commandLine(), output, json, texts, objects, tables);
         return code;
     }

@@ -28,8 +28,21 @@ public final class Response {
      * @param device hair, suspension, medium and cover
      */
     public Response(Device device) {
+        this(device, TorqueModel.of(device.hair(), device.around(), device.pivotDepth(), device.cover()));
+    }
+
+    private Response(Device device, TorqueModel model) {
         this.device = device;
-        this.model = TorqueModel.of(device.hair(), device.around(), device.pivotDepth(), device.cover());
+        this.model = model;
+    }
+
+    /**
+     * The same for a few frequencies alone: a hair that is solved whole is solved at each of them and no others.
+     *
+     * @return less work for one of many devices
+     */
+    public Response alone() {
+        return new Response(device, model.alone());
     }
 
     /**

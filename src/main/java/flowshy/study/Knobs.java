@@ -6,11 +6,16 @@ import flowshy.hair.Profile;
 import flowshy.medium.Medium;
 import flowshy.response.Device;
 import flowshy.study.units.Dimension;
+import flowshy.verdict.Band;
+import flowshy.verdict.BandsAnswer;
 import flowshy.verdict.BandsQuestion;
 import flowshy.verdict.design.Knob;
 import flowshy.verdict.design.NoDesignException;
+import flowshy.verdict.design.Sensitivities.Place;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
+import java.util.TreeMap;
 import java.util.function.DoubleFunction;
 
 /** Every dimension and property of a study on which the rejection may depend. */
@@ -50,6 +55,24 @@ final class Knobs {
                 question,
                 value -> with(medium, medium.density(), value)));
         return knobs;
+    }
+
+    /** At the frequency of comparison and where the rejection is least, which may be the same. */
+    static List<Place> places(Study study, BandsAnswer answer) {
+        Map<Double, String> words = new TreeMap<>();
+        answer.least().ifPresent(least -> words.put(least.frequency(), least(least.frequency(), study.band())));
+        words.merge(
+                study.reference(),
+                study.calibration().isPresent() ? "calibration" : "middle of the band",
+                (one, other) -> one + ", " + other);
+        return words.entrySet().stream()
+                .map(place -> new Place(place.getKey(), place.getValue()))
+                .toList();
+    }
+
+    private static String least(double frequency, Band band) {
+        String end = frequency == band.from() ? ", its lower end" : frequency == band.to() ? ", its upper end" : "";
+        return "least rejection of the band" + end;
     }
 
     private static boolean counts(NumberKey number) {

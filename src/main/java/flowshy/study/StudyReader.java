@@ -10,7 +10,9 @@ import flowshy.study.text.Problems;
 import flowshy.study.text.Setting;
 import flowshy.study.text.StudyException;
 import flowshy.study.text.StudyText;
-import flowshy.verdict.design.Knob;
+import flowshy.verdict.BandsAnswer;
+import flowshy.verdict.design.Sensitivities;
+import flowshy.verdict.design.SensitivityQuestion;
 import java.nio.file.Path;
 import java.util.Comparator;
 import java.util.List;
@@ -86,13 +88,14 @@ public final class StudyReader {
     }
 
     /**
-     * Every dimension and property on which the rejection may depend.
+     * What every dimension and property does to the rejection: at the frequency of comparison and where the rejection is least.
      *
      * @param study read by this reader
-     * @return one a positive number of the study's hair, cover and medium, and some of them together
+     * @param answer to its question
+     * @return by each positive number of the study's hair, cover and medium, and some of them together
      */
-    public List<Knob> knobs(Study study) {
-        return Knobs.of(this, study);
+    public Sensitivities sensitivities(Study study, BandsAnswer answer) {
+        return new SensitivityQuestion(study.device(), Knobs.of(this, study), Knobs.places(study, answer)).answer();
     }
 
     private FamilyReader family(Node.Mapping root) {

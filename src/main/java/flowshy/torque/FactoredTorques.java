@@ -43,6 +43,11 @@ record FactoredTorques(TorqueModel strips, LengthFactors factors, boolean confin
     }
 
     @Override
+    public TorqueModel alone() {
+        return new FactoredTorques(strips, factors.alone(), confined);
+    }
+
+    @Override
     public Optional<Complex> streamFactor(double omega) {
         return Optional.of(factors.at(omega).stream());
     }

@@ -37,6 +37,15 @@ public interface TorqueModel {
     default void expect(double lowest, double highest) {}
 
     /**
+     * The same for a hair that is asked for a few frequencies alone.
+     *
+     * @return torques in which nothing is shared between frequencies
+     */
+    default TorqueModel alone() {
+        return this;
+    }
+
+    /**
      * Torque of flow over that of strip theory.
      *
      * @param omega angular frequency, positive [rad/s]

@@ -18,7 +18,6 @@ import java.util.HashMap;
 import java.util.HexFormat;
 import java.util.List;
 import java.util.Map;
-import java.util.Optional;
 import java.util.stream.Stream;
 import javax.xml.parsers.DocumentBuilderFactory;
 import org.junit.jupiter.api.Test;
@@ -202,6 +201,39 @@ class ReportTest {
         }
     }
 
+    /** Every slope, in the order of the answer; no section where nothing moves the rejection. */
+    @ParameterizedTest
+    @MethodSource("examples")
+    void tellsWhatToTightenFirst(String study) {
+        Document page = parse(made(study).page());
+        List<Map<String, Object>> numbers = Json.objects(made(study).json().get("sensitivities"));
+        if (numbers.isEmpty()) {
+            assertThat(elements(page, "section"))
+                    .noneMatch(section -> section.getAttribute("id").equals("sensitivities"));
+            return;
+        }
+        Element section = section(page, "sensitivities");
+        List<Element> rows = elements(
+                elements(table(section, "Change of the rejection, the strongest first"), "tbody")
+                        .get(0),
+                "tr");
+        assertThat(rows).hasSameSizeAs(numbers);
+        for (int i = 0; i < rows.size(); i++) {
+            assertThat(words(rows.get(i)))
+                    .startsWith(numbers.get(i).get("number").toString());
+            assertThat(values(rows.get(i)))
+                    .containsExactlyElementsOf(Json.objects(numbers.get(i).get("slopes")).stream()
+                            .map(slope -> (Double)
+                                    slope.getOrDefault("rejection_db_per_percent", slope.get("rejection_db_per_k")))
+                            .toList());
+        }
+        assertThat(words(section))
+                .contains(
+                        "(finite-length: " + made(study).json().get("sensitivities_finite_length") + ")",
+                        "least rejection of the band");
+        assertThat(elements(section, "svg")).hasSize(1);
+    }
+
     private static Element table(Element inside, String caption) {
         return elements(inside, "table").stream()
                 .filter(table -> words(elements(table, "caption").get(0)).equals(caption))
@@ -280,9 +312,8 @@ class ReportTest {
     @MethodSource("examples")
     void hasEveryChartOnceWithTheNumbersBehindIt(String study) {
         Document page = parse(made(study).page());
-        List<Chart> charts = StudyReport.of(
-                        StudyReader.open(Path.of(study), List.of()).family(Optional.empty()))
-                .charts();
+        List<Chart> charts =
+                StudyReport.of(StudyReader.open(Path.of(study), List.of())).charts();
         List<Element> figures = elements(page, "figure");
         assertThat(figures.stream().map(figure -> figure.getAttribute("id")).toList())
                 .containsExactlyInAnyOrderElementsOf(

@@ -70,7 +70,8 @@ record Bounds(double from, double to) {
         return about(low, high);
     }
 
-    private static double round(double value, boolean up) {
+    /** The next of 1, 2 or 5 times a power of ten. */
+    static double round(double value, boolean up) {
         double decade = FastMath.pow(10.0, FastMath.floor(FastMath.log10(value)));
         double[] steps = up ? new double[] {1.0, 2.0, 5.0, 10.0} : new double[] {5.0, 2.0, 1.0};
         for (double step : steps) {

@@ -73,6 +73,7 @@ public final class PdfPage {
         builder.useSVGDrawer(new BatikSVGDrawer());
         builder.useUnicodeBidiSplitter(new ICUBidiSplitter.ICUBidiSplitterFactory());
         builder.useUnicodeBidiReorderer(new ICUBidiReorderer());
+        builder.useUnicodeLineBreaker(new NumberBreaker());
         builder.defaultTextDirection(TextDirection.LTR);
         builder.useReplacementText("\u25A1");
         builder.useExternalResourceAccessControl(

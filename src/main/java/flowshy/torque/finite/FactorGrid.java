@@ -119,6 +119,16 @@ final class FactorGrid {
         return new FiniteFactors(stream.at(t), rocking.at(t), streamError, rockingError);
     }
 
+    /**
+     * Factors of a solution at this very rate, which is not kept: less work than a grid for a hair that is asked once or twice.
+     *
+     * @param rate ω/ν, positive [1/m²]
+     * @return factors with the errors of their meshes; those of the grid in a layer thinner than the solver takes
+     */
+    FiniteFactors alone(double rate) {
+        return rate > heldAbove() ? at(rate) : solved(rate);
+    }
+
     /** Place on the grid, which counts from the highest frequency down. */
     private double place(double rate) {
         if (!(rate > 0.0) || Double.isInfinite(rate)) {
@@ -139,13 +149,14 @@ final class FactorGrid {
     }
 
     private FiniteFactors point(int index) {
-        return points.computeIfAbsent(index, k -> {
-            double rate = heldAbove() * FastMath.pow(10.0, -k / accuracy.perDecade());
-            FiniteFactors found = hair.at(rate, accuracy).factors();
-            return accuracy == Accuracy.FINE || FastMath.max(found.streamError(), found.rockingError()) < TOO_MUCH
-                    ? found
-                    : hair.at(rate, Accuracy.FINE).factors();
-        });
+        return points.computeIfAbsent(index, k -> solved(heldAbove() * FastMath.pow(10.0, -k / accuracy.perDecade())));
+    }
+
+    private FiniteFactors solved(double rate) {
+        FiniteFactors found = hair.at(rate, accuracy).factors();
+        return accuracy == Accuracy.FINE || FastMath.max(found.streamError(), found.rockingError()) < TOO_MUCH
+                ? found
+                : hair.at(rate, Accuracy.FINE).factors();
     }
 
     /** Cubic Hermite curve from left to right with slopes (right − before)/2 and (after − left)/2. */

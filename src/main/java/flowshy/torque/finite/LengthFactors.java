@@ -24,6 +24,15 @@ public interface LengthFactors {
     default void expect(double lowest, double highest) {}
 
     /**
+     * The same for a hair that is asked for a few frequencies alone.
+     *
+     * @return factors that are worked out at each frequency by itself, without a curve through others
+     */
+    default LengthFactors alone() {
+        return this;
+    }
+
+    /**
      * Torque of a slow steady stream along the wall: a lower bound for the torque at any Reynolds number.
      *
      * @param velocity undisturbed velocity at height z [m] above the wall [m/s]

@@ -21,6 +21,11 @@ record SolvedFactors(FactorGrid grid, Medium medium) implements LengthFactors {
     }
 
     @Override
+    public LengthFactors alone() {
+        return omega -> grid.alone(omega / medium.kinematicViscosity());
+    }
+
+    @Override
     public double creepingTorque(DoubleUnaryOperator velocity) {
         return medium.viscosity() * grid.creepingTorque(velocity);
     }

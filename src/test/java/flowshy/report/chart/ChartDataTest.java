@@ -11,6 +11,7 @@ import flowshy.report.chart.paper.Datasets;
 import flowshy.study.Study;
 import flowshy.study.StudyReader;
 import flowshy.verdict.BandsAnswer;
+import flowshy.verdict.design.Sensitivities;
 import flowshy.verdict.lid.LidAnswer;
 import flowshy.verdict.lid.LidQuestion;
 import java.nio.file.Path;
@@ -33,7 +34,7 @@ class ChartDataTest {
         BandsAnswer answer = study.question().answer();
         List<Chart> charts = BandsCharts.of(study, answer);
         JsonPage page = new JsonPage();
-        BandsJson.write(page, study, answer, new Why(List.of(), List.of()), List.of(), List.of(), charts);
+        BandsJson.write(page, study, answer, new Why(List.of(), Sensitivities.NONE), List.of(), List.of(), charts);
         Map<String, Object> json = Json.object(Json.parse(page.finish()));
         List<Map<String, Object>> points = Json.objects(json.get("points"));
         assertThat(points).isNotEmpty();
@@ -43,6 +44,38 @@ class ChartDataTest {
         }
         // a sealed device has no curve of rejection or of flow
         assertThat(drawn).isGreaterThanOrEqualTo(example.equals("helium-can") ? 8 : 14);
+    }
+
+    /** Bars and the table behind them, the strongest first, against the field of the answer. */
+    @ParameterizedTest
+    @ValueSource(strings = {"workbench-air", "water-tank", "weather-mast", "vacuum-package"})
+    void barsOfSensitivitiesAreThoseOfTheJson(String example) {
+        StudyReader reader = StudyReader.open(Path.of("examples/" + example + "/study.yaml"), List.of());
+        Study study = reader.study();
+        BandsAnswer answer = study.question().answer();
+        Sensitivities slopes = reader.sensitivities(study, answer);
+        List<Chart> charts = SensitivityChart.of(study.title(), slopes);
+        assertThat(charts).hasSize(1);
+        JsonPage page = new JsonPage();
+        BandsJson.write(page, study, answer, new Why(List.of(), slopes), List.of(), List.of(), charts);
+        Map<String, Object> json = Json.object(Json.parse(page.finish()));
+        List<Datasets.Drawn> bars = Datasets.bars(((DrawnChart) charts.get(0)).picture());
+        List<Map<String, Object>> rows = rows(json, "sensitivities");
+        List<Map<String, Object>> all = Json.objects(json.get("sensitivities"));
+        assertThat(bars).hasSameSizeAs(rows).hasSizeGreaterThanOrEqualTo(2 * 5);
+        for (int i = 0; i < bars.size(); i++) {
+            Map<String, Object> number = all.get(i / 2);
+            Map<String, Object> slope = Json.objects(number.get("slopes")).get(i % 2);
+            boolean degrees = slope.containsKey("rejection_db_per_k");
+            double change = (double) slope.get(degrees ? "rejection_db_per_k" : "rejection_db_per_percent");
+            assertThat(bars.get(i).label()).isEqualTo(number.get("number") + (degrees ? ", per K" : ""));
+            assertThat(bars.get(i).scale()).isEqualTo(i % 2);
+            assertThat(near(bars.get(i).value(), change)).isTrue();
+            assertThat(rows.get(i).get("label")).isEqualTo(bars.get(i).label());
+            assertThat(rows.get(i).get("frequency_hz")).isEqualTo(slope.get("frequency_hz"));
+            assertThat(rows.get(i).get("change_db")).isEqualTo(change);
+            assertThat(rows.get(i).get("error_db")).isEqualTo(slope.get("error_db"));
+        }
     }
 
     @ParameterizedTest

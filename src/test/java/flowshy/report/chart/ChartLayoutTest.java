@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import flowshy.report.chart.paper.LaidText;
 import flowshy.study.Study;
 import flowshy.study.StudyReader;
+import flowshy.verdict.BandsAnswer;
 import flowshy.verdict.fill.Fill;
 import flowshy.verdict.fill.FillQuestion;
 import flowshy.verdict.lid.LidQuestion;
@@ -62,8 +63,12 @@ class ChartLayoutTest {
     @ParameterizedTest
     @MethodSource("studies")
     void textsOfBandsFit(Path file, List<String> settings) {
-        Study study = StudyReader.read(file, settings);
-        fit(BandsCharts.of(study, study.question().answer()));
+        StudyReader reader = StudyReader.open(file, settings);
+        Study study = reader.study();
+        BandsAnswer answer = study.question().answer();
+        List<Chart> charts = new ArrayList<>(BandsCharts.of(study, answer));
+        charts.addAll(SensitivityChart.of(study.title(), reader.sensitivities(study, answer)));
+        fit(charts);
     }
 
     @ParameterizedTest

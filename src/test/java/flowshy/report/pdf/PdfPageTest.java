@@ -62,6 +62,25 @@ class PdfPageTest {
         }
     }
 
+    /** At any width: the words before each number push it over the edge of a line somewhere. */
+    @Test
+    void noLineEndsWithinANumber() throws IOException {
+        StringBuilder numbers = new StringBuilder();
+        for (int i = 0; i < 400; i++) {
+            numbers.append("x".repeat(1 + i % 7)).append(" −0.123 +0.456 2.93×10⁻⁴ ");
+        }
+        String page = Page.of("Numbers", html -> html.tag("p", numbers.toString()));
+        try (PDDocument document = Loader.loadPDF(PdfPage.of(page))) {
+            String[] lines = new PDFTextStripper().getText(document).split("\\R");
+            assertThat(lines).hasSizeGreaterThan(50);
+            assertThat(lines)
+                    .allSatisfy(line -> assertThat(line.strip())
+                            .doesNotEndWith(".")
+                            .doesNotEndWith("2.93")
+                            .doesNotStartWith("×"));
+        }
+    }
+
     @Test
     void theSamePageGivesTheSameBytes() throws IOException {
         byte[] first = PdfPage.of(page());

@@ -17,7 +17,7 @@ import org.jfree.chart.axis.ValueAxis;
 import org.jfree.chart.axis.ValueTick;
 import org.jfree.chart.ui.RectangleEdge;
 
-/** A sheet on which things stand one under another, each with a dot on one or more scales, so that they can be compared. */
+/** A sheet on which things stand one under another, each with a dot or bars on one or more scales, so that they can be compared. */
 public final class RowSheet implements Picture {
     private static final int WIDTH = 460;
     private static final int MARGIN = 10;
@@ -40,7 +40,16 @@ public final class RowSheet implements Picture {
     private record Limit(double value, String words) {}
 
     /** One thing. */
-    private record Row(String label, List<Mark> marks) {}
+    record Row(String label, List<Mark> marks, List<Bar> bars) {
+        private long deepest() {
+            return bars.stream()
+                    .mapToLong(bar -> bars.stream()
+                            .filter(other -> other.scale() == bar.scale())
+                            .count())
+                    .max()
+                    .orElse(0);
+        }
+    }
 
     /**
      * What stands in a row under a scale.
@@ -110,8 +119,25 @@ public final class RowSheet implements Picture {
      * @return this
      */
     public RowSheet row(String label, List<Mark> marks) {
-        rows.add(new Row(label, List.copyOf(marks)));
+        rows.add(new Row(label, List.copyOf(marks), List.of()));
         return this;
+    }
+
+    /**
+     * Adds a thing that is told by bars.
+     *
+     * @param label its name; wrapped where it is long
+     * @param bars those of one scale from above to below
+     * @return this
+     */
+    public RowSheet bars(String label, List<Bar> bars) {
+        rows.add(new Row(label, List.of(), List.copyOf(bars)));
+        return this;
+    }
+
+    /** What stands on the sheet, for tests. */
+    List<Row> rows() {
+        return List.copyOf(rows);
     }
 
     /**
@@ -174,7 +200,8 @@ public final class RowSheet implements Picture {
     }
 
     private int tall(Row row) {
-        return Math.max(ROW, LINE * label(row).size() + 4);
+        int words = Math.max(ROW, LINE * label(row).size() + 4);
+        return Math.max(words, (int) (Bar.PITCH * row.deepest()) + 5);
     }
 
     private int bottom() {
@@ -206,6 +233,7 @@ public final class RowSheet implements Picture {
         double row = top();
         for (Row thing : rows) {
             drawRow(graphics, pen, thing, row);
+            drawBars(graphics, pen, thing, row);
             row += tall(thing);
         }
         drawKey(graphics, pen);
@@ -268,6 +296,29 @@ public final class RowSheet implements Picture {
         }
     }
 
+    /** Bars first, words over them; from zero, which has a line of its own. */
+    private void drawBars(Graphics2D graphics, Pen pen, Row row, double top) {
+        for (int i = 0; i < scales.size(); i++) {
+            int scale = i;
+            List<Bar> bars =
+                    row.bars().stream().filter(bar -> bar.scale() == scale).toList();
+            ValueAxis axis = scales.get(i).axis();
+            Rectangle2D area = area(i);
+            double middle = top + 0.5 * tall(row) - 0.5 * Bar.PITCH * (bars.size() - 1);
+            for (Bar bar : bars) {
+                bar.draw(graphics, axis, area, middle);
+                bar.write(pen, axis, area, middle);
+                middle += Bar.PITCH;
+            }
+            if (!bars.isEmpty()) {
+                double zero = axis.valueToJava2D(0.0, area, RectangleEdge.BOTTOM);
+                graphics.setPaint(Ink.BOUNDARY.colour());
+                graphics.setStroke(new BasicStroke(0.9f));
+                graphics.draw(new Line2D.Double(zero, top, zero, top + tall(row)));
+            }
+        }
+    }
+
     /** A limit's line must not run through words. */
     private static void clear(Graphics2D graphics, String text, double x, double baseline) {
         Rectangle2D box = Pen.box(Typeface.SMALL, text, x, baseline);
@@ -294,7 +345,11 @@ public final class RowSheet implements Picture {
         double x = MARGIN;
         double y = bottom() + 30.0;
         for (Map.Entry<String, Ink> entry : key.entrySet()) {
-            draw(graphics, entry.getValue(), x + 6, y - 4);
+            if (rows.stream().anyMatch(row -> !row.bars().isEmpty())) {
+                Bar.fill(graphics, entry.getValue(), new Rectangle2D.Double(x + 1, y - 8, 10, 8));
+            } else {
+                draw(graphics, entry.getValue(), x + 6, y - 4);
+            }
             pen.write(Typeface.TEXT, Typeface.DARK, entry.getKey(), x + 15, y);
             x += 15 + Pen.width(Typeface.TEXT, entry.getKey()) + 12;
         }

@@ -17,6 +17,7 @@ final class FurtherChartsSection implements ReportSection {
             Map.entry("error-budget", "error"),
             Map.entry("flow-profile", "error"),
             Map.entry("regime", "device"),
+            Map.entry("sensitivities", "sensitivities"),
             Map.entry("fit-residuals", "fit"),
             Map.entry("rejection-spread", "tolerance"),
             Map.entry("covers", "covers"),

@@ -20,6 +20,7 @@ public final class ReportPage {
             new FitSection(),
             new MeasuredSection(),
             new WhySection(),
+            new SensitivitySection(),
             new ErrorSection(),
             new LidSection(),
             new VariantsSection(),

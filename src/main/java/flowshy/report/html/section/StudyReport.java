@@ -9,12 +9,14 @@ import flowshy.report.chart.CompareCharts;
 import flowshy.report.chart.CoverCharts;
 import flowshy.report.chart.FitCharts;
 import flowshy.report.chart.MeasuredOverlays;
+import flowshy.report.chart.SensitivityChart;
 import flowshy.report.chart.ToleranceCharts;
 import flowshy.report.html.Typography;
 import flowshy.stream.Source;
 import flowshy.stream.cover.Covers;
 import flowshy.study.Family;
 import flowshy.study.Study;
+import flowshy.study.StudyReader;
 import flowshy.study.Variant;
 import flowshy.verdict.BandsAnswer;
 import flowshy.verdict.Decision;
@@ -23,6 +25,7 @@ import flowshy.verdict.Limit;
 import flowshy.verdict.compare.CompareQuestion;
 import flowshy.verdict.compare.ComparedDevice;
 import flowshy.verdict.compare.Contender;
+import flowshy.verdict.design.Sensitivities;
 import flowshy.verdict.fit.FitAnswer;
 import flowshy.verdict.lid.Candidate;
 import flowshy.verdict.lid.LidAnswer;
@@ -48,6 +51,7 @@ import java.util.Set;
  * @param lid covers side by side, where the study names candidates or a cover
  * @param spread how sure the verdict is, where the study states tolerances
  * @param why what would move edges of bands and failed limits, empty where there is none
+ * @param slopes what each dimension and property does to the rejection; none where that was not asked
  * @param measured what was measured, beside the model of the device told of; empty if nothing was
  * @param fit how that device was fitted, empty if it is the study's own
  * @param variants the study and its variants side by side, empty where it names none
@@ -59,6 +63,7 @@ public record StudyReport(
         Optional<LidAnswer> lid,
         Optional<ToleranceAnswer> spread,
         List<Levers> why,
+        Sensitivities slopes,
         List<Compared> measured,
         Optional<FitAnswer> fit,
         List<ComparedDevice> variants,
@@ -81,38 +86,32 @@ public record StudyReport(
     /**
      * Answers every question of a study.
      *
-     * @param study what is asked
+     * @param reader of the study and its variants
      * @return what the report tells
+     * @throws flowshy.study.text.StudyException with every problem of the study
      */
-    public static StudyReport of(Study study) {
-        return of(study, List.of());
-    }
-
-    /**
-     * Answers every question of a study that has variants.
-     *
-     * @param family the study and its variants
-     * @return what the report tells
-     */
-    public static StudyReport of(Family family) {
-        List<Contender> contenders =
-                family.all().stream().map(Variant::contender).toList();
-        return of(
-                family.study(),
-                contenders.size() == 1 ? List.of() : new CompareQuestion(contenders, Optional.empty()).answer());
-    }
-
-    private static StudyReport of(Study study, List<ComparedDevice> variants) {
+    public static StudyReport of(StudyReader reader) {
+        Family family = reader.family(Optional.empty());
+        Study study = family.study();
         BandsAnswer answer = study.question().answer();
+        Sensitivities slopes = reader.sensitivities(study, answer);
         List<Compared> measured = BesideModel.of(study.device(), study.measurements());
-        Optional<ToleranceAnswer> spread = spread(study);
-        List<Chart> charts = new ArrayList<>(BandsCharts.of(study, answer, MeasuredOverlays.of(measured)));
         Optional<LidAnswer> lid = lid(study);
+        Optional<ToleranceAnswer> spread = spread(study);
+        List<ComparedDevice> variants = variants(family);
+        List<Chart> charts = new ArrayList<>(BandsCharts.of(study, answer, MeasuredOverlays.of(measured)));
+        charts.addAll(SensitivityChart.of(study.title(), slopes));
         lid.ifPresent(covers -> charts.addAll(CoverCharts.of(study, covers)));
         spread.ifPresent(found -> charts.addAll(ToleranceCharts.of(study, found)));
         charts.addAll(CompareCharts.of(study.title(), variants));
         return new StudyReport(
-                study, answer, lid, spread, Levers.of(answer), measured, Optional.empty(), variants, charts);
+                study, answer, lid, spread, Levers.of(answer), slopes, measured, Optional.empty(), variants, charts);
+    }
+
+    private static List<ComparedDevice> variants(Family family) {
+        List<Contender> contenders =
+                family.all().stream().map(Variant::contender).toList();
+        return contenders.size() == 1 ? List.of() : new CompareQuestion(contenders, Optional.empty()).answer();
     }
 
     private static Optional<ToleranceAnswer> spread(Study study) {
@@ -137,6 +136,7 @@ public record StudyReport(
                 Optional.empty(),
                 Optional.empty(),
                 Levers.of(answer),
+                Sensitivities.NONE,
                 fit.after(),
                 Optional.of(fit),
                 List.of(),

@@ -32,6 +32,30 @@ public final class Datasets {
         return all;
     }
 
+    /**
+     * One bar of a sheet of rows.
+     *
+     * @param label of its row
+     * @param scale index of its scale
+     * @param value where it ends
+     * @param low lower end of its interval
+     * @param high upper end of its interval
+     */
+    public record Drawn(String label, int scale, double value, double low, double high) {}
+
+    /** Bars of a picture, row by row; none for a picture that has no bars. */
+    public static List<Drawn> bars(Picture picture) {
+        List<Drawn> all = new ArrayList<>();
+        if (picture instanceof RowSheet sheet) {
+            for (RowSheet.Row row : sheet.rows()) {
+                for (Bar bar : row.bars()) {
+                    all.add(new Drawn(row.label(), bar.scale(), bar.value(), bar.low(), bar.high()));
+                }
+            }
+        }
+        return all;
+    }
+
     private static Series series(XYDataset dataset) {
         if (dataset.getSeriesCount() != 1) {
             throw new AssertionError(dataset.getSeriesCount() + " series in one dataset");
