@@ -23,6 +23,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.stream.Collectors;
 import org.hipparchus.util.FastMath;
 
 /** Devices side by side for a terminal: who they are, what they meet, then one line a quantity and one column a device. */
@@ -124,19 +125,25 @@ public final class CompareText {
     }
 
     private void held() {
-        List<String> words = new ArrayList<>();
+        Map<String, List<String>> words = new LinkedHashMap<>();
+        int index = 0;
         for (Family family : families) {
             for (Variant variant : family.all()) {
-                String word = variant.hold().word();
-                if (!words.contains(word)
-                        && family.study().device().suspension().isPresent()) {
-                    words.add(word);
+                String letter = CompareTable.letter(index++);
+                if (family.study().device().suspension().isPresent()) {
+                    words.computeIfAbsent(variant.hold().word(), word -> new ArrayList<>())
+                            .add(letter);
                 }
             }
         }
+        String what = words.size() == 1
+                ? words.keySet().iterator().next()
+                : words.entrySet().stream()
+                        .map(word -> word.getKey() + " (" + String.join(", ", word.getValue()) + ")")
+                        .collect(Collectors.joining(", "));
         String held = words.isEmpty()
                 ? ""
-                : "Held of the suspension, as measured on its study's own hair: " + String.join(", or ", words)
+                : "Held of the suspension, as measured on its study's own hair: " + what
                         + ", and the structural damping. ";
         page.paragraph(held + CompareTable.frame(devices));
         if (devices.size() == 1) {

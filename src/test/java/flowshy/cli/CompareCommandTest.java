@@ -267,6 +267,16 @@ class CompareCommandTest {
     }
 
     @Test
+    void whatIsHeldIsToldDeviceByDevice() throws IOException {
+        String study = study(
+                "variants: {tuned: {hold: resonance, hair: {diameter: 120 um}}, dense: {hair: {density: 2 g/cm3}}}");
+        assertThat(Run.of("compare", study).out().replaceAll("\\s+", " "))
+                .contains("own hair: stiffness (A, C), resonance (B), and the structural damping.");
+        assertThat(Run.of("compare", study, "--hold", "resonance").out().replaceAll("\\s+", " "))
+                .contains("own hair: resonance, and the structural damping.");
+    }
+
+    @Test
     void aNumberWithoutEffectIsNamed() throws IOException {
         String study = study("variants: {thick: {hair: {diameter: 140 um}}}");
         Run run = Run.of("compare", study, "--equal", "mass", "--by", "medium.temperature");
