@@ -42,6 +42,26 @@ public record BesselK(Complex k0, Complex k1) {
     }
 
     /**
+     * K₁ at one place over K₀ at another, neither scaled.
+     *
+     * @param above argument of K₁, Re ≥ 0, not 0, finite
+     * @param below argument of K₀, likewise
+     * @return K₁(above)/K₀(below) [-]; zero or infinite where the real parts lie some 700 apart
+     * @throws IllegalArgumentException outside the closed right half plane or at 0
+     */
+    public static Complex quotient(Complex above, Complex below) {
+        double one = checked(above);
+        double other = checked(below);
+        if (one <= SERIES_BELOW && other <= SERIES_BELOW) { // no scale that would cancel
+            return series(above, one).k1.divide(series(below, other).k0);
+        }
+        return of(above, one)
+                .k1
+                .divide(of(below, other).k0)
+                .multiply(below.subtract(above).exp());
+    }
+
+    /**
      * Scaled function e^z K₀(z), free of underflow.
      *
      * @param z argument, Re z ≥ 0, not 0, finite
@@ -71,33 +91,57 @@ public record BesselK(Complex k0, Complex k1) {
      * @throws IllegalArgumentException outside the closed right half plane or at 0
      */
     public static BesselK of(Complex z) {
+        return of(z, checked(z));
+    }
+
+    /** |z| of an argument that both functions have. */
+    private static double checked(Complex z) {
         if (!(z.getReal() >= 0.0) || z.isZero() || z.isInfinite() || z.isNaN()) {
             throw new IllegalArgumentException("K0 and K1 need a finite z with Re z >= 0, not 0, was " + z);
         }
-        double modulus = z.norm();
+        return z.norm();
+    }
+
+    private static BesselK of(Complex z, double modulus) {
         if (modulus <= SERIES_BELOW) {
-            return series(z);
+            Complex scale = z.exp();
+            BesselK plain = series(z, modulus);
+            return new BesselK(plain.k0.multiply(scale), plain.k1.multiply(scale));
         }
         return modulus < ASYMPTOTIC_FROM ? quadrature(modulus, z.getArgument()) : asymptotic(z);
     }
 
-    /** K₀ = Σ q^k/k!² (H_k − L), z K₁ = Σ q^k/k!² (1 + 2k(L − H_k)), q = z²/4, L = ln(z/2) + γ. */
-    private static BesselK series(Complex z) {
-        Complex q = z.multiply(z).multiply(0.25);
-        Complex logarithm = z.multiply(0.5).log().add(EULER_GAMMA);
-        Complex term = Complex.ONE;
-        Complex k0 = logarithm.negate();
-        Complex zk1 = Complex.ONE;
+    /**
+     * Without the scale: K₀ = Σ q^k/k!² (H_k − L), z K₁ = Σ q^k/k!² (1 + 2k(L − H_k)), q = z²/4, L = ln(z/2) + γ. Written out in parts: maps ask
+     * for it a hundred thousand times.
+     */
+    private static BesselK series(Complex z, double modulus) {
+        double qReal = 0.25 * (z.getReal() - z.getImaginary()) * (z.getReal() + z.getImaginary());
+        double qImaginary = 0.5 * z.getReal() * z.getImaginary();
+        double logarithm = FastMath.log(0.5 * modulus) + EULER_GAMMA;
+        double angle = z.getArgument();
+        double real = 1.0;
+        double imaginary = 0.0;
+        double k0Real = -logarithm;
+        double k0Imaginary = -angle;
+        double zk1Real = 1.0;
+        double zk1Imaginary = 0.0;
         double harmonic = 0.0;
-        for (int k = 1; term.norm() > SMALLEST_TERM; k++) {
+        for (int k = 1; FastMath.abs(real) + FastMath.abs(imaginary) > SMALLEST_TERM; k++) {
             harmonic += 1.0 / k;
-            term = term.multiply(q).divide((double) k * k);
-            Complex rest = logarithm.subtract(harmonic);
-            k0 = k0.subtract(term.multiply(rest));
-            zk1 = zk1.add(term.multiply(rest.multiply(2.0 * k).add(1.0)));
+            double share = 1.0 / ((double) k * k);
+            double next = (real * qReal - imaginary * qImaginary) * share;
+            imaginary = (real * qImaginary + imaginary * qReal) * share;
+            real = next;
+            double rest = logarithm - harmonic;
+            double turnedReal = real * rest - imaginary * angle;
+            double turnedImaginary = real * angle + imaginary * rest;
+            k0Real -= turnedReal;
+            k0Imaginary -= turnedImaginary;
+            zk1Real += 2.0 * k * turnedReal + real;
+            zk1Imaginary += 2.0 * k * turnedImaginary + imaginary;
         }
-        Complex scale = z.exp();
-        return new BesselK(k0.multiply(scale), zk1.divide(z).multiply(scale));
+        return new BesselK(new Complex(k0Real, k0Imaginary), new Complex(zk1Real, zk1Imaginary).divide(z));
     }
 
     /**

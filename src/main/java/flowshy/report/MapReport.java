@@ -61,11 +61,9 @@ public final class MapReport {
         grid.least().ifPresent(k -> page.row("least", place(map, k)));
         grid.largest().ifPresent(k -> page.row("largest", place(map, k)));
         int all = grid.spots().size();
-        long there = grid.spots().stream().filter(Spot::there).count();
+        int there = grid.reaching(Double.NEGATIVE_INFINITY);
         for (double level : map.decisive()) {
-            long above = grid.spots().stream()
-                    .filter(spot -> spot.there() && spot.value() >= level)
-                    .count();
+            int above = grid.reaching(level);
             boolean asked =
                     !map.rejection() || level == map.study().acceptance().margin();
             if (asked || (above > 0 && above < there)) {

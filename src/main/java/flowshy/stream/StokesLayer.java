@@ -73,35 +73,37 @@ public record StokesLayer(double kinematicViscosity) implements WallShare {
      */
     public static Complex lever(double length, double pivotDepth, double delta) {
         double y = length / delta;
-        Complex first;
-        Complex zeroth;
+        double square = length * length;
+        double step = length * pivotDepth;
         if (y * FastMath.sqrt(2.0) < SERIES_BELOW) {
-            first = series(y, true);
-            zeroth = series(y, false);
-        } else {
-            Complex x = new Complex(y, y);
-            double fall = FastMath.exp(-y);
-            Complex e = new Complex(fall * FastMath.cos(y), -fall * FastMath.sin(y));
-            Complex once = e.negate().add(1.0).divide(x);
-            zeroth = once.negate().add(1.0);
-            // (1 − (1+x)e)/x² = (once − e)/x
-            first = once.subtract(e).divide(x).negate().add(0.5);
+            return series(y, square, step);
         }
-        return first.multiply(length * length).add(zeroth.multiply(length * pivotDepth));
+        Complex x = new Complex(y, y);
+        double fall = FastMath.exp(-y);
+        SinCos turn = FastMath.sinCos(y);
+        Complex e = new Complex(fall * turn.cos(), -fall * turn.sin());
+        Complex once = new Complex(1.0 - e.getReal(), -e.getImaginary()).divide(x);
+        // (1 − (1+x)e)/x² = (once − e)/x
+        Complex twice = once.subtract(e).divide(x);
+        return new Complex(
+                square * (0.5 - twice.getReal()) + step * (1.0 - once.getReal()),
+                -square * twice.getImaginary() - step * once.getImaginary());
     }
 
-    /** M₁ = −Σ_{n≥3} (−1)ⁿ x^{n−2}(n−1)/n!, M₀ = Σ_{n≥2} (−1)ⁿ x^{n−1}/n!. */
-    private static Complex series(double y, boolean moment) {
-        Complex minusX = new Complex(-y, -y);
-        Complex power = Complex.ONE;
-        Complex sum = Complex.ZERO;
-        double factorial = moment ? 2.0 : 1.0;
+    /** M₁ = −Σ_{k≥1} (k+1)/(k+2)! (−x)^k and M₀ = −Σ_{k≥1} (−x)^k/(k+1)!, each times its weight. */
+    private static Complex series(double y, double square, double step) {
+        double real = 1.0;
+        double imaginary = 0.0;
+        double sumReal = 0.0;
+        double sumImaginary = 0.0;
         for (int k = 1; k <= TERMS; k++) {
-            power = power.multiply(minusX);
-            int n = moment ? k + 2 : k + 1;
-            factorial *= n;
-            sum = sum.add(power.multiply((moment ? -(n - 1) : -1) / factorial));
+            double next = -y * (real - imaginary) / (k + 1);
+            imaginary = -y * (real + imaginary) / (k + 1);
+            real = next;
+            double weight = square * (k + 1) / (k + 2) + step;
+            sumReal -= real * weight;
+            sumImaginary -= imaginary * weight;
         }
-        return sum;
+        return new Complex(sumReal, sumImaginary);
     }
 }

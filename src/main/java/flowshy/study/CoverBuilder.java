@@ -1,6 +1,5 @@
 package flowshy.study;
 
-import flowshy.cylinder.ConfinedCylinder;
 import flowshy.hair.Hair;
 import flowshy.medium.Medium;
 import flowshy.stream.cover.Cavity;
@@ -20,6 +19,7 @@ final class CoverBuilder {
     private final Problems problems;
     private final FilesRead files;
     private final MediumBuilder media;
+    private final CoverFit fit;
 
     /**
      * A cover with the medium under it.
@@ -34,6 +34,7 @@ final class CoverBuilder {
         this.problems = problems;
         this.files = files;
         this.media = media;
+        this.fit = new CoverFit(form, problems);
     }
 
     /** The cover of a group; empty if it, or the hair or medium it needs, has a problem. */
@@ -42,7 +43,7 @@ final class CoverBuilder {
             return Optional.empty();
         }
         Optional<Cover> cover = cover(path, outside, band);
-        if (cover.isEmpty() || outside.isEmpty() || (hair.isPresent() && !fits(path, cover.get(), hair.get()))) {
+        if (cover.isEmpty() || outside.isEmpty() || (hair.isPresent() && !fit.fits(path, cover.get(), hair.get()))) {
             return Optional.empty();
         }
         if (!cover.get().closed() || !form.has(path + ".fill")) {
@@ -51,18 +52,13 @@ final class CoverBuilder {
         return media.sealed(path + ".fill", outside.get().temperature()).map(fill -> new Fitted(cover.get(), fill));
     }
 
-    /** Whether a known cover also stands over another hair; the problem is told if not. */
-    boolean alsoFits(String path, Cover cover, Hair hair) {
-        return fits(path, cover, hair);
-    }
-
     /** The cover under which something was measured; empty if none is stated or the hair does not fit under it. */
     Optional<Cover> measuredUnder(String path, Optional<Hair> hair) {
         if (!form.word(path + ".kind").orElse("open").equals("sealed")) {
             return Optional.empty();
         }
         Cover cover = sealed(path);
-        return hair.isEmpty() || fits(path, cover, hair.get()) ? Optional.of(cover) : Optional.empty();
+        return hair.isEmpty() || fit.fits(path, cover, hair.get()) ? Optional.of(cover) : Optional.empty();
     }
 
     private Optional<Cover> cover(String path, Optional<Medium> outside, Optional<Band> band) {
@@ -100,37 +96,6 @@ final class CoverBuilder {
                 form.word(path + ".sides").orElse("one").equals("through"),
                 form.si(path + ".cavity-volume"),
                 form.si(path + ".cavity-section")));
-    }
-
-    private boolean fits(String path, Cover cover, Hair hair) {
-        double length = hair.profile().length();
-        if (cover instanceof RoofedCover roof && !(roof.gap() > length)) {
-            refuse(
-                    path + ".gap",
-                    "a roof " + form.word(path + ".gap").orElse("") + " above the wall touches the hair",
-                    "a gap above the hair's length");
-            return false;
-        }
-        if (cover instanceof SealedCover sealed && sealed.cavity().isPresent()) {
-            Cavity cavity = sealed.cavity().get();
-            if (!(cavity.height() > length)) {
-                refuse(
-                        path + ".height",
-                        "a cavity " + form.word(path + ".height").orElse("") + " high touches the hair",
-                        "a height above the hair's length");
-                return false;
-            }
-        }
-        if (cover.cavityRadius().isPresent()
-                && !(cover.cavityRadius().getAsDouble()
-                        > ConfinedCylinder.NARROWEST * hair.profile().largestRadius())) {
-            refuse(
-                    path + ".kind",
-                    "a cavity hardly wider than the hair",
-                    "a cavity radius of 1.01 of the hair's or more, where the law of the confined cylinder holds");
-            return false;
-        }
-        return true;
     }
 
     private Optional<Cover> refuse(String key, String found, String accepted) {

@@ -24,6 +24,11 @@ final class HairBuilder {
 
     /** The hair; empty if it has a problem. */
     Optional<Hair> build() {
+        return build(form.word("finite-length").map(LengthModel::of).orElse(LengthModel.AUTO));
+    }
+
+    /** The same under a model of its length. */
+    Optional<Hair> build(LengthModel model) {
         if (problems.touches("hair") || !form.has("hair")) {
             return Optional.empty();
         }
@@ -33,18 +38,17 @@ final class HairBuilder {
             case "club" -> club();
             default -> new ProfileReader(form, problems, files).read();
         };
-        LengthModel model = form.word("finite-length").map(LengthModel::of).orElse(LengthModel.AUTO);
         return profile.map(p -> new Hair(
                 p, form.si("hair.density"), form.siIfAny("hair.youngs-modulus"), model, form.siIfAny("hair.foot-gap")));
     }
 
     /** The hair of a known shape, where nothing but its material changes. */
-    Hair of(Hair base) {
+    Hair of(Hair base, LengthModel model) {
         return new Hair(
                 base.profile(),
                 form.si("hair.density"),
                 form.siIfAny("hair.youngs-modulus"),
-                base.lengthModel(),
+                model,
                 form.siIfAny("hair.foot-gap"));
     }
 

@@ -56,6 +56,8 @@ public final class VariedStudy implements StatesOfUse {
     private final Hold hold;
     private final List<NumberKey> numbers;
     private final List<String> paths;
+    private final Moving moving;
+    private final LengthModel model;
     private final boolean surrounded;
     private final DevicePlace place;
     private final Map<List<Double>, Medium> known = new ConcurrentHashMap<>();
@@ -73,7 +75,9 @@ public final class VariedStudy implements StatesOfUse {
         this.base = base;
         this.hold = hold;
         this.numbers = List.copyOf(numbers);
-        this.paths = numbers.stream().map(NumberKey::path).toList();
+        this.paths = List.copyOf(numbers.stream().map(NumberKey::path).toList()); // a copy that needs no copy
+        this.moving = Moving.of(paths, place.path());
+        this.model = over(base.device().hair().lengthModel(), paths);
         this.surrounded = surrounded;
         this.place = place;
     }
@@ -164,7 +168,7 @@ public final class VariedStudy implements StatesOfUse {
      * @return off, the estimate, auto or on
      */
     public LengthModel model() {
-        return over(base.device().hair().lengthModel(), paths);
+        return model;
     }
 
     @Override
@@ -225,37 +229,65 @@ public final class VariedStudy implements StatesOfUse {
         return problem.path() + ": " + problem.found() + accepted;
     }
 
-    private boolean varies(String... beginnings) {
-        for (String path : paths) {
-            for (String beginning : beginnings) {
-                if (path.startsWith(beginning)) {
-                    return true;
-                }
-            }
+    /** Which parts of a study have numbers that vary; of a cover, those of the medium and the band it depends on count too. */
+    private record Moving(
+            boolean hair,
+            boolean shape,
+            boolean medium,
+            boolean cover,
+            boolean suspension,
+            boolean measured,
+            boolean band,
+            boolean acceptance,
+            boolean motion,
+            boolean surroundings) {
+        static Moving of(List<String> paths, String cover) {
+            boolean medium = any(paths, List.of("medium."));
+            boolean band = any(paths, List.of("band."));
+            return new Moving(
+                    any(paths, List.of("hair.")),
+                    VariedStudy.shape(paths),
+                    medium,
+                    !cover.isEmpty() && (medium || band || any(paths, List.of(cover + "."))),
+                    any(paths, List.of("suspension.")),
+                    any(paths, MEASURED),
+                    band,
+                    any(paths, List.of("accept.")),
+                    any(paths, List.of("motion.")),
+                    any(paths, List.of("surroundings.")));
         }
-        return false;
+
+        private static boolean any(List<String> paths, List<String> beginnings) {
+            return paths.stream().anyMatch(path -> beginnings.stream().anyMatch(path::startsWith));
+        }
     }
 
     /** One point of the space: each part made anew only where it depends on what varies. */
     private final class Point {
         private final Form now;
         private final Problems problems;
-        private final FilesRead read = files.again();
-        private final MediumBuilder media;
-        private final CoverBuilder covers;
 
         Point(Form now, Problems problems) {
             this.now = now;
             this.problems = problems;
-            this.media = new MediumBuilder(now, problems, read);
-            this.covers = new CoverBuilder(now, problems, read, media);
+        }
+
+        private StudyBuilder studies() {
+            return new StudyBuilder(now, problems, files.again());
+        }
+
+        private MediumBuilder media() {
+            return new MediumBuilder(now, problems, files.again());
+        }
+
+        private CoverBuilder covers() {
+            return new CoverBuilder(now, problems, files.again(), media());
         }
 
         Optional<BandsQuestion> question() {
             Optional<Hair> hair = hair();
             Optional<Medium> outside = outside();
-            StudyBuilder builder = new StudyBuilder(now, problems, read);
-            Optional<Band> band = varies("band.") ? builder.band() : Optional.of(base.band());
+            Optional<Band> band = moving.band() ? studies().band() : Optional.of(base.band());
             if (hair.isEmpty() || outside.isEmpty() || band.isEmpty()) {
                 return Optional.empty();
             }
@@ -269,8 +301,8 @@ public final class VariedStudy implements StatesOfUse {
                     outside.get(),
                     cover.get().cover(),
                     cover.get().around());
-            Acceptance acceptance = varies("accept.") ? builder.acceptance() : base.acceptance();
-            Motion motion = varies("motion.") ? new MotionBuilder(now, problems, read).build() : base.motion();
+            Acceptance acceptance = moving.acceptance() ? studies().acceptance() : base.acceptance();
+            Motion motion = moving.motion() ? new MotionBuilder(now, problems, files.again()).build() : base.motion();
             List<Source> sources = surrounded ? sources(hair.get(), outside.get()) : List.of();
             return Optional.of(
                     new BandsQuestion(device, band.get(), acceptance, motion, sources, reference(band.get())));
@@ -283,7 +315,7 @@ public final class VariedStudy implements StatesOfUse {
                         now.siIfAny("medium.pressure")
                                 .orElse(base.device().outside().pressure())));
             }
-            return varies("medium.") ? medium() : Optional.of(base.device().outside());
+            return moving.medium() ? medium() : Optional.of(base.device().outside());
         }
 
         private double reference(Band band) {
@@ -299,7 +331,7 @@ public final class VariedStudy implements StatesOfUse {
             if (kept.isPresent()) {
                 return kept;
             }
-            Optional<Medium> made = media.build("medium");
+            Optional<Medium> made = media().build("medium");
             if (known.size() >= KEPT) {
                 known.clear();
             }
@@ -308,25 +340,20 @@ public final class VariedStudy implements StatesOfUse {
         }
 
         private Optional<Hair> hair() {
-            return made().map(hair -> hair.seenAs(over(hair.lengthModel(), paths)));
-        }
-
-        private Optional<Hair> made() {
-            if (!varies("hair.")) {
-                return Optional.of(base.device().hair());
+            Hair there = base.device().hair();
+            if (!moving.hair()) {
+                return Optional.of(there.lengthModel() == model ? there : there.seenAs(model));
             }
-            HairBuilder builder = new HairBuilder(now, problems, read);
-            return shape(paths)
-                    ? builder.build()
-                    : Optional.of(builder.of(base.device().hair()));
+            HairBuilder builder = new HairBuilder(now, problems, files.again());
+            return moving.shape() ? builder.build(model) : Optional.of(builder.of(there, model));
         }
 
         private Optional<CoverBuilder.Fitted> cover(Hair hair, Medium outside, Band band) {
             String path = place.path();
-            if (!path.isEmpty() && varies(path + ".", "medium.", "band.")) {
-                return covers.build(path, Optional.of(hair), Optional.of(outside), Optional.of(band));
+            if (moving.cover()) {
+                return covers().build(path, Optional.of(hair), Optional.of(outside), Optional.of(band));
             }
-            return covers.alsoFits(path.isEmpty() ? "cover" : path, place.cover(), hair)
+            return new CoverFit(now, problems).fits(path.isEmpty() ? "cover" : path, place.cover(), hair)
                     ? Optional.of(new CoverBuilder.Fitted(
                             place.cover(),
                             path.isEmpty() ? outside : place.around().orElse(outside)))
@@ -335,18 +362,16 @@ public final class VariedStudy implements StatesOfUse {
 
         private Optional<Suspension> suspension(Hair hair) {
             Optional<Suspension> there = base.device().suspension();
-            if (there.isEmpty() || !varies("suspension.", "hair.")) {
+            boolean anew = moving.suspension() || (moving.hair() && hold != Hold.STIFFNESS);
+            if (there.isEmpty() || !anew) {
                 return there;
             }
-            if (!varies("suspension.") && hold == Hold.STIFFNESS) {
-                return there;
-            }
-            boolean anew = varies(MEASURED.toArray(String[]::new));
-            Hair measured = anew ? base.measuredOn() : base.device().hair();
+            Hair measured =
+                    moving.measured() ? base.measuredOn() : base.device().hair();
             SuspensionBuilder builder =
-                    new SuspensionBuilder(now, problems, media, covers, read, Optional.of(measured));
+                    new SuspensionBuilder(now, problems, media(), covers(), files.again(), Optional.of(measured));
             Optional<SuspensionStatement> statement = builder.statement();
-            Optional<Suspension> solved = anew ? builder.solved(statement, measured) : there;
+            Optional<Suspension> solved = moving.measured() ? builder.solved(statement, measured) : there;
             return statement.isEmpty() || solved.isEmpty()
                     ? Optional.empty()
                     : Optional.of(hold.on(hair, measured, solved.get(), statement.get()));
@@ -356,18 +381,20 @@ public final class VariedStudy implements StatesOfUse {
             if (place.fluid().isPresent()) {
                 // what the study has outside need not bear the state: its sources are taken over from its own
                 List<Source> stated = sources(
-                        varies("surroundings.", "hair."), hair, base.device().outside());
+                        moving.surroundings() || moving.hair(),
+                        hair,
+                        base.device().outside());
                 return place.cover().closed()
                         ? stated
                         : stated.stream().map(source -> source.in(outside)).toList();
             }
-            return sources(varies("surroundings.", "medium.", "hair."), hair, outside);
+            return sources(moving.surroundings() || moving.hair() || moving.medium(), hair, outside);
         }
 
         private List<Source> sources(boolean anew, Hair hair, Medium outside) {
             return base.surroundings().isEmpty() || !anew
                     ? base.surroundings()
-                    : new SurroundingsBuilder(now, problems, read, outside, hair).build();
+                    : new SurroundingsBuilder(now, problems, files.again(), outside, hair).build();
         }
     }
 }

@@ -7,6 +7,7 @@ import flowshy.hair.Profile;
 import flowshy.math.Caveat;
 import flowshy.math.Caveat.Subject;
 import flowshy.math.Caveat.Weight;
+import flowshy.medium.Medium;
 import flowshy.medium.PropertySource;
 import flowshy.medium.PropertySource.Reading;
 import flowshy.response.Device;
@@ -14,6 +15,7 @@ import flowshy.response.Suspension;
 import flowshy.torque.ThinStrips;
 import flowshy.torque.finite.LengthFactors;
 import java.util.ArrayList;
+import java.util.Collection;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
@@ -35,17 +37,33 @@ final class Assumptions {
     private Assumptions() {}
 
     /** Whether a model has ended that a quantity rests on. */
-    static boolean ended(List<Caveat> caveats, Subject subject) {
-        return caveats.stream().anyMatch(caveat -> caveat.weight() == Weight.OUT_OF_RANGE && caveat.about() == subject);
+    static boolean ended(Collection<Caveat> caveats, Subject subject) {
+        for (Caveat caveat : caveats) {
+            if (caveat.weight() == Weight.OUT_OF_RANGE && caveat.about() == subject) {
+                return true;
+            }
+        }
+        return false;
     }
 
     /** The same for the rejection alone, whose laws have few ends: without the work of all that stands beside a whole answer. */
     static boolean rejectionEnds(Device device, Band band) {
+        Medium around = device.around();
+        boolean outside = !device.cover().closed() && ended(device.outside().caveats(), Subject.REJECTION);
+        return outside
+                || ended(around.caveats(), Subject.REJECTION)
+                || ended(device.cover().assumptions(around), Subject.REJECTION)
+                || rarefactionEnds(device, band);
+    }
+
+    private static boolean rarefactionEnds(Device device, Band band) {
+        double thinnest = device.hair().profile().smallestRadius();
+        if (new OscillatingCylinder(thinnest, device.around()).knudsen() <= OscillatingCylinder.SLIP_END) {
+            return false;
+        }
         Set<Caveat> caveats = new LinkedHashSet<>();
-        surroundedBy(device, caveats);
         rarefaction(device, band, caveats);
-        caveats.addAll(device.cover().assumptions(device.around()));
-        return ended(List.copyOf(caveats), Subject.REJECTION);
+        return ended(caveats, Subject.REJECTION);
     }
 
     static List<Caveat> of(Device device, Band band, DeviceFacts facts) {

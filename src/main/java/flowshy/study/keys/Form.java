@@ -14,8 +14,10 @@ public final class Form {
     private final Map<String, Field> fields;
     private final Map<String, Position> places;
     private final List<Taken> taken;
-    /** Numbers laid over the fields; few, and cheap to change. */
-    private final Map<String, Double> changed;
+    /** Paths of the numbers laid over the fields; a handful, sought one by one. */
+    private final List<String> changed;
+
+    private final double[] values;
 
     /**
      * A default that was used, or something left out.
@@ -30,14 +32,16 @@ public final class Form {
         this.fields = Collections.unmodifiableMap(new LinkedHashMap<>(fields));
         this.places = Collections.unmodifiableMap(new LinkedHashMap<>(places));
         this.taken = List.copyOf(taken);
-        this.changed = Map.of();
+        this.changed = List.of();
+        this.values = new double[0];
     }
 
-    private Form(Form base, Map<String, Double> changed) {
+    private Form(Form base, List<String> changed, double... values) {
         this.fields = base.fields;
         this.places = base.places;
         this.taken = base.taken;
         this.changed = changed;
+        this.values = values;
     }
 
     /**
@@ -59,7 +63,7 @@ public final class Form {
     public List<Taken> taken() {
         return changed.isEmpty()
                 ? taken
-                : taken.stream().filter(t -> !changed.containsKey(t.path())).toList();
+                : taken.stream().filter(t -> !changed.contains(t.path())).toList();
     }
 
     /**
@@ -79,7 +83,7 @@ public final class Form {
      * @return false for a default and for nothing at all
      */
     public boolean given(String path) {
-        return changed.containsKey(path)
+        return changed.contains(path)
                 || (fields.containsKey(path) && fields.get(path).given());
     }
 
@@ -91,7 +95,11 @@ public final class Form {
      * @throws IllegalStateException if there is none: ask {@link #has} before
      */
     public double si(String path) {
-        return siIfAny(path).orElseThrow(() -> new IllegalStateException("no number at " + path));
+        OptionalDouble number = siIfAny(path);
+        if (number.isEmpty()) {
+            throw new IllegalStateException("no number at " + path);
+        }
+        return number.getAsDouble();
     }
 
     /**
@@ -101,12 +109,14 @@ public final class Form {
      * @return in SI, empty if the key is not there
      */
     public OptionalDouble siIfAny(String path) {
-        Double over = changed.get(path);
-        if (over != null) {
-            return OptionalDouble.of(over);
+        int over = changed.indexOf(path);
+        if (over >= 0) {
+            return OptionalDouble.of(values[over]);
         }
-        Optional<Quantity> quantity = Optional.ofNullable(fields.get(path)).flatMap(Field::quantity);
-        return quantity.isPresent() ? OptionalDouble.of(quantity.get().value()) : OptionalDouble.empty();
+        Field field = fields.get(path);
+        return field == null || field.quantity().isEmpty()
+                ? OptionalDouble.empty()
+                : OptionalDouble.of(field.quantity().get().value());
     }
 
     /**
@@ -131,11 +141,11 @@ public final class Form {
 
     private Field at(String path) {
         Field field = fields.get(path);
-        Double over = changed.get(path);
-        if (over == null) {
+        int over = changed.indexOf(path);
+        if (over < 0) {
             return field;
         }
-        Quantity quantity = field.quantity().orElseThrow().at(over);
+        Quantity quantity = field.quantity().orElseThrow().at(values[over]);
         return new Field(path, quantity.written(), Optional.of(quantity), field.position(), true);
     }
 
@@ -221,14 +231,25 @@ public final class Form {
      * @throws IllegalStateException if there is no number at one of these paths
      */
     public Form with(List<String> paths, double... values) {
-        Map<String, Double> over = new LinkedHashMap<>(changed);
-        for (int i = 0; i < paths.size(); i++) {
-            Field old = fields.get(paths.get(i));
+        for (String path : paths) {
+            Field old = fields.get(path);
             if (old == null || old.quantity().isEmpty()) {
-                throw new IllegalStateException("no number at " + paths.get(i));
+                throw new IllegalStateException("no number at " + path);
             }
+        }
+        if (changed.isEmpty()) {
+            return new Form(this, List.copyOf(paths), values.clone());
+        }
+        Map<String, Double> over = new LinkedHashMap<>();
+        for (int i = 0; i < changed.size(); i++) {
+            over.put(changed.get(i), this.values[i]);
+        }
+        for (int i = 0; i < paths.size(); i++) {
             over.put(paths.get(i), values[i]);
         }
-        return new Form(this, over);
+        return new Form(
+                this,
+                List.copyOf(over.keySet()),
+                over.values().stream().mapToDouble(value -> value).toArray());
     }
 }

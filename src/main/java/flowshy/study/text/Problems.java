@@ -71,11 +71,16 @@ public final class Problems {
      * @return true if so
      */
     public boolean touches(String path) {
-        // a mistyped key stands for the one it was meant to be; past the hundredth problem, who knows
-        return untold > 0
-                || found.stream()
-                        .anyMatch(p -> within(p.path(), path)
-                                || p.nearest().filter(n -> within(n, path)).isPresent());
+        if (untold > 0) { // past the hundredth problem, who knows
+            return true;
+        }
+        for (Problem problem : found) { // a mistyped key stands for the one it was meant to be
+            if (within(problem.path(), path)
+                    || problem.nearest().filter(near -> within(near, path)).isPresent()) {
+                return true;
+            }
+        }
+        return false;
     }
 
     private static boolean within(String inner, String path) {

@@ -10,6 +10,7 @@ import flowshy.medium.Medium;
 import flowshy.stream.StokesLayer;
 import org.hipparchus.complex.Complex;
 import org.hipparchus.util.FastMath;
+import org.hipparchus.util.SinCos;
 
 /**
  * Strip theory with a cheap repair for finite length: hundreds of times quicker than {@link FiniteHair}, and an estimate.
@@ -51,6 +52,9 @@ public record RepairedStrips(Profile profile, Medium medium, double pivotDepth) 
 
     private static final double POWER = 1.5;
 
+    /** Of k^{3/2}. */
+    private static final SinCos TURNED = FastMath.sinCos(0.25 * FastMath.PI * POWER);
+
     private static final double REACH = 2.0;
 
     private static final double TIP = 0.5;
@@ -63,18 +67,19 @@ public record RepairedStrips(Profile profile, Medium medium, double pivotDepth) 
     public FiniteFactors at(double omega) {
         double delta = medium.stokesLayer(omega);
         Complex k = new Complex(1.0 / delta, 1.0 / delta);
-        Complex near =
-                k.pow(POWER).add(FastMath.pow(REACH / profile.length(), POWER)).pow(1.0 / POWER);
+        Complex near = near(delta);
         Moments strips = new Moments();
         Moments repaired = new Moments();
         if (profile instanceof Cylinder cylinder) {
-            add(cylinder, delta, HydrodynamicFunction.of(waveNumber(delta) * cylinder.radius()), strips);
-            add(cylinder, delta, gamma(k.multiply(cylinder.radius()), near.multiply(cylinder.radius())), repaired);
+            Complex lever = StokesLayer.lever(cylinder.length(), pivotDepth, delta);
+            add(cylinder, lever, HydrodynamicFunction.of(waveNumber(delta) * cylinder.radius()), strips);
+            add(cylinder, lever, gamma(k.multiply(cylinder.radius()), near.multiply(cylinder.radius())), repaired);
         } else {
             add(delta, k, near, strips, repaired);
         }
         double arm = profile.length() + pivotDepth;
-        double end = TIP * FastMath.pow(tipRadius(), 3) * arm;
+        double tip = tipRadius();
+        double end = TIP * tip * tip * tip * arm;
         Complex stream = repaired.stream.subtract(
                 StokesLayer.share(profile.length() / delta).multiply(end));
         Complex rocking = repaired.rocking.add(-end * arm);
@@ -100,18 +105,32 @@ public record RepairedStrips(Profile profile, Medium medium, double pivotDepth) 
         }
     }
 
+    /** k_e. The argument of k is 45°, that of its power is known without a logarithm. */
+    private Complex near(double delta) {
+        double power = power(waveNumber(delta));
+        double real = power * TURNED.cos() + power(REACH / profile.length());
+        double imaginary = power * TURNED.sin();
+        double modulus = FastMath.cbrt(real * real + imaginary * imaginary);
+        SinCos turn = FastMath.sinCos(FastMath.atan2(imaginary, real) / POWER);
+        return new Complex(modulus * turn.cos(), modulus * turn.sin());
+    }
+
+    /** To the power of 3/2. */
+    private static double power(double x) {
+        return x * FastMath.sqrt(x);
+    }
+
     /** √(ω/ν). */
     private static double waveNumber(double delta) {
         return FastMath.sqrt(2.0) / delta;
     }
 
-    private void add(Cylinder cylinder, double delta, Complex gamma, Moments moments) {
+    private void add(Cylinder cylinder, Complex lever, Complex gamma, Moments moments) {
         double square = cylinder.radius() * cylinder.radius();
         double length = cylinder.length();
         double top = length + pivotDepth;
-        moments.stream = gamma.multiply(StokesLayer.lever(length, pivotDepth, delta))
-                .add(length * (0.5 * length + pivotDepth))
-                .multiply(square);
+        moments.stream =
+                gamma.multiply(lever).add(length * (0.5 * length + pivotDepth)).multiply(square);
         moments.rocking = gamma.multiply(square * (top * top * top - pivotDepth * pivotDepth * pivotDepth) / 3.0);
     }
 
@@ -134,10 +153,7 @@ public record RepairedStrips(Profile profile, Medium medium, double pivotDepth) 
     }
 
     private static Complex gamma(Complex lambda, Complex near) {
-        Complex ratio = BesselK.scaledK1(lambda)
-                .divide(BesselK.scaledK0(near))
-                .multiply(near.subtract(lambda).exp());
-        return ratio.multiply(4.0).divide(lambda).add(1.0);
+        return BesselK.quotient(lambda, near).multiply(4.0).divide(lambda).add(1.0);
     }
 
     /** Root of a(L − s) = s, from below where there is none but 0. */

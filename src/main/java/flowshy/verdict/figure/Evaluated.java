@@ -14,7 +14,6 @@ import flowshy.verdict.error.ErrorBudget;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
-import java.util.function.Supplier;
 import org.hipparchus.util.FastMath;
 
 /**
@@ -24,15 +23,16 @@ import org.hipparchus.util.FastMath;
 public final class Evaluated {
     private final BandsQuestion question;
     private final double frequency;
-    private final Supplier<Response> response;
-    private final Supplier<ResponsePoint> point;
-    private final Supplier<Moments> moments;
-    private final Supplier<OptionalDouble> resonance;
-    private final Supplier<Optional<Decay>> decay;
-    private final Supplier<BandReading> reading;
-    private final Supplier<List<ReadingBand>> bands;
-    private final Supplier<Optional<ErrorBudget>> error;
-    private final Supplier<OptionalDouble> bending;
+    // parts: null until asked for
+    private Response response;
+    private ResponsePoint point;
+    private Moments moments;
+    private OptionalDouble resonance;
+    private Optional<Decay> decay;
+    private BandReading reading;
+    private List<ReadingBand> bands;
+    private Optional<ErrorBudget> error;
+    private OptionalDouble bending;
 
     /**
      * A device at the frequency of comparison of its question.
@@ -52,17 +52,6 @@ public final class Evaluated {
     public Evaluated(BandsQuestion question, double frequency) {
         this.question = question;
         this.frequency = frequency;
-        this.response = new Once<>(() -> new Response(device()));
-        this.point = new Once<>(() -> response().at(frequency));
-        this.moments = new Once<>(() -> Moments.of(device().hair().profile(), device().pivotDepth()));
-        this.resonance = new Once<>(() -> oscillator()
-                .map(swing -> OptionalDouble.of(swing.resonance() / (2.0 * FastMath.PI)))
-                .orElseGet(OptionalDouble::empty));
-        this.decay = new Once<>(() -> oscillator().map(Oscillator::decay));
-        this.reading = new Once<>(() -> question.reading(response()));
-        this.bands = new Once<>(() -> reading().bands());
-        this.error = new Once<>(question::error);
-        this.bending = new Once<>(() -> DeviceFacts.bendingFrequency(device()));
     }
 
     /**
@@ -92,18 +81,10 @@ public final class Evaluated {
             Response response,
             BandReading reading,
             Optional<ErrorBudget> error) {
-        this.question = question;
-        this.frequency = frequency;
-        Evaluated fresh = new Evaluated(question);
-        this.response = () -> response;
-        this.point = new Once<>(() -> response.at(frequency));
-        this.moments = fresh.moments;
-        this.resonance = fresh.resonance;
-        this.decay = fresh.decay;
-        this.reading = () -> reading;
-        this.bands = new Once<>(reading::bands);
-        this.error = () -> error;
-        this.bending = fresh.bending;
+        this(question, frequency);
+        this.response = response;
+        this.reading = reading;
+        this.error = error;
     }
 
     /**
@@ -134,25 +115,42 @@ public final class Evaluated {
     }
 
     Response response() {
-        return response.get();
+        if (response == null) {
+            response = new Response(device());
+        }
+        return response;
     }
 
     ResponsePoint point() {
-        return point.get();
+        if (point == null) {
+            point = response().at(frequency);
+        }
+        return point;
     }
 
     Moments moments() {
-        return moments.get();
+        if (moments == null) {
+            moments = Moments.of(device().hair().profile(), device().pivotDepth());
+        }
+        return moments;
     }
 
     /** Absent where no suspension is stated that holds the hair. */
     OptionalDouble resonance() {
-        return resonance.get();
+        if (resonance == null) {
+            resonance = oscillator()
+                    .map(swing -> OptionalDouble.of(swing.resonance() / (2.0 * FastMath.PI)))
+                    .orElseGet(OptionalDouble::empty);
+        }
+        return resonance;
     }
 
     /** Likewise. */
     Optional<Decay> decay() {
-        return decay.get();
+        if (decay == null) {
+            decay = oscillator().map(Oscillator::decay);
+        }
+        return decay;
     }
 
     Optional<Oscillator> oscillator() {
@@ -160,11 +158,17 @@ public final class Evaluated {
     }
 
     BandReading reading() {
-        return reading.get();
+        if (reading == null) {
+            reading = question.reading(response());
+        }
+        return reading;
     }
 
     List<ReadingBand> bands() {
-        return bands.get();
+        if (bands == null) {
+            bands = reading().bands();
+        }
+        return bands;
     }
 
     /**
@@ -173,29 +177,17 @@ public final class Evaluated {
      * @return their error over the band, empty where none are given
      */
     public Optional<ErrorBudget> error() {
-        return error.get();
+        if (error == null) {
+            error = question.error();
+        }
+        return error;
     }
 
     /** Absent without a modulus. */
     OptionalDouble bending() {
-        return bending.get();
-    }
-
-    /** A value worked out at the first call. */
-    private static final class Once<T> implements Supplier<T> {
-        private final Supplier<T> work;
-        private T value;
-
-        Once(Supplier<T> work) {
-            this.work = work;
+        if (bending == null) {
+            bending = DeviceFacts.bendingFrequency(device());
         }
-
-        @Override
-        public T get() {
-            if (value == null) { // not worked out yet
-                value = work.get();
-            }
-            return value;
-        }
+        return bending;
     }
 }

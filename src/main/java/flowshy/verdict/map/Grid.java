@@ -84,6 +84,22 @@ public record Grid(Axis across, Axis down, List<Spot> spots) {
     }
 
     /**
+     * How many places have a number that reaches a level.
+     *
+     * @param level least number that counts; minus infinity for any
+     * @return count
+     */
+    public int reaching(double level) {
+        int count = 0;
+        for (Spot spot : spots) {
+            if (spot.value() >= level) { // never so without a number
+                count++;
+            }
+        }
+        return count;
+    }
+
+    /**
      * Why places have no number, or one that counts little. What differs in its figures alone is one reason.
      *
      * @param first as said at the first place that has it
