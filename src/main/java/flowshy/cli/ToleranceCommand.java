@@ -2,6 +2,7 @@ package flowshy.cli;
 
 import flowshy.report.JsonPage;
 import flowshy.report.ToleranceReport;
+import flowshy.report.chart.Chart;
 import flowshy.report.chart.ToleranceCharts;
 import flowshy.study.units.Dimension;
 import flowshy.study.units.Quantity;
@@ -92,8 +93,9 @@ final class ToleranceCommand implements Callable<Integer> {
         int code = studies.each(spec.commandLine(), output.json(), study -> {
             ToleranceAnswer answer = answer(new ToleranceQuestion(study.tolerances(), figures), effort);
             texts.add(ToleranceReport.text(study, answer));
-            charts.add(charts.asked() ? ToleranceCharts.of(study, answer) : List.of());
-            objects.add(() -> ToleranceReport.write(json, study, answer));
+            List<Chart> drawn = charts.asked() ? ToleranceCharts.of(study, answer) : List.of();
+            charts.add(drawn);
+            objects.add(() -> ToleranceReport.write(json, study, answer, drawn));
             if (output.csv()) {
                 tables.add(ToleranceReport.csv(answer));
             }

@@ -3,6 +3,7 @@ package flowshy.report;
 import static flowshy.math.Figures.say;
 
 import flowshy.math.Figures;
+import flowshy.report.chart.Chart;
 import flowshy.study.Study;
 import flowshy.verdict.figure.FigureUnit;
 import flowshy.verdict.tolerance.ToleranceAnswer;
@@ -255,8 +256,9 @@ public final class ToleranceReport {
      * @param json where to write
      * @param study what was asked
      * @param answer what was found
+     * @param charts drawn of it, in order; none if they were not asked for
      */
-    public static void write(JsonPage json, Study study, ToleranceAnswer answer) {
+    public static void write(JsonPage json, Study study, ToleranceAnswer answer, List<Chart> charts) {
         json.object(() -> {
             StudyJson.write(json, study);
             json.object("run", () -> {
@@ -298,6 +300,7 @@ public final class ToleranceReport {
                 json.cell("required_yield", Cell.of(answer.required(), "no yield is required"));
                 json.text("sentence", answer.sentence());
             });
+            ChartTables.write(json, charts);
         });
     }
 

@@ -82,12 +82,45 @@ class ChartsTest {
         }
     }
 
+    /** Every command that draws. */
+    static List<List<String>> drawing() {
+        String tray = "examples/fan-tray/study.yaml";
+        List<List<String>> all = new ArrayList<>();
+        some().forEach(study -> all.add(List.of("bands", study.toString())));
+        all.add(List.of("bands", tray, "--force-at", "80 Hz, 1 kHz"));
+        all.add(List.of("lid", tray));
+        all.add(List.of("fill", "examples/wrong-fill/study.yaml"));
+        all.add(List.of("compare", "examples/lift-machinery/study.yaml"));
+        all.add(List.of("fit", "examples/measured-pickup/study.yaml"));
+        all.add(List.of("tolerance", "examples/potting-oil/study.yaml", "--samples", "512", "--of", "resonance"));
+        all.add(List.of(
+                "map",
+                "examples/hoist-chain/study.yaml",
+                "--across",
+                "hair.diameter=40 um..120 um",
+                "--down",
+                "hair.length=0.3 mm..1.2 mm",
+                "--steps",
+                "13,9"));
+        return all;
+    }
+
+    private static List<String> with(List<String> words, String... more) {
+        List<String> all = new ArrayList<>(words);
+        all.addAll(List.of(more));
+        return all;
+    }
+
+    private static Run drawn(List<String> words, Path into) {
+        Run run = Run.of(with(words, "--chart", into.toString()).toArray(String[]::new));
+        assertThat(run.code()).as("%s: %s", words, run.err()).isIn(0, 3);
+        return run;
+    }
+
     @ParameterizedTest
-    @MethodSource("some")
-    void svgIsXmlWithWordsAndWithoutScript(Path study) throws Exception {
-        assertThat(Run.of("bands", study.toString(), "--chart", folder.toString())
-                        .code())
-                .isIn(0, 3);
+    @MethodSource("drawing")
+    void svgIsXmlWithWordsAndWithoutScript(List<String> words) throws Exception {
+        drawn(words, folder);
         List<String> names = names("svg");
         assertThat(names).isNotEmpty();
         for (String name : names) {
@@ -131,19 +164,46 @@ class ChartsTest {
         }
     }
 
-    @Test
-    void sameStudySameBytes() throws IOException {
+    @ParameterizedTest
+    @MethodSource("drawing")
+    void sameStudySameBytes(List<String> words) throws IOException {
         Path one = folder.resolve("one");
         Path two = folder.resolve("two");
-        Run.of("bands", "examples/fan-tray/study.yaml", "--chart", one.toString());
-        Run.of("bands", "examples/fan-tray/study.yaml", "--chart", two.toString());
+        drawn(words, one);
+        drawn(words, two);
         try (Stream<Path> files = Files.list(one)) {
             List<Path> all = files.toList();
-            assertThat(all).isNotEmpty();
+            assertThat(all).hasSizeGreaterThanOrEqualTo(3);
             for (Path file : all) {
                 assertThat(two.resolve(file.getFileName().toString())).hasSameBinaryContentAs(file);
             }
         }
+    }
+
+    /** README names every chart, and no other. */
+    @Test
+    void readmeListsEveryChart() throws IOException {
+        Set<String> drawn = new HashSet<>();
+        for (List<String> words : drawing()) {
+            Path into = folder.resolve("c" + drawn.size() + words.get(0));
+            drawn(words, into);
+            try (Stream<Path> files = Files.list(into)) {
+                files.map(file -> file.getFileName().toString().replaceFirst("\\.[a-z]+$", ""))
+                        .map(name -> name.replaceFirst("^force-along-hair-.*", "force-along-hair-FREQUENCY"))
+                        .map(name -> name.replaceFirst("^variance-.*", "variance-FIGURE"))
+                        .forEach(drawn::add);
+            }
+        }
+        Set<String> listed = new HashSet<>();
+        String readme = Files.readString(Path.of("README.md"));
+        String charts = readme.substring(readme.indexOf("## Charts"));
+        charts.substring(0, charts.indexOf("\n## ", 3))
+                .lines()
+                .filter(line -> line.startsWith("| "))
+                .map(line -> line.split("\\|", -1)[2].strip())
+                .filter(name -> name.startsWith("`"))
+                .forEach(name -> listed.add(name.replace("`", "")));
+        assertThat(listed).hasSizeGreaterThan(10).containsExactlyInAnyOrderElementsOf(drawn);
     }
 
     @Test

@@ -11,9 +11,9 @@ import picocli.CommandLine;
  * @param out what went to standard output
  * @param err what went to standard error
  */
-record Run(int code, String out, String err) {
+public record Run(int code, String out, String err) {
     /** Runs a command line. */
-    static Run of(String... words) {
+    public static Run of(String... words) {
         StringWriter out = new StringWriter();
         StringWriter err = new StringWriter();
         CommandLine line = Main.commandLine(words);

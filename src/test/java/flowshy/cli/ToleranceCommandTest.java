@@ -279,5 +279,8 @@ class ToleranceCommandTest {
                 .contains("cut and plate");
         assertThat(text.indexOf("Spread of the rejection over all devices"))
                 .isGreaterThan(text.indexOf("id=\"tolerance\""));
+        String section = text.substring(text.indexOf("id=\"tolerance\""));
+        assertThat(section.substring(0, section.indexOf("</section>")))
+                .contains("id=\"chart-variance-least-rejection\"", "id=\"chart-rejection-spread\"");
     }
 }

@@ -16,7 +16,7 @@ import java.util.Locale;
 /** The charts of a fit: those of {@code bands} for the fitted device with what was measured over them, and what is left. */
 public final class FitCharts {
     private static final String NAME = "fit-residuals";
-    private static final int HEIGHT = 150;
+    private static final int HEIGHT = 250;
 
     /** Within this a residual is nothing to speak of, as common practice has it. */
     private static final double USUAL = 2.0;
@@ -61,9 +61,9 @@ public final class FitCharts {
         Bounds axis = Bounds.about(from, to > from ? to : 2.0 * from);
         PlotSheet sheet = PlotSheet.decades(
                 new Heading("What the fit leaves", study.title()), "frequency, Hz", axis.from(), axis.to(), HEIGHT);
-        panel(sheet, all, ends, "sizes, in standard uncertainties", false);
+        panel(sheet, all, ends, "sizes, in standard uncertainties; dashes at ±2", false);
         if (all.stream().anyMatch(r -> r.part() == Residual.Part.PHASE)) {
-            panel(sheet, all, ends, "phases, in standard uncertainties", true);
+            panel(sheet, all, ends, "phases, in standard uncertainties; dashes at ±2", true);
         }
         return new DrawnChart(NAME, "What the fit leaves", description(answer), columns.table(), sheet);
     }
@@ -80,8 +80,8 @@ public final class FitCharts {
                 draw(panel, phases ? "" : name, i, own);
             }
         }
-        panel.level(USUAL, "2", Ink.LIMIT);
-        panel.level(-USUAL, "-2", Ink.LIMIT);
+        panel.level(USUAL, "", Ink.LIMIT);
+        panel.level(-USUAL, "", Ink.LIMIT);
         sheet.add(panel);
     }
 

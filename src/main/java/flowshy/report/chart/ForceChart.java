@@ -18,6 +18,9 @@ import org.hipparchus.util.FastMath;
 public final class ForceChart {
     private static final int HEIGHT = 300;
 
+    /** Height over that of the tip up to which the picture holds the whole curve. */
+    private static final double BELOW_THE_SPIKE = 0.97;
+
     private ForceChart() {}
 
     /** One end of a slice, so that a curve runs in steps. */
@@ -79,8 +82,8 @@ public final class ForceChart {
                 .add(panel(
                         "on the turning hair, µN/m per rad/s", height, scaled(rocking, 1e6), scaled(stripRocking, 1e6)))
                 .remark(
-                        "On a bare wall. The end carries a spike, cut off in the picture at 1.6 times the largest force of strips; a"
-                                + " flat tip carries a force of its own that is not drawn.");
+                        "On a bare wall. The edge at the end carries a spike, which may leave the picture; a flat tip carries a"
+                                + " force of its own that is not drawn.");
         return new DrawnChart(
                 "force-along-hair-"
                         + TickText.hertz(force.frequency(), 4)
@@ -94,12 +97,16 @@ public final class ForceChart {
 
     private static Panel panel(String heading, List<Double> height, List<Double> whole, List<Double> strips) {
         double largest = strips.stream().mapToDouble(Double::doubleValue).max().orElse(1.0);
-        double most = 1.6 * largest;
+        double tip = height.get(height.size() - 1);
+        for (int i = 0; i < whole.size(); i++) {
+            if (height.get(i) <= BELOW_THE_SPIKE * tip) {
+                largest = FastMath.max(largest, whole.get(i));
+            }
+        }
+        double most = 1.1 * largest;
         Bounds ends = Bounds.even(List.of(List.of(0.0, most)), step(most));
-        List<Double> seen =
-                whole.stream().map(value -> FastMath.min(value, ends.to())).toList();
         return Panel.even(heading, 0.0, ends.to(), 1)
-                .line("whole hair", Ink.FIRST, height, seen)
+                .line("whole hair", Ink.FIRST, height, whole)
                 .line("strip theory", Ink.SECOND, height, strips);
     }
 

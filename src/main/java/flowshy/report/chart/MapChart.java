@@ -123,7 +123,11 @@ public final class MapChart {
     }
 
     private static String number(Side side, double value) {
-        return (TickText.of(side.unit().show(value), 4) + " " + side.unit().symbol()).strip();
+        return (TickText.of(side.unit().show(value), 4) + " " + symbol(side)).strip();
+    }
+
+    private static String symbol(Side side) {
+        return side.unit().symbol().replaceFirst("^u", "µ");
     }
 
     private String shown(double value) {
@@ -149,7 +153,7 @@ public final class MapChart {
     }
 
     private static MapSheet.Side axis(Side side, Axis axis) {
-        String symbol = side.unit().symbol();
+        String symbol = symbol(side);
         return new MapSheet.Side(
                 side.key().path() + (symbol.isEmpty() ? "" : ", " + symbol),
                 side.unit().show(axis.from()),

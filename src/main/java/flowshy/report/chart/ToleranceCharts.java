@@ -19,14 +19,30 @@ public final class ToleranceCharts {
     private ToleranceCharts() {}
 
     /**
-     * The rejection of all devices as a fan over frequency.
+     * The rejection of all devices as a fan over frequency, and of each quantity which tolerance matters most.
      *
      * @param study what was asked
      * @param answer what was found
-     * @return one chart; none where no flow reaches the hair
+     * @return no fan where no flow reaches the hair, no bars for a quantity whose indices were not worked out
      */
     public static List<Chart> of(Study study, ToleranceAnswer answer) {
-        return answer.fan().isEmpty() ? List.of() : List.of(fan(study.title(), answer));
+        List<Chart> charts = new ArrayList<>();
+        if (!answer.fan().isEmpty()) {
+            charts.add(fan(study.title(), answer));
+        }
+        answer.figures()
+                .forEach(spread -> VarianceChart.of(study.title(), spread).ifPresent(charts::add));
+        return charts;
+    }
+
+    /**
+     * Whether a chart is of a tolerance run.
+     *
+     * @param name of a chart
+     * @return true for any of this class
+     */
+    public static boolean named(String name) {
+        return name.equals(NAME) || name.startsWith(VarianceChart.STEM);
     }
 
     private static Chart fan(String study, ToleranceAnswer answer) {

@@ -2,12 +2,18 @@ package flowshy.report.chart;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import flowshy.report.MapReport;
 import flowshy.report.chart.paper.LaidText;
+import flowshy.study.Family;
 import flowshy.study.Study;
 import flowshy.study.StudyReader;
+import flowshy.study.Variant;
 import flowshy.verdict.BandsAnswer;
+import flowshy.verdict.compare.CompareQuestion;
 import flowshy.verdict.fill.Fill;
 import flowshy.verdict.fill.FillQuestion;
+import flowshy.verdict.fit.FitAnswer;
+import flowshy.verdict.force.ForceAlong;
 import flowshy.verdict.lid.LidQuestion;
 import java.io.IOException;
 import java.nio.file.Files;
@@ -15,6 +21,7 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
@@ -22,6 +29,7 @@ import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.Arguments;
 import org.junit.jupiter.params.provider.MethodSource;
+import org.junit.jupiter.params.provider.ValueSource;
 
 /** Every text of every chart lies on the sheet, is not clipped, and covers no other. */
 class ChartLayoutTest {
@@ -92,12 +100,62 @@ class ChartLayoutTest {
         fit(FillChart.of(study, study.acceptance(), question.answer().rows()));
     }
 
+    @Test
+    void textsOfMapsFit() {
+        String diameter = "hair.diameter=40 um..120 um";
+        fit(List.of(MapReport.chart(
+                MapChartTest.map("hoist-chain", diameter, "hair.length=0.3 mm..1.2 mm", "least-rejection", false))));
+        fit(List.of(MapReport.chart(
+                MapChartTest.map("hoist-chain", diameter, "frequency=20 Hz..2 kHz", "rejection", true))));
+        fit(List.of(MapReport.chart(
+                MapChartTest.map("hoist-chain", "hair.density=1 g/cm3..4 g/cm3", diameter, "noise", false))));
+        fit(List.of(MapReport.chart(MapChartTest.map(
+                "weather-mast",
+                "hair.stalk-length=100 um..850 um",
+                "hair.head-diameter=50 um..200 um",
+                "least-rejection",
+                false))));
+    }
+
+    @Test
+    void textsOfFitsFit() {
+        Study study = FitChartsTest.study();
+        FitAnswer answer = FitChartsTest.answer();
+        fit(FitCharts.of(study, study.question().about(answer.device()).answer(), answer));
+    }
+
+    @ParameterizedTest
+    @ValueSource(strings = {"workbench-air", "water-tank", "weather-mast", "nitrogen-stream", "vacuum-package"})
+    void textsOfForcesFit(String example) {
+        Study study = StudyReader.read(Path.of("examples/" + example + "/study.yaml"), List.of());
+        List<ForceAlong> forces = Stream.of(3.0, 31.6, 412.3)
+                .map(frequency -> ForceAlong.of(study.device(), frequency))
+                .toList();
+        fit(ForceChart.of(study.title(), forces));
+    }
+
+    @Test
+    void textsOfTolerancesFit() {
+        fit(ToleranceCharts.of(ToleranceChartsTest.study(), ToleranceChartsTest.answer()));
+    }
+
+    @Test
+    void textsOfComparisonsFit() {
+        Family family = StudyReader.open(Path.of("examples/lift-machinery/study.yaml"), List.of())
+                .family(Optional.empty());
+        fit(CompareCharts.of(
+                family.study().title(),
+                new CompareQuestion(
+                                family.all().stream().map(Variant::contender).toList(), Optional.empty())
+                        .answer()));
+    }
+
     private static void fit(List<Chart> charts) {
         assertThat(charts).isNotEmpty();
         Set<String> names = new HashSet<>();
         for (Chart chart : charts) {
             assertThat(names.add(chart.name())).isTrue();
-            assertThat(chart.name()).matches("[a-z]+(-[a-z]+)*");
+            assertThat(chart.name()).matches("[a-z]+(-[a-z0-9]+)*");
             assertThat(chart.description()).hasSizeGreaterThan(20).doesNotContain("NaN", "Infinity");
             List<LaidText> texts = chart.texts();
             assertThat(texts).hasSizeGreaterThan(5);

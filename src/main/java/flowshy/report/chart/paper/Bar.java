@@ -51,12 +51,9 @@ public record Bar(int scale, Ink ink, double value, double low, double high, Str
     void write(Pen pen, ValueAxis axis, Rectangle2D area, double middle) {
         double width = Pen.width(Typeface.SMALL, words);
         double zero = x(axis, area, 0.0);
-        double right = zero + ASIDE;
+        double right = Math.max(zero, x(axis, area, Math.max(value, high))) + ASIDE;
         double left = zero - ASIDE - width;
-        double at = value < 0.0 ? right : left;
-        if (at < area.getMinX()) {
-            at = Math.max(x(axis, area, Math.max(value, high)), zero) + ASIDE;
-        }
+        double at = value < 0.0 || left < area.getMinX() ? right : left;
         pen.write(Typeface.SMALL, Typeface.DARK, words, at, middle + 3.5);
     }
 

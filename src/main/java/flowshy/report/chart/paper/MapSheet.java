@@ -30,7 +30,7 @@ public final class MapSheet implements Picture {
     private static final int LEFT = 58;
     private static final int RIGHT = 74;
     private static final int PANEL = 290;
-    private static final int AXIS = 22;
+    private static final int AXIS = 26;
     private static final int ROW = 15;
     private static final int BAR = 14;
     private static final double HATCH = 6.0;
@@ -72,11 +72,11 @@ public final class MapSheet implements Picture {
      */
     public record Box(double left, double right, double low, double high) {}
 
-    private record Block(Box box, Color colour) {}
+    record Block(Box box, Color colour) {}
 
-    private record Line(String words, boolean decisive, List<double[]> points) {}
+    record Line(String words, boolean decisive, List<double[]> points) {}
 
-    private record Step(Color colour, String above) {}
+    record Step(Color colour, String above) {}
 
     /** A line of the key. */
     private record Entry(Kind kind, String words) {}
@@ -179,6 +179,26 @@ public final class MapSheet implements Picture {
         remarks.add(words);
     }
 
+    /** Blocks with a number, for tests. */
+    List<Block> blocks() {
+        return List.copyOf(blocks);
+    }
+
+    /** Blocks without a number, for tests. */
+    List<Block> hatched() {
+        return List.copyOf(missing);
+    }
+
+    /** Lines of equal value in the order drawn, for tests. */
+    List<Line> lines() {
+        return List.copyOf(lines);
+    }
+
+    /** Steps of the scale from below, for tests. */
+    List<Step> scale() {
+        return List.copyOf(scale);
+    }
+
     @Override
     public int width() {
         return WIDTH;
@@ -191,7 +211,7 @@ public final class MapSheet implements Picture {
     }
 
     private double top() {
-        return MARGIN + 18.0 + (heading.study().isBlank() ? 0.0 : 16.0) + 18.0;
+        return MARGIN + 18.0 + (heading.study().isBlank() ? 0.0 : 16.0) + 24.0;
     }
 
     private double keyTop() {
@@ -242,7 +262,7 @@ public final class MapSheet implements Picture {
                 Typeface.DARK,
                 Pen.fitting(Typeface.TEXT, PlainText.of(down.heading()), WIDTH - RIGHT - MARGIN - 4.0),
                 MARGIN,
-                top() - 6.0);
+                top() - 12.0);
         new Drawing(graphics, pen).draw();
         String below = Pen.fitting(Typeface.TEXT, PlainText.of(across.heading()), room);
         double middle = 0.5 * (LEFT + WIDTH - RIGHT);
@@ -257,7 +277,8 @@ public final class MapSheet implements Picture {
             return;
         }
         double x = WIDTH - RIGHT + 14.0;
-        pen.write(Typeface.TEXT, Typeface.DARK, Pen.fitting(Typeface.TEXT, scaleHeading, RIGHT - 18.0), x, top() - 6.0);
+        pen.write(
+                Typeface.TEXT, Typeface.DARK, Pen.fitting(Typeface.TEXT, scaleHeading, RIGHT - 18.0), x, top() - 12.0);
         double each = (double) PANEL / scale.size();
         double free = Double.POSITIVE_INFINITY;
         for (int i = 0; i < scale.size(); i++) {
@@ -458,6 +479,8 @@ public final class MapSheet implements Picture {
             plot.setAxisOffset(RectangleInsets.ZERO_INSETS);
             plot.setInsets(
                     new RectangleInsets(ASIDE, 0.0, 0.0, ASIDE)); // labels at the ends of the axes reach out so far
+            horizontal.setTickLabelInsets(
+                    new RectangleInsets(5.0, 3.0, 1.0, 3.0)); // clear of the lowest label of the other axis
             AxisSpace below = new AxisSpace();
             below.setBottom(AXIS);
             plot.setFixedDomainAxisSpace(below);

@@ -352,6 +352,9 @@ public final class PlotSheet implements Picture {
             }
             List<Rectangle2D> taken = new ArrayList<>();
             for (Panel.Level level : panel.levels()) {
+                if (level.words().isEmpty()) {
+                    continue;
+                }
                 double y = panel.axis().valueToJava2D(level.value(), area, RectangleEdge.LEFT);
                 double room = area.getWidth() - 8 - Pen.width(Typeface.TEXT, level.words());
                 List<Rectangle2D> places = new ArrayList<>();

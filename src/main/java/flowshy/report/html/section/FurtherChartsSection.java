@@ -1,6 +1,7 @@
 package flowshy.report.html.section;
 
 import flowshy.report.chart.Chart;
+import flowshy.report.chart.ToleranceCharts;
 import flowshy.report.html.Html;
 import java.util.Map;
 
@@ -19,7 +20,6 @@ final class FurtherChartsSection implements ReportSection {
             Map.entry("regime", "device"),
             Map.entry("sensitivities", "sensitivities"),
             Map.entry("fit-residuals", "fit"),
-            Map.entry("rejection-spread", "tolerance"),
             Map.entry("covers", "covers"),
             Map.entry("covers-rejection", "covers"),
             Map.entry("attenuation", "covers"),
@@ -46,6 +46,6 @@ final class FurtherChartsSection implements ReportSection {
     }
 
     static String home(Chart chart) {
-        return HOMES.getOrDefault(chart.name(), HERE);
+        return ToleranceCharts.named(chart.name()) ? "tolerance" : HOMES.getOrDefault(chart.name(), HERE);
     }
 }

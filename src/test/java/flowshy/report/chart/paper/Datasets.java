@@ -1,7 +1,11 @@
 package flowshy.report.chart.paper;
 
+import java.awt.Color;
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
+import java.util.Optional;
 import org.jfree.chart.plot.XYPlot;
 import org.jfree.data.xy.XYDataset;
 
@@ -54,6 +58,44 @@ public final class Datasets {
             }
         }
         return all;
+    }
+
+    /**
+     * A block of a map.
+     *
+     * @param colour of what it is filled with, empty where it is hatched
+     */
+    public record Block(double left, double right, double low, double high, Optional<Color> colour) {}
+
+    /** Blocks of a map, those without a number last. */
+    public static List<Block> blocks(Picture picture) {
+        List<Block> all = new ArrayList<>();
+        MapSheet map = (MapSheet) picture;
+        map.blocks().forEach(block -> all.add(block(block.box(), Optional.of(block.colour()))));
+        map.hatched().forEach(block -> all.add(block(block.box(), Optional.empty())));
+        return all;
+    }
+
+    private static Block block(MapSheet.Box box, Optional<Color> colour) {
+        return new Block(box.left(), box.right(), box.low(), box.high(), colour);
+    }
+
+    /** Colours of a map's scale from below, each with the number at its upper end; the last has none. */
+    public static Map<Color, String> scale(Picture picture) {
+        Map<Color, String> scale = new LinkedHashMap<>();
+        ((MapSheet) picture).scale().forEach(step -> scale.put(step.colour(), step.above()));
+        return scale;
+    }
+
+    /** Lines of equal value of a map, in the order drawn. */
+    public static List<Series> lines(Picture picture) {
+        return ((MapSheet) picture)
+                .lines().stream()
+                        .map(line -> new Series(
+                                line.words(),
+                                line.points().stream().map(point -> point[0]).toList(),
+                                line.points().stream().map(point -> point[1]).toList()))
+                        .toList();
     }
 
     private static Series series(XYDataset dataset) {
