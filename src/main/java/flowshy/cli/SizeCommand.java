@@ -109,10 +109,10 @@ final class SizeCommand implements Callable<Integer> {
             if (output.csv()) {
                 tables.add(SizeReport.csv(sizing));
             }
-            if (write != null && sizing.sized().fits()) {
+            if (write != null && sizing.keeps()) {
                 OutputOptions.write(write, rewritten(reader, sizing));
             }
-            return sizing.sized().fits() ? 0 : Failures.LIMIT;
+            return sizing.keeps() ? 0 : Failures.LIMIT;
         });
         studies.send(spec.commandLine(), output, json, texts, objects, tables);
         return code;

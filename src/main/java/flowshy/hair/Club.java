@@ -59,6 +59,9 @@ public record Club(
         if (intoEnd <= 0.0) {
             return headRadius;
         }
+        if (z >= length) {
+            return 0.0; // a rounding error of the difference would be a flat of its root, 1e-8 of the radius wide
+        }
         // (R - x)(R + x) keeps its digits near the tip, R² - x² does not
         return FastMath.sqrt(FastMath.max(0.0, (headRadius - intoEnd) * (headRadius + intoEnd)));
     }

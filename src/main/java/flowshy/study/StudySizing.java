@@ -1,32 +1,32 @@
 package flowshy.study;
 
-import flowshy.hair.Hair;
 import flowshy.hair.LengthModel;
 import flowshy.math.Caveat;
 import flowshy.math.Figures;
+import flowshy.response.Device;
 import flowshy.response.Hold;
 import flowshy.study.NumberKeys.KeyRange;
 import flowshy.study.text.Position;
 import flowshy.study.text.Problem;
 import flowshy.study.text.StudyException;
 import flowshy.study.units.WrittenUnit;
+import flowshy.verdict.BandsAnswer;
 import flowshy.verdict.BandsQuestion;
+import flowshy.verdict.Decision;
 import flowshy.verdict.FigureLimit;
-import flowshy.verdict.design.NoDesignException;
-import flowshy.verdict.error.StreamTooFastException;
+import flowshy.verdict.Limit;
+import flowshy.verdict.design.DesignSpace;
 import flowshy.verdict.figure.Evaluated;
 import flowshy.verdict.figure.Figure;
 import flowshy.verdict.figure.Found;
-import flowshy.verdict.size.Constraint;
+import flowshy.verdict.size.Agreement;
+import flowshy.verdict.size.Rounding;
 import flowshy.verdict.size.SizeQuestion;
 import flowshy.verdict.size.Sized;
 import flowshy.verdict.size.Sizer;
 import flowshy.verdict.size.SizingProblem;
 import flowshy.verdict.size.Trial;
 import flowshy.verdict.size.Variable;
-import java.math.BigDecimal;
-import java.math.MathContext;
-import java.math.RoundingMode;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
@@ -47,12 +47,13 @@ import org.hipparchus.util.FastMath;
  * @param limits what must be kept
  * @param leftOut limits that the study states and nothing can be said about, with the reason
  * @param hold what of the suspension stays
- * @param model how the length of the hair is seen in the search; over many shapes the estimate stands for a solution that is taken by default
- * @param solved the figures of the rounded numbers with the study's own model, as {@code bands} finds them
- * @param sized the optimum, or what comes nearest
+ * @param search how the length of the hair is seen by the search; over many shapes the estimate stands for a solution that is taken by default
+ * @param agreement the optimum, or what comes nearest, by the study's own model, and how the search came to agree with it
  * @param values the numbers rounded to few digits, to the side that keeps the limits
- * @param trial the figures of the rounded numbers
+ * @param trial the figures of the rounded numbers, as {@code bands} finds them
+ * @param estimate the same figures by the model of the search
  * @param base the figures of the study as it stands
+ * @param undecided limits that the search keeps and {@code bands} does not call met at the rounded numbers
  * @param caveats what must stand beside the sized device's numbers
  */
 public record StudySizing(
@@ -65,12 +66,13 @@ public record StudySizing(
         List<FigureLimit> limits,
         List<String> leftOut,
         Hold hold,
-        LengthModel model,
-        Trial solved,
-        Sized sized,
+        LengthModel search,
+        Agreement agreement,
         List<Double> values,
         Trial trial,
+        Trial estimate,
         Trial base,
+        List<Limit> undecided,
         List<Caveat> caveats) {
     /** More numbers than this are no longer searched with any certainty. */
     private static final int MOST = 6;
@@ -81,8 +83,6 @@ public record StudySizing(
     /** And so many kelvin, or decibels, where that has no sense. */
     private static final double STEP = 20.0;
 
-    private static final int FEWEST_DIGITS = 6;
-
     /** Copies the lists. */
     public StudySizing {
         numbers = List.copyOf(numbers);
@@ -91,6 +91,7 @@ public record StudySizing(
         limits = List.copyOf(limits);
         leftOut = List.copyOf(leftOut);
         values = List.copyOf(values);
+        undecided = List.copyOf(undecided);
         caveats = List.copyOf(caveats);
     }
 
@@ -105,9 +106,9 @@ public record StudySizing(
     public static StudySizing of(StudyReader reader, SizeWords words) {
         Study study = reader.study();
         Figure figure = StudyMap.figure("--to", words.figure());
-        NumberKeys known = reader.numbers();
-        List<NumberKey> numbers = numbers(known, words);
-        Map<String, KeyRange> stated = stated(known, words, numbers);
+        NumberKeys keys = reader.numbers();
+        List<NumberKey> numbers = numbers(keys, words);
+        Map<String, KeyRange> stated = stated(keys, words, numbers);
         List<Variable> variables = new ArrayList<>();
         for (NumberKey number : numbers) {
             variables.add(variable(number, Optional.ofNullable(stated.get(number.path()))));
@@ -130,6 +131,9 @@ public record StudySizing(
                 limits.add(limit);
             }
         }
+        if (study.envelope().isPresent()) {
+            leftOut.add("envelope: the limits are kept at the study's own state; bands judges the worst one");
+        }
         boolean surrounded =
                 StudyMap.surrounded(figure) || limits.stream().anyMatch(limit -> StudyMap.surrounded(limit.figure()));
         SizeQuestion question =
@@ -141,14 +145,24 @@ public record StudySizing(
             inside &= own.get(i) >= variables.get(i).from()
                     && own.get(i) <= variables.get(i).to();
         }
-        Sized sized = new Sizer(words.seed()).solve(problem, inside ? List.of(own) : List.of());
-        List<Double> values = rounded(question, problem, sized);
+        List<List<Double>> known = inside ? List.of(own) : List.of();
+        Sizer sizer = new Sizer(words.seed());
+        boolean estimated = varied.model() != study.device().hair().lengthModel();
+        SizeQuestion solved = estimated ? question.in(asStudied(study, question.space())) : question;
+        Agreement agreement =
+                estimated ? sizer.solve(problem, solved::trial, known) : Agreement.of(sizer.solve(problem, known));
+        List<Double> values = Rounding.of(agreement);
+        Optional<BandsAnswer> answer = agreement.sized().trial().there()
+                ? Optional.of(asStudied(study, varied)
+                        .at(values.stream().mapToDouble(value -> value).toArray())
+                        .answer())
+                : Optional.empty();
         return new StudySizing(
                 study,
                 words,
                 figure,
                 numbers,
-                numbers.stream().map(known::unit).toList(),
+                numbers.stream().map(keys::unit).toList(),
                 numbers.stream()
                         .map(number -> !stated.containsKey(number.path()))
                         .toList(),
@@ -156,12 +170,13 @@ public record StudySizing(
                 leftOut,
                 varied.hold(),
                 varied.model(),
-                solved(study, varied, question, values),
-                sized,
+                agreement,
                 values,
+                solved.trial(values),
                 question.trial(values),
-                question.trial(own),
-                sized.trial().there() ? caveats(study, varied, values) : List.of());
+                question.trial(study.question()),
+                agreement.sized().fits() ? answer.map(StudySizing::undecided).orElseThrow() : List.of(),
+                answer.map(found -> caveats(study, found)).orElse(List.of()));
     }
 
     private static List<NumberKey> numbers(NumberKeys known, SizeWords words) {
@@ -215,76 +230,43 @@ public record StudySizing(
         };
     }
 
-    /** Fewest digits with which the limits are still kept; the digits found if none do. */
-    private static List<Double> rounded(SizeQuestion question, SizingProblem problem, Sized sized) {
-        if (!sized.trial().there()) {
-            return sized.values();
-        }
-        for (int digits = FEWEST_DIGITS; digits <= Figures.FULL; digits++) {
-            List<Double> best = List.of();
-            double bestCost = Double.POSITIVE_INFINITY;
-            for (int choice = 0; choice < 1 << sized.values().size(); choice++) {
-                List<Double> tried = new ArrayList<>();
-                for (int i = 0; i < sized.values().size(); i++) {
-                    Variable range = problem.variables().get(i);
-                    RoundingMode mode = !sized.fits()
-                            ? RoundingMode.HALF_EVEN
-                            : (choice >> i & 1) == 0 ? RoundingMode.FLOOR : RoundingMode.CEILING;
-                    double value = new BigDecimal(sized.values().get(i))
-                            .round(new MathContext(digits, mode))
-                            .doubleValue();
-                    tried.add(FastMath.min(FastMath.max(value, range.from()), range.to()));
-                }
-                Trial trial = question.trial(tried);
-                double cost = trial.objective() * (problem.maximize() ? -1.0 : 1.0);
-                if (trial.there() && (!sized.fits() || keeps(problem, trial)) && cost < bestCost) {
-                    best = tried;
-                    bestCost = cost;
-                }
-            }
-            if (!best.isEmpty()) {
-                return best;
-            }
-        }
-        return sized.values();
+    /** The devices of a space with the study's own model of their length. */
+    private static DesignSpace asStudied(Study study, DesignSpace space) {
+        return new Seen(space, study.device().hair().lengthModel());
     }
 
-    private static boolean keeps(SizingProblem problem, Trial trial) {
-        for (int c = 0; c < problem.constraints().size(); c++) {
-            Constraint constraint = problem.constraints().get(c);
-            if (!(constraint.shortfall(trial.found().get(c)) <= 0.0)) {
-                return false;
-            }
+    /** The devices of a space, their length seen otherwise. */
+    private record Seen(DesignSpace space, LengthModel model) implements DesignSpace {
+        @Override
+        public List<String> keys() {
+            return space.keys();
         }
-        return true;
-    }
 
-    private static Trial solved(Study study, VariedStudy varied, SizeQuestion question, List<Double> values) {
-        if (varied.model() == study.device().hair().lengthModel()) {
-            return question.trial(values);
+        @Override
+        public BandsQuestion at(double... values) {
+            BandsQuestion question = space.at(values);
+            Device device = question.device();
+            return question.about(device.with(device.hair().seenAs(model)));
         }
-        try {
-            return question.trial(asStudied(study, varied, values));
-        } catch (NoDesignException | StreamTooFastException e) {
-            return Trial.none(e.getMessage());
+
+        @Override
+        public DesignSpace still() {
+            return new Seen(space.still(), model);
         }
     }
 
-    /** The sized device with the study's own model of its length. */
-    private static BandsQuestion asStudied(Study study, VariedStudy varied, List<Double> values) {
-        BandsQuestion sized =
-                varied.at(values.stream().mapToDouble(value -> value).toArray());
-        Hair hair = sized.device().hair();
-        return sized.about(sized.device().with(hair.seenAs(study.device().hair().lengthModel())));
+    private static List<Limit> undecided(BandsAnswer answer) {
+        return answer.verdict().limits().stream()
+                .filter(limit -> limit.decision() == Decision.UNDECIDED || limit.decision() == Decision.FAILS)
+                .toList();
     }
 
     /** What weakens or ends at the sized device and did not at the base, and all that has ended. */
-    private static List<Caveat> caveats(Study study, VariedStudy varied, List<Double> values) {
-        BandsQuestion sized = asStudied(study, varied, values);
+    private static List<Caveat> caveats(Study study, BandsAnswer sized) {
         List<String> before = new ArrayList<>();
         study.question().answer().caveats().forEach(caveat -> before.add(caveat.text()));
         LinkedHashSet<Caveat> caveats = new LinkedHashSet<>();
-        for (Caveat caveat : sized.answer().caveats()) {
+        for (Caveat caveat : sized.caveats()) {
             boolean ended = caveat.weight() == Caveat.Weight.OUT_OF_RANGE;
             if (ended || (caveat.weight() == Caveat.Weight.WEAK && !before.contains(caveat.text()))) {
                 caveats.add(caveat);
@@ -295,6 +277,33 @@ public record StudySizing(
 
     private static StudyException fault(String option, String found, String accepted) {
         return new StudyException(Problem.of(Position.label(option), "", found, accepted));
+    }
+
+    /**
+     * The optimum, or what comes nearest.
+     *
+     * @return by the study's own model
+     */
+    public Sized sized() {
+        return agreement.sized();
+    }
+
+    /**
+     * Whether every limit is kept.
+     *
+     * @return true if {@code bands} says so too
+     */
+    public boolean keeps() {
+        return sized().fits() && undecided.isEmpty();
+    }
+
+    /**
+     * Whether the search went by another model than the answer.
+     *
+     * @return true if an estimate was corrected
+     */
+    public boolean estimated() {
+        return search != study.device().hair().lengthModel();
     }
 
     /**

@@ -134,7 +134,7 @@ public record BandsQuestion(
      * @return the same verdict
      */
     public BandsAnswer judged() {
-        return answer(List.of(reference), budget().map(SurroundingsQuestion::asTaken));
+        return answer(List.of(reference), errorAsTaken());
     }
 
     private BandsAnswer answer(List<Double> frequencies, Optional<ErrorBudget> error) {
@@ -192,6 +192,15 @@ public record BandsQuestion(
      */
     public Optional<ErrorBudget> error() {
         return budget().map(SurroundingsQuestion::answer);
+    }
+
+    /**
+     * The same sooner: it does not tell what half and twice of the sources' assumed numbers would do.
+     *
+     * @return their error over the band, empty where none are given
+     */
+    public Optional<ErrorBudget> errorAsTaken() {
+        return budget().map(SurroundingsQuestion::asTaken);
     }
 
     private Optional<SurroundingsQuestion> budget() {

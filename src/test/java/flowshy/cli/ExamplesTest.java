@@ -211,7 +211,7 @@ class ExamplesTest {
         }
     }
 
-    /** One example is mapped and sized as its heading says. */
+    /** One example is mapped and sized as its heading says, another is sized. */
     @Test
     void mapsAndSizesAsExpected() throws IOException {
         Path example = Path.of("examples", "hoist-chain");
@@ -227,6 +227,10 @@ class ExamplesTest {
         expect(
                 example.resolve("expected-size.txt"),
                 Run.of("size", study(example), "--vary", "hair.diameter", "--to", "minimize", "mass"));
+        Path solved = Path.of("examples", "workbench-air"); // the whole hair, not strip theory
+        expect(
+                solved.resolve("expected-size.txt"),
+                Run.of("size", study(solved), "--vary", "hair.diameter", "--to", "minimize", "mass"));
     }
 
     private static void expect(Path expected, Run run) throws IOException {

@@ -13,6 +13,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import org.hipparchus.analysis.solvers.BisectionSolver;
+import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -77,6 +78,121 @@ class SizeCommandTest {
         // and a number of the other end: the slope of the mass along the diameter
         assertThat((double) number.get("mass_kg_per_hair_diameter_m"))
                 .isCloseTo(2.0 * mass / found, within(1e-4 * mass / found));
+    }
+
+    /** What bands itself finds, under a limit it is sure to state. */
+    private static double byBands(String study, String key, double value, String... settings) {
+        List<String> words = new ArrayList<>(List.of("bands", study, "--json", "--set", key + "=" + value + " m"));
+        for (String setting : settings) {
+            words.addAll(List.of("--set", setting));
+        }
+        Map<String, Object> verdict =
+                Json.object(answer(Run.of(words.toArray(String[]::new))).get("verdict"));
+        Map<String, Object> limit = Json.objects(verdict.get("limits")).get(0);
+        assertThat(limit).containsEntry("limit", "rejection");
+        return (double) limit.get("found");
+    }
+
+    /** The search goes by an estimate, the answer is that of bands: against bisection of what bands prints, the whole hair solved. */
+    @Tag("long")
+    @ParameterizedTest
+    @CsvSource({
+        "workbench-air, hair.diameter, hair_diameter_m, 20, 7.5e-5, 7.8e-5, finite-length=auto",
+        "vacuum-package, hair.base-diameter, hair_base_diameter_m, 24, 1.0e-4, 1.04e-4, finite-length=auto",
+        "helium-can, hair.head-diameter, hair_head_diameter_m, 21, 2.84e-4, 2.92e-4, cover=open"
+    })
+    void theWholeHairMeetsItsLimitAsByBisectionOfBands(
+            String example, String key, String column, double margin, double low, double high, String setting) {
+        String study = "examples/" + example + "/study.yaml";
+        String limit = "accept.rejection=" + margin + " dB";
+        double expected = new BisectionSolver(1e-6, 1e-12)
+                .solve(60, x -> byBands(study, key, x, limit, setting) - margin, low, high);
+        Map<String, Object> answer = answer(Run.of(
+                "size", study, "--vary", key, "--to", "minimize", "mass", "--json", "--set", limit, "--set", setting));
+        assertThat(answer)
+                .containsEntry("fits", true)
+                .containsEntry("keeps", true)
+                .containsEntry("settled", true)
+                .containsEntry("finite_length", "auto")
+                .containsEntry("searched_by", "estimate");
+        double found = (double) Json.objects(answer.get("numbers")).get(0).get(column);
+        assertThat(found).isCloseTo(expected, within(1e-5 * expected));
+        assertThat(byBands(study, key, found, limit, setting)).isGreaterThanOrEqualTo(margin);
+        Map<String, Object> kept = Json.objects(answer.get("limits")).get(0);
+        assertThat(kept).containsEntry("binds", true).containsEntry("keeps", true);
+        assertThat((double) kept.get("found")).isCloseTo(margin, within(1e-3));
+        // the estimate alone would have stopped elsewhere
+        List<Map<String, Object>> rounds = Json.objects(answer.get("rounds"));
+        assertThat(rounds).hasSizeBetween(2, 6);
+        assertThat((double) rounds.get(0).get(column)).isNotCloseTo(expected, within(1e-3 * expected));
+    }
+
+    /** Two numbers: at the density found no thinner hair meets the limit by bands, at others none is lighter. */
+    @Tag("long")
+    @Test
+    void theWholeHairIsSizedInTwoNumbers() {
+        String density = "hair.density=1 g/cm3..8 g/cm3";
+        Map<String, Object> answer = answer(Run.of(
+                "size",
+                STUDY,
+                "--vary",
+                "hair.diameter,hair.density",
+                "--within",
+                density,
+                "--within",
+                "hair.diameter=20 um..200 um",
+                "--to",
+                "minimize",
+                "mass",
+                "--json"));
+        assertThat(answer).containsEntry("keeps", true).containsEntry("settled", true);
+        double mass = (double) answer.get("mass_kg");
+        double thin = (double) Json.objects(answer.get("numbers")).get(0).get("hair_diameter_m");
+        double found = (double) Json.objects(answer.get("numbers")).get(1).get("hair_density_kg_m3");
+        double alone = thinnest(found);
+        assertThat(thin).isCloseTo(alone, within(1e-4 * alone));
+        double volume = mass / (found * thin * thin);
+        for (double other : List.of(1000.0, 0.97 * found, Math.min(8000.0, 1.03 * found))) {
+            double diameter = thinnest(other);
+            assertThat(mass).isLessThanOrEqualTo(volume * other * diameter * diameter * (1.0 + 1e-5));
+        }
+    }
+
+    private static double thinnest(double density) {
+        return new BisectionSolver(1e-5, 1e-12)
+                .solve(
+                        60,
+                        x -> byBands(STUDY, "hair.diameter", x, "hair.density=" + density + " kg/m3") - 20.0,
+                        2e-5,
+                        1e-4);
+    }
+
+    @Test
+    void theRoundsAreToldAndWhatTheSearchWentBy() {
+        Run run = Run.of("size", STUDY, "--vary", "hair.diameter", "--to", "minimize", "mass");
+        assertThat(run.code()).isZero();
+        assertThat(run.out())
+                .contains("auto (the whole hair solved", "searched by the estimate", "round 1", "(expected 20.0000 dB)")
+                .contains("Another round would gain nothing that counts");
+        assertThat(run.out().lines())
+                .allSatisfy(line -> assertThat(line.length()).isLessThanOrEqualTo(80));
+    }
+
+    /** At 75.98 um the estimate has 20 dB, the whole hair 19.92 dB: within a range that ends just above nothing fits. */
+    @Test
+    void whatTheEstimateAloneKeepsIsNotCalledKept() {
+        Run run = Run.of(
+                "size",
+                STUDY,
+                "--vary",
+                "hair.diameter",
+                "--within",
+                "hair.diameter=40 um..76.2 um",
+                "--to",
+                "minimize",
+                "mass");
+        assertThat(run.code()).isEqualTo(3);
+        assertThat(run.out()).contains("nothing in these ranges keeps every limit", "found 19.956 dB: short by");
     }
 
     /** Least mass at a fixed range of lengths: for the length found, no thinner hair will do; for other lengths, no lighter one. */

@@ -55,6 +55,17 @@ class ProfileTest {
         }
     }
 
+    /** A rounding error there would be a flat of its square root, and rings shrink without end towards its edge. */
+    @Test
+    void aRoundEndIsClosedExactly() {
+        for (int i = 0; i < 200; i++) {
+            double head = 6e-5 + 5e-8 * i;
+            assertThat(new Club(9e-4, 2e-5, 4e-4, 1e-4, head, End.ROUND).radius(9e-4))
+                    .as("%s", head)
+                    .isZero();
+        }
+    }
+
     @ParameterizedTest
     @MethodSource("every")
     void volumeGrowsWithTheSquareOfTheDiameters(Profile profile) {

@@ -71,4 +71,13 @@ public record ErrorBudget(
         bands = List.copyOf(bands);
         caveats = List.copyOf(caveats);
     }
+
+    /**
+     * Whether a model has ended that the error rests on.
+     *
+     * @return true if a caveat says so
+     */
+    public boolean ended() {
+        return caveats.stream().anyMatch(caveat -> caveat.weight() == Caveat.Weight.OUT_OF_RANGE);
+    }
 }

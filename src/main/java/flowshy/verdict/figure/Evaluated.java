@@ -172,13 +172,13 @@ public final class Evaluated {
     }
 
     /**
-     * What the surroundings do.
+     * What the surroundings do; what their assumed numbers decide may be left out.
      *
      * @return their error over the band, empty where none are given
      */
     public Optional<ErrorBudget> error() {
         if (error == null) {
-            error = question.error();
+            error = question.errorAsTaken();
         }
         return error;
     }

@@ -24,6 +24,7 @@ final class OneVariable {
     private static final int SAMPLES = 129;
     private static final int FEW_SAMPLES = 13;
     private static final double NEAR = 0.03;
+    private static final double AT_ONCE = 1e-4;
     private static final double ACCURACY = 1e-13;
     private static final int HALVINGS = 45;
 
@@ -38,6 +39,11 @@ final class OneVariable {
     /** The best of the whole range. */
     Candidate best() {
         return best(0.0, 1.0, SAMPLES);
+    }
+
+    /** The same of a range in which a dip or two are expected. */
+    Candidate bestOfFew() {
+        return best(0.0, 1.0, FEW_SAMPLES);
     }
 
     /** The same for a problem hardly different from one whose optimum is known: it is looked for near that one first. */
@@ -154,7 +160,8 @@ final class OneVariable {
             if (!there
                     || !(here <= measure.applyAsDouble(low.candidate()))
                     || !(here <= measure.applyAsDouble(high.candidate()))
-                    || low.share() == high.share()) {
+                    || low.share() == high.share()
+                    || rises(low, middle, high, measure)) {
                 continue;
             }
             found.add(sample(new BrentOptimizer(1e-9, 1e-12)
@@ -166,6 +173,17 @@ final class OneVariable {
                     .getPoint()));
         }
         return found;
+    }
+
+    /** At an end of the range that is lower than its neighbour the dip is that end itself, if the measure rises from there at once. */
+    private boolean rises(Sample low, Sample middle, Sample high, ToDoubleFunction<Candidate> measure) {
+        if (middle.share() != low.share() && middle.share() != high.share()) {
+            return false;
+        }
+        double inwards = middle.share() == low.share() ? high.share() : low.share();
+        Sample beside = sample(middle.share() + AT_ONCE * (inwards - middle.share()));
+        return beside.candidate().trial().there()
+                && measure.applyAsDouble(beside.candidate()) >= measure.applyAsDouble(middle.candidate());
     }
 
     private static double inside(Sample low, Sample middle, Sample high) {

@@ -35,6 +35,9 @@ final class SeveralVariables {
     /** Weight of violated limits for the evolution strategy, which knows no prices. */
     private static final double PENALTY = 1e3;
 
+    /** A choice near a good one that makes no device counts as so many times the objective. */
+    private static final double WALL = 1e3;
+
     private final SizingProblem problem;
     private final long seed;
     private final int n;
@@ -84,6 +87,21 @@ final class SeveralVariables {
             best = Candidate.better(best, end);
         }
         return new AugmentedLagrangian(problem, near, wall).from(best, 0.1 * FIRST_STEP, AugmentedLagrangian.MANY);
+    }
+
+    /**
+     * The best choice near one.
+     *
+     * @param start makes a device
+     * @return never worse than that
+     */
+    Candidate near(Candidate start) {
+        Candidate kept = start.keepsAll() ? start : leastViolation(start);
+        if (!kept.keepsAll()) {
+            return kept;
+        }
+        double scale = kept.cost() == 0.0 ? 1.0 : FastMath.abs(kept.cost());
+        return new AugmentedLagrangian(problem, scale, WALL).from(kept, FIRST_STEP, AugmentedLagrangian.MANY);
     }
 
     /** A Sobol sequence, turned about by the seed (Cranley &amp; Patterson 1976); its first point, all zeros, is left out. */

@@ -6,6 +6,7 @@ import flowshy.verdict.BandsQuestion;
 import flowshy.verdict.FigureLimit;
 import flowshy.verdict.design.DesignSpace;
 import flowshy.verdict.design.NoDesignException;
+import flowshy.verdict.error.ErrorBudget;
 import flowshy.verdict.error.StreamTooFastException;
 import flowshy.verdict.figure.Evaluated;
 import flowshy.verdict.figure.Figure;
@@ -13,8 +14,10 @@ import flowshy.verdict.figure.FigureUnit;
 import flowshy.verdict.figure.Found;
 import flowshy.verdict.figure.Sense;
 import java.util.ArrayList;
+import java.util.EnumSet;
 import java.util.List;
 import java.util.OptionalDouble;
+import java.util.Set;
 import org.hipparchus.util.FastMath;
 
 /**
@@ -32,6 +35,7 @@ public record SizeQuestion(
     private static final double DECIBELS = 20.0;
 
     private static final String ENDED = "a model of the rejection has ended there";
+    private static final String DRAG_ENDED = "a model of the error has ended there";
 
     /** Copies the list. */
     public SizeQuestion {
@@ -57,6 +61,16 @@ public record SizeQuestion(
         error.ifPresent(most -> limits.add(new FigureLimit(Figure.ERROR, Sense.AT_MOST, most)));
         limits.addAll(acceptance.others());
         return limits;
+    }
+
+    /**
+     * The same question in another space.
+     *
+     * @param other of the same numbers
+     * @return figure and limits kept
+     */
+    public SizeQuestion in(DesignSpace other) {
+        return new SizeQuestion(other, figure, maximize, limits, frequency);
     }
 
     /**
@@ -110,16 +124,22 @@ public record SizeQuestion(
         if (objective.number().isEmpty()) {
             return Trial.none(figure.word() + ": " + objective.reason());
         }
-        boolean rejecting = figure.subject() == Subject.REJECTION;
+        Set<Subject> subjects = EnumSet.of(figure.subject());
         List<Double> found = new ArrayList<>();
         for (FigureLimit limit : limits) {
             Found limited = limit.figure().of(device);
             if (Double.isNaN(limited.value())) {
                 return Trial.none(limit.figure().word() + ": " + limited.reason());
             }
-            rejecting |= limit.figure().subject() == Subject.REJECTION;
+            subjects.add(limit.figure().subject());
             found.add(limited.value());
         }
-        return rejecting && device.question().rejectionEnds() ? Trial.none(ENDED) : Trial.of(objective.value(), found);
+        if (subjects.contains(Subject.REJECTION) && device.question().rejectionEnds()) {
+            return Trial.none(ENDED);
+        }
+        if (subjects.contains(Subject.ERROR) && device.error().stream().anyMatch(ErrorBudget::ended)) {
+            return Trial.none(DRAG_ENDED);
+        }
+        return Trial.of(objective.value(), found);
     }
 }

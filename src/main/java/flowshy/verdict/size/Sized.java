@@ -12,6 +12,7 @@ import java.util.List;
  * @param shortfalls one a constraint, in units of its scale, zero or less where it is kept; empty without a device
  * @param binding the constraints that bind: moved, they would move the optimum; indices, rising
  * @param ends which variables stand at an end of their range, one a variable
+ * @param edges why there is no device just beside each value, one a variable; empty where there is one
  * @param prices change of the objective per change of each limit, one a constraint; empty unless everything fits
  * @param slopes what a change of each variable alone does, one a variable; empty without a device
  * @param trials how many choices were tried
@@ -24,6 +25,7 @@ public record Sized(
         List<Double> shortfalls,
         List<Integer> binding,
         List<End> ends,
+        List<String> edges,
         List<Slope> prices,
         List<VariableSlopes> slopes,
         int trials) {
@@ -33,6 +35,7 @@ public record Sized(
         shortfalls = List.copyOf(shortfalls);
         binding = List.copyOf(binding);
         ends = List.copyOf(ends);
+        edges = List.copyOf(edges);
         prices = List.copyOf(prices);
         slopes = List.copyOf(slopes);
     }

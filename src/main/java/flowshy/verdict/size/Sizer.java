@@ -4,6 +4,9 @@ import flowshy.verdict.size.Sized.End;
 import flowshy.verdict.size.Sized.VariableSlopes;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.concurrent.ConcurrentHashMap;
 import java.util.concurrent.atomic.AtomicInteger;
 import java.util.stream.IntStream;
 import org.hipparchus.util.FastMath;
@@ -34,16 +37,54 @@ public record Sizer(long seed) {
      */
     public Sized solve(SizingProblem problem, List<List<Double>> known) {
         AtomicInteger trials = new AtomicInteger();
-        SizingProblem counted =
-                new SizingProblem(problem.variables(), problem.maximize(), problem.constraints(), values -> {
-                    trials.incrementAndGet();
-                    return problem.trials().at(values);
-                });
-        Candidate best = best(counted, known);
-        return answer(counted, problem, best, trials);
+        SizingProblem counted = counted(problem, trials);
+        return answer(counted, problem, best(counted, known), trials);
     }
 
-    private Candidate best(SizingProblem problem, List<List<Double>> known) {
+    /**
+     * Solves a problem whose own trials are an estimate, so that a full model keeps the limits.
+     *
+     * @param estimate what is asked
+     * @param full trials by the full model, thread-safe
+     * @param known as before
+     * @return the answer by the full model
+     */
+    public Agreement solve(SizingProblem estimate, SizingProblem.Trials full, List<List<Double>> known) {
+        AtomicInteger trials = new AtomicInteger();
+        SizingProblem counted = counted(estimate, trials);
+        CorrectedSearch search = new CorrectedSearch(this, counted, full);
+        Candidate first = best(counted, known);
+        if (!first.trial().there()) {
+            return new Agreement(answer(counted, estimate, first, trials), estimate, List.of(), false, 0);
+        }
+        Candidate best = search.from(first);
+        SizingProblem corrected = best.trial().there() ? search.correctedAt(best) : counted;
+        return new Agreement(
+                answer(corrected, search.solved(), best, trials),
+                corrected,
+                search.rounds(),
+                search.settled(),
+                search.solutions());
+    }
+
+    /** Counts what is tried, and keeps it: searches and slopes come back to the same places. */
+    private static SizingProblem counted(SizingProblem problem, AtomicInteger trials) {
+        Map<List<Double>, Trial> kept = new ConcurrentHashMap<>();
+        return problem.by(values -> {
+            Optional<Trial> before = Optional.ofNullable(kept.get(values));
+            if (before.isPresent()) {
+                return before.get();
+            }
+            Trial trial = problem.trials().at(values);
+            if (kept.putIfAbsent(List.copyOf(values), trial) == null) {
+                trials.incrementAndGet();
+            }
+            return trial;
+        });
+    }
+
+    /** The best choice of the whole ranges. */
+    Candidate best(SizingProblem problem, List<List<Double>> known) {
         List<Candidate> starts = known.stream().map(problem::at).toList();
         Candidate best = problem.variables().size() == 1
                 ? new OneVariable(problem).best()
@@ -52,6 +93,14 @@ public record Sizer(long seed) {
             best = Candidate.better(best, start);
         }
         return best;
+    }
+
+    /** The best choice that a local search from a place finds, never worse than that. */
+    Candidate near(SizingProblem problem, List<Double> from) {
+        Candidate start = problem.at(from);
+        return problem.variables().size() == 1
+                ? Candidate.better(start, new OneVariable(problem).bestOfFew())
+                : new SeveralVariables(problem, seed).near(start);
     }
 
     private Sized answer(SizingProblem counted, SizingProblem problem, Candidate best, AtomicInteger trials) {
@@ -77,6 +126,7 @@ public record Sizer(long seed) {
                 best.shortfalls(),
                 binding,
                 ends,
+                edges(counted, best),
                 prices,
                 slopes,
                 trials.get());
@@ -127,16 +177,43 @@ public record Sizer(long seed) {
         return slopes;
     }
 
+    /** Whether a step of a variable's slope leads to where there is no device. */
+    private static List<String> edges(SizingProblem problem, Candidate best) {
+        List<String> edges = new ArrayList<>();
+        for (int i = 0; i < best.values().size(); i++) {
+            String edge = "";
+            for (double change : new double[] {-step(problem, best, i), step(problem, best, i)}) {
+                Variable range = problem.variables().get(i);
+                double moved = best.values().get(i) + change;
+                if (best.trial().there() && edge.isEmpty() && moved >= range.from() && moved <= range.to()) {
+                    edge = problem.trials().at(moved(best, i, change)).reason();
+                }
+            }
+            edges.add(edge);
+        }
+        return edges;
+    }
+
+    private static double step(SizingProblem problem, Candidate best, int variable) {
+        Variable range = problem.variables().get(variable);
+        double value = best.values().get(variable);
+        return VARIABLE_STEP * (value == 0.0 ? range.to() - range.from() : FastMath.abs(value));
+    }
+
+    private static List<Double> moved(Candidate best, int variable, double change) {
+        List<Double> moved = new ArrayList<>(best.values());
+        moved.set(variable, best.values().get(variable) + change);
+        return moved;
+    }
+
     /** Slope of a limited figure, or of the objective (−1), along one variable; steps end at the ends of its range. */
     private static Slope slope(SizingProblem problem, Candidate best, int variable, int constraint) {
         Variable range = problem.variables().get(variable);
         double value = best.values().get(variable);
-        double step = VARIABLE_STEP * (value == 0.0 ? range.to() - range.from() : FastMath.abs(value));
+        double step = step(problem, best, variable);
         return Slope.of(
                 change -> {
-                    List<Double> moved = new ArrayList<>(best.values());
-                    moved.set(variable, value + change);
-                    Trial trial = problem.trials().at(moved);
+                    Trial trial = problem.trials().at(moved(best, variable, change));
                     return !trial.there()
                             ? Double.NaN
                             : constraint < 0 ? trial.objective() : trial.found().get(constraint);

@@ -64,6 +64,20 @@ public record SizingProblem(List<Variable> variables, boolean maximize, List<Con
         return new SizingProblem(variables, maximize, moved, trials);
     }
 
+    /** The same with other trials. */
+    SizingProblem by(Trials other) {
+        return new SizingProblem(variables, maximize, constraints, other);
+    }
+
+    /** The same with every range cut to a reach, in shares of it, about a place. */
+    SizingProblem near(List<Double> place, double reach) {
+        List<Variable> cut = new ArrayList<>();
+        for (int i = 0; i < variables.size(); i++) {
+            cut.add(variables.get(i).near(place.get(i), reach));
+        }
+        return new SizingProblem(cut, maximize, constraints, trials);
+    }
+
     /** Where values lie in their ranges. */
     double[] shares(List<Double> values) {
         double[] shares = new double[values.size()];

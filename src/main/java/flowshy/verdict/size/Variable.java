@@ -46,4 +46,16 @@ public record Variable(String name, double from, double to, boolean logarithmic)
                 logarithmic ? FastMath.log(value / from) / FastMath.log(to / from) : (value - from) / (to - from);
         return FastMath.min(FastMath.max(share, 0.0), 1.0);
     }
+
+    /**
+     * The part of the range near a value.
+     *
+     * @param value in SI, inside the range
+     * @param reach how far it goes to both sides, as a share of the range
+     * @return cut at the ends of this range
+     */
+    Variable near(double value, double reach) {
+        double share = share(value);
+        return new Variable(name, at(share - reach), at(share + reach), logarithmic);
+    }
 }
