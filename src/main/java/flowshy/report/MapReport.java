@@ -66,7 +66,7 @@ public final class MapReport {
             int above = grid.reaching(level);
             boolean asked =
                     !map.rejection() || level == map.study().acceptance().margin();
-            if (asked || (above > 0 && above < there)) {
+            if (there > 0 && (asked || (above > 0 && above < there))) {
                 boolean most = map.atMost(level);
                 page.row(
                         (most ? "at most " : "at least ") + shown(map, level, 4),

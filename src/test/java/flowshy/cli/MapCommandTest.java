@@ -221,6 +221,15 @@ class MapCommandTest {
                 .doesNotContain("300 um wide");
     }
 
+    @Test
+    void whereNoPlaceHasANumberNoShareOfThemIsTold() {
+        Run run = map(CYLINDER, "hair.diameter=20 um..60 um", LENGTH, "--steps", "5,3", "--set", "cover=sealed");
+        assertThat(run.code()).isZero();
+        assertThat(run.out())
+                .contains("[100 %] no flow reaches the hair under a sealed cover")
+                .doesNotContain("undefined", "places with a number");
+    }
+
     /** A limit from above is told as one, and both sides of it make all places. */
     @Test
     void aLargestValueIsToldAsAtMost() {

@@ -5,7 +5,9 @@ import static org.assertj.core.api.Assertions.assertThat;
 import flowshy.report.MapReport;
 import flowshy.report.chart.paper.LaidText;
 import flowshy.study.Family;
+import flowshy.study.MapWords;
 import flowshy.study.Study;
+import flowshy.study.StudyMap;
 import flowshy.study.StudyReader;
 import flowshy.study.Variant;
 import flowshy.verdict.BandsAnswer;
@@ -15,6 +17,7 @@ import flowshy.verdict.fill.FillQuestion;
 import flowshy.verdict.fit.FitAnswer;
 import flowshy.verdict.force.ForceAlong;
 import flowshy.verdict.lid.LidQuestion;
+import flowshy.verdict.map.GridRun;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -22,12 +25,14 @@ import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import java.util.Set;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.Arguments;
+import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.MethodSource;
 import org.junit.jupiter.params.provider.ValueSource;
 
@@ -148,6 +153,28 @@ class ChartLayoutTest {
                 new CompareQuestion(
                                 family.all().stream().map(Variant::contender).toList(), Optional.empty())
                         .answer()));
+    }
+
+    /** Scales of many digits, long units and many reasons without a number. */
+    @ParameterizedTest
+    @CsvSource(
+            delimiter = '|',
+            value = {
+                "noise | accept.noise=15 ug/rtHz | frequency=5 Hz..5 kHz | suspension.quality.value=0.3..30 | true",
+                "least-rejection | accept.rejection=23.75 dB | hair.diameter=20 um..900 um | hair.length=0.2 mm..1.5 mm | false",
+                "rejection | accept.rejection=20 dB | medium.pressure=1 Pa..200 kPa | frequency=10 Hz..2 kHz | true",
+                "equivalent | accept.error=0.1 m/s2 | hair.diameter=20 um..300 um | medium.temperature=-120 degC..300 degC | false",
+                "sensitivity | accept.mass=5 ug | suspension.stiffness=2e-10 N.m/rad..3e-6 N.m/rad | hair.length=0.2 mm..1.5 mm | true",
+                "inertial-torque | accept.mass=5 ug | hair.diameter=20 um..300 um | hair.length=0.2 mm..1.5 mm | true",
+                "flow-sensitivity | cover=sealed | hair.diameter=20 um..60 um | hair.length=0.2 mm..1.5 mm | false"
+            })
+    void textsOfMapsOfManyFiguresFit(String figure, String setting, String across, String down, boolean log) {
+        StudyReader reader = StudyReader.open(
+                Path.of("examples/workbench-air/study.yaml"),
+                List.of("suspension={stiffness: 9e-9 N.m/rad, quality: {value: 3.5, in: vacuum}}", setting));
+        MapWords words = new MapWords(
+                across, down, Optional.of(figure), OptionalDouble.empty(), List.of(13, 11), List.of(log, log));
+        fit(List.of(MapReport.chart(StudyMap.of(reader, words, new GridRun(2, GridRun.Progress.NONE)))));
     }
 
     private static void fit(List<Chart> charts) {

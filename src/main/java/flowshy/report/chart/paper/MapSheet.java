@@ -28,13 +28,22 @@ public final class MapSheet implements Picture {
     private static final int WIDTH = 460;
     private static final int MARGIN = 10;
     private static final int LEFT = 58;
+    /** Room beside the panel, at least; figures of many digits take more. */
     private static final int RIGHT = 74;
+
     private static final int PANEL = 290;
     private static final int AXIS = 26;
     private static final int ROW = 15;
     private static final int BAR = 14;
     private static final double HATCH = 6.0;
     private static final double ASIDE = 12.0;
+
+    /** What names the side down and the scale stands clear of the figure at the upper end. */
+    private static final double ABOVE = 12.0;
+
+    /** Figures below stand clear of the one at the lower end beside. */
+    private static final double BELOW = 6.0;
+
     private static final Color LINE = new Color(0x222222);
     private static final Color HATCHED = new Color(0x707070);
     private static final Color EMPTY = new Color(0xF4F4F4);
@@ -210,6 +219,14 @@ public final class MapSheet implements Picture {
                 FastMath.ceil(keyTop() + keyLines().size() * ROW + remarkLines().size() * 13.0 + 8.0);
     }
 
+    private double right() {
+        double widest = Pen.width(Typeface.TEXT, scaleHeading) - BAR - 5.0;
+        for (Step step : scale) {
+            widest = FastMath.max(widest, Pen.width(Typeface.SMALL, step.above()));
+        }
+        return FastMath.max(RIGHT, 14.0 + BAR + 5.0 + widest + 4.0);
+    }
+
     private double top() {
         return MARGIN + 18.0 + (heading.study().isBlank() ? 0.0 : 16.0) + 24.0;
     }
@@ -260,12 +277,12 @@ public final class MapSheet implements Picture {
         pen.write(
                 Typeface.TEXT,
                 Typeface.DARK,
-                Pen.fitting(Typeface.TEXT, PlainText.of(down.heading()), WIDTH - RIGHT - MARGIN - 4.0),
+                Pen.fitting(Typeface.TEXT, PlainText.of(down.heading()), WIDTH - right() - MARGIN - 4.0),
                 MARGIN,
-                top() - 12.0);
+                top() - ABOVE);
         new Drawing(graphics, pen).draw();
         String below = Pen.fitting(Typeface.TEXT, PlainText.of(across.heading()), room);
-        double middle = 0.5 * (LEFT + WIDTH - RIGHT);
+        double middle = 0.5 * (LEFT + WIDTH - right());
         double left = FastMath.max(MARGIN, middle - 0.5 * Pen.width(Typeface.TEXT, below));
         pen.write(Typeface.TEXT, Typeface.DARK, below, left, top() + PANEL + AXIS + ROW - 3.0);
         drawScale(graphics, pen);
@@ -276,9 +293,13 @@ public final class MapSheet implements Picture {
         if (scale.isEmpty()) {
             return;
         }
-        double x = WIDTH - RIGHT + 14.0;
+        double x = WIDTH - right() + 14.0;
         pen.write(
-                Typeface.TEXT, Typeface.DARK, Pen.fitting(Typeface.TEXT, scaleHeading, RIGHT - 18.0), x, top() - 12.0);
+                Typeface.TEXT,
+                Typeface.DARK,
+                Pen.fitting(Typeface.TEXT, scaleHeading, right() - 18.0),
+                x,
+                top() - ABOVE);
         double each = (double) PANEL / scale.size();
         double free = Double.POSITIVE_INFINITY;
         for (int i = 0; i < scale.size(); i++) {
@@ -378,7 +399,7 @@ public final class MapSheet implements Picture {
         Drawing(Graphics2D graphics, Pen pen) {
             this.graphics = graphics;
             this.pen = pen;
-            this.area = new Rectangle2D.Double(LEFT, top(), WIDTH - (double) LEFT - RIGHT, PANEL);
+            this.area = new Rectangle2D.Double(LEFT, top(), WIDTH - (double) LEFT - right(), PANEL);
         }
 
         void draw() {
@@ -471,6 +492,7 @@ public final class MapSheet implements Picture {
 
         /** Axes and frame by the chart library, with nothing between. */
         private void frame() {
+            horizontal.setTickLabelInsets(new RectangleInsets(BELOW, 4.0, 2.0, 4.0));
             XYPlot plot = new XYPlot(null, horizontal, upright, null);
             plot.setBackgroundPaint(null);
             plot.setDomainGridlinesVisible(false);
