@@ -250,6 +250,19 @@ class CompareCommandTest {
                 .isCloseTo(wanted, within(1e-6));
     }
 
+    /** The springs of the base carry the club below 330 Hz in every state; measured on the club they would swing it at 378 Hz. */
+    @Test
+    void statesOfAVariantAreMeasuredOnTheBase() throws IOException {
+        String study = study(
+                "accept: {resonance: {at-most: 330 Hz}}",
+                "envelope: {suspension.resonance.frequency: [380 Hz, 380.001 Hz]}",
+                "variants: {club: {hair: {shape: club, stalk-diameter: 50 um, stalk-length: 500 um, head-diameter: 130 um}}}");
+        List<Map<String, Object>> devices = devices("compare", study, "--json");
+        assertThat(decision(devices.get(0))).isEqualTo("fails");
+        assertThat(decision(devices.get(1))).isEqualTo("meets");
+        assertThat((double) figures(devices.get(1)).get("resonance_hz")).isBetween(310.0, 330.0);
+    }
+
     /** The same flow at the same frequency, whatever band or calibration each study has. */
     @Test
     void figuresAtAFrequencyAreThoseAtTheFrequencyOfTheFirst() throws IOException {
