@@ -4,7 +4,7 @@ import flowshy.report.CompareJson;
 import flowshy.report.CompareText;
 import flowshy.report.JsonPage;
 import flowshy.report.chart.Chart;
-import flowshy.report.chart.CompareCharts;
+import flowshy.report.chart.several.CompareCharts;
 import flowshy.response.Hold;
 import flowshy.study.Family;
 import flowshy.study.Variant;

@@ -3,7 +3,7 @@ package flowshy.cli;
 import flowshy.report.FillReport;
 import flowshy.report.JsonPage;
 import flowshy.report.chart.Chart;
-import flowshy.report.chart.FillChart;
+import flowshy.report.chart.several.FillChart;
 import flowshy.stream.cover.Cover;
 import flowshy.stream.cover.Covers;
 import flowshy.study.Study;

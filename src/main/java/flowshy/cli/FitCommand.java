@@ -3,7 +3,7 @@ package flowshy.cli;
 import flowshy.report.FitReport;
 import flowshy.report.JsonPage;
 import flowshy.report.chart.Chart;
-import flowshy.report.chart.FitCharts;
+import flowshy.report.chart.device.FitCharts;
 import flowshy.report.html.section.ReportPage;
 import flowshy.report.html.section.StudyReport;
 import flowshy.study.FittedStudy;

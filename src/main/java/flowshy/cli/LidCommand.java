@@ -3,7 +3,7 @@ package flowshy.cli;
 import flowshy.report.JsonPage;
 import flowshy.report.LidReport;
 import flowshy.report.chart.Chart;
-import flowshy.report.chart.CoverCharts;
+import flowshy.report.chart.several.CoverCharts;
 import flowshy.verdict.Decision;
 import flowshy.verdict.lid.LidAnswer;
 import flowshy.verdict.lid.LidQuestion;

@@ -3,7 +3,7 @@ package flowshy.cli;
 import flowshy.report.JsonPage;
 import flowshy.report.ToleranceReport;
 import flowshy.report.chart.Chart;
-import flowshy.report.chart.ToleranceCharts;
+import flowshy.report.chart.several.ToleranceCharts;
 import flowshy.study.units.Dimension;
 import flowshy.study.units.Quantity;
 import flowshy.study.units.QuantityException;

@@ -2,7 +2,7 @@ package flowshy.report;
 
 import flowshy.math.Figures;
 import flowshy.report.chart.Chart;
-import flowshy.report.chart.MapChart;
+import flowshy.report.chart.several.MapChart;
 import flowshy.study.Side;
 import flowshy.study.StudyMap;
 import flowshy.verdict.figure.FigureUnit;

@@ -9,9 +9,9 @@ import org.hipparchus.util.FastMath;
  * @param from lower
  * @param to upper
  */
-record Bounds(double from, double to) {
+public record Bounds(double from, double to) {
     /** Ends on whole steps that hold every number, with room over the largest. */
-    static Bounds even(List<List<Double>> numbers, double step) {
+    public static Bounds even(List<List<Double>> numbers, double step) {
         double least = Double.POSITIVE_INFINITY;
         double largest = Double.NEGATIVE_INFINITY;
         for (List<Double> column : numbers) {
@@ -31,7 +31,7 @@ record Bounds(double from, double to) {
     }
 
     /** Ends that hold every positive number, at 1, 2 or 5 times a power of ten, no more than so many decades below the largest. */
-    static Bounds decades(List<List<Double>> numbers, double most) {
+    public static Bounds decades(List<List<Double>> numbers, double most) {
         double least = Double.POSITIVE_INFINITY;
         double largest = 0.0;
         for (List<Double> column : numbers) {
@@ -52,13 +52,13 @@ record Bounds(double from, double to) {
     }
 
     /** Frequency axis a little wider than a band, so that its ends can be seen. */
-    static Bounds about(double from, double to) {
+    public static Bounds about(double from, double to) {
         double aside = FastMath.pow(to / from, 0.04);
         return new Bounds(from / aside, to * aside);
     }
 
     /** The same, wide enough for what was measured beyond the band. */
-    static Bounds about(double from, double to, List<Overlay> overlays) {
+    public static Bounds about(double from, double to, List<Overlay> overlays) {
         double low = from;
         double high = to;
         for (Overlay overlay : overlays) {
@@ -70,8 +70,14 @@ record Bounds(double from, double to) {
         return about(low, high);
     }
 
-    /** The next of 1, 2 or 5 times a power of ten. */
-    static double round(double value, boolean up) {
+    /**
+     * A round number.
+     *
+     * @param value positive
+     * @param up whether the next above is wanted, else the next below
+     * @return 1, 2 or 5 times a power of ten
+     */
+    public static double round(double value, boolean up) {
         double decade = FastMath.pow(10.0, FastMath.floor(FastMath.log10(value)));
         double[] steps = up ? new double[] {1.0, 2.0, 5.0, 10.0} : new double[] {5.0, 2.0, 1.0};
         for (double step : steps) {

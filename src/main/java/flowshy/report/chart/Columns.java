@@ -13,16 +13,29 @@ import java.util.function.ToDoubleFunction;
  *
  * @param <T> what a row is made of
  */
-final class Columns<T> {
+public final class Columns<T> {
     private final List<T> rows;
     private final Map<Head, List<Double>> columns = new LinkedHashMap<>();
 
-    Columns(List<T> rows) {
+    /**
+     * A table without columns.
+     *
+     * @param rows in order
+     */
+    public Columns(List<T> rows) {
         this.rows = List.copyOf(rows);
     }
 
-    /** Adds a column and gives its numbers; what is not finite becomes NaN. */
-    List<Double> add(String name, String words, String unit, ToDoubleFunction<T> value) {
+    /**
+     * Adds a column.
+     *
+     * @param name for programs, ends in its unit
+     * @param words for people
+     * @param unit for people, empty for pure numbers
+     * @param value of a row
+     * @return its numbers, one a row; what is not finite becomes NaN
+     */
+    public List<Double> add(String name, String words, String unit, ToDoubleFunction<T> value) {
         List<Double> numbers = new ArrayList<>();
         for (T row : rows) {
             double number = value.applyAsDouble(row);
@@ -32,7 +45,12 @@ final class Columns<T> {
         return numbers;
     }
 
-    ChartTable table() {
+    /**
+     * The table.
+     *
+     * @return with every column added so far
+     */
+    public ChartTable table() {
         List<Row> all = new ArrayList<>();
         for (int i = 0; i < rows.size(); i++) {
             List<Double> values = new ArrayList<>();

@@ -15,7 +15,8 @@ import java.util.List;
  * @param table the numbers behind it
  * @param picture drawn when asked for
  */
-record DrawnChart(String name, String title, String description, ChartTable table, Picture picture) implements Chart {
+public record DrawnChart(String name, String title, String description, ChartTable table, Picture picture)
+        implements Chart {
     @Override
     public String svg(String idPrefix) {
         return SvgPaper.of(picture, idPrefix, title, description);

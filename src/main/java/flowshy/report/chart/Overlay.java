@@ -39,8 +39,12 @@ public record Overlay(String name, Of of, List<Point> points) {
         points = List.copyOf(points);
     }
 
-    /** Points as a panel takes them. */
-    List<List<Double>> rows() {
+    /**
+     * Points as a panel takes them.
+     *
+     * @return frequency, value, lower and upper end of each
+     */
+    public List<List<Double>> rows() {
         return points.stream()
                 .map(point -> List.of(point.frequency(), point.value(), point.low(), point.high()))
                 .toList();

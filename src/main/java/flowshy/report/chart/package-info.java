@@ -1,2 +1,2 @@
-/** Charts of an answer: one class a picture, each with the table behind it. Nothing is computed here; drawing itself is left to {@code paper}. */
+/** What a chart is: words, the table behind it, a picture, a folder. Charts themselves are left to {@code device} and {@code several}, drawing to {@code paper}; nothing is computed here. */
 package flowshy.report.chart;

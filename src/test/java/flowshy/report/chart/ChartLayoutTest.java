@@ -3,7 +3,18 @@ package flowshy.report.chart;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import flowshy.report.MapReport;
+import flowshy.report.chart.device.BandsCharts;
+import flowshy.report.chart.device.FitCharts;
+import flowshy.report.chart.device.FitChartsTest;
+import flowshy.report.chart.device.ForceChart;
+import flowshy.report.chart.device.SensitivityChart;
 import flowshy.report.chart.paper.LaidText;
+import flowshy.report.chart.several.CompareCharts;
+import flowshy.report.chart.several.CoverCharts;
+import flowshy.report.chart.several.FillChart;
+import flowshy.report.chart.several.MapChartTest;
+import flowshy.report.chart.several.ToleranceCharts;
+import flowshy.report.chart.several.ToleranceChartsTest;
 import flowshy.study.Family;
 import flowshy.study.MapWords;
 import flowshy.study.Study;

@@ -1,7 +1,7 @@
 package flowshy.report.html.section;
 
 import flowshy.report.chart.Chart;
-import flowshy.report.chart.ToleranceCharts;
+import flowshy.report.chart.several.ToleranceCharts;
 import flowshy.report.html.Html;
 import java.util.Map;
 

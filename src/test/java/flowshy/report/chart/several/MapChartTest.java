@@ -1,4 +1,4 @@
-package flowshy.report.chart;
+package flowshy.report.chart.several;
 
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
@@ -6,6 +6,7 @@ import static org.assertj.core.api.Assertions.within;
 import flowshy.cli.Json;
 import flowshy.cli.Run;
 import flowshy.report.MapReport;
+import flowshy.report.chart.DrawnChart;
 import flowshy.report.chart.paper.Datasets;
 import flowshy.report.chart.paper.Picture;
 import flowshy.study.MapWords;
@@ -24,8 +25,8 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 
 /** What a map draws is what its JSON says: the colour of every place, and every point of every line of equal value. */
-class MapChartTest {
-    static StudyMap map(String study, String across, String down, String figure, boolean log) {
+public class MapChartTest {
+    public static StudyMap map(String study, String across, String down, String figure, boolean log) {
         MapWords words = new MapWords(
                 across, down, Optional.of(figure), OptionalDouble.empty(), List.of(13, 9), List.of(log, log));
         return StudyMap.of(

@@ -1,5 +1,10 @@
-package flowshy.report.chart;
+package flowshy.report.chart.device;
 
+import flowshy.report.chart.Bounds;
+import flowshy.report.chart.Chart;
+import flowshy.report.chart.Columns;
+import flowshy.report.chart.DrawnChart;
+import flowshy.report.chart.Overlay;
 import flowshy.report.chart.paper.Ink;
 import flowshy.report.chart.paper.Panel;
 import flowshy.report.chart.paper.PlotSheet;

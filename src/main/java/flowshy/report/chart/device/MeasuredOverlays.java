@@ -1,5 +1,6 @@
-package flowshy.report.chart;
+package flowshy.report.chart.device;
 
+import flowshy.report.chart.Overlay;
 import flowshy.verdict.measured.Compared;
 import flowshy.verdict.measured.Deviation;
 import flowshy.verdict.measured.Measurand;

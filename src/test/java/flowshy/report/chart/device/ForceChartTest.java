@@ -1,10 +1,12 @@
-package flowshy.report.chart;
+package flowshy.report.chart.device;
 
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import flowshy.cli.Json;
 import flowshy.cli.Run;
+import flowshy.report.chart.Chart;
+import flowshy.report.chart.DrawnChart;
 import flowshy.report.chart.paper.Datasets;
 import flowshy.study.Study;
 import flowshy.study.StudyReader;

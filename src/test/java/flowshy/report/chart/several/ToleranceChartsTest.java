@@ -1,10 +1,13 @@
-package flowshy.report.chart;
+package flowshy.report.chart.several;
 
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import flowshy.cli.Json;
 import flowshy.cli.Run;
+import flowshy.report.chart.Chart;
+import flowshy.report.chart.ChartTable;
+import flowshy.report.chart.DrawnChart;
 import flowshy.report.chart.paper.Datasets;
 import flowshy.study.Study;
 import flowshy.study.StudyReader;
@@ -20,14 +23,14 @@ import java.util.Map;
 import org.junit.jupiter.api.Test;
 
 /** What is drawn of a tolerance run is what its JSON says: the fan point for point, every bar with its interval. */
-class ToleranceChartsTest {
+public class ToleranceChartsTest {
     private static final String STUDY = "examples/potting-oil/study.yaml";
 
-    static Study study() {
+    public static Study study() {
         return StudyReader.read(Path.of(STUDY), List.of());
     }
 
-    static ToleranceAnswer answer() {
+    public static ToleranceAnswer answer() {
         return new ToleranceQuestion(study().tolerances(), List.of(Figure.RESONANCE))
                 .answer(new Effort(1024, Precision.ANY, 1), Progress.NONE);
     }

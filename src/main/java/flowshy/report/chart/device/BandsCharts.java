@@ -1,5 +1,7 @@
-package flowshy.report.chart;
+package flowshy.report.chart.device;
 
+import flowshy.report.chart.Chart;
+import flowshy.report.chart.Overlay;
 import flowshy.study.Study;
 import flowshy.verdict.BandsAnswer;
 import flowshy.verdict.curve.DeviceCurve;

@@ -1,8 +1,11 @@
-package flowshy.report.chart;
+package flowshy.report.chart.device;
 
 import flowshy.hair.Profile;
+import flowshy.report.chart.Chart;
+import flowshy.report.chart.ChartTable;
 import flowshy.report.chart.ChartTable.Head;
 import flowshy.report.chart.ChartTable.Row;
+import flowshy.report.chart.DrawnChart;
 import flowshy.report.chart.paper.PlotSheet.Heading;
 import flowshy.report.chart.paper.ScaleSheet;
 import flowshy.report.chart.paper.TickText;

@@ -1,8 +1,12 @@
-package flowshy.report.chart;
+package flowshy.report.chart.device;
 
 import flowshy.report.SensitivityReport;
+import flowshy.report.chart.Bounds;
+import flowshy.report.chart.Chart;
+import flowshy.report.chart.ChartTable;
 import flowshy.report.chart.ChartTable.Head;
 import flowshy.report.chart.ChartTable.Row;
+import flowshy.report.chart.DrawnChart;
 import flowshy.report.chart.paper.Bar;
 import flowshy.report.chart.paper.Ink;
 import flowshy.report.chart.paper.PlotSheet.Heading;

@@ -1,10 +1,11 @@
-package flowshy.report.chart;
+package flowshy.report.chart.device;
 
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import flowshy.cli.Json;
 import flowshy.cli.Run;
+import flowshy.report.chart.DrawnChart;
 import flowshy.report.chart.paper.Datasets;
 import flowshy.study.FreeKeys;
 import flowshy.study.Study;
@@ -18,14 +19,14 @@ import java.util.Map;
 import org.junit.jupiter.api.Test;
 
 /** What is drawn of what a fit leaves is what the JSON says, measurement by measurement, sizes over phases. */
-class FitChartsTest {
+public class FitChartsTest {
     private static final String STUDY = "examples/measured-pickup/study.yaml";
 
-    static Study study() {
+    public static Study study() {
         return StudyReader.read(Path.of(STUDY), List.of());
     }
 
-    static FitAnswer answer() {
+    public static FitAnswer answer() {
         StudyReader reader = StudyReader.open(Path.of(STUDY), List.of());
         Study study = reader.study();
         FreeKeys keys = FreeKeys.of(reader, List.of(FreeKeys.STIFFNESS, FreeKeys.DAMPING));

@@ -1,4 +1,4 @@
-package flowshy.report.chart;
+package flowshy.report.chart.several;
 
 import org.hipparchus.util.FastMath;
 

@@ -1,7 +1,10 @@
-package flowshy.report.chart;
+package flowshy.report.chart.several;
 
+import flowshy.report.chart.Chart;
+import flowshy.report.chart.ChartTable;
 import flowshy.report.chart.ChartTable.Head;
 import flowshy.report.chart.ChartTable.Row;
+import flowshy.report.chart.DrawnChart;
 import flowshy.report.chart.paper.MapSheet;
 import flowshy.report.chart.paper.MapSheet.Box;
 import flowshy.report.chart.paper.PlotSheet.Heading;
