@@ -23,6 +23,11 @@ public final class LidReport {
     /** Begins the name of a column of the worst state. */
     private static final String WORST = "worst_";
 
+    /** What a state does to a fill. */
+    public static final String FILLED =
+            "A can with a fill of its own stays as it was filled: a gas keeps its density, a liquid its"
+                    + " pressure. A closed cover without a fill of its own holds what is outside.";
+
     private static final String NO_BOUND = "no flow enters: the rejection has no bound";
     private static final String NOTHING = "the hair is as dense as the fluid carried with it: it reads nothing";
     private static final String NO_SUSPENSION = "no suspension is stated that holds the hair";
@@ -157,7 +162,10 @@ public final class LidReport {
         for (String remedy : answer.remedies()) {
             page.note("-", remedy);
         }
-        answer.worst().ifPresent(over -> EnvelopeReport.states(page, over.bare()));
+        answer.worst().ifPresent(over -> {
+            EnvelopeReport.states(page, over.bare());
+            page.paragraph(FILLED);
+        });
         page.heading("Bare");
         page.paragraph(bare(answer));
         page.heading("Attenuation a cover must give for a margin of "

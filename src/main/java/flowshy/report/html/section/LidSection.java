@@ -52,7 +52,8 @@ final class LidSection implements ReportSection {
             words.amount(answer.reference(), "Hz", 4);
             html.text(". Error and offset are those of the surroundings.");
             if (answer.worst().isPresent()) {
-                html.text(" Worst: of all states of the envelope; the other figures hold at the study's own state.");
+                html.text(" Worst: of all states of the envelope; the other figures hold at the study's own state. ");
+                words.sentence(LidReport.FILLED);
             }
         });
         words.charts(id());
