@@ -19,7 +19,8 @@ public record BesselK(Complex k0, Complex k1) {
     /** Euler's constant γ [-]. */
     public static final double EULER_GAMMA = 0.5772156649015329;
 
-    private static final double SERIES_BELOW = 1.5;
+    /** Largest |z| of the ascending series. */
+    static final double SERIES_BELOW = 1.5;
 
     /** Where the smallest term of the asymptotic series, about e^{-2|z|}, is below rounding. */
     private static final double ASYMPTOTIC_FROM = 20.0;
@@ -39,26 +40,6 @@ public record BesselK(Complex k0, Complex k1) {
     public static Complex ratio(Complex z) {
         BesselK pair = of(z);
         return pair.k1.divide(pair.k0);
-    }
-
-    /**
-     * K₁ at one place over K₀ at another, neither scaled.
-     *
-     * @param above argument of K₁, Re ≥ 0, not 0, finite
-     * @param below argument of K₀, likewise
-     * @return K₁(above)/K₀(below) [-]; zero or infinite where the real parts lie some 700 apart
-     * @throws IllegalArgumentException outside the closed right half plane or at 0
-     */
-    public static Complex quotient(Complex above, Complex below) {
-        double one = checked(above);
-        double other = checked(below);
-        if (one <= SERIES_BELOW && other <= SERIES_BELOW) { // no scale that would cancel
-            return series(above, one).k1.divide(series(below, other).k0);
-        }
-        return of(above, one)
-                .k1
-                .divide(of(below, other).k0)
-                .multiply(below.subtract(above).exp());
     }
 
     /**
@@ -105,7 +86,7 @@ public record BesselK(Complex k0, Complex k1) {
     private static BesselK of(Complex z, double modulus) {
         if (modulus <= SERIES_BELOW) {
             Complex scale = z.exp();
-            BesselK plain = series(z, modulus);
+            BesselK plain = series(z, FastMath.log(0.5 * modulus), z.getArgument());
             return new BesselK(plain.k0.multiply(scale), plain.k1.multiply(scale));
         }
         return modulus < ASYMPTOTIC_FROM ? quadrature(modulus, z.getArgument()) : asymptotic(z);
@@ -114,12 +95,15 @@ public record BesselK(Complex k0, Complex k1) {
     /**
      * Without the scale: K₀ = Σ q^k/k!² (H_k − L), z K₁ = Σ q^k/k!² (1 + 2k(L − H_k)), q = z²/4, L = ln(z/2) + γ. Written out in parts: maps ask
      * for it a hundred thousand times.
+     *
+     * @param z argument
+     * @param log ln|z/2|
+     * @param angle arg z
      */
-    private static BesselK series(Complex z, double modulus) {
+    static BesselK series(Complex z, double log, double angle) {
         double qReal = 0.25 * (z.getReal() - z.getImaginary()) * (z.getReal() + z.getImaginary());
         double qImaginary = 0.5 * z.getReal() * z.getImaginary();
-        double logarithm = FastMath.log(0.5 * modulus) + EULER_GAMMA;
-        double angle = z.getArgument();
+        double logarithm = log + EULER_GAMMA;
         double real = 1.0;
         double imaginary = 0.0;
         double k0Real = -logarithm;

@@ -54,7 +54,7 @@ public record StokesLayer(double kinematicViscosity) implements WallShare {
             return Complex.ONE;
         }
         // 1 − e^{−y} cos y = −expm1(−y) + 2 e^{−y} sin²(y/2)
-        double rise = -FastMath.expm1(-y);
+        double rise = y < 1.0 ? -FastMath.expm1(-y) : 1.0 - FastMath.exp(-y);
         double fall = 1.0 - rise;
         SinCos half = FastMath.sinCos(0.5 * y);
         double sine = fall * 2.0 * half.sin();

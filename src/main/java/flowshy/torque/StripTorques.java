@@ -8,6 +8,7 @@ import flowshy.stream.StokesLayer;
 import flowshy.stream.WallShare;
 import flowshy.stream.cover.Cover;
 import flowshy.stream.cover.Covers;
+import flowshy.torque.strips.StripMesh;
 import org.hipparchus.complex.Complex;
 import org.hipparchus.util.FastMath;
 

@@ -12,8 +12,8 @@ import flowshy.medium.PropertySource;
 import flowshy.medium.PropertySource.Reading;
 import flowshy.response.Device;
 import flowshy.response.Suspension;
-import flowshy.torque.ThinStrips;
 import flowshy.torque.finite.LengthFactors;
+import flowshy.torque.strips.ThinStrips;
 import java.util.ArrayList;
 import java.util.Collection;
 import java.util.LinkedHashSet;
@@ -57,8 +57,7 @@ final class Assumptions {
     }
 
     private static boolean rarefactionEnds(Device device, Band band) {
-        double thinnest = device.hair().profile().smallestRadius();
-        if (new OscillatingCylinder(thinnest, device.around()).knudsen() <= OscillatingCylinder.SLIP_END) {
+        if (ThinStrips.none(device.hair().profile(), device.around(), OscillatingCylinder.SLIP_END)) {
             return false;
         }
         Set<Caveat> caveats = new LinkedHashSet<>();

@@ -17,14 +17,14 @@ import java.util.OptionalDouble;
 import org.hipparchus.util.FastMath;
 
 /** Hairs and media that the tests of this package share. */
-final class Hairs {
+public final class Hairs {
     private Hairs() {}
 
     static Hair of(Profile profile, double density) {
         return new Hair(profile, density, OptionalDouble.empty());
     }
 
-    static Medium gas(String name, double density, double viscosity, double meanFreePath) {
+    public static Medium gas(String name, double density, double viscosity, double meanFreePath) {
         return new Medium(
                 name,
                 Phase.GAS,

@@ -2,8 +2,10 @@ package flowshy.verdict;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import flowshy.hair.Club;
 import flowshy.hair.Cylinder;
 import flowshy.hair.Hair;
+import flowshy.hair.Profile;
 import flowshy.hair.Taper;
 import flowshy.math.Caveat;
 import flowshy.math.Caveat.Subject;
@@ -120,6 +122,30 @@ class AssumptionsTest {
                 Weight.NOTE);
         assertThat(with(Devices.bare(Devices.ROD, 1190.0, Devices.gas(6.5e-8)), "slip"))
                 .isEmpty();
+    }
+
+    /** What a map asks of every place says the same as all that stands beside a whole answer. */
+    @Test
+    void theEndOfTheRejectionIsThatOfItsCaveats() {
+        int ended = 0;
+        for (double path : new double[] {6.5e-8, 1e-6, 3e-6, 4.1e-6, 4.3e-6, 6e-6}) {
+            for (Profile profile : List.of(
+                    Devices.ROD,
+                    new Taper(7.6e-4, 4.2e-5, 0.0),
+                    new Taper(7.6e-4, 4.2e-5, 2e-5),
+                    new Club(7.6e-4, 2e-5, 4e-4, 1e-4, 6e-5, Club.End.ROUND))) {
+                for (Device device : List.of(
+                        Devices.bare(profile, 1190.0, Devices.gas(path)),
+                        Devices.sealed(profile, 1190.0, Devices.gas(path)))) {
+                    boolean expected = Assumptions.ended(of(device), Subject.REJECTION);
+                    assertThat(Assumptions.rejectionEnds(device, BAND))
+                            .as("%s, mean free path %s", device, path)
+                            .isEqualTo(expected);
+                    ended += expected ? 1 : 0;
+                }
+            }
+        }
+        assertThat(ended).isBetween(8, 30);
     }
 
     /** The tip of a pointed hair is always too thin for the law; by how much that counts is told. */

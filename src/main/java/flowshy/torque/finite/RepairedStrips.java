@@ -4,10 +4,12 @@ import flowshy.cylinder.HydrodynamicFunction;
 import flowshy.hair.Cylinder;
 import flowshy.hair.Profile;
 import flowshy.hair.Strip;
-import flowshy.math.BesselK;
+import flowshy.math.BesselQuotient;
 import flowshy.math.Range;
 import flowshy.medium.Medium;
 import flowshy.stream.StokesLayer;
+import flowshy.torque.strips.StripMesh;
+import java.util.Optional;
 import org.hipparchus.complex.Complex;
 import org.hipparchus.util.FastMath;
 import org.hipparchus.util.SinCos;
@@ -23,12 +25,8 @@ import org.hipparchus.util.SinCos;
  * <p>Complex error of the torques against {@link FiniteHair}, tabulated beside its test: in the usual range (L/d from 3.5, δ/L from
  * 0.02 to 1) cylinders 4 % (stream) and 9 % (rocking), of L/d ≥ 10 3 % and 5 %; tapers 6 % and 5 %; clubs 7 % and 10 %. In the wide
  * range, down to L/d = 2 and for δ/L from 0.005 to 100, 10 % and 16 %.
- *
- * @param profile shape of the hair
- * @param medium what it stands in; its slip is left out
- * @param pivotDepth h, depth of the pivot below the wall [m]
  */
-public record RepairedStrips(Profile profile, Medium medium, double pivotDepth) implements LengthFactors {
+public final class RepairedStrips implements LengthFactors {
     /** Length over largest diameter for which the errors were found. */
     public static final Range SLENDERNESS = new Range("L/d", 2.0, 200.0);
 
@@ -59,49 +57,83 @@ public record RepairedStrips(Profile profile, Medium medium, double pivotDepth) 
 
     private static final double TIP = 0.5;
 
-    private static final int POINTS = 20;
-
     private static final int HALVINGS = 50;
+
+    private final Profile profile;
+    private final Medium medium;
+    private final double pivotDepth;
+    private final StokesLayer layer;
+    /** Not needed for a cylinder, whose integrals are known. */
+    private final Optional<StripMesh> mesh;
+
+    /**
+     * The repair of a hair.
+     *
+     * @param profile shape of the hair
+     * @param medium what it stands in; its slip is left out
+     * @param pivotDepth h, depth of the pivot below the wall [m]
+     */
+    public RepairedStrips(Profile profile, Medium medium, double pivotDepth) {
+        this.profile = profile;
+        this.medium = medium;
+        this.pivotDepth = pivotDepth;
+        this.layer = new StokesLayer(medium.kinematicViscosity());
+        this.mesh = profile instanceof Cylinder ? Optional.empty() : Optional.of(new StripMesh(profile, 1));
+    }
 
     @Override
     public FiniteFactors at(double omega) {
         double delta = medium.stokesLayer(omega);
         Complex k = new Complex(1.0 / delta, 1.0 / delta);
-        Complex near = near(delta);
+        Repaired law = new Repaired(k, new BesselQuotient(k, near(delta)));
         Moments strips = new Moments();
         Moments repaired = new Moments();
         if (profile instanceof Cylinder cylinder) {
             Complex lever = StokesLayer.lever(cylinder.length(), pivotDepth, delta);
             add(cylinder, lever, HydrodynamicFunction.of(waveNumber(delta) * cylinder.radius()), strips);
-            add(cylinder, lever, gamma(k.multiply(cylinder.radius()), near.multiply(cylinder.radius())), repaired);
+            add(cylinder, lever, law.gamma(cylinder.radius()), repaired);
         } else {
-            add(delta, k, near, strips, repaired);
+            add(delta, law, strips, repaired);
         }
         double arm = profile.length() + pivotDepth;
         double tip = tipRadius();
         double end = TIP * tip * tip * tip * arm;
-        Complex stream = repaired.stream.subtract(
-                StokesLayer.share(profile.length() / delta).multiply(end));
-        Complex rocking = repaired.rocking.add(-end * arm);
+        Complex stream = repaired.stream()
+                .subtract(StokesLayer.share(profile.length() / delta).multiply(end));
+        Complex rocking = repaired.rocking().add(-end * arm);
         double slenderness = profile.length() / (2.0 * profile.largestRadius());
         double layer = delta / profile.length();
         boolean usual = USUAL_SLENDERNESS.contains(slenderness) && USUAL_LAYER_SHARE.contains(layer);
         boolean known = SLENDERNESS.contains(slenderness) && LAYER_SHARE.contains(layer);
         return new FiniteFactors(
-                stream.divide(strips.stream),
-                rocking.divide(strips.rocking),
+                stream.divide(strips.stream()),
+                rocking.divide(strips.rocking()),
                 usual ? USUAL_STREAM_ERROR : known ? STREAM_ERROR : Double.POSITIVE_INFINITY,
                 usual ? USUAL_ROCKING_ERROR : known ? ROCKING_ERROR : Double.POSITIVE_INFINITY);
     }
 
-    /** ∫ a² (1 + Γ s) ℓ dz and ∫ a² Γ ℓ² dz. */
+    /** ∫ a² (1 + Γ s) ℓ dz and ∫ a² Γ ℓ² dz. In parts: the library's product guards against infinities and takes longer than all the rest. */
     private static final class Moments {
-        private Complex stream = Complex.ZERO;
-        private Complex rocking = Complex.ZERO;
+        private double stream;
+        private double streamImaginary;
+        private double rocking;
+        private double rockingImaginary;
 
         void add(Complex gamma, double moment, double arm, Complex share) {
-            stream = stream.add(gamma.multiply(share).add(1.0).multiply(moment));
-            rocking = rocking.add(gamma.multiply(moment * arm));
+            double real = gamma.getReal();
+            double imaginary = gamma.getImaginary();
+            stream += moment * (1.0 + real * share.getReal() - imaginary * share.getImaginary());
+            streamImaginary += moment * (real * share.getImaginary() + imaginary * share.getReal());
+            rocking += moment * arm * real;
+            rockingImaginary += moment * arm * imaginary;
+        }
+
+        Complex stream() {
+            return new Complex(stream, streamImaginary);
+        }
+
+        Complex rocking() {
+            return new Complex(rocking, rockingImaginary);
         }
     }
 
@@ -129,20 +161,20 @@ public record RepairedStrips(Profile profile, Medium medium, double pivotDepth) 
         double square = cylinder.radius() * cylinder.radius();
         double length = cylinder.length();
         double top = length + pivotDepth;
-        moments.stream =
-                gamma.multiply(lever).add(length * (0.5 * length + pivotDepth)).multiply(square);
-        moments.rocking = gamma.multiply(square * (top * top * top - pivotDepth * pivotDepth * pivotDepth) / 3.0);
+        double lift = length * (0.5 * length + pivotDepth);
+        double second = (top * top * top - pivotDepth * pivotDepth * pivotDepth) / 3.0;
+        moments.add(gamma, square * lift, second / lift, lever.divide(lift));
     }
 
-    private void add(double delta, Complex k, Complex near, Moments strips, Moments repaired) {
+    private void add(double delta, Repaired law, Moments strips, Moments repaired) {
         double radius = Double.NaN;
         Complex plain = Complex.ZERO;
         Complex better = Complex.ZERO;
-        for (Strip strip : Strip.along(profile, StripForces.segments(profile, delta), POINTS)) {
+        for (Strip strip : mesh.orElseThrow().strips(delta, layer)) {
             if (strip.radius() != radius) { // a straight part needs its law once
                 radius = strip.radius();
                 plain = HydrodynamicFunction.of(waveNumber(delta) * radius);
-                better = gamma(k.multiply(radius), near.multiply(radius));
+                better = law.gamma(radius);
             }
             double arm = strip.height() + pivotDepth;
             double moment = radius * radius * strip.weight() * arm;
@@ -152,8 +184,16 @@ public record RepairedStrips(Profile profile, Medium medium, double pivotDepth) 
         }
     }
 
-    private static Complex gamma(Complex lambda, Complex near) {
-        return BesselK.quotient(lambda, near).multiply(4.0).divide(lambda).add(1.0);
+    /** Γ with the reach of the flow. */
+    private record Repaired(Complex k, BesselQuotient quotient) {
+        Complex gamma(double radius) {
+            Complex ratio = quotient.at(radius);
+            // 4/λ, λ = ak = a|k|(1 + i)/√2
+            double half = 2.0 / (radius * k.getReal());
+            return new Complex(
+                    1.0 + half * (ratio.getReal() + ratio.getImaginary()),
+                    half * (ratio.getImaginary() - ratio.getReal()));
+        }
     }
 
     /** Root of a(L − s) = s, from below where there is none but 0. */

@@ -1,4 +1,4 @@
-package flowshy.torque;
+package flowshy.torque.strips;
 
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
@@ -9,6 +9,7 @@ import flowshy.hair.Club.End;
 import flowshy.hair.Cylinder;
 import flowshy.hair.Taper;
 import flowshy.medium.Medium;
+import flowshy.torque.Hairs;
 import org.junit.jupiter.api.Test;
 
 class ThinStripsTest {

@@ -1,4 +1,4 @@
-package flowshy.torque;
+package flowshy.torque.strips;
 
 import flowshy.cylinder.OscillatingCylinder;
 import flowshy.hair.Profile;
@@ -14,6 +14,19 @@ public final class ThinStrips {
     private ThinStrips() {}
 
     /**
+     * Whether no part is thin; a map asks this of every place.
+     *
+     * @param profile shape of the hair
+     * @param medium around it
+     * @param knudsen mean free path over radius above which a part counts as thin [-]
+     * @return true also if no mean free path is known
+     */
+    public static boolean none(Profile profile, Medium medium, double knudsen) {
+        double tip = profile.radius(profile.length()); // the smallest radius passes over a point or a round end
+        return medium.meanFreePath().orElse(0.0) <= knudsen * FastMath.min(profile.smallestRadius(), tip);
+    }
+
+    /**
      * Share of the thin parts in the torque of a uniform stream.
      *
      * @param profile shape of the hair
@@ -23,10 +36,8 @@ public final class ThinStrips {
      * @return ∫ |Γ| a² z dz over the thin parts by that over the hair [-]; zero if no mean free path is known
      */
     public static double share(Profile profile, Medium medium, double omega, double knudsen) {
-        double path = medium.meanFreePath().orElse(0.0);
-        double tip = profile.radius(profile.length()); // the smallest radius passes over a point or a round end
-        if (path <= knudsen * FastMath.min(profile.smallestRadius(), tip)) {
-            return 0.0; // no part is thin: a map asks this of every place
+        if (none(profile, medium, knudsen)) {
+            return 0.0;
         }
         double thin = 0.0;
         double whole = 0.0;

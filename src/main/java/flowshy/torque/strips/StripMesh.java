@@ -1,4 +1,4 @@
-package flowshy.torque;
+package flowshy.torque.strips;
 
 import flowshy.hair.Profile;
 import flowshy.hair.Strip;
@@ -13,7 +13,7 @@ import org.hipparchus.util.FastMath;
  * Gauss–Legendre strips along a hair: between the profile's own breaks once for all, and anew where the Stokes layer is thin
  * against a piece. As many points as keep each torque converged to 1e-8; a test doubles them.
  */
-final class StripMesh {
+public final class StripMesh {
     /** Splits in units of δ; above the last the flow is the free stream to 4e-11. */
     private static final double[] LAYER_SPLITS = {1.0, 3.0, 8.0, 24.0};
 
@@ -42,7 +42,7 @@ final class StripMesh {
      * @param profile the shape
      * @param refinement factor on the number of points, 1 in use
      */
-    StripMesh(Profile profile, int refinement) {
+    public StripMesh(Profile profile, int refinement) {
         this.profile = profile;
         this.pieces = new ArrayList<>();
         this.all = new ArrayList<>();
@@ -59,7 +59,7 @@ final class StripMesh {
      *
      * @return from wall to tip
      */
-    List<Strip> strips() {
+    public List<Strip> strips() {
         return all;
     }
 
@@ -70,7 +70,7 @@ final class StripMesh {
      * @param share the flow over the wall; under a roof there is a second layer
      * @return from wall to tip
      */
-    List<Strip> strips(double delta, WallShare share) {
+    public List<Strip> strips(double delta, WallShare share) {
         double thickness = LAYER_SPLITS[LAYER_SPLITS.length - 1] * delta;
         double roof = share instanceof ChannelLayer channel ? channel.gap() : Double.POSITIVE_INFINITY;
         List<Strip> strips = new ArrayList<>(2 * all.size());
