@@ -5,6 +5,7 @@ import flowshy.report.SizeReport;
 import flowshy.study.SizeWords;
 import flowshy.study.StudyReader;
 import flowshy.study.StudySizing;
+import flowshy.verdict.map.GridRun;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
@@ -12,6 +13,9 @@ import java.util.List;
 import java.util.Map;
 import java.util.OptionalDouble;
 import java.util.concurrent.Callable;
+import java.util.concurrent.ForkJoinPool;
+import java.util.concurrent.atomic.AtomicLong;
+import java.util.function.DoubleConsumer;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
@@ -32,6 +36,7 @@ import picocli.CommandLine.Spec;
 final class SizeCommand implements Callable<Integer> {
     private static final String MINIMIZE = "minimize";
     private static final String MAXIMIZE = "maximize";
+    private static final long PATIENCE_NS = 100_000_000L;
 
     @Mixin
     private StudyOptions studies;
@@ -75,6 +80,9 @@ final class SizeCommand implements Callable<Integer> {
     private Path write;
 
     @Mixin
+    private RunOptions run;
+
+    @Mixin
     private OutputOptions output;
 
     @Spec
@@ -103,7 +111,7 @@ final class SizeCommand implements Callable<Integer> {
         List<Runnable> objects = new ArrayList<>();
         List<String> tables = new ArrayList<>();
         int code = studies.eachOpened(spec.commandLine(), output.json(), reader -> {
-            StudySizing sizing = StudySizing.of(reader, words);
+            StudySizing sizing = sized(reader, words);
             texts.add(SizeReport.text(sizing));
             objects.add(() -> SizeReport.write(json, sizing));
             if (output.csv()) {
@@ -116,6 +124,32 @@ final class SizeCommand implements Callable<Integer> {
         });
         studies.send(spec.commandLine(), output, json, texts, objects, tables);
         return code;
+    }
+
+    /** On as many threads as asked for: what runs in parallel stays in the pool that began it. */
+    private StudySizing sized(StudyReader reader, SizeWords words) {
+        GridRun.Progress line = run.progress(spec.commandLine());
+        ForkJoinPool pool = new ForkJoinPool(run.threads());
+        try {
+            return pool.submit(() -> StudySizing.of(reader, words, shares(line)))
+                    .join();
+        } finally {
+            pool.shutdownNow();
+            line.end();
+        }
+    }
+
+    /** Tells a line of progress, now and then, how much is done and how long the rest will take at that rate. */
+    private static DoubleConsumer shares(GridRun.Progress line) {
+        long start = System.nanoTime();
+        AtomicLong last = new AtomicLong(start);
+        return share -> {
+            long now = System.nanoTime();
+            long before = last.get();
+            if (now - before >= PATIENCE_NS && last.compareAndSet(before, now)) {
+                line.at(share, 1e-9 * (now - start) * (1.0 - share) / share);
+            }
+        };
     }
 
     private static String rewritten(StudyReader reader, StudySizing sizing) {

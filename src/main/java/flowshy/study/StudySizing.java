@@ -33,6 +33,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
+import java.util.function.DoubleConsumer;
 import org.hipparchus.util.FastMath;
 
 /**
@@ -100,10 +101,11 @@ public record StudySizing(
      *
      * @param reader of the study
      * @param words what is asked
+     * @param progress told now and then, by any thread, what share is done
      * @return the answer
      * @throws StudyException with every problem of the study, or the first of the words
      */
-    public static StudySizing of(StudyReader reader, SizeWords words) {
+    public static StudySizing of(StudyReader reader, SizeWords words, DoubleConsumer progress) {
         Study study = reader.study();
         Figure figure = StudyMap.figure("--to", words.figure());
         NumberKeys keys = reader.numbers();
@@ -146,7 +148,7 @@ public record StudySizing(
                     && own.get(i) <= variables.get(i).to();
         }
         List<List<Double>> known = inside ? List.of(own) : List.of();
-        Sizer sizer = new Sizer(words.seed());
+        Sizer sizer = new Sizer(words.seed(), progress);
         boolean estimated = varied.model() != study.device().hair().lengthModel();
         SizeQuestion solved = estimated ? question.in(asStudied(study, question.space())) : question;
         Agreement agreement =

@@ -282,6 +282,15 @@ class SizeCommandTest {
         assertThat(size(STUDY, words).out()).isEqualTo(one.out());
     }
 
+    @Test
+    void theAnswerDoesNotDependOnTheThreads() {
+        String[] words = {"--vary", "hair.diameter,hair.density", "--to", "minimize", "mass", "--threads", "1"};
+        Run one = size(STUDY, words);
+        words[words.length - 1] = "3";
+        assertThat(one.code()).isZero();
+        assertThat(size(STUDY, words).out()).isEqualTo(one.out());
+    }
+
     @ParameterizedTest
     @CsvSource(
             delimiter = '|',

@@ -7,7 +7,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.ConcurrentHashMap;
-import java.util.concurrent.atomic.AtomicInteger;
+import java.util.function.DoubleConsumer;
 import java.util.stream.IntStream;
 import org.hipparchus.util.FastMath;
 
@@ -15,8 +15,9 @@ import org.hipparchus.util.FastMath;
  * Solves a sizing: first what keeps every limit, then the best of that.
  *
  * @param seed of everything drawn at random: one seed, one answer
+ * @param progress told now and then, by any thread, how much is done: a share, 0 to 1, guessed
  */
-public record Sizer(long seed) {
+public record Sizer(long seed, DoubleConsumer progress) {
     /** A limit binds if it is kept by less than this, in its scale. */
     private static final double BINDS = 1e-5;
 
@@ -29,6 +30,15 @@ public record Sizer(long seed) {
     private static final double NEAR = 0.02;
 
     /**
+     * A sizer that tells nobody how far it is.
+     *
+     * @param seed of everything drawn at random
+     */
+    public Sizer(long seed) {
+        this(seed, share -> {});
+    }
+
+    /**
      * Solves a problem.
      *
      * @param problem what is asked
@@ -36,9 +46,12 @@ public record Sizer(long seed) {
      * @return the answer
      */
     public Sized solve(SizingProblem problem, List<List<Double>> known) {
-        AtomicInteger trials = new AtomicInteger();
-        SizingProblem counted = counted(problem, trials);
-        return answer(counted, problem, best(counted, known), trials);
+        Course course = new Course(problem.variables().size(), progress);
+        SizingProblem counted = counted(problem, course);
+        Candidate best = best(counted, known);
+        course.next();
+        course.next();
+        return answer(counted, problem, best, course);
     }
 
     /**
@@ -50,17 +63,19 @@ public record Sizer(long seed) {
      * @return the answer by the full model
      */
     public Agreement solve(SizingProblem estimate, SizingProblem.Trials full, List<List<Double>> known) {
-        AtomicInteger trials = new AtomicInteger();
-        SizingProblem counted = counted(estimate, trials);
+        Course course = new Course(estimate.variables().size(), progress);
+        SizingProblem counted = counted(estimate, course);
         CorrectedSearch search = new CorrectedSearch(this, counted, full);
         Candidate first = best(counted, known);
         if (!first.trial().there()) {
-            return new Agreement(answer(counted, estimate, first, trials), estimate, List.of(), false, 0);
+            return new Agreement(answer(counted, estimate, first, course), estimate, List.of(), false, 0);
         }
+        course.next();
         Candidate best = search.from(first);
+        course.next();
         SizingProblem corrected = best.trial().there() ? search.correctedAt(best) : counted;
         return new Agreement(
-                answer(corrected, search.solved(), best, trials),
+                answer(corrected, search.solved(), best, course),
                 corrected,
                 search.rounds(),
                 search.settled(),
@@ -68,7 +83,7 @@ public record Sizer(long seed) {
     }
 
     /** Counts what is tried, and keeps it: searches and slopes come back to the same places. */
-    private static SizingProblem counted(SizingProblem problem, AtomicInteger trials) {
+    private static SizingProblem counted(SizingProblem problem, Course course) {
         Map<List<Double>, Trial> kept = new ConcurrentHashMap<>();
         return problem.by(values -> {
             Optional<Trial> before = Optional.ofNullable(kept.get(values));
@@ -77,7 +92,7 @@ public record Sizer(long seed) {
             }
             Trial trial = problem.trials().at(values);
             if (kept.putIfAbsent(List.copyOf(values), trial) == null) {
-                trials.incrementAndGet();
+                course.step();
             }
             return trial;
         });
@@ -103,7 +118,7 @@ public record Sizer(long seed) {
                 : new SeveralVariables(problem, seed).near(start);
     }
 
-    private Sized answer(SizingProblem counted, SizingProblem problem, Candidate best, AtomicInteger trials) {
+    private Sized answer(SizingProblem counted, SizingProblem problem, Candidate best, Course course) {
         boolean fits = best.keepsAll();
         List<Integer> binding = new ArrayList<>();
         for (int c = 0; c < best.shortfalls().size(); c++) {
@@ -129,7 +144,7 @@ public record Sizer(long seed) {
                 edges(counted, best),
                 prices,
                 slopes,
-                trials.get());
+                course.tried());
     }
 
     private List<Slope> prices(SizingProblem problem, Candidate best) {

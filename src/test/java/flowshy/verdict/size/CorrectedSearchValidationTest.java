@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.within;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.concurrent.CopyOnWriteArrayList;
 import java.util.concurrent.atomic.AtomicInteger;
 import java.util.stream.Stream;
 import org.hipparchus.util.FastMath;
@@ -130,6 +131,19 @@ class CorrectedSearchValidationTest {
         // least x + y with xy ≥ 20 is at x = y
         assertThat(agreement.sized().fits()).isTrue();
         assertThat(agreement.sized().trial().objective()).isCloseTo(2.0 * FastMath.sqrt(20.0), within(1e-4));
+    }
+
+    /** Told from several threads, so not quite in order; the guess stays a share and comes near its end. */
+    @Test
+    void tellsHowFarItIs() {
+        List<Double> told = new CopyOnWriteArrayList<>();
+        SizingProblem right = SizerValidationTest.published().get(1).problem();
+        new Sizer(1, told::add).solve(bent(right), right.trials(), List.of());
+        assertThat(told)
+                .hasSizeGreaterThan(100)
+                .allSatisfy(share -> assertThat(share).isGreaterThan(0.0).isLessThanOrEqualTo(1.0));
+        assertThat(told.get(0)).isLessThan(0.05);
+        assertThat(told.get(told.size() - 1)).isGreaterThan(0.7);
     }
 
     @Test
