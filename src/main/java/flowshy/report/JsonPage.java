@@ -12,15 +12,18 @@ import java.util.function.Consumer;
 /** Writes JSON into text; numbers through {@link Figures}, missing numbers as null with a reason. */
 public final class JsonPage {
     private final StringWriter text = new StringWriter();
-    private final JsonGenerator generator;
+    /** Made with the first thing written, null until then: most runs write no JSON. */
+    private JsonGenerator generator;
 
-    /** An empty page. */
-    public JsonPage() {
-        try {
-            generator = new JsonFactory().createGenerator(text).useDefaultPrettyPrinter();
-        } catch (IOException e) {
-            throw new UncheckedIOException(e);
+    private JsonGenerator out() {
+        if (generator == null) {
+            try {
+                generator = new JsonFactory().createGenerator(text).useDefaultPrettyPrinter();
+            } catch (IOException e) {
+                throw new UncheckedIOException(e);
+            }
         }
+        return generator;
     }
 
     /**
@@ -29,7 +32,7 @@ public final class JsonPage {
      * @return the text, with a line end
      */
     public String finish() {
-        run(generator::close);
+        run(out()::close);
         return text + "\n";
     }
 
@@ -39,9 +42,9 @@ public final class JsonPage {
      * @param fields writes its fields
      */
     public void object(Runnable fields) {
-        run(generator::writeStartObject);
+        run(out()::writeStartObject);
         fields.run();
-        run(generator::writeEndObject);
+        run(out()::writeEndObject);
     }
 
     /**
@@ -50,9 +53,9 @@ public final class JsonPage {
      * @param elements each writes one element
      */
     public void array(List<Runnable> elements) {
-        run(generator::writeStartArray);
+        run(out()::writeStartArray);
         elements.forEach(Runnable::run);
-        run(generator::writeEndArray);
+        run(out()::writeEndArray);
     }
 
     /**
@@ -62,7 +65,7 @@ public final class JsonPage {
      * @param fields writes its fields
      */
     public void object(String name, Runnable fields) {
-        run(() -> generator.writeFieldName(name));
+        run(() -> out().writeFieldName(name));
         object(fields);
     }
 
@@ -75,9 +78,9 @@ public final class JsonPage {
      * @param <T> what a row is made of
      */
     public <T> void array(String name, List<T> rows, Consumer<T> fields) {
-        run(() -> generator.writeArrayFieldStart(name));
+        run(() -> out().writeArrayFieldStart(name));
         rows.forEach(row -> object(() -> fields.accept(row)));
-        run(generator::writeEndArray);
+        run(out()::writeEndArray);
     }
 
     /**
@@ -88,11 +91,11 @@ public final class JsonPage {
      */
     public void texts(String name, List<String> values) {
         run(() -> {
-            generator.writeArrayFieldStart(name);
+            out().writeArrayFieldStart(name);
             for (String value : values) {
-                generator.writeString(value);
+                out().writeString(value);
             }
-            generator.writeEndArray();
+            out().writeEndArray();
         });
     }
 
@@ -104,15 +107,15 @@ public final class JsonPage {
      */
     void numbers(String name, List<Double> values) {
         run(() -> {
-            generator.writeArrayFieldStart(name);
+            out().writeArrayFieldStart(name);
             for (double value : values) {
                 if (Double.isFinite(value)) {
-                    generator.writeNumber(Figures.full(value));
+                    out().writeNumber(Figures.full(value));
                 } else {
-                    generator.writeNull();
+                    out().writeNull();
                 }
             }
-            generator.writeEndArray();
+            out().writeEndArray();
         });
     }
 
@@ -123,7 +126,7 @@ public final class JsonPage {
      * @param value any text
      */
     public void text(String name, String value) {
-        run(() -> generator.writeStringField(name, value));
+        run(() -> out().writeStringField(name, value));
     }
 
     /**
@@ -133,7 +136,7 @@ public final class JsonPage {
      * @param value true or false
      */
     public void bool(String name, boolean value) {
-        run(() -> generator.writeBooleanField(name, value));
+        run(() -> out().writeBooleanField(name, value));
     }
 
     /**
@@ -143,7 +146,7 @@ public final class JsonPage {
      * @param value any
      */
     public void whole(String name, int value) {
-        run(() -> generator.writeNumberField(name, value));
+        run(() -> out().writeNumberField(name, value));
     }
 
     /**
@@ -158,8 +161,8 @@ public final class JsonPage {
             throw new IllegalStateException(name + " is not finite and has no reason");
         }
         run(() -> {
-            generator.writeFieldName(name);
-            generator.writeNumber(Figures.full(value));
+            out().writeFieldName(name);
+            out().writeNumber(Figures.full(value));
         });
     }
 
@@ -173,7 +176,7 @@ public final class JsonPage {
         if (cell.value().isPresent()) {
             number(name, cell.value().getAsDouble());
         } else {
-            run(() -> generator.writeNullField(name));
+            run(() -> out().writeNullField(name));
             text(name + "_reason", cell.reason());
         }
     }
