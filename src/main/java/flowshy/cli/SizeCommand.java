@@ -2,6 +2,7 @@ package flowshy.cli;
 
 import flowshy.report.JsonPage;
 import flowshy.report.SizeReport;
+import flowshy.report.chart.Chart;
 import flowshy.study.SizeWords;
 import flowshy.study.StudyReader;
 import flowshy.study.StudySizing;
@@ -85,6 +86,9 @@ final class SizeCommand implements Callable<Integer> {
     @Mixin
     private OutputOptions output;
 
+    @Mixin
+    private ChartOptions charts;
+
     @Spec
     private CommandSpec spec;
 
@@ -113,7 +117,9 @@ final class SizeCommand implements Callable<Integer> {
         int code = studies.eachOpened(spec.commandLine(), output.json(), reader -> {
             StudySizing sizing = sized(reader, words);
             texts.add(SizeReport.text(sizing));
-            objects.add(() -> SizeReport.write(json, sizing));
+            List<Chart> drawn = charts.asked() ? SizeReport.charts(sizing) : List.of();
+            charts.add(drawn);
+            objects.add(() -> SizeReport.write(json, sizing, drawn));
             if (output.csv()) {
                 tables.add(SizeReport.csv(sizing));
             }
@@ -122,6 +128,7 @@ final class SizeCommand implements Callable<Integer> {
             }
             return sizing.keeps() ? 0 : Failures.LIMIT;
         });
+        charts.write();
         studies.send(spec.commandLine(), output, json, texts, objects, tables);
         return code;
     }

@@ -1,6 +1,8 @@
 package flowshy.report;
 
 import flowshy.math.Figures;
+import flowshy.report.chart.Chart;
+import flowshy.report.chart.several.SizeCharts;
 import flowshy.study.NumberKey;
 import flowshy.study.StudySizing;
 import flowshy.verdict.FigureLimit;
@@ -32,12 +34,28 @@ public final class SizeReport {
     }
 
     /**
+     * As pictures: the rejection before and after.
+     *
+     * @param sizing the answer
+     * @return empty where the numbers make no device
+     */
+    public static List<Chart> charts(StudySizing sizing) {
+        String sized =
+                sizing.numbers().size() == 1 ? sizing.numbers().get(0).path() + " " + sizing.written(0) : "as sized";
+        return sizing.answer()
+                .map(answer -> SizeCharts.of(
+                        sizing.study().title(), sizing.study().question().answer(), sized, answer))
+                .orElse(List.of());
+    }
+
+    /**
      * As an object.
      *
      * @param json where to write
      * @param sizing the answer
+     * @param charts drawn of it, their numbers are left out if there are none
      */
-    public static void write(JsonPage json, StudySizing sizing) {
+    public static void write(JsonPage json, StudySizing sizing, List<Chart> charts) {
         Sized sized = sizing.sized();
         Trial trial = sizing.trial();
         json.object(() -> {
@@ -63,6 +81,7 @@ public final class SizeReport {
             json.bool("settled", sizing.agreement().settled());
             json.array("rounds", sizing.agreement().rounds(), round -> round(json, sizing, round));
             json.text("seed", Long.toString(sizing.words().seed()));
+            ChartTables.write(json, charts);
         });
     }
 

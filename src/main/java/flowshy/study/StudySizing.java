@@ -54,6 +54,7 @@ import org.hipparchus.util.FastMath;
  * @param trial the figures of the rounded numbers, as {@code bands} finds them
  * @param estimate the same figures by the model of the search
  * @param base the figures of the study as it stands
+ * @param answer what {@code bands} says of the device with the rounded numbers; empty where there is none
  * @param undecided limits that the search keeps and {@code bands} does not call met at the rounded numbers
  * @param caveats what must stand beside the sized device's numbers
  */
@@ -73,6 +74,7 @@ public record StudySizing(
         Trial trial,
         Trial estimate,
         Trial base,
+        Optional<BandsAnswer> answer,
         List<Limit> undecided,
         List<Caveat> caveats) {
     /** More numbers than this are no longer searched with any certainty. */
@@ -177,6 +179,7 @@ public record StudySizing(
                 solved.trial(values),
                 question.trial(values),
                 question.trial(study.question()),
+                answer,
                 agreement.sized().fits() ? answer.map(StudySizing::undecided).orElseThrow() : List.of(),
                 answer.map(found -> caveats(study, found)).orElse(List.of()));
     }

@@ -91,6 +91,16 @@ class ChartsTest {
         all.add(List.of("lid", tray));
         all.add(List.of("fill", "examples/wrong-fill/study.yaml"));
         all.add(List.of("compare", "examples/lift-machinery/study.yaml"));
+        all.add(List.of(
+                "size",
+                "examples/workbench-air/study.yaml",
+                "--set",
+                "finite-length=off",
+                "--vary",
+                "hair.diameter",
+                "--to",
+                "minimize",
+                "mass"));
         all.add(List.of("fit", "examples/measured-pickup/study.yaml"));
         all.add(List.of("tolerance", "examples/potting-oil/study.yaml", "--samples", "512", "--of", "resonance"));
         all.add(List.of(

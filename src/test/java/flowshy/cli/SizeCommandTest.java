@@ -10,6 +10,7 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import org.hipparchus.analysis.solvers.BisectionSolver;
@@ -78,6 +79,40 @@ class SizeCommandTest {
         // and a number of the other end: the slope of the mass along the diameter
         assertThat((double) number.get("mass_kg_per_hair_diameter_m"))
                 .isCloseTo(2.0 * mass / found, within(1e-4 * mass / found));
+    }
+
+    /** The device before and after, each as bands finds it; the sized one comes down to the margin. */
+    @Test
+    void drawsTheDeviceBeforeAndAfter() {
+        Map<String, Object> answer = answer(size(
+                STUDY, "--vary", "hair.diameter", "--to", "minimize", "mass", "--json", "--chart", folder.toString()));
+        Map<String, Object> chart = Json.objects(answer.get("charts")).get(0);
+        assertThat(chart).containsEntry("name", "size-rejection");
+        assertThat(folder.resolve("size-rejection.svg")).isNotEmptyFile();
+        double diameter = (double) Json.objects(answer.get("numbers")).get(0).get("hair_diameter_m");
+        Map<String, List<Map<String, Object>>> drawn = new LinkedHashMap<>();
+        Json.objects(chart.get("rows"))
+                .forEach(row -> drawn.computeIfAbsent((String) row.get("label"), label -> new ArrayList<>())
+                        .add(row));
+        assertThat(drawn).hasSize(2);
+        List<String> settings = List.of("hair.diameter=105 um", "hair.diameter=" + diameter + " m");
+        int device = 0;
+        for (List<Map<String, Object>> rows : drawn.values()) {
+            double least = rows.stream()
+                    .filter(row -> (double) row.get("frequency_hz") >= 25.0)
+                    .filter(row -> (double) row.get("frequency_hz") <= 500.0)
+                    .mapToDouble(row -> (double) row.get("rejection_db"))
+                    .min()
+                    .orElseThrow();
+            assertThat(least).isCloseTo(figure(Figure.LEAST_REJECTION, settings.get(device)), within(1e-9));
+            device++;
+        }
+        assertThat(drawn.keySet()).first().isEqualTo("as it stands");
+        assertThat(drawn.keySet())
+                .last()
+                .asString()
+                .startsWith("hair.diameter ")
+                .endsWith(" um");
     }
 
     /** What bands itself finds, under a limit it is sure to state. */

@@ -17,7 +17,7 @@ import org.openjdk.jmh.annotations.Scope;
 import org.openjdk.jmh.annotations.State;
 import org.openjdk.jmh.annotations.Warmup;
 
-/** Whole maps of shipped studies, from the words to the grid, by strip theory. */
+/** Whole maps of shipped studies, from the words to the grid. */
 @State(Scope.Benchmark)
 @BenchmarkMode(Mode.AverageTime)
 @OutputTimeUnit(TimeUnit.MILLISECONDS)
@@ -29,6 +29,10 @@ public class MapBenchmark {
     @Param({"1", "2"})
     public int threads;
 
+    /** Strip theory, or the default, which takes the estimate where the shape varies. */
+    @Param({"off", "auto"})
+    public String finiteLength;
+
     /**
      * 400 by 400 places of a cylinder at one frequency.
      *
@@ -36,20 +40,30 @@ public class MapBenchmark {
      */
     @Benchmark
     public StudyMap cylinderAtOneFrequency() {
-        return map("workbench-air", "hair.diameter=40 um..160 um", "rejection", 400);
+        return map(
+                "workbench-air",
+                "hair.diameter=40 um..160 um",
+                "rejection",
+                400,
+                List.of("finite-length=" + finiteLength));
     }
 
     /**
-     * 50 by 50 places of a club, the least rejection over its band: a sixteenth of 200 by 200.
+     * 50 by 50 places of a club, the least rejection over a band of some 50 frequencies: a sixteenth of 200 by 200.
      *
      * @return the map
      */
     @Benchmark
     public StudyMap clubOverItsBand() {
-        return map("weather-mast", "hair.stalk-diameter=30 um..60 um", "least-rejection", 50);
+        return map(
+                "weather-mast",
+                "hair.stalk-diameter=30 um..60 um",
+                "least-rejection",
+                50,
+                List.of("finite-length=" + finiteLength, "band.from=19 Hz"));
     }
 
-    private StudyMap map(String example, String across, String figure, int steps) {
+    private StudyMap map(String example, String across, String figure, int steps, List<String> settings) {
         MapWords words = new MapWords(
                 across,
                 "hair.density=0.9 g/cm3..2.4 g/cm3",
@@ -57,7 +71,7 @@ public class MapBenchmark {
                 OptionalDouble.empty(),
                 List.of(steps, steps),
                 List.of(false, false));
-        StudyReader reader = StudyReader.open(Path.of("examples", example, "study.yaml"), List.of("finite-length=off"));
+        StudyReader reader = StudyReader.open(Path.of("examples", example, "study.yaml"), settings);
         return StudyMap.of(reader, words, new GridRun(threads, GridRun.Progress.NONE));
     }
 }
