@@ -38,7 +38,18 @@ final class CorrectedSearch {
     private final AtomicInteger solutions = new AtomicInteger();
     private final List<Round> rounds = new ArrayList<>();
     private final double[] room;
-    private boolean settled;
+
+    /**
+     * Where a search ended.
+     *
+     * @param place the best of the full model
+     * @param settled whether nothing was left to be gained there
+     */
+    record Ended(Candidate place, boolean settled) {
+        private static Ended better(Ended one, Ended other) {
+            return Candidate.better(one.place, other.place).equals(one.place) ? one : other;
+        }
+    }
 
     CorrectedSearch(Sizer sizer, SizingProblem estimate, SizingProblem.Trials full) {
         this.sizer = sizer;
@@ -54,11 +65,6 @@ final class CorrectedSearch {
     /** Places at which both models were asked. */
     List<Round> rounds() {
         return rounds;
-    }
-
-    /** Whether the last walk ended where nothing was left to be gained. */
-    boolean settled() {
-        return settled;
     }
 
     /** How often the full model was asked. */
@@ -78,21 +84,15 @@ final class CorrectedSearch {
      * @param start best place of the estimate
      * @return by the full model
      */
-    Candidate from(Candidate start) {
-        Candidate best = walk(start);
+    Ended from(Candidate start) {
+        Ended first = walk(start);
+        Candidate best = first.place();
         if (!best.trial().there() || best.keepsAll()) {
-            return best;
+            return first;
         }
-        boolean settledHere = settled;
         SizingProblem shifted = Correction.at(estimate, solved, best, 0.0).on(estimate);
         Candidate elsewhere = sizer.best(shifted, List.of(best.values()));
-        if (distance(elsewhere, best) < SHORT) {
-            return best;
-        }
-        Candidate other = walk(elsewhere);
-        Candidate better = Candidate.better(best, other);
-        settled = better.equals(best) ? settledHere : settled;
-        return better;
+        return distance(elsewhere, best) < SHORT ? first : Ended.better(first, walk(elsewhere));
     }
 
     /** The estimate corrected at a place of the full model. */
@@ -100,12 +100,11 @@ final class CorrectedSearch {
         return Correction.at(estimate, solved, place, REACH).on(estimate);
     }
 
-    private Candidate walk(Candidate start) {
-        settled = false;
+    private Ended walk(Candidate start) {
         Candidate here = solve(start);
         Candidate best = here;
         if (!here.trial().there()) {
-            return best;
+            return new Ended(best, false);
         }
         List<Candidate> filter = new ArrayList<>(List.of(here));
         SizingProblem corrected = correctedAt(here);
@@ -113,8 +112,7 @@ final class CorrectedSearch {
         for (int round = 1; round < ROUNDS && reach > LEAST_REACH; round++) {
             Candidate next = sizer.near(roomier(corrected).near(here.values(), reach), here.values());
             if (nothingToGain(here, next)) {
-                settled = true;
-                return best;
+                return new Ended(best, true);
             }
             Candidate found = solve(next);
             best = Candidate.better(best, found);
@@ -130,8 +128,7 @@ final class CorrectedSearch {
                 reach *= CUT;
             }
         }
-        settled = reach <= LEAST_REACH;
-        return best;
+        return new Ended(best, reach <= LEAST_REACH);
     }
 
     private Candidate solve(Candidate expected) {

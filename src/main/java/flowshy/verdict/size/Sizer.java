@@ -71,14 +71,15 @@ public record Sizer(long seed, DoubleConsumer progress) {
             return new Agreement(answer(counted, estimate, first, course), estimate, List.of(), false, 0);
         }
         course.next();
-        Candidate best = search.from(first);
+        CorrectedSearch.Ended ended = search.from(first);
+        Candidate best = ended.place();
         course.next();
         SizingProblem corrected = best.trial().there() ? search.correctedAt(best) : counted;
         return new Agreement(
                 answer(corrected, search.solved(), best, course),
                 corrected,
                 search.rounds(),
-                search.settled(),
+                ended.settled(),
                 search.solutions());
     }
 
