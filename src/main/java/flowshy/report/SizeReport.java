@@ -40,8 +40,9 @@ public final class SizeReport {
      * @return empty where the numbers make no device
      */
     public static List<Chart> charts(StudySizing sizing) {
-        String sized =
-                sizing.numbers().size() == 1 ? sizing.numbers().get(0).path() + " " + sizing.written(0) : "as sized";
+        String sized = sizing.numbers().size() == 1
+                ? sizing.numbers().get(0).path() + " " + sizing.written(0).replaceFirst(" u", " µ")
+                : "as sized";
         return sizing.answer()
                 .map(answer -> SizeCharts.of(
                         sizing.study().title(), sizing.study().question().answer(), sized, answer))

@@ -112,7 +112,7 @@ class SizeCommandTest {
                 .last()
                 .asString()
                 .startsWith("hair.diameter ")
-                .endsWith(" um");
+                .endsWith(" µm");
     }
 
     /** What bands itself finds, under a limit it is sure to state. */

@@ -20,8 +20,6 @@ import flowshy.study.Study;
 import flowshy.verdict.BandsAnswer;
 import flowshy.verdict.BandsAnswer.Extreme;
 import flowshy.verdict.Reads;
-import flowshy.verdict.curve.CurvePoint;
-import flowshy.verdict.curve.DeviceCurve;
 import flowshy.verdict.envelope.EnvelopeAnswer.AtState;
 import flowshy.verdict.error.ErrorBudget;
 import flowshy.verdict.lid.CoverRow;
@@ -170,57 +168,16 @@ public final class CoverCharts {
     }
 
     private static Chart curves(String study, LidAnswer answer) {
-        BandsAnswer bare = answer.bare();
-        double margin = bare.acceptance().margin();
-        List<Row> rows = new ArrayList<>();
-        List<List<Double>> frequencies = new ArrayList<>();
-        List<List<Double>> rejections = new ArrayList<>();
+        SideBySide sides = new SideBySide();
         for (CoverRow row : answer.covers()) {
-            List<Double> frequency = new ArrayList<>();
-            List<Double> rejection = new ArrayList<>();
-            for (CurvePoint point : DeviceCurve.of(row.answer()).points()) {
-                double value = point.response().rejection();
-                frequency.add(point.response().frequency());
-                rejection.add(Double.isFinite(value) ? value : Double.NaN);
-                rows.add(new Row(
-                        words(row),
-                        List.of(point.response().frequency(), Double.isFinite(value) ? value : Double.NaN)));
-            }
-            frequencies.add(frequency);
-            rejections.add(rejection);
+            boolean nothing = row.answer().bands().get(0).reads() == Reads.NOTHING;
+            sides.add(
+                    words(row),
+                    row.answer(),
+                    nothing ? "it reads nothing." : "no flow enters, the rejection has no bound.");
         }
-        List<List<Double>> seen = new ArrayList<>(rejections);
-        seen.add(List.of(0.0, margin));
-        Bounds ends = Bounds.even(seen, 5.0);
-        Bounds axis = Bounds.about(bare.band().from(), bare.band().to());
-        Panel panel = Panel.even("rejection, dB", ends.from(), ends.to(), 1);
-        PlotSheet sheet = PlotSheet.decades(new Heading(CURVES, study), "frequency, Hz", axis.from(), axis.to(), 210);
-        int inks = 0;
-        for (int i = 0; i < answer.covers().size(); i++) {
-            CoverRow row = answer.covers().get(i);
-            if (rejections.get(i).stream().anyMatch(Double::isFinite)) {
-                panel.line(words(row), Ink.alike(inks++), frequencies.get(i), rejections.get(i));
-            } else {
-                sheet.remark("No curve for " + words(row) + ": "
-                        + (row.answer().bands().get(0).reads() == Reads.NOTHING
-                                ? "it reads nothing."
-                                : "no flow enters, the rejection has no bound."));
-            }
-        }
-        if (answer.worst().isPresent()) {
-            sheet.remark("At the study's own state.");
-        }
-        panel.level(margin, "margin " + TickText.of(margin, 4) + " dB", Ink.LIMIT);
-        return new DrawnChart(
-                "covers-rejection",
-                CURVES,
-                description(answer),
-                new ChartTable(
-                        List.of(
-                                new Head("frequency_hz", "frequency", "Hz"),
-                                new Head("rejection_db", "rejection", "dB")),
-                        rows),
-                sheet.add(panel));
+        List<String> remarks = answer.worst().isPresent() ? List.of("At the study's own state.") : List.of();
+        return sides.chart("covers-rejection", CURVES, study, description(answer), remarks);
     }
 
     private static Chart required(String study, LidAnswer answer) {

@@ -24,10 +24,17 @@ final class SideBySide {
 
     private final List<String> names = new ArrayList<>();
     private final List<BandsAnswer> answers = new ArrayList<>();
+    private final List<String> whyNone = new ArrayList<>();
 
     void add(String name, BandsAnswer answer) {
+        add(name, answer, "no flow enters, or it reads nothing.");
+    }
+
+    /** A device, and why it has no curve if it has none. */
+    void add(String name, BandsAnswer answer, String none) {
         names.add(name);
         answers.add(answer);
+        whyNone.add(none);
     }
 
     boolean empty() {
@@ -36,6 +43,11 @@ final class SideBySide {
 
     /** The chart; one device or more must be there. */
     Chart chart(String file, String title, String study) {
+        return chart(file, title, study, description(), List.of());
+    }
+
+    /** The same described otherwise, with remarks below. */
+    Chart chart(String file, String title, String study, String description, List<String> remarks) {
         BandsAnswer first = answers.get(0);
         double margin = first.acceptance().margin();
         List<Row> rows = new ArrayList<>();
@@ -67,14 +79,15 @@ final class SideBySide {
             if (rejections.get(i).stream().anyMatch(Double::isFinite)) {
                 panel.line(names.get(i), Ink.alike(inks++), frequencies.get(i), rejections.get(i));
             } else {
-                sheet.remark("No curve for " + names.get(i) + ": no flow enters, or it reads nothing.");
+                sheet.remark("No curve for " + names.get(i) + ": " + whyNone.get(i));
             }
         }
+        remarks.forEach(sheet::remark);
         panel.level(margin, "margin " + TickText.of(margin, 4) + " dB", Ink.LIMIT);
         return new DrawnChart(
                 file,
                 title,
-                description(),
+                description,
                 new ChartTable(
                         List.of(
                                 new Head("frequency_hz", "frequency", "Hz"),
